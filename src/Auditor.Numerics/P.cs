@@ -1,0 +1,1 @@
+namespace Auditor.Numerics; internal static class Placeholder { }

@@ -1,0 +1,1 @@
+namespace Auditor; internal static class Placeholder { }

@@ -1,0 +1,7 @@
+namespace Auditor.Cli.Tests;
+
+public sealed class PlaceholderTests
+{
+    [Fact]
+    public void Runs() => Assert.True(true);
+}

@@ -1,0 +1,7 @@
+namespace Auditor.Numerics.Tests;
+
+public sealed class PlaceholderTests
+{
+    [Fact]
+    public void Runs() => Assert.True(true);
+}
