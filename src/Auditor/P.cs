@@ -1,1 +1,0 @@
-namespace Auditor; internal static class Placeholder { }

@@ -1,0 +1,47 @@
+using Auditor.Findings;
+using Auditor.Results;
+
+namespace Auditor.Reporting;
+
+/// <summary>All that an output needs: ordered, unformatted, the same whatever the output. Written as JSON in snake case it is the record of the audit.</summary>
+public sealed record AuditRecord(
+    int Record,
+    ModelInfo Model,
+    string Outcome,
+    RowAccount Rows,
+    FitSummary FinalFit,
+    FitSummary? OtherFit,
+    IReadOnlyList<Exclusion> Exclusions,
+    Exclusion? AllLeftOut,
+    IReadOnlyList<EntangledGroups> Entangled,
+    IReadOnlyList<CheckResult> Checks,
+    Influence Influence,
+    Collinearity Collinearity,
+    IReadOnlyList<ClaimResult> Claims,
+    IReadOnlyList<StepResult> Elimination,
+    IReadOnlyList<Finding> Findings,
+    IReadOnlyList<Undecided> Undecided,
+    IReadOnlyDictionary<string, object> Policy,
+    Provenance Provenance);
+
+/// <param name="Response">The response's label.</param>
+public sealed record ModelInfo(string Id, string? Title, string? Version, string? PreparedBy, string Response, IReadOnlyList<string> Terms, bool Intercept);
+
+/// <param name="Started">UTC, ISO 8601.</param>
+public sealed record Provenance(
+    string DataSha256,
+    string DataSource,
+    string DeclarationSha256,
+    string Declaration,
+    string RulesSha256,
+    string ToolVersion,
+    long Seed,
+    string Started);
+
+/// <summary>The audit's overall outcome, as the record writes it.</summary>
+public static class Outcomes
+{
+    public const string ExclusionsNotSupported = "exclusions_not_supported";
+    public const string Findings = "findings";
+    public const string NothingFound = "nothing_found";
+}

@@ -1,0 +1,49 @@
+using System.Text.Json.Serialization;
+
+namespace Auditor.Results;
+
+/// <summary>One check of the final model's residuals; nulls with the reason when it could not be computed.</summary>
+public sealed record CheckResult(
+    string Check,
+    double? Statistic,
+    double? Df,
+    double? Df2,
+    double? P,
+    string Assumption,
+    bool? Rejects,
+    [property: JsonIgnore(Condition = JsonIgnoreCondition.WhenWritingNull)] string? Why);
+
+public sealed record Influence(IReadOnlyList<int> LeverageOne, IReadOnlyList<InfluentialRow> Largest)
+{
+    [JsonIgnore(Condition = JsonIgnoreCondition.WhenWritingNull)]
+    public string? Why { get; init; }
+}
+
+public sealed record InfluentialRow(int Row, string? Label, double Leverage, double? StudentisedResidual, double? CooksDistance, double? Dffits);
+
+public sealed record Collinearity(
+    IReadOnlyList<TermCollinearity> Terms,
+    IReadOnlyList<double> ConditionIndices,
+    IReadOnlyList<VarianceProportions> VarianceProportions)
+{
+    [JsonIgnore(Condition = JsonIgnoreCondition.WhenWritingNull)]
+    public string? Why { get; init; }
+}
+
+public sealed record TermCollinearity(string Term, int Df, double? Gvif, double? GvifScaled);
+
+public sealed record VarianceProportions(double ConditionIndex, IReadOnlyDictionary<string, double> Proportions);
+
+public sealed record ClaimResult(string Claim, string Reported, double? Recomputed, string Outcome);
+
+public sealed record StepResult(
+    int Step,
+    string Drop,
+    double? F,
+    double? Df1,
+    double? Df2,
+    double? P,
+    bool? BreaksRule,
+    [property: JsonIgnore(Condition = JsonIgnoreCondition.WhenWritingNull)] string? Why);
+
+public sealed record EntangledGroups(string Kind, IReadOnlyList<string> Groups, double? Df1, double? Df2, double? F, double? P, double? PAdjusted);
