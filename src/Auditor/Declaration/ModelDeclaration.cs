@@ -1,5 +1,3 @@
-using Auditor.Data;
-
 namespace Auditor.Declaration;
 
 /// <summary>
