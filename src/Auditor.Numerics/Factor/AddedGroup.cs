@@ -1,0 +1,89 @@
+namespace Auditor.Numerics.Factor;
+
+/// <summary>
+/// What columns Z add to the final model F (or to F and other columns before them): all that a group test needs. Z is residualised on
+/// what stands before it, the rest is factored into an orthonormal Qz with q columns, q being the rank really added, and u = Qz'y.
+/// The triangular factor cancels from every test, so nothing depends on how levels are coded, and aliased columns never enter.
+/// </summary>
+/// <remarks>Frisch–Waugh–Lovell; sums of squares come from u, not from a difference of two residual sums of squares.</remarks>
+public sealed class AddedGroup
+{
+    private AddedGroup(FinalFactor final, IReadOnlyList<int> columns, int before, Reduction reduction)
+    {
+        Final = final;
+        Columns = columns;
+        var rankBefore = reduction.Kept.Count(position => position < before);
+        KeptPositions = [.. reduction.Kept.Skip(rankBefore)];
+        Kept = [.. KeptPositions.Select(position => columns[position - before])];
+        NearlyAliased = [.. reduction.Nearly.Where(near => columns.Contains(near.Column))];
+        var y = reduction.Rotated.Column(reduction.Rotated.Columns - 1)[rankBefore..];
+        U = y[..Kept.Count].ToArray();
+        RssWith = BlockKernels.Dot(y[Kept.Count..], y[Kept.Count..]);
+        RankBefore = final.Rank + rankBefore;
+        Triangle = new ColumnMatrix(Kept.Count, Kept.Count);
+        for (var c = 0; c < Kept.Count; c++)
+        {
+            reduction.Rotated.Column(KeptPositions[c]).Slice(rankBefore, c + 1).CopyTo(Triangle.Column(c));
+        }
+
+        Aliased = before > 0
+            ? []
+            : [.. reduction.Aliased.Select(position => Combinations.OfGroupColumn(this, columns[position], reduction.Rotated.Column(position)))];
+    }
+
+    public FinalFactor Final { get; }
+
+    /// <summary>Design columns of Z.</summary>
+    public IReadOnlyList<int> Columns { get; }
+
+    /// <summary>Design columns of Z that add a direction; q of them.</summary>
+    public IReadOnlyList<int> Kept { get; }
+
+    /// <summary>Rank q added: df1 of every test of the group.</summary>
+    public int Rank => Kept.Count;
+
+    /// <summary>Rank of what stands before Z.</summary>
+    public int RankBefore { get; }
+
+    /// <summary>Rank with Z.</summary>
+    public int RankWith => RankBefore + Rank;
+
+    /// <summary>u = Qz'y, q entries; u'u is the extra sum of squares.</summary>
+    public IReadOnlyList<double> U { get; }
+
+    public double SumOfSquares => U.Sum(value => value * value);
+
+    /// <summary>Residual sum of squares with Z in the model.</summary>
+    public double RssWith { get; }
+
+    public double RssWithout => RssWith + SumOfSquares;
+
+    /// <summary>Columns of Z that equal a combination of F and earlier columns of Z (given only when nothing else stands before Z).</summary>
+    public IReadOnlyList<AliasedColumn> Aliased { get; }
+
+    public IReadOnlyList<NearlyAliasedColumn> NearlyAliased { get; }
+
+    /// <summary>q x q triangle R_z with Z~ = Qz R_z.</summary>
+    internal ColumnMatrix Triangle { get; }
+
+    private IReadOnlyList<int> KeptPositions { get; }
+
+    /// <summary>Z added to F.</summary>
+    public static AddedGroup Of(FinalFactor final, IReadOnlyList<int> columns) => After(final, [], columns);
+
+    /// <summary>Z added to F and the columns before it, such as all other groups ("last in").</summary>
+    public static AddedGroup After(FinalFactor final, IReadOnlyList<int> before, IReadOnlyList<int> columns)
+    {
+        int[] all = [.. before, .. columns];
+        var response = final.Factor.Layout.Response;
+        var matrix = new ColumnMatrix(final.Orthogonal(response).Length, all.Length + 1);
+        for (var c = 0; c < all.Length; c++)
+        {
+            final.Orthogonal(all[c]).CopyTo(matrix.Column(c));
+        }
+
+        final.Orthogonal(response).CopyTo(matrix.Column(all.Length));
+        var reduction = Reduction.Of(final.Factor, matrix, all.Length, 0, position => all[position]);
+        return new AddedGroup(final, columns, before.Count, reduction);
+    }
+}

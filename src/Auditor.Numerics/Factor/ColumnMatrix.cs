@@ -1,0 +1,31 @@
+namespace Auditor.Numerics.Factor;
+
+/// <summary>A small dense column-major matrix, so that a column is one span.</summary>
+public sealed class ColumnMatrix(int rows, int columns)
+{
+    private readonly double[] _values = new double[rows * columns];
+
+    public int Rows { get; } = rows;
+
+    public int Columns { get; } = columns;
+
+    public double this[int row, int column]
+    {
+        get => _values[(column * Rows) + row];
+        set => _values[(column * Rows) + row] = value;
+    }
+
+    public Span<double> Column(int column) => _values.AsSpan(column * Rows, Rows);
+
+    /// <summary>The given columns, in that order, copied.</summary>
+    public ColumnMatrix Select(IReadOnlyList<int> columns)
+    {
+        var selected = new ColumnMatrix(Rows, columns.Count);
+        for (var c = 0; c < columns.Count; c++)
+        {
+            Column(columns[c]).CopyTo(selected.Column(c));
+        }
+
+        return selected;
+    }
+}

@@ -1,0 +1,34 @@
+namespace Auditor.Numerics.Factor;
+
+/// <summary>An unevaluated sum of two doubles, about 31 decimal digits.</summary>
+/// <remarks>Dekker 1971; Knuth, The Art of Computer Programming 2, 4.2.2 (two-sum); products by fused multiply-add.</remarks>
+internal readonly record struct DoubleDouble(double High, double Low)
+{
+    public double Value => High + Low;
+
+    public static DoubleDouble operator +(DoubleDouble a, DoubleDouble b)
+    {
+        var sum = a.High + b.High;
+        var part = sum - a.High;
+        var error = (a.High - (sum - part)) + (b.High - part) + a.Low + b.Low;
+        return Renormalise(sum, error);
+    }
+
+    public static DoubleDouble operator -(DoubleDouble a) => new(-a.High, -a.Low);
+
+    public static DoubleDouble operator -(DoubleDouble a, DoubleDouble b) => a + -b;
+
+    public static DoubleDouble operator *(DoubleDouble a, double b)
+    {
+        var product = a.High * b;
+        return Renormalise(product, Math.FusedMultiplyAdd(a.High, b, -product) + (a.Low * b));
+    }
+
+    public static DoubleDouble Of(double value) => new(value, 0);
+
+    private static DoubleDouble Renormalise(double high, double low)
+    {
+        var sum = high + low;
+        return new DoubleDouble(sum, low - (sum - high));
+    }
+}

@@ -1,0 +1,62 @@
+namespace Auditor.Numerics.Factor;
+
+/// <summary>
+/// The final model F within a factor: its rank r, the triangle of its kept columns, and every other column of the design in coordinates that split
+/// into the part that F explains (r rows) and the part orthogonal to F (the rest).
+/// </summary>
+public sealed class FinalFactor
+{
+    private readonly ColumnMatrix _rotated;
+
+    private FinalFactor(OrthogonalFactor factor, Reduction reduction)
+    {
+        Factor = factor;
+        _rotated = reduction.Rotated;
+        Kept = reduction.Kept;
+        NearlyAliased = reduction.Nearly;
+        Triangle = Leading(reduction.Kept);
+        Aliased = [.. reduction.Aliased.Select(column => Combinations.OfFinalColumn(this, column))];
+        var orthogonal = Orthogonal(factor.Layout.Response);
+        Rss = BlockKernels.Dot(orthogonal, orthogonal);
+    }
+
+    public OrthogonalFactor Factor { get; }
+
+    /// <summary>Design columns of F that span it, in declared order; r of them.</summary>
+    public IReadOnlyList<int> Kept { get; }
+
+    public int Rank => Kept.Count;
+
+    public IReadOnlyList<AliasedColumn> Aliased { get; }
+
+    public IReadOnlyList<NearlyAliasedColumn> NearlyAliased { get; }
+
+    /// <summary>Residual sum of squares of y on F.</summary>
+    public double Rss { get; }
+
+    /// <summary>r x r upper triangle R_F of the kept columns.</summary>
+    internal ColumnMatrix Triangle { get; }
+
+    public static FinalFactor Of(OrthogonalFactor factor)
+    {
+        var all = factor.R.Select([.. Enumerable.Range(0, factor.R.Columns)]);
+        return new FinalFactor(factor, Reduction.Of(factor, all, factor.Layout.FinalColumns, 0, column => column));
+    }
+
+    /// <summary>Coordinates of a design column within F; r entries.</summary>
+    internal ReadOnlySpan<double> Explained(int column) => _rotated.Column(column)[..Kept.Count];
+
+    /// <summary>Coordinates of a design column orthogonal to F.</summary>
+    internal ReadOnlySpan<double> Orthogonal(int column) => _rotated.Column(column)[Kept.Count..];
+
+    private ColumnMatrix Leading(IReadOnlyList<int> columns)
+    {
+        var triangle = new ColumnMatrix(columns.Count, columns.Count);
+        for (var c = 0; c < columns.Count; c++)
+        {
+            _rotated.Column(columns[c])[..(c + 1)].CopyTo(triangle.Column(c));
+        }
+
+        return triangle;
+    }
+}

@@ -1,1 +1,0 @@
-namespace Auditor.Numerics; internal static class Placeholder { }

@@ -1,0 +1,45 @@
+namespace Auditor.Numerics.SecondPass;
+
+/// <summary>
+/// Sums over the rows for one group, all in the coordinates of its orthonormal Qz (q x q matrices): each is sum_i c_i omega_i qz_i qz_i'
+/// with c_i the copies of the row. Rows with h(F) = 1 have qz = 0 and e = 0 by definition: they are left out and counted.
+/// </summary>
+public sealed class GroupSums
+{
+    internal GroupSums(int q)
+    {
+        (Hc0, Hc2, Hc3) = (new double[q, q], new double[q, q], new double[q, q]);
+        (Score, Ceiling) = (new double[q, q], new double[q, q]);
+    }
+
+    /// <summary>omega = e², e the residual of F + group (White 1980).</summary>
+    public double[,] Hc0 { get; }
+
+    /// <summary>omega = e² / (1 - h), h the leverage in F + group.</summary>
+    public double[,] Hc2 { get; }
+
+    /// <summary>omega = e² / (1 - h)² (MacKinnon and White 1985).</summary>
+    public double[,] Hc3 { get; }
+
+    /// <summary>omega = e(F)²: the null-imposed score matrix M.</summary>
+    public double[,] Score { get; }
+
+    /// <summary>M with e(F) replaced by the group's own fitted part Qz u.</summary>
+    public double[,] Ceiling { get; }
+
+    /// <summary>sum h(F) |qz|², the trace of N in phi.</summary>
+    public double LeverageTrace { get; internal set; }
+
+    /// <summary>Observations with a non-zero qz row.</summary>
+    public double ContributingN { get; internal set; }
+
+    /// <summary>Positions (0-based, within the row set) of rows with leverage 1 in F.</summary>
+    public IReadOnlyList<int> LeverageOneInFinal => LeverageOneRows;
+
+    /// <summary>Positions of rows whose leverage becomes 1 when the group is added: HC2, HC3 and the score form do not exist then.</summary>
+    public IReadOnlyList<int> RestsOn => RestsOnRows;
+
+    internal List<int> LeverageOneRows { get; } = [];
+
+    internal List<int> RestsOnRows { get; } = [];
+}

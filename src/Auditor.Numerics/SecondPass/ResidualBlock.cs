@@ -1,0 +1,75 @@
+using Auditor.Numerics.Factor;
+
+namespace Auditor.Numerics.SecondPass;
+
+/// <summary>Something that is summed over the rows once the factor is known. Fed with every block, in order.</summary>
+public interface IAccumulator
+{
+    void Add(ResidualBlock block);
+}
+
+/// <summary>A block of rows with what the final model says of them; rows times sqrt(w), each of one copy.</summary>
+public sealed class ResidualBlock
+{
+    private readonly double[] _residuals;
+    private readonly double[] _leverages;
+    private readonly double[] _q;
+
+    internal ResidualBlock(FinalFactor final, int capacity)
+    {
+        Final = final;
+        Prepared = new PreparedBlock(capacity, final.Factor.Layout.Columns);
+        _residuals = new double[capacity];
+        _leverages = new double[capacity];
+        _q = new double[capacity * Math.Max(1, final.Rank)];
+    }
+
+    public int Rows => Prepared.Rows;
+
+    /// <summary>0-based position of the first row within the row set.</summary>
+    public int FirstRow { get; private set; }
+
+    /// <summary>e(F) times sqrt(w).</summary>
+    public ReadOnlySpan<double> Residuals => _residuals.AsSpan(0, Rows);
+
+    /// <summary>h(F).</summary>
+    public ReadOnlySpan<double> Leverages => _leverages.AsSpan(0, Rows);
+
+    /// <summary>How many equal rows each row stands for, null when all are one.</summary>
+    public double[]? Copies { get; private set; }
+
+    internal FinalFactor Final { get; }
+
+    internal PreparedBlock Prepared { get; }
+
+    /// <summary>Column k of the rows of Q_F, 0 to r - 1.</summary>
+    internal Span<double> QColumn(int k) => _q.AsSpan(k * Prepared.Stride, Rows);
+
+    /// <param name="residuals">y - X b, not weighted.</param>
+    internal void Load(RowBlock block, ReadOnlySpan<double> residuals)
+    {
+        Prepared.Load(block, (double[])Final.Factor.Shifts, withCopies: false);
+        FirstRow = block.FirstRow;
+        Copies = block.Copies;
+        BlockKernels.Multiply(residuals, Prepared.Scale, _residuals.AsSpan(0, Rows));
+        ComputeQ();
+    }
+
+    private void ComputeQ()
+    {
+        var leverages = _leverages.AsSpan(0, Rows);
+        leverages.Clear();
+        for (var k = 0; k < Final.Rank; k++)
+        {
+            var q = QColumn(k);
+            Prepared.Column(Final.Kept[k]).CopyTo(q);
+            for (var j = 0; j < k; j++)
+            {
+                BlockKernels.AddScaled(q, -Final.Triangle[j, k], QColumn(j));
+            }
+
+            BlockKernels.Scale(q, 1 / Final.Triangle[k, k]);
+            BlockKernels.AddSquares(leverages, q);
+        }
+    }
+}
