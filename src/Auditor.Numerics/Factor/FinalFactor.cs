@@ -18,6 +18,7 @@ public sealed class FinalFactor
         Aliased = [.. reduction.Aliased.Select(column => Combinations.OfFinalColumn(this, column))];
         var orthogonal = Orthogonal(factor.Layout.Response);
         Rss = BlockKernels.Dot(orthogonal, orthogonal);
+        LargestPiece = FindLargestPiece();
     }
 
     public OrthogonalFactor Factor { get; }
@@ -34,6 +35,9 @@ public sealed class FinalFactor
     /// <summary>Residual sum of squares of y on F.</summary>
     public double Rss { get; }
 
+    /// <summary>The largest of the lengths that a fit adds up: the response's, and each column's in the fit of the response.</summary>
+    internal double LargestPiece { get; }
+
     /// <summary>r x r upper triangle R_F of the kept columns.</summary>
     internal ColumnMatrix Triangle { get; }
 
@@ -48,6 +52,16 @@ public sealed class FinalFactor
 
     /// <summary>Coordinates of a design column orthogonal to F.</summary>
     internal ReadOnlySpan<double> Orthogonal(int column) => _rotated.Column(column)[Kept.Count..];
+
+    private double FindLargestPiece()
+    {
+        var rows = Math.Sqrt(Factor.Totals.SumOfWeights);
+        var response = Factor.Layout.Response;
+        var slopes = Explained(response).ToArray();
+        Numerics.Factor.Triangle.Solve(Triangle, slopes);
+        var pieces = Kept.Select((column, k) => Math.Abs(slopes[k]) * Factor.LargestValues[column] * rows);
+        return pieces.Append(Factor.LargestValues[response] * rows).Max();
+    }
 
     private ColumnMatrix Leading(IReadOnlyList<int> columns)
     {

@@ -1,0 +1,26 @@
+using Auditor.Numerics.Factor;
+
+namespace Auditor.Numerics.GroupTests;
+
+/// <summary>What keeps any test of a group from being computed, asked in one order everywhere.</summary>
+internal static class Impediments
+{
+    public static Impediment? OfGroup(AddedGroup group)
+    {
+        if (group.Rank == 0)
+        {
+            return Impediment.AddsNothing;
+        }
+
+        if (PerfectFit.Is(group.Final, group.RssWithout))
+        {
+            return Impediment.PerfectWithoutGroup;
+        }
+
+        return PartialF.ResidualDf(group) <= 0 ? Impediment.NoResidualDegreesOfFreedom : null;
+    }
+
+    /// <summary>Robust forms need residuals of F + group that are more than rounding.</summary>
+    public static Impediment? OfRobust(AddedGroup group) =>
+        OfGroup(group) ?? (PerfectFit.Is(group.Final, group.RssWith) ? Impediment.PerfectWithGroup : null);
+}
