@@ -16,6 +16,9 @@ public static class FisherF
 {
     private const int MostSteps = 2000;
 
+    /// <summary>A Newton step in log f whose square, the error that is left after it, no longer counts.</summary>
+    private const double Settled = 1e-10;
+
     /// <summary>P(F > f), the p-value of an F test, with full relative accuracy in the tail; 0 below the smallest double.</summary>
     public static double Survival(double f, double df1, double df2) => Checked(f, df1, df2) switch
     {
@@ -86,7 +89,6 @@ public static class FisherF
     {
         double f = 1;
         double reach = 2; // a longest step in log f, doubled each time it binds
-        double previous = double.PositiveInfinity;
         for (int step = 0; step < MostSteps; step++)
         {
             BetaTail tail = BetaTail.At(f, a, b);
@@ -105,12 +107,10 @@ public static class FisherF
             }
 
             f = next;
-            if (Math.Abs(move) < 1e-15 || (Math.Abs(move) < 1e-9 && Math.Abs(move) >= previous))
+            if (Math.Abs(move) < Settled)
             {
                 break;
             }
-
-            previous = Math.Abs(move);
         }
 
         return f;

@@ -14,6 +14,9 @@ public static class NoncentralF
     private const int MostSteps = 300;
     private const double LargestLambda = 1e300;
 
+    /// <summary>A relative Newton step whose square, the error that is left after it, no longer counts.</summary>
+    private const double Settled = 1e-10;
+
     /// <summary>P(F' &lt;= f), with full relative accuracy where it is small.</summary>
     public static double Cumulative(double f, double df1, double df2, double lambda) => Tail(f, df1, df2, lambda, upper: false);
 
@@ -116,24 +119,28 @@ public static class NoncentralF
         double low = 0;
         double high = double.PositiveInfinity;
         double root = Math.Sqrt(Math.Max(df1 * (f - 1), 1)); // of lambda: the tails are nearly normal in it
-        double previous = double.PositiveInfinity;
         for (int step = 0; step < MostSteps && root * root < LargestLambda; step++)
         {
             (double logTail, double rate) = NoncentralTail.At(f, df1, df2, root * root, upper);
             double missing = upper ? target - logTail : logTail - target; // above 0: lambda must grow
             (low, high) = missing > 0 ? (root, high) : (low, root);
-            double next = Next(root, missing / (2 * root * rate), low, high);
-            double change = Math.Abs(next - root);
-            root = next;
-            if (change <= 1e-15 * root || (change <= 1e-9 * root && change >= previous))
+            double move = missing / (2 * root * rate);
+            if (Math.Abs(move) <= Settled * root)
             {
-                return root * root;
+                return (root + move) * (root + move);
             }
 
-            previous = change;
+            double next = Next(root, move, low, high);
+            if (next == root)
+            {
+                break;
+            }
+
+            root = next;
         }
 
-        return null;
+        double lambda = root * root;
+        return lambda < LargestLambda ? lambda : null;
     }
 
     /// <summary>The Newton step, at most doubling; halfway into the bracket where it would leave that.</summary>
