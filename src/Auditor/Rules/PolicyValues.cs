@@ -1,0 +1,90 @@
+using System.Globalization;
+using Auditor.Yaml;
+using YamlDotNet.RepresentationModel;
+
+namespace Auditor.Rules;
+
+/// <summary>One line of a policy file, not yet checked.</summary>
+internal sealed record PolicyEntry(string File, YamlNode Key, YamlNode Node)
+{
+    public string Name => Key is YamlScalarNode scalar ? YamlScalars.Text(scalar) : Key.ToString();
+
+    public Problem Problem(string message) => new(File, YamlText.Line(Key), message);
+}
+
+/// <summary>From a line of a policy file to a value of the right type and within its range.</summary>
+internal static class PolicyValues
+{
+    /// <param name="shipped">The value it replaces, which gives the type; null for a line of the shipped file itself.</param>
+    public static Reading<PolicyValue> Read(PolicyEntry entry, PolicyValue? shipped)
+    {
+        if (entry.Node is not YamlScalarNode scalar || YamlScalars.Text(scalar).Length == 0)
+        {
+            return Failed(entry, $"{entry.Name} must be one value");
+        }
+
+        var fixedName = PolicyNames.Fixed.GetValueOrDefault(entry.Name);
+        var type = fixedName?.Default.Type ?? shipped?.Type ?? TypeOf(entry.Name, scalar);
+        return type switch
+        {
+            PolicyType.Text => Word(entry, scalar, fixedName),
+            PolicyType.Flag => YamlScalars.Flag(scalar) is bool flag
+                ? Reading<PolicyValue>.Of(PolicyValue.Of(flag))
+                : Failed(entry, $"{entry.Name} must be true or false, found '{scalar.Value}'"),
+            _ => YamlScalars.Number(scalar) is double number
+                ? InRange(entry, scalar, type, number, fixedName?.Range)
+                : Failed(entry, $"{entry.Name} must be a number with a decimal point, found {Quoted(scalar)}"),
+        };
+    }
+
+    private static PolicyType TypeOf(string name, YamlScalarNode scalar)
+    {
+        if (YamlScalars.Number(scalar) is double number)
+        {
+            return name.EndsWith("_share", StringComparison.Ordinal) ? PolicyType.Share
+                : double.IsInteger(number) && !scalar.Value!.Contains('.', StringComparison.Ordinal) ? PolicyType.Count
+                : PolicyType.Number;
+        }
+
+        return YamlScalars.Flag(scalar) is null ? PolicyType.Text : PolicyType.Flag;
+    }
+
+    private static Reading<PolicyValue> Word(PolicyEntry entry, YamlScalarNode scalar, FixedName? fixedName)
+    {
+        var word = YamlScalars.Text(scalar);
+        if (fixedName is null)
+        {
+            return Reading<PolicyValue>.Of(PolicyValue.Of(word));
+        }
+
+        var usable = string.Join(", ", fixedName.Words.Except(fixedName.NotBuilt));
+        return fixedName.NotBuilt.Contains(word) ? Failed(entry, $"{entry.Name} '{word}' is not built yet; use one of {usable}")
+            : fixedName.Words.Contains(word) ? Reading<PolicyValue>.Of(PolicyValue.Of(word))
+            : Failed(entry, $"{entry.Name} must be one of {usable}; found '{word}'" + DidYouMean(word, fixedName.Words));
+    }
+
+    private static string DidYouMean(string word, IReadOnlyList<string> words) =>
+        NearestName.Of(word, words) is { } near ? $" (did you mean '{near}'?)" : "";
+
+    private static Reading<PolicyValue> InRange(PolicyEntry entry, YamlScalarNode scalar, PolicyType type, double number, Between? range)
+    {
+        var wanted = range is not null ? Wanted(range, number) : type switch
+        {
+            PolicyType.Share when number is < 0 or > 1 => "from 0 to 1",
+            PolicyType.Count when number < 0 || !double.IsInteger(number) || number > int.MaxValue => "a whole number of 0 or more",
+            PolicyType.Number when number < 0 => "0 or more",
+            _ => null,
+        };
+        return wanted is null
+            ? Reading<PolicyValue>.Of(PolicyValue.Of(type, number))
+            : Failed(entry, $"{entry.Name} must be {wanted}, found {scalar.Value}");
+    }
+
+    private static string? Wanted(Between range, double number) => range.Holds(number)
+        ? null
+        : string.Create(CultureInfo.InvariantCulture, $"above {range.Low} and below {range.High}");
+
+    private static string Quoted(YamlScalarNode scalar) => YamlScalars.IsPlain(scalar) ? $"'{scalar.Value}'" : $"the text \"{scalar.Value}\"";
+
+    private static Reading<PolicyValue> Failed(PolicyEntry entry, string message) => Reading<PolicyValue>.Failed(entry.Problem(message));
+}
