@@ -15,7 +15,7 @@ public sealed record FitSummary(
     double? F,
     double? FDf1,
     double? FDf2,
-    double? FP,
+    [property: JsonPropertyName("f_p")] double? FP,
     [property: JsonPropertyName("f_log10_p"), JsonIgnore(Condition = JsonIgnoreCondition.WhenWritingNull)] double? FLog10P,
     double? LogLikelihood,
     double? Aic,
