@@ -53,7 +53,8 @@ internal sealed class GroupRows(AddedGroup group, int capacity)
 
     private void ComputeSums(ResidualBlock block)
     {
-        var (fitted, squares) = (_fitted.AsSpan(0, _rows), _squares.AsSpan(0, _rows));
+        var fitted = _fitted.AsSpan(0, _rows);
+        var squares = _squares.AsSpan(0, _rows);
         fitted.Clear();
         squares.Clear();
         for (var k = 0; k < group.Rank; k++)

@@ -1,7 +1,0 @@
-namespace Auditor.Numerics.Tests;
-
-public sealed class PlaceholderTests
-{
-    [Fact]
-    public void Runs() => Assert.True(true);
-}
