@@ -119,6 +119,6 @@ public sealed class CsvSourceTests
         Assert.Equal([1.5], table!.Numbers("x"));
         Assert.Equal(["1.5"], table!.Texts("x"));
         Assert.Equal(["2020-01-31"], table!.Texts("d"));
-        Assert.Equal(ColumnKind.Levels, table["comma"].Kind);
+        Assert.Equal(ColumnKind.Levels, table!["comma"].Kind);
     }
 }
