@@ -72,7 +72,15 @@ public sealed record StructureDeclaration(
     int? SerialLag,
     SplitDeclaration? Split,
     ColumnMention? Cluster,
-    IReadOnlyList<ColumnMention> Segments);
+    IReadOnlyList<ColumnMention> Segments)
+{
+    /// <summary>Where <c>time</c> stands, be it a column or the file's order; null when it is not declared.</summary>
+    public int? TimeLine { get; init; }
+
+    public int? PeriodLine { get; init; }
+
+    public int? SerialLagLine { get; init; }
+}
 
 /// <summary>The first part ends at a value of a column, or at a row.</summary>
 public sealed record SplitDeclaration(string? Column, string? At, int? Row, int Line);

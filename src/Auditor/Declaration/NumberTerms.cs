@@ -1,5 +1,3 @@
-using System.Globalization;
-
 namespace Auditor.Declaration;
 
 /// <summary>A data column taken as it is: a number, or levels in treatment coding against the reference.</summary>
@@ -80,7 +78,7 @@ public sealed record WinsoriseTerm(Term Of, double Lower, double Upper) : Term
 {
     public override IReadOnlyList<Term> Parts => [Of];
 
-    public override string Label => string.Create(CultureInfo.InvariantCulture, $"winsorise({Of.Label}, {Lower}, {Upper})");
+    public override string Label => "winsorise(" + Of.Label + ")";
 }
 
 /// <summary>Values below and above two fixed limits are set to them; either limit may be absent.</summary>
@@ -88,5 +86,5 @@ public sealed record CapTerm(Term Of, double? Lower, double? Upper) : Term
 {
     public override IReadOnlyList<Term> Parts => [Of];
 
-    public override string Label => "cap(" + Of.Label + ", " + TermWords.Limit(Lower) + ", " + TermWords.Limit(Upper) + ")";
+    public override string Label => "cap(" + Of.Label + ")";
 }

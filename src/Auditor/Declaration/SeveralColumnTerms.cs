@@ -7,7 +7,8 @@ public sealed record ProductTerm(IReadOnlyList<Term> Factors) : Term
 {
     public override IReadOnlyList<Term> Parts => Factors;
 
-    public override string Label => string.Join(" * ", Factors.Select(factor => factor.Label));
+    /// <summary>A difference among the factors is the only one that means something else without brackets.</summary>
+    public override string Label => string.Join(" * ", Factors.Select(factor => factor is MinusTerm ? factor.Operand : factor.Label));
 
     protected override bool IsInfix => true;
 
@@ -54,4 +55,6 @@ public sealed record IndicatorTerm(ColumnTerm Of, string EqualTo) : Term
     public override IReadOnlyList<Term> Parts => [Of];
 
     public override string Label => Of.Label + " = " + EqualTo;
+
+    protected override bool IsInfix => true;
 }

@@ -30,5 +30,8 @@ internal static class TermWords
     public static string Limit(double? value) => value is double limit ? Number(limit) : "none";
 
     public static string Sum(Term term, double plus) =>
-        plus < 0 ? term.Label + " - " + Number(-plus) : term.Label + " + " + Number(plus);
+        plus < 0 ? Summand(term) + " - " + Number(-plus) : Summand(term) + " + " + Number(plus);
+
+    /// <summary>What is added to a value or date would read as belonging to it.</summary>
+    private static string Summand(Term term) => term is IndicatorTerm or StepTerm or PulseTerm ? term.Operand : term.Label;
 }

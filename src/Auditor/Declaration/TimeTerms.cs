@@ -8,6 +8,8 @@ public sealed record StepTerm(ColumnTerm Of, string From) : Term
     public override IReadOnlyList<Term> Parts => [Of];
 
     public override string Label => Of.Label + " from " + From;
+
+    protected override bool IsInfix => true;
 }
 
 /// <summary>1 from one date or number to another, both included, 0 elsewhere.</summary>
@@ -16,6 +18,8 @@ public sealed record PulseTerm(ColumnTerm Of, string From, string To) : Term
     public override IReadOnlyList<Term> Parts => [Of];
 
     public override string Label => Of.Label + " from " + From + " to " + To;
+
+    protected override bool IsInfix => true;
 }
 
 /// <summary>The unit in which time is counted.</summary>

@@ -1,48 +1,84 @@
 namespace Auditor.Yaml;
 
-/// <summary>The name someone most likely meant.</summary>
-internal static class NearestName
+/// <summary>The name someone most likely meant; upper and lower case count as the same.</summary>
+public static class NearestName
 {
+    private const int LettersForEachSlip = 3;
+
+    private const int MostNamesListed = 12;
+
     /// <summary>A sentence part naming the nearest of the known names, or all of them when none is near and they are few.</summary>
     public static string Hint(string name, IReadOnlyCollection<string> known)
     {
-        if (Of(name, known) is { } near)
+        if (DidYouMean(name, known) is { Length: > 0 } meant)
         {
-            return $"; did you mean '{near}'?";
+            return meant;
         }
 
-        return known.Count is > 0 and <= 12 ? "; known: " + string.Join(", ", known) : "";
+        return known.Count is > 0 and <= MostNamesListed ? "; known: " + string.Join(", ", known) : "";
     }
 
-    /// <summary>The known name with the fewest edits (a swap of neighbours is one), when that is at most a third of the name; the first on a tie.</summary>
+    /// <summary>A sentence part naming the nearest of the known names, empty when none is near.</summary>
+    public static string DidYouMean(string name, IEnumerable<string> known) => Of(name, known) is { } near ? $"; did you mean '{near}'?" : "";
+
+    /// <summary>
+    /// The known name with the fewest slips, the first on a tie; null when none is near enough to be meant: one slip in names of two to five
+    /// letters (of the shorter), two from six, three from nine and so on.
+    /// </summary>
     public static string? Of(string name, IEnumerable<string> known)
     {
-        var best = known.Select(candidate => (candidate, edits: Edits(name, candidate))).MinBy(pair => pair.edits);
-        return best.candidate is not null && best.edits <= Math.Max(2, name.Length / 3) ? best.candidate : null;
-    }
-
-    /// <summary>Optimal string alignment distance, case ignored.</summary>
-    private static int Edits(string a, string b)
-    {
-        a = a.ToUpperInvariant();
-        b = b.ToUpperInvariant();
-        var cost = new int[a.Length + 1, b.Length + 1];
-        for (var i = 0; i <= a.Length; i++)
+        string? nearest = null;
+        var least = int.MaxValue;
+        foreach (var candidate in known)
         {
-            for (var j = 0; j <= b.Length; j++)
+            if (Slips(name, candidate) is int slips && slips < least)
             {
-                cost[i, j] = i == 0 || j == 0 ? i + j : Cheapest(a, b, cost, i, j);
+                (nearest, least) = (candidate, slips);
             }
         }
 
-        return cost[a.Length, b.Length];
+        return nearest;
     }
 
-    private static int Cheapest(string a, string b, int[,] cost, int i, int j)
+    /// <summary>
+    /// Optimal string alignment distance: insertions, deletions, substitutions and swaps of neighbours, none edited twice
+    /// (the restricted Damerau–Levenshtein distance). Three rows of the table are enough.
+    /// </summary>
+    public static int Distance(string a, string b)
     {
-        var change = a[i - 1] == b[j - 1] ? 0 : 1;
-        var least = Math.Min(cost[i - 1, j - 1] + change, Math.Min(cost[i - 1, j], cost[i, j - 1]) + 1);
-        var swapped = i > 1 && j > 1 && a[i - 1] == b[j - 2] && a[i - 2] == b[j - 1];
-        return swapped ? Math.Min(least, cost[i - 2, j - 2] + 1) : least;
+        var beforeLast = new int[b.Length + 1];
+        var last = Enumerable.Range(0, b.Length + 1).ToArray();
+        var row = new int[b.Length + 1];
+        for (var i = 1; i <= a.Length; i++)
+        {
+            row[0] = i;
+            for (var j = 1; j <= b.Length; j++)
+            {
+                var substituted = last[j - 1] + (a[i - 1] == b[j - 1] ? 0 : 1);
+                row[j] = Math.Min(substituted, 1 + Math.Min(last[j], row[j - 1]));
+                if (i > 1 && j > 1 && a[i - 1] == b[j - 2] && a[i - 2] == b[j - 1])
+                {
+                    row[j] = Math.Min(row[j], beforeLast[j - 2] + 1);
+                }
+            }
+
+            (beforeLast, last, row) = (last, row, beforeLast);
+        }
+
+        return last[b.Length];
+    }
+
+    /// <summary>Null when there are too many for a misspelling. Names of very different length are never compared letter by letter.</summary>
+    private static int? Slips(string name, string candidate)
+    {
+        var shorter = Math.Min(name.Length, candidate.Length);
+        var allowed = shorter < 2 ? 0 : Math.Max(1, shorter / LettersForEachSlip);
+        if (Math.Abs(name.Length - candidate.Length) > allowed)
+        {
+            return null;
+        }
+
+        var slips = Distance(name.ToUpperInvariant(), candidate.ToUpperInvariant());
+        return slips <= allowed ? slips : null;
     }
 }

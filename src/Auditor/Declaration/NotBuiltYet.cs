@@ -1,0 +1,60 @@
+namespace Auditor.Declaration;
+
+/// <summary>
+/// What a declaration may say and the program cannot compute yet: refused, because an option that is accepted and ignored is worse than none.
+/// Each line of the table goes when its subject is built.
+/// </summary>
+public static class NotBuiltYet
+{
+    private sealed record Entry(string Subject, Func<ModelDeclaration, IEnumerable<int?>> Lines);
+
+    private static readonly IReadOnlyList<Entry> _entries =
+    [
+        new("data.time, the order of rows", declaration => [declaration.Data.Structure.TimeLine]),
+        new("data.period", declaration => [declaration.Data.Structure.PeriodLine]),
+        new("data.unit", declaration => [declaration.Data.Structure.Unit?.Line]),
+        new("data.serial_lag", declaration => [declaration.Data.Structure.SerialLagLine]),
+        new("data.split", declaration => [declaration.Data.Structure.Split?.Line]),
+        new("data.cluster", declaration => [declaration.Data.Structure.Cluster?.Line]),
+        new("data.segments", declaration => [declaration.Data.Structure.Segments is [var first, ..] ? first.Line : null]),
+        new("weights of kind frequency", declaration => Weights(declaration, WeightKind.Frequency)),
+        new("weights of kind sampling", declaration => Weights(declaration, WeightKind.Sampling)),
+        new("columns of kind date", declaration => declaration.Data.Columns.Values.Where(column => column.Kind == Data.ColumnKind.Date).Select(column => (int?)column.Line)),
+        new("spline terms", Terms<SplineTerm>),
+        new("bins terms", Terms<BinsTerm>),
+        new("step terms", Terms<StepTerm>),
+        new("pulse terms", Terms<PulseTerm>),
+        new("season terms", Terms<SeasonTerm>),
+        new("trend terms", Terms<TrendTerm>),
+        new("ratio terms", Terms<RatioTerm>),
+        new("minus terms", Terms<MinusTerm>),
+        new("winsorise terms", Terms<WinsoriseTerm>),
+        new("cap terms", Terms<CapTerm>),
+        new("lag terms", declaration => InTimeOrder(declaration, TimeOrderOperation.Lag)),
+        new("change terms", declaration => InTimeOrder(declaration, TimeOrderOperation.Change)),
+        new("moving_average terms", declaration => InTimeOrder(declaration, TimeOrderOperation.MovingAverage)),
+    ];
+
+    /// <summary>One problem for each subject and line, by line.</summary>
+    public static IReadOnlyList<Problem> In(ModelDeclaration declaration)
+    {
+        var found = from entry in _entries
+                    from line in entry.Lines(declaration).Distinct()
+                    where line is not null
+                    orderby line
+                    select new Problem(declaration.File, line, "not built yet: " + entry.Subject);
+        return [.. found];
+    }
+
+    private static IEnumerable<int?> Weights(ModelDeclaration declaration, WeightKind kind) =>
+        [declaration.Data.Weights is { } weights && weights.Kind == kind ? weights.Line : null];
+
+    private static IEnumerable<int?> Terms<T>(ModelDeclaration declaration)
+        where T : Term => TermWalk.All(declaration.Response, declaration.FinalModel, declaration.LeftOut).OfType<T>().Select(term => (int?)term.Line);
+
+    private static IEnumerable<int?> InTimeOrder(ModelDeclaration declaration, TimeOrderOperation operation) =>
+        TermWalk.All(declaration.Response, declaration.FinalModel, declaration.LeftOut)
+            .OfType<TimeOrderTerm>()
+            .Where(term => term.Operation == operation)
+            .Select(term => (int?)term.Line);
+}

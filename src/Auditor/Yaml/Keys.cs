@@ -1,0 +1,77 @@
+namespace Auditor.Yaml;
+
+/// <summary>A map whose keys are known by name: unknown and missing keys are problems.</summary>
+internal sealed class Keys
+{
+    private readonly Place _place;
+    private readonly Dictionary<string, YamlEntry> _entries;
+
+    /// <summary>The known keys that a misspelt one was probably meant to be: it is not also reported as missing.</summary>
+    private readonly HashSet<string> _suggested = [];
+
+    private Keys(Place place, YamlMap map)
+    {
+        _place = place;
+        _entries = map.Entries.ToDictionary(entry => entry.Key, StringComparer.Ordinal);
+    }
+
+    public int Line => _place.Line;
+
+    /// <summary>The keys of a map, null with a problem when it is no map.</summary>
+    public static Keys? Of(Place place, params IReadOnlyList<string> known)
+    {
+        if (place.Node is not YamlMap map)
+        {
+            place.Refuse("a map with " + (known.Count == 1 ? "the key " : "the keys ") + string.Join(", ", known));
+            return null;
+        }
+
+        var keys = new Keys(place, map);
+        keys.RefuseUnknown(known);
+        return keys;
+    }
+
+    public bool Has(string key) => _entries.ContainsKey(key);
+
+    /// <summary>How many of these keys there are.</summary>
+    public IReadOnlyList<string> Present(params IReadOnlyList<string> keys) => [.. keys.Where(Has)];
+
+    public Place? Optional(string key) => _entries.TryGetValue(key, out var entry) ? At(entry) : null;
+
+    /// <summary>The value of a key that must be there.</summary>
+    /// <param name="expected">What it would hold, for the message.</param>
+    public Place? Required(string key, string expected)
+    {
+        var found = Optional(key);
+        if (found is null && !_suggested.Contains(key))
+        {
+            _place.Add($"'{key}' is missing; expected {expected}");
+        }
+
+        return found;
+    }
+
+    public void Add(string message) => _place.Add(message);
+
+    private Place At(YamlEntry entry)
+    {
+        var path = _place.Path is DocumentPath ? entry.Key : _place.Path + "." + entry.Key;
+        // A key with nothing after it is reported where the key stands, not where the parser noticed.
+        var node = entry.Value is YamlScalar { IsPlain: true, Text: "" } nothing ? nothing with { Line = entry.Line } : entry.Value;
+        return new Place(node, path, _place.Problems);
+    }
+
+    /// <summary>The path of a whole file, left out before its keys.</summary>
+    public const string DocumentPath = "declaration";
+
+    private void RefuseUnknown(IReadOnlyList<string> known)
+    {
+        foreach (var entry in _entries.Values.Where(entry => !known.Contains(entry.Key)))
+        {
+            var near = NearestName.Of(entry.Key, known);
+            _suggested.UnionWith(near is null ? [] : [near]);
+            var hint = near is null ? "; the keys are " + string.Join(", ", known) : $"; did you mean '{near}'?";
+            _place.Problems.Add(entry.Line, $"{_place.Path}: unknown key '{Words.Short(entry.Key)}'{hint}");
+        }
+    }
+}
