@@ -29,6 +29,6 @@ internal static class CellText
         const int most = 40;
         var start = text[..Math.Min(text.Length, most)].ToString();
         var oneLine = start.Replace("\r", "\\r", StringComparison.Ordinal).Replace("\n", "\\n", StringComparison.Ordinal).Replace("\t", "\\t", StringComparison.Ordinal);
-        return "\"" + oneLine + (text.Length > most ? "…" : string.Empty) + "\"";
+        return "'" + oneLine + (text.Length > most ? "…" : string.Empty) + "'";
     }
 }
