@@ -1,0 +1,22 @@
+using Auditor.Results;
+
+namespace Auditor.Facts;
+
+/// <summary>The facts of one check of the final model's residuals.</summary>
+public static class CheckFacts
+{
+    private static readonly FactFamily<CheckResult> Family = new FactFamily<CheckResult>(About.Check)
+        .Text("check", "Name of the check, as in the record.", check => check.Check)
+        .Text("assumption", "The assumption it looks at.", check => check.Assumption)
+        .Number("statistic", FactUnits.None, "The check's statistic.", check => check.Statistic, Why)
+        .Number("df", FactUnits.DegreesOfFreedom, "First degrees of freedom.", check => check.Df, Why)
+        .Number("df2", FactUnits.DegreesOfFreedom, "Second degrees of freedom, for an F.", check => check.Df2, Why)
+        .Number("p", FactUnits.P, "p of the check.", check => check.P, Why)
+        .Flag("rejects", "p is at most the policy's significance.", check => check.Rejects, Why);
+
+    public static IReadOnlyList<FactDefinition> Definitions => Family.Definitions;
+
+    public static FactSet From(CheckResult check) => Family.From(check, check.Check, null);
+
+    private static string Why(CheckResult check) => check.Why ?? "the check has no such value";
+}

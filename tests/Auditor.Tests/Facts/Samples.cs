@@ -1,0 +1,43 @@
+using Auditor.Results;
+using Auditor.Rules;
+
+namespace Auditor.Tests.Facts;
+
+/// <summary>Results for the tests of facts: invented figures, no computation.</summary>
+internal static class Samples
+{
+    public static readonly GroupTests NoTests = new(null, null, null, null, null, null, null, null, null, null, null, null, null, null, null);
+
+    public static readonly Exclusion Tested = new(
+        "engine condition", ["engine_hours", "engine_hours^2"], 480, 2, 470, 12.5, 12.1,
+        NoTests with { Classical = new TestFigures(7.8, 2, 470, 0.0005) },
+        new Dictionary<string, string> { ["cluster"] = "no cluster declared" },
+        "hc3", "no cluster and no time declared", 0.03, null, 0.06, null,
+        new SelectiveFigures(null, "no elimination rule declared"),
+        new EffectFigures(0.032, 0.01, 0.06, 0.008, 0.07, null), 410,
+        new NegligibleFigures(0.01, 0.9, 0.95, null), new PowerFigures(0.44, 0.02, 1100, null),
+        null, Verdicts.Inconclusive, Materialities.NotShown, "neither rejected nor shown negligible", [], []);
+
+    public static readonly Exclusion Untestable = Tested with
+    {
+        Group = "dealer bonus",
+        Df1 = 0,
+        P = null,
+        PAdjusted = null,
+        Tests = NoTests,
+        TestsNotComputed = new Dictionary<string, string> { ["classical"] = "the group adds no rank" },
+        PartialRSquared = new EffectFigures(null, null, null, null, null, "no rank, no effect"),
+        Verdict = Verdicts.Untestable,
+        Reason = "its columns equal those of the final model",
+        Line = 31,
+    };
+
+    public static readonly FitSummary Fit = new(
+        480, 6, 474, 12.5, 0.16, 0.4, 0.39, 63, 5, 474, 1e-30, null, 100, -190, -160, 12, 13, [], [], [], null);
+
+    public static readonly RowAccount Rows = new(
+        520, 20, 10, 7, 3, 480, new Dictionary<string, int> { ["age"] = 2, ["price"] = 1500, ["grade"] = 0 }, new Dictionary<string, int> { ["log(price)"] = 3 }, []);
+
+    public static Policy Policy(string firm = "significance: 0.05") =>
+        PolicyReader.Read("significance: 0.05", "policy.yaml", firm, "firm.yaml").Value!;
+}
