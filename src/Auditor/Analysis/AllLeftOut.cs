@@ -1,0 +1,27 @@
+using Auditor.Design;
+using Auditor.Results;
+using Auditor.Rules;
+
+namespace Auditor.Analysis;
+
+/// <summary>All left-out terms as one group on the common rows: shown, never counted, a family of its own.</summary>
+internal static class AllLeftOut
+{
+    public const string Name = "all left out";
+
+    public static Exclusion? Of(BoundModel model, RowSetFit? common, Policy policy, bool sampling)
+    {
+        if (model.Groups.Count == 0)
+        {
+            return null;
+        }
+
+        var evidence = common?.Joint is { } joint ? new GroupEvidence(joint, policy, sampling) : null;
+        var product = model.FinalTerms.Select(term => term.Term).OfType<Declaration.ProductTerm>()
+            .FirstOrDefault(term => model.Groups.SelectMany(group => group.Terms).Any(bound => term.Factors.Contains(bound.Term)));
+        var judgement = Judgement.OfFamily([new JudgedGroup(evidence, product?.Label)], policy)[0];
+        var terms = model.Groups.SelectMany(group => group.Terms).Select(term => term.Term.Label);
+        var identity = new GroupIdentity(Name, [.. terms], null, null);
+        return ExclusionFigures.Of(identity, judgement, common, null, common?.Joint, policy, sampling);
+    }
+}

@@ -1,0 +1,135 @@
+using Auditor.Numerics;
+using Auditor.Numerics.GroupTests;
+using Auditor.Results;
+using Auditor.Rules;
+
+namespace Auditor.Analysis;
+
+/// <summary>What names a group in the record.</summary>
+internal sealed record GroupIdentity(string Name, IReadOnlyList<string> Terms, string? Because, int? Line);
+
+/// <summary>Puts an exclusion together from its judgement on the row set the policy asks for, the other one, and the common rows.</summary>
+internal static class ExclusionFigures
+{
+    private static readonly IReadOnlyDictionary<string, string> NotDeclared = new Dictionary<string, string>
+    {
+        ["cluster"] = "no cluster declared",
+        ["cr1"] = "no cluster declared",
+        ["cr2"] = "no cluster declared",
+        ["time"] = "no time order declared",
+        ["newey_west"] = "no time order declared",
+        ["permutation"] = "not built yet",
+        ["wild_bootstrap"] = "no cluster declared",
+    };
+
+    /// <param name="common">The group on the rows common to all; null when there is none. Last in and the largest model's denominator need it.</param>
+    public static Exclusion Of(
+        GroupIdentity identity, Judgement judgement, RowSetFit? rows, OtherRowSetFigures? other, GroupFit? common, Policy policy, bool sampling)
+    {
+        var notComputed = new SortedDictionary<string, string>(StringComparer.Ordinal);
+        foreach (var (test, missing) in NotDeclared)
+        {
+            notComputed[test] = missing;
+        }
+
+        var evidence = judgement.Evidence;
+        var added = evidence?.Fit.Added;
+        var basisTest = evidence?.Basis.Test ?? TestResult.None(Impediment.NoRows);
+        var why = Whys(basisTest, evidence);
+        return new Exclusion(
+            identity.Name,
+            identity.Terms,
+            rows is null ? 0 : (int)rows.Fit.N,
+            added?.Rank,
+            added is null ? null : PartialF.ResidualDf(added),
+            added?.RssWithout,
+            added?.RssWith,
+            Tests(evidence, common, notComputed, sampling),
+            notComputed,
+            evidence?.Basis.Name ?? Basis.Hc3,
+            evidence?.Basis.Reason ?? ImpedimentWords.Of(Impediment.NoRows),
+            basisTest.P is double p ? TestFigure.ShownP(p) : null,
+            TestFigure.LogP(basisTest) is double logP ? TestFigure.Log10(logP) : null,
+            judgement.PAdjusted,
+            judgement.LogPAdjusted is double logAdjusted ? TestFigure.Log10(logAdjusted) : null,
+            new SelectiveFigures(null, "not built yet"),
+            Effect(evidence, why),
+            evidence?.Basis.EffectiveRows?.LeastInformed,
+            new NegligibleFigures(policy.NegligiblePartialRSquared, evidence?.NegligibleP, judgement.NegligiblePAdjusted, evidence?.NegligibleP is null ? why["p"] : null),
+            Power(evidence, why),
+            other,
+            judgement.Verdict,
+            judgement.Materiality,
+            judgement.Reason,
+            rows is null || added is null ? [] : [.. added.Aliased.Select(column => AliasedWord.Of(column, rows.Plan.Labels))],
+            rows is null || added is null ? [] : [.. added.NearlyAliased.Select(near => new NearlyAliasedColumn(rows.Plan.Labels[near.Column], near.DigitsLost))])
+        {
+            Because = identity.Because,
+            Line = identity.Line,
+            Why = evidence?.Basis.Test is FTest && evidence.Basis.EffectiveRows is not null ? new Dictionary<string, string>() : why,
+        };
+    }
+
+    /// <summary>The basis test on the other row set, with the verdict it would give there.</summary>
+    public static OtherRowSetFigures Other(Judgement judgement, RowSetFit? rows)
+    {
+        var test = judgement.Evidence?.Basis.Test;
+        var f = test as FTest;
+        return new OtherRowSetFigures(
+            rows is null ? 0 : (int)rows.Fit.N, f?.Statistic, f?.Df1, f?.Df2, test?.P is double p ? TestFigure.ShownP(p) : null, judgement.Verdict);
+    }
+
+    private static GroupTests Tests(GroupEvidence? evidence, GroupFit? common, IDictionary<string, string> notComputed, bool sampling)
+    {
+        TestFigures? Figure(string name, TestResult? result) => TestFigure.Of(result ?? TestResult.None(Impediment.NoRows), name, notComputed);
+        return new GroupTests(
+            Figure("classical", evidence?.Classical),
+            Figure("hc0", evidence?.Hc[0]),
+            Figure("hc1", evidence?.Hc[1]),
+            Figure("hc2", evidence?.Hc[2]),
+            Figure("hc3", evidence?.Hc[3]),
+            Figure("score", evidence?.Score),
+            null,
+            null,
+            null,
+            null,
+            null,
+            null,
+            null,
+            Figure("last_in", Against(common?.LastIn, sampling, PartialF.Of)),
+            Figure("largest_model_denominator", Against(common?.Largest, sampling, largest => PartialF.WithMeanSquareOf(common!.Added, largest))));
+    }
+
+    private static TestResult? Against(Numerics.Factor.AddedGroup? model, bool sampling, Func<Numerics.Factor.AddedGroup, TestResult> test) =>
+        model is null ? null : sampling ? TestResult.None(Impediment.SamplingWeights) : test(model);
+
+    private static EffectFigures Effect(GroupEvidence? evidence, Dictionary<string, string> why) => new(
+        evidence?.PartialRSquared,
+        evidence?.ClassicalInterval?.Lower,
+        evidence?.ClassicalInterval?.Upper,
+        evidence?.BasisInterval?.Lower,
+        evidence?.BasisInterval?.Upper,
+        evidence?.BasisInterval is null ? why["p"] : null);
+
+    private static PowerFigures Power(GroupEvidence? evidence, Dictionary<string, string> why) => evidence?.Power is { } power
+        ? new PowerFigures(power.AtBound, power.SmallestDetectable, power.RowsNeeded, power.RowsNeeded is null ? "no practicable number of rows is enough" : null)
+        : new PowerFigures(null, null, null, why["p"]);
+
+    /// <summary>Why p and everything that follows from it has no value.</summary>
+    private static Dictionary<string, string> Whys(TestResult basis, GroupEvidence? evidence)
+    {
+        var reason = basis switch
+        {
+            NotComputable none => ImpedimentWords.Of(none.Why),
+            PerfectWithGroup => "the model with the group fits perfectly, so no effect figure can be given",
+            _ when evidence?.Basis.EffectiveRows is null => ImpedimentWords.Of(Impediment.SingularCovariance),
+            _ => "",
+        };
+        return new Dictionary<string, string>(StringComparer.Ordinal)
+        {
+            ["p"] = reason,
+            ["p_adjusted"] = reason,
+            ["effective_rows"] = reason,
+        };
+    }
+}

@@ -1,0 +1,44 @@
+using Auditor.Design;
+using Auditor.Results;
+using Auditor.Rules;
+
+namespace Auditor.Analysis;
+
+/// <summary>
+/// Every left-out group judged on the row set the policy asks for, with its test on the other row set beside it when the rows differ. Each kind of row
+/// set is a family of its own.
+/// </summary>
+internal static class Exclusions
+{
+    public static IReadOnlyList<Exclusion> Of(BoundModel model, ModelFits fits, Policy policy, bool sampling)
+    {
+        var groups = Enumerable.Range(0, model.Groups.Count).ToArray();
+        var own = OnRows(model, groups, fits.Own, policy, sampling);
+        var common = OnRows(model, groups, _ => fits.Common, policy, sampling);
+        var (main, other) = policy.RowSet == RowSet.Own ? (own, common) : (common, own);
+        return [.. groups.Select(group =>
+        {
+            var sameRows = fits.Selection.Own[group].Equals(fits.Selection.Common);
+            return ExclusionFigures.Of(
+                Identity(model.Groups[group]),
+                main[group].Judgement,
+                main[group].Rows,
+                sameRows ? null : ExclusionFigures.Other(other[group].Judgement, other[group].Rows),
+                fits.Common?[group],
+                policy,
+                sampling);
+        })];
+    }
+
+    private static List<(Judgement Judgement, RowSetFit? Rows)> OnRows(
+        BoundModel model, int[] groups, Func<int, RowSetFit?> rows, Policy policy, bool sampling)
+    {
+        var judged = groups.Select(group => new JudgedGroup(
+            rows(group) is { } fit ? new GroupEvidence(fit[group], policy, sampling) : null,
+            ProductsElsewhere.Of(model, group) is [var product, ..] ? product : null)).ToList();
+        return [.. Judgement.OfFamily(judged, policy).Select((judgement, group) => (judgement, rows(group)))];
+    }
+
+    private static GroupIdentity Identity(BoundGroup group) => new(
+        group.Declared.Name, [.. group.Terms.Select(term => term.Term.Label)], group.Declared.Because, group.Declared.Line);
+}

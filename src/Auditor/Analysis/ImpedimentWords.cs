@@ -1,0 +1,21 @@
+using Auditor.Numerics;
+
+namespace Auditor.Analysis;
+
+/// <summary>Why something has no value, in words.</summary>
+internal static class ImpedimentWords
+{
+    public static string Of(Impediment impediment) => impediment switch
+    {
+        Impediment.AddsNothing => "the group adds no direction to the final model (df1 = 0): its columns are combinations of the final model's",
+        Impediment.NoResidualDegreesOfFreedom => "no residual degrees of freedom are left with the group in (df2 = 0)",
+        Impediment.PerfectWithoutGroup => "the final model already fits these rows to rounding, so nothing is left to test",
+        Impediment.PerfectWithGroup => "with the group in, the model fits these rows to rounding and its residuals carry no information",
+        Impediment.RestsOnOneRow => "the group rests on one row: with it in, that row has leverage 1",
+        Impediment.SingularCovariance => "the estimated covariance of the group's effects is singular",
+        Impediment.TooFewContributions => "too few rows contribute to the score for the directions tested",
+        Impediment.SamplingWeights => "sampling weights: a classical test does not apply",
+        Impediment.NoRows => "no row is complete for the final model and the group",
+        _ => "the statistic is not finite",
+    };
+}

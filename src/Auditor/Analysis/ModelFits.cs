@@ -1,0 +1,48 @@
+using Auditor.Design;
+using Auditor.Rows;
+
+namespace Auditor.Analysis;
+
+/// <summary>
+/// The fits of an audit, one for each distinct row set: the final model's own rows, each group's own rows, the rows common to all. Groups with one
+/// missing pattern share a factor.
+/// </summary>
+internal sealed class ModelFits
+{
+    private readonly Dictionary<RowSubset, RowSetFit> _fits = [];
+
+    private ModelFits(RowSelection selection) => Selection = selection;
+
+    public RowSelection Selection { get; }
+
+    /// <summary>The final model on the rows complete for it alone.</summary>
+    public RowSetFit? Final => On(Selection.Final);
+
+    /// <summary>The final model and all groups on the rows complete for everything; null when there is no such row.</summary>
+    public RowSetFit? Common => On(Selection.Common);
+
+    public static ModelFits Compute(BoundModel model, RowSelection selection)
+    {
+        var wanted = new Dictionary<RowSubset, SortedSet<int>> { [selection.Final] = [] };
+        wanted.TryAdd(selection.Common, []);
+        for (var g = 0; g < model.Groups.Count; g++)
+        {
+            wanted.TryAdd(selection.Own[g], []);
+            wanted[selection.Own[g]].Add(g);
+            wanted[selection.Common].Add(g);
+        }
+
+        var fits = new ModelFits(selection);
+        foreach (var (rows, groups) in wanted.Where(entry => entry.Key.Count > 0))
+        {
+            fits._fits[rows] = RowSetFit.Compute(model, rows, [.. groups], rows.Equals(selection.Common));
+        }
+
+        return fits;
+    }
+
+    /// <summary>The fit of a group's own rows; null when it has none.</summary>
+    public RowSetFit? Own(int group) => On(Selection.Own[group]);
+
+    private RowSetFit? On(RowSubset rows) => _fits.GetValueOrDefault(rows);
+}

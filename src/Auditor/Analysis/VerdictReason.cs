@@ -1,0 +1,73 @@
+using System.Globalization;
+using Auditor.Numerics;
+using Auditor.Results;
+using Auditor.Rules;
+
+namespace Auditor.Analysis;
+
+/// <summary>One sentence that says what a verdict rests on, with its numbers.</summary>
+internal static class VerdictReason
+{
+    public static string Of(Judgement judgement, string? productElsewhere, Policy policy)
+    {
+        if (judgement.Evidence is not { } evidence)
+        {
+            return "Nothing can be tested: " + ImpedimentWords.Of(Impediment.NoRows) + ".";
+        }
+
+        if (evidence.Basis.Test is NotComputable none)
+        {
+            return "The data cannot test this: " + ImpedimentWords.Of(none.Why) + ".";
+        }
+
+        return productElsewhere is not null
+            ? $"The test depends on how variables are coded, because {productElsewhere} is outside the group: no verdict can rest on it ({Test(judgement, policy)})."
+            : Sentence(judgement, evidence, policy);
+    }
+
+    private static string Sentence(Judgement judgement, GroupEvidence evidence, Policy policy) => judgement.Verdict switch
+    {
+        Verdicts.NotSupported when evidence.Basis.Test is PerfectWithGroup =>
+            "With the group in, the model fits these rows perfectly; without it, it does not.",
+        Verdicts.NotSupported when judgement.Materiality == Materialities.ShownNegligible =>
+            $"The data show an effect ({Test(judgement, policy)}), but a negligible one: partial R² is below {Bound(policy)} (interval {Interval(evidence)}).",
+        Verdicts.NotSupported =>
+            $"The data contradict leaving it out: jointly, its terms explain more than chance would ({Test(judgement, policy)}).",
+        Verdicts.Supported =>
+            $"No effect is found ({Test(judgement, policy)}) and the data show that any effect is negligible: partial R² is below {Bound(policy)} "
+            + $"(negligible-effect test, adjusted {PlainNumber.PAgainst(judgement.NegligiblePAdjusted!.Value, policy.Significance)}).",
+        _ => $"No effect is found ({Test(judgement, policy)}), but the data cannot show that it is negligible: {Possible(evidence, policy)}{Needed(evidence, policy)}.",
+    };
+
+    private static string Test(Judgement judgement, Policy policy)
+    {
+        var test = judgement.Evidence!.Basis.Test;
+        var p = judgement.PAdjusted is double adjusted ? "adjusted " + PlainNumber.PAgainst(adjusted, policy.Significance) : "no p";
+        return test is FTest f
+            ? string.Create(CultureInfo.InvariantCulture, $"{BasisWords.Of(judgement.Evidence.Basis.Name)} F = {PlainNumber.Digits(f.Statistic, 3)} on {PlainNumber.Digits(f.Df1, 4)} and {Df2(f)} degrees of freedom, {p}")
+            : p;
+    }
+
+    private static string Df2(FTest f) => double.IsInteger(f.Df2) ? PlainNumber.Count(f.Df2) : PlainNumber.Digits(f.Df2, 4);
+
+    private static string Bound(Policy policy) => PlainNumber.Digits(policy.NegligiblePartialRSquared, 4);
+
+    private static string Interval(GroupEvidence evidence) => evidence.BasisInterval is { } interval
+        ? PlainNumber.Digits(interval.Lower, 2) + " to " + PlainNumber.Digits(interval.Upper, 2)
+        : "not computed";
+
+    private static string Possible(GroupEvidence evidence, Policy policy) => evidence.BasisInterval is { } interval && interval.Upper >= policy.NegligiblePartialRSquared
+        ? $"partial R² may be as large as {PlainNumber.Digits(interval.Upper, 2)}, and {Bound(policy)} is the most that counts as negligible"
+        : $"the test that partial R² is below {Bound(policy)} does not hold after adjustment for the number of groups";
+
+    private static string Needed(GroupEvidence evidence, Policy policy) =>
+        evidence.Power?.RowsNeeded is double rows && evidence.Power.AtBound < policy.Power
+            ? $"; about {PlainNumber.Count(rows)} rows like these would find an effect of that size with {PlainNumber.Digits(100 * policy.Power, 3)} % power"
+            : "";
+}
+
+/// <summary>The basis tests' names in sentences.</summary>
+internal static class BasisWords
+{
+    public static string Of(string basis) => basis == Basis.Hc3 ? "robust (HC3)" : basis;
+}

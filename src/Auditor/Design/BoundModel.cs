@@ -1,0 +1,21 @@
+using Auditor.Data;
+using Auditor.Declaration;
+
+namespace Auditor.Design;
+
+/// <summary>A declaration bound to its data: every term can make its columns, nothing is fitted yet.</summary>
+/// <param name="KeptRows">0-based rows of the table that the row filter leaves, ascending.</param>
+public sealed record BoundModel(
+    DataTable Table,
+    int[] KeptRows,
+    bool Intercept,
+    BoundTerm Response,
+    IReadOnlyList<BoundTerm> FinalTerms,
+    IReadOnlyList<BoundGroup> Groups,
+    BoundWeights? Weights);
+
+/// <summary>A left-out group whose terms are bound.</summary>
+public sealed record BoundGroup(LeftOutGroup Declared, IReadOnlyList<BoundTerm> Terms);
+
+/// <summary>The column of weights and what they mean; checked: no negative and no missing weight on a kept row.</summary>
+public sealed record BoundWeights(NumberColumn Column, WeightKind Kind, WeightsDeclaration Declared);

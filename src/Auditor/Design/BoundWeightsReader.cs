@@ -1,0 +1,42 @@
+using Auditor.Data;
+using Auditor.Declaration;
+
+namespace Auditor.Design;
+
+/// <summary>Checks the weights of the kept rows: present, not negative, whole where they count copies.</summary>
+internal static class BoundWeightsReader
+{
+    private const int MostShown = 5;
+
+    public static BoundWeights? Read(ModelDeclaration declaration, DataTable table, int[] rows, List<Problem> problems)
+    {
+        if (declaration.Data.Weights is not { } declared)
+        {
+            return null;
+        }
+
+        if (table[declared.Column] is not NumberColumn column)
+        {
+            problems.Add(new Problem(declaration.File, declared.Line, $"weights: column {declared.Column} holds {table[declared.Column].Kind.ToString().ToLowerInvariant()}, weights are numbers"));
+            return null;
+        }
+
+        var faults = rows.Select(row => (Row: row, Fault: Fault(column.Values[row], declared.Kind))).Where(pair => pair.Fault is not null).ToList();
+        problems.AddRange(faults.Take(MostShown).Select(pair => new Problem(
+            declaration.File, declared.Line, string.Create(System.Globalization.CultureInfo.InvariantCulture, $"weights: column {declared.Column}, row {pair.Row + 1}: {pair.Fault}"))));
+        if (faults.Count > MostShown)
+        {
+            problems.Add(new Problem(declaration.File, declared.Line, string.Create(System.Globalization.CultureInfo.InvariantCulture, $"weights: {faults.Count - MostShown} more rows like these")));
+        }
+
+        return new BoundWeights(column, declared.Kind, declared);
+    }
+
+    private static string? Fault(double weight, WeightKind kind) => weight switch
+    {
+        double.NaN => "the weight is missing; give one, or take the row out with data.keep",
+        < 0 => "the weight is negative",
+        _ when kind == WeightKind.Frequency && !double.IsInteger(weight) => "a frequency must be a whole number",
+        _ => null,
+    };
+}

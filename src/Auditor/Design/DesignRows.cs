@@ -1,0 +1,46 @@
+using Auditor.Declaration;
+using Auditor.Numerics.Factor;
+using Auditor.Rows;
+
+namespace Auditor.Design;
+
+/// <summary>Makes the columns of a plan for the rows of a subset, block by block: the whole design is never in memory.</summary>
+public sealed class DesignRows(BoundModel model, DesignPlan plan, RowSubset rows) : IDesignRows
+{
+    public DesignLayout Layout => plan.Layout;
+
+    public IEnumerable<RowBlock> Blocks()
+    {
+        var block = new RowBlock(Math.Min(RowBlock.DefaultCapacity, Math.Max(1, rows.Count)), Layout.Columns);
+        var weights = model.Weights is null ? null : new double[block.Stride];
+        var copies = model.Weights?.Kind == WeightKind.Frequency;
+        block.Weights = copies ? null : weights;
+        block.Copies = copies ? weights : null;
+        for (var first = 0; first < rows.Count; first += block.Stride)
+        {
+            Fill(block, first, weights);
+            yield return block;
+        }
+    }
+
+    private void Fill(RowBlock block, int first, double[]? weights)
+    {
+        block.FirstRow = first;
+        block.Rows = Math.Min(block.Stride, rows.Count - first);
+        var chosen = rows.Rows.AsSpan(first, block.Rows);
+        if (Layout.Intercept)
+        {
+            block.Column(0).Fill(1);
+        }
+
+        foreach (var (term, column) in plan.TermColumns())
+        {
+            term.Fill(chosen, block.Values.AsSpan(column * block.Stride), block.Stride);
+        }
+
+        for (var i = 0; weights is not null && i < chosen.Length; i++)
+        {
+            weights[i] = model.Weights!.Column.Values[chosen[i]];
+        }
+    }
+}

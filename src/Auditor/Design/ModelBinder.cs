@@ -1,0 +1,53 @@
+using Auditor.Data;
+using Auditor.Declaration;
+
+namespace Auditor.Design;
+
+/// <summary>Binds a checked declaration to its table: filter, weights, then every term; all problems at once.</summary>
+public static class ModelBinder
+{
+    public static Reading<BoundDeclaration> Bind(ModelDeclaration declaration, DataTable table)
+    {
+        var kept = KeepFilter.Apply(table, declaration.Data.Keep, declaration.File);
+        if (kept.Value is not { } rows)
+        {
+            return Reading<BoundDeclaration>.Failed(kept.Problems);
+        }
+
+        var binder = new TermBinder(table, rows.Rows, declaration.Data.Columns, declaration.Data.Structure.Period, declaration.File);
+        var problems = new List<Problem>();
+        var response = Bound(binder.Bind(declaration.Response), problems);
+        var final = All(binder, declaration.FinalModel.Terms, problems);
+        var groups = declaration.LeftOut.Select(group => new BoundGroup(group, All(binder, group.Terms, problems))).ToList();
+        var weights = BoundWeightsReader.Read(declaration, table, rows.Rows, problems);
+        CheckResponse(declaration, response, problems);
+        return problems.Count > 0
+            ? Reading<BoundDeclaration>.Failed([.. problems.OrderBy(problem => problem.Line)])
+            : Reading<BoundDeclaration>.Of(new BoundDeclaration(
+                new BoundModel(table, rows.Rows, declaration.FinalModel.Intercept, response!, final, groups, weights),
+                [.. rows.Notes, .. binder.Notes]));
+    }
+
+    private static void CheckResponse(ModelDeclaration declaration, BoundTerm? response, List<Problem> problems)
+    {
+        if (response is not null && (response.ColumnLabels.Count != 1 || response.Sources.Any(source => source is not NumberColumn && declaration.Response is ColumnTerm)))
+        {
+            problems.Add(new Problem(
+                declaration.File,
+                declaration.Response.Line,
+                $"response: {declaration.Response.Label} must be one number, found {response.Sources[0].Kind.ToString().ToLowerInvariant()}"));
+        }
+    }
+
+    private static List<BoundTerm> All(TermBinder binder, IReadOnlyList<Term> terms, List<Problem> problems) =>
+        [.. terms.Select(term => Bound(binder.Bind(term), problems)).OfType<BoundTerm>()];
+
+    private static BoundTerm? Bound(Reading<BoundTerm> reading, List<Problem> problems)
+    {
+        problems.AddRange(reading.Problems);
+        return reading.Value;
+    }
+}
+
+/// <summary>A bound model and what was noted while binding it.</summary>
+public sealed record BoundDeclaration(BoundModel Model, IReadOnlyList<BindingNote> Notes);

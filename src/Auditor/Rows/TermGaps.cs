@@ -1,0 +1,80 @@
+using Auditor.Design;
+
+namespace Auditor.Rows;
+
+/// <summary>Where some terms have no value: rows with a missing source, and rows where a transform has none although its sources do.</summary>
+internal sealed class TermGaps
+{
+    private const int BlockRows = 1024;
+
+    public List<int> Incomplete { get; } = [];
+
+    public List<int> Undefined { get; } = [];
+
+    /// <summary>Rows that each term leaves undefined, by the term's label.</summary>
+    public Dictionary<string, int> UndefinedByTerm { get; } = new(StringComparer.Ordinal);
+
+    public IReadOnlyCollection<int> Both => Undefined.Count == 0 ? Incomplete : [.. Incomplete, .. Undefined];
+
+    public static TermGaps Find(IReadOnlyList<BoundTerm> terms, RowSubset rows)
+    {
+        var gaps = new TermGaps();
+        var sources = terms.SelectMany(term => term.Sources).Distinct().ToArray();
+        var complete = new List<int>(rows.Count);
+        foreach (var row in rows.Rows)
+        {
+            (Array.Exists(sources, source => source.IsMissing(row)) ? gaps.Incomplete : complete).Add(row);
+        }
+
+        gaps.FindUndefined(terms, [.. complete]);
+        return gaps;
+    }
+
+    private void FindUndefined(IReadOnlyList<BoundTerm> terms, int[] rows)
+    {
+        var undefined = new SortedSet<int>();
+        foreach (var term in terms.Where(term => term.ColumnLabels.Count > 0))
+        {
+            var own = Undefineds(term, rows);
+            undefined.UnionWith(own);
+            if (own.Count > 0)
+            {
+                UndefinedByTerm[term.Term.Label] = own.Count;
+            }
+        }
+
+        Undefined.AddRange(undefined);
+    }
+
+    private static List<int> Undefineds(BoundTerm term, int[] rows)
+    {
+        var (found, values) = (new List<int>(), new double[BlockRows * term.ColumnLabels.Count]);
+        for (var first = 0; first < rows.Length; first += BlockRows)
+        {
+            var block = rows.AsSpan(first, Math.Min(BlockRows, rows.Length - first));
+            term.Fill(block, values, BlockRows);
+            for (var i = 0; i < block.Length; i++)
+            {
+                if (!IsDefined(values, i, term.ColumnLabels.Count))
+                {
+                    found.Add(block[i]);
+                }
+            }
+        }
+
+        return found;
+    }
+
+    private static bool IsDefined(double[] values, int row, int columns)
+    {
+        for (var c = 0; c < columns; c++)
+        {
+            if (!double.IsFinite(values[(c * BlockRows) + row]))
+            {
+                return false;
+            }
+        }
+
+        return true;
+    }
+}
