@@ -1,0 +1,67 @@
+using Auditor.Declaration;
+using Auditor.Design;
+using Auditor.Results;
+using Auditor.Rules;
+
+namespace Auditor.Facts;
+
+/// <summary>All facts of an audit, in the order of the record: what rules may speak of.</summary>
+internal static class AuditFacts
+{
+    public static IReadOnlyList<FactSet> Of(AuditResults results, BoundDeclaration bound, IReadOnlyList<ColumnMention> mentions, Policy policy)
+    {
+        var id = results.ModelId;
+        return
+        [
+            .. results.Exclusions.Select((exclusion, g) => ExclusionFacts.From(exclusion, results.ExclusionInputs[g], policy)),
+            .. results.AllLeftOut is { } all ? new[] { AllLeftOutFacts.From(all, results.Exclusions, results.FinalFit.Rows, policy) } : [],
+            FitFacts.From(id, results.FinalFit, new FitInputs(results.Perfect, results.Exclusions.Count)),
+            RowFacts.From(id, results.Rows),
+            .. Columns(bound, mentions, results.Rows).Select(ColumnFacts.From),
+            .. results.FinalFit.Coefficients.Select(CoefficientFacts.From),
+            .. results.Checks.Select(CheckFacts.From),
+        ];
+    }
+
+    private static IEnumerable<ColumnInputs> Columns(BoundDeclaration bound, IReadOnlyList<ColumnMention> mentions, RowAccount rows)
+    {
+        var model = bound.Model;
+        var terms = model.Groups.SelectMany(group => group.Terms).Concat(model.FinalTerms).ToList();
+        var plain = terms.Select(term => term.Term).SelectMany(PlainColumns).ToHashSet(StringComparer.Ordinal);
+        var inTerm = terms.SelectMany(term => term.Term.Columns).Select(column => column.Column).ToHashSet(StringComparer.Ordinal);
+        var absent = bound.Notes.OfType<LevelWithoutRows>().ToLookup(note => note.Column, note => note.Level, StringComparer.Ordinal);
+        foreach (var column in model.Table.Columns)
+        {
+            var line = mentions.FirstOrDefault(mention => mention.Column == column.Name)?.Line;
+            var input = ColumnInputs.Of(column, model.KeptRows, plain.Contains(column.Name) && column.Kind == Data.ColumnKind.Number, inTerm.Contains(column.Name), null, line);
+            yield return input with { AbsentLevels = [.. absent[column.Name]] };
+        }
+
+        foreach (var name in rows.ColumnsNobodyMentions)
+        {
+            yield return ColumnInputs.NobodyMentions(name);
+        }
+    }
+
+    /// <summary>Columns taken as they are, on their own or as a factor of a product.</summary>
+    private static IEnumerable<string> PlainColumns(Term term) => term switch
+    {
+        ColumnTerm column => [column.Column],
+        ProductTerm product => product.Factors.SelectMany(PlainColumns),
+        _ => [],
+    };
+}
+
+/// <summary>The results that facts are drawn from.</summary>
+internal sealed record AuditResults(
+    string ModelId,
+    RowAccount Rows,
+    FitSummary FinalFit,
+    FitSummary? OtherFit,
+    bool Perfect,
+    IReadOnlyList<Exclusion> Exclusions,
+    IReadOnlyList<ExclusionInputs> ExclusionInputs,
+    Exclusion? AllLeftOut,
+    IReadOnlyList<CheckResult> Checks,
+    Influence Influence,
+    Collinearity Collinearity);
