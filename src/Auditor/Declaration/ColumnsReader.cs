@@ -6,6 +6,8 @@ namespace Auditor.Declaration;
 /// <summary>The key <c>data.columns</c>: kinds and levels that cannot be inferred.</summary>
 internal static class ColumnsReader
 {
+    private static readonly IReadOnlyList<string> Known = ["kind", "reference", "levels"];
+
     public static IReadOnlyDictionary<string, ColumnDeclaration> Read(Place place, ColumnNames columns)
     {
         var declared = new Dictionary<string, ColumnDeclaration>(StringComparer.Ordinal);
@@ -35,14 +37,14 @@ internal static class ColumnsReader
         var name = all with { Node = new YamlScalar(entry.Key, IsPlain: false, entry.Line) };
         var mention = columns.Read(name, "data.columns");
         var place = all with { Node = entry.Value, Path = all.Path + "." + entry.Key };
-        if (Keys.Of(place, "kind", "reference", "levels") is not { } keys)
+        if (Keys.Of(place, Known) is not { } keys)
         {
             return null;
         }
 
-        if (keys.Present("kind", "reference", "levels") is [])
+        if (keys.Present(Known) is [])
         {
-            place.Refuse("kind, reference or levels");
+            keys.RefuseChoice("kind, reference or levels", Known);
         }
 
         var kind = keys.Optional("kind")

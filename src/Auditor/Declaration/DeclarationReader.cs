@@ -31,7 +31,7 @@ public static class DeclarationReader
         var model = keys.Required("model", "a map with the key id") is { } identity ? ModelReader.Read(identity) : null;
         var data = keys.Required("data", "a map with the key source") is { } described ? dataReader.Read(described) : null;
         var response = keys.Required("response", "a column or a term that yields one number") is { } explained
-            ? new TermReader(columns, "response").ReadOneColumn(explained, "response")
+            ? new TermReader(columns, "response").ReadOneColumn(explained, "the response")
             : null;
         var final = keys.Required("final_model", "a map with the key terms") is { } stayed ? FinalModelReader.Read(stayed, columns) : null;
         var leftOut = keys.Optional("left_out") is { } dropped ? LeftOutReader.Read(dropped, columns) : [];

@@ -28,14 +28,13 @@ internal static class EliminationReader
             return null;
         }
 
-        switch (keys.Present(Rules))
+        if (keys.Present(Rules) is [var only])
         {
-            case [var only]:
-                return Rule(only, keys.Optional(only)!);
-            case var found:
-                keys.Add("expected exactly one of drop_above, drop_worse or judgement, found " + Words.NoneOr(found));
-                return null;
+            return Rule(only, keys.Optional(only)!);
         }
+
+        keys.RefuseChoice("exactly one of drop_above, drop_worse or judgement", Rules);
+        return null;
     }
 
     private static EliminationRule? Rule(string key, Place place) => key switch

@@ -42,7 +42,7 @@ internal sealed class KeepReader(ColumnNames columns)
             case ["from", "to"] or ["from"] or ["to"]:
                 return Between(keys, column, line);
             default:
-                keys.Add("expected exactly one of equals, not, in, from/to or present, found " + Words.NoneOr(present));
+                keys.RefuseChoice("exactly one of equals, not, in, from/to or present", Tests);
                 return null;
         }
     }

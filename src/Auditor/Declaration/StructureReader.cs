@@ -79,13 +79,13 @@ internal sealed class StructureReader(ColumnNames columns)
                 var column = columns.Read(keys.Optional("column")!, "data.split");
                 var at = DateOrNumber.Read(keys.Optional("at")!);
                 return new SplitDeclaration(column?.Column, at?.Text, null, place.Line);
-            case var found:
+            default:
                 if (keys.Optional("column") is { } named)
                 {
                     columns.Read(named, "data.split");
                 }
 
-                keys.Add("expected column and at, or row, found " + Words.NoneOr(found));
+                keys.RefuseChoice("column and at, or row", ["column", "at", "row"]);
                 return null;
         }
     }

@@ -33,8 +33,17 @@ internal sealed class Keys
 
     public bool Has(string key) => _entries.ContainsKey(key);
 
-    /// <summary>How many of these keys there are.</summary>
+    /// <summary>Which of these keys there are.</summary>
     public IReadOnlyList<string> Present(params IReadOnlyList<string> keys) => [.. keys.Where(Has)];
+
+    /// <summary>Says that another choice of keys was expected, unless a misspelt one explains what is missing.</summary>
+    public void RefuseChoice(string expected, IReadOnlyList<string> keys)
+    {
+        if (!_suggested.Overlaps(keys))
+        {
+            Add($"expected {expected}, found {Words.NoneOr(Present(keys))}");
+        }
+    }
 
     public Place? Optional(string key) => _entries.TryGetValue(key, out var entry) ? At(entry) : null;
 
@@ -64,13 +73,16 @@ internal sealed class Keys
     /// <summary>The path of a whole file, left out before its keys.</summary>
     public const string DocumentPath = "declaration";
 
+    private static string Known(IReadOnlyList<string> known) =>
+        known.Count == 1 ? "; the only key is " + known[0] : "; the keys are " + string.Join(", ", known);
+
     private void RefuseUnknown(IReadOnlyList<string> known)
     {
         foreach (var entry in _entries.Values.Where(entry => !known.Contains(entry.Key)))
         {
             var near = NearestName.Of(entry.Key, known);
             _suggested.UnionWith(near is null ? [] : [near]);
-            var hint = near is null ? "; the keys are " + string.Join(", ", known) : $"; did you mean '{near}'?";
+            var hint = near is null ? Known(known) : $"; did you mean '{near}'?";
             _place.Problems.Add(entry.Line, $"{_place.Path}: unknown key '{Words.Short(entry.Key)}'{hint}");
         }
     }

@@ -105,7 +105,9 @@ internal sealed record Place(YamlValue Node, string Path, ProblemList Problems)
             return [.. items.Select(item => this with { Node = item })];
         }
 
-        Add(string.Create(CultureInfo.InvariantCulture, $"expected a list of at least {least} {of}, found {items.Count}"));
+        Add(least == 1
+            ? $"expected a list of {of}, found an empty one"
+            : string.Create(CultureInfo.InvariantCulture, $"expected a list of at least {least} {of}, found {items.Count}"));
         return null;
     }
 

@@ -31,9 +31,6 @@ internal static class YamlCharacters
     /// <summary>A control character other than tab and line ends.</summary>
     public static bool IsForbidden(char c) => char.IsControl(c) && c is not ('\t' or '\n' or '\r' or '\u0085');
 
-    /// <summary>The given 1-based line, empty when there is none.</summary>
-    public static string Line(string text, int line) => text.ReplaceLineEndings("\n").Split('\n').ElementAtOrDefault(line - 1) ?? "";
-
     private static int? FirstForbidden(string text)
     {
         for (var i = 0; i < text.Length; i++)

@@ -14,9 +14,13 @@ internal static class YamlFault
         {
             problems.Add(line, fault.Message);
         }
-        else if (IndentedByTab(yaml, line) is int tabbed)
+        else if (IndentedByTab(yaml, line, fault) is int tabbed)
         {
             problems.Add(tabbed, "a tab cannot indent YAML; use spaces");
+        }
+        else if (PlainText(fault) is { } reason)
+        {
+            problems.Add(line, "this is not YAML: " + reason);
         }
         else if (openBracket is { } open)
         {
@@ -24,7 +28,7 @@ internal static class YamlFault
         }
         else
         {
-            problems.Add(line, "this is not YAML: " + Plain(fault));
+            problems.Add(line, "this is not YAML: " + PlainStructure(fault));
         }
     }
 
@@ -37,22 +41,34 @@ internal static class YamlFault
     private static string Unclosed(Mark open) =>
         string.Create(CultureInfo.InvariantCulture, $"the bracket that opens in column {open.Column} is not closed, or what stands in it is not YAML");
 
-    /// <summary>The faulty line, or the one after it (where the parser stops at a key before it), when its indentation holds a tab.</summary>
-    private static int? IndentedByTab(string yaml, int line) =>
-        new[] { line, line + 1 }.Where(number => Indentation(YamlCharacters.Line(yaml, number)).Contains('\t', StringComparison.Ordinal)).Cast<int?>().FirstOrDefault();
+    /// <summary>
+    /// The first line whose indentation holds a tab: from the line of the fault on when the parser names the tab (it may name the line where the
+    /// whole map starts), else the faulty line or the one after it.
+    /// </summary>
+    private static int? IndentedByTab(string yaml, int line, YamlException fault)
+    {
+        var lines = yaml.ReplaceLineEndings("\n").Split('\n');
+        var last = Says(fault, "tab") ? lines.Length : Math.Min(lines.Length, line + 1);
+        return Enumerable.Range(line, Math.Max(0, last - line + 1)).Where(number => Indentation(lines[number - 1]).Contains('\t', StringComparison.Ordinal)).Cast<int?>().FirstOrDefault();
+    }
 
     private static string Indentation(string line) => line[..^line.TrimStart().Length];
 
-    private static string Plain(YamlException fault) => fault.Message switch
-    {
-        var words when words.Contains("quoted scalar, found unexpected end", StringComparison.Ordinal) => "the quotation mark is not closed",
-        var words when words.Contains("unknown escape", StringComparison.Ordinal) => "a backslash in double quotation marks must be written twice",
-        var words when words.Contains("found invalid mapping", StringComparison.Ordinal) => "a second colon on a line, or a deeper line under a key that already has a value; put text with a colon in quotation marks",
-        var words when words.Contains("cannot start any token", StringComparison.Ordinal) => "text cannot start with this character; put it in quotation marks",
-        var words when words.Contains("did not find expected key", StringComparison.Ordinal) => "expected a key here; is the indentation the same as above?",
-        var words when words.Contains("expected '-'", StringComparison.Ordinal) => "expected the next '-' of the list; is the indentation the same as above, with a space after the '-'?",
-        var words => words,
-    };
+    /// <summary>What is wrong with a text, whatever it stands in.</summary>
+    private static string? PlainText(YamlException fault) =>
+        Says(fault, "unknown escape") ? "a backslash in double quotation marks must be written twice"
+        : Says(fault, "quoted scalar") ? "the quotation mark is not closed"
+        : Says(fault, "cannot start any token") ? "text cannot start with this character; put it in quotation marks"
+        : null;
+
+    /// <summary>What is wrong outside brackets.</summary>
+    private static string PlainStructure(YamlException fault) =>
+        Says(fault, "found invalid mapping") ? "a second colon on a line, or a deeper line under a key that already has a value; put text with a colon in quotation marks"
+        : Says(fault, "did not find expected key") ? "expected a key here; is the indentation the same as above?"
+        : Says(fault, "expected '-'") ? "expected the next '-' of the list; is the indentation the same as above, with a space after the '-'?"
+        : fault.Message;
+
+    private static bool Says(YamlException fault, string words) => fault.Message.Contains(words, StringComparison.Ordinal);
 }
 
 /// <summary>YAML that is well formed, yet nests or multiplies beyond what a person would write.</summary>
