@@ -14,11 +14,14 @@ internal static class NearestName
         return known.Count is > 0 and <= 12 ? "; known: " + string.Join(", ", known) : "";
     }
 
-    /// <summary>The known name with the fewest edits (a swap of neighbours is one), when that is at most a third of the name; the first on a tie.</summary>
+    /// <summary>
+    /// The known name with the fewest edits (a swap of neighbours is one), when they are at most a third of the name, two for a name
+    /// of five or six letters, one for a shorter one; the first on a tie.
+    /// </summary>
     public static string? Of(string name, IEnumerable<string> known)
     {
         var best = known.Select(candidate => (candidate, edits: Edits(name, candidate))).MinBy(pair => pair.edits);
-        return best.candidate is not null && best.edits <= Math.Max(2, name.Length / 3) ? best.candidate : null;
+        return best.candidate is not null && best.edits <= (name.Length < 5 ? Math.Min(1, name.Length) : Math.Max(2, name.Length / 3)) ? best.candidate : null;
     }
 
     /// <summary>Optimal string alignment distance, case ignored.</summary>
