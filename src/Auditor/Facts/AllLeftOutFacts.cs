@@ -17,10 +17,10 @@ public static class AllLeftOutFacts
             view => view.FinalRows > 0 ? (double)view.Joint.Rows / view.FinalRows : null, _ => "the final model has no rows")
         .Count("df1", FactUnits.DegreesOfFreedom, "Rank that all groups together add.", view => view.Joint.Df1, Why("df1"))
         .Number("df2", FactUnits.DegreesOfFreedom, "Residual degrees of freedom with all groups in.", view => view.Joint.Df2, Why("df2"))
-        .Text("basis", "The test on which the joint verdict rests.", view => view.Joint.Basis)
+        .Word("basis", "The test on which the joint verdict rests.", FactWords.Bases, view => view.Joint.Basis)
         .Number("p", FactUnits.P, "p of that test; it stands alone and is not adjusted.", view => view.Joint.P, Why("p"))
-        .Text("verdict", "not_supported, supported, inconclusive or untestable.", view => view.Joint.Verdict)
-        .Text("materiality", "shown_negligible, shown_material or not_shown.", view => view.Joint.Materiality)
+        .Word("verdict", "What the test says of leaving everything out.", FactWords.Verdicts, view => view.Joint.Verdict)
+        .Word("materiality", "What the interval says of the effect against the policy's bound.", FactWords.Materialities, view => view.Joint.Materiality)
         .Text("reason", "What the verdict rests on, in words.", view => view.Joint.Reason)
         .Number("partial_r_squared", FactUnits.PartialRSquared, "Estimated partial R² of all groups together.", view => view.Joint.PartialRSquared.Estimate,
             view => view.Joint.PartialRSquared.Why ?? view.Why("partial_r_squared.estimate"));

@@ -6,7 +6,7 @@ namespace Auditor.Facts;
 public static class CheckFacts
 {
     private static readonly FactFamily<CheckResult> Family = new FactFamily<CheckResult>(About.Check)
-        .Text("check", "Name of the check, as in the record.", check => check.Check)
+        .Word("check", "Name of the check, as in the record.", FactWords.Checks, check => check.Check)
         .Text("assumption", "The assumption it looks at.", check => check.Assumption)
         .Number("statistic", FactUnits.None, "The check's statistic.", check => check.Statistic, Why)
         .Number("df", FactUnits.DegreesOfFreedom, "First degrees of freedom.", check => check.Df, Why)

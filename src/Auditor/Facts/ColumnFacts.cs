@@ -8,7 +8,7 @@ public static class ColumnFacts
     private static readonly FactFamily<ColumnInputs> Family = new FactFamily<ColumnInputs>(About.Column)
         .Text("column", "Name of the column.", column => column.Column)
         .Flag("mentioned", "The declaration names it somewhere.", column => column.Kind is not null)
-        .Text("kind", "number, levels, date or text.", Kind, NotRead)
+        .Word("kind", "What its cells are.", FactWords.Kinds, Kind, NotRead)
         .Flag("in_term", "A term of the final model or of a left-out group holds it.", column => column.InTerm)
         .Flag("fitted_as_number", "A term takes its plain value as a number.", column => column.FittedAsNumber)
         .Count("distinct_values", "values", "Distinct values over the kept rows (counted up to 1,000).", column => column.Distinct, NotRead)

@@ -14,7 +14,7 @@ public static class ExclusionFacts
     private static readonly FactFamily<ExclusionView> Family = Effect(Tests(new FactFamily<ExclusionView>(About.Exclusion)))
         .Count("other_rows", FactUnits.Rows, "Rows of the same test on the other row set.", view => view.Of.OtherRowSet?.Rows, SameRows)
         .Number("other_p", FactUnits.P, "p of the same test on the other row set.", view => view.Of.OtherRowSet?.P, SameRows)
-        .Text("other_verdict", "Verdict on the other row set.", view => view.Of.OtherRowSet?.Verdict, SameRows)
+        .Word("other_verdict", "Verdict on the other row set.", FactWords.Verdicts, view => view.Of.OtherRowSet?.Verdict, SameRows)
         .Flag("other_row_set_verdict_differs", "The verdict on the other row set is another one; false when both row sets are the same.",
             view => view.Of.OtherRowSet is { } other && other.Verdict != view.Of.Verdict)
         .Flag("has_aliased_columns", "At least one column of the group equals a combination of the final model's.", view => view.Of.Aliased.Count > 0)
@@ -40,7 +40,7 @@ public static class ExclusionFacts
         .Count("rows", FactUnits.Rows, "Rows of the group's own test.", view => view.Of.Rows)
         .Count("df1", FactUnits.DegreesOfFreedom, "Rank that the group adds to the final model.", view => view.Of.Df1, Why("df1"))
         .Number("df2", FactUnits.DegreesOfFreedom, "Residual degrees of freedom with the group in.", view => view.Of.Df2, Why("df2"))
-        .Text("basis", "The test on which the verdict rests.", view => view.Of.Basis)
+        .Word("basis", "The test on which the verdict rests.", FactWords.Bases, view => view.Of.Basis)
         .Text("basis_reason", "Why that test.", view => view.Of.BasisReason)
         .Number("p", FactUnits.P, "p of the basis test.", view => view.Of.P, Why("p"))
         .Number("p_adjusted", FactUnits.P, "The same, adjusted for the number of groups.", view => view.Of.PAdjusted, Why("p_adjusted"))
@@ -51,8 +51,8 @@ public static class ExclusionFacts
             view => view.Rejects(view.Of.Tests.Classical?.P) is bool classical ? view.Rejects(view.Of.P) is bool basis ? classical != basis : null : null,
             view => view.Of.Tests.Classical?.P is null ? view.NotTested("classical") : view.Why("p"))
         .Number("selective_p", FactUnits.P, "p given the rule that left the group out.", view => view.Of.Selective.P, view => view.Of.Selective.Why ?? view.Why("selective.p"))
-        .Text("verdict", "not_supported, supported, inconclusive or untestable.", view => view.Of.Verdict)
-        .Text("materiality", "shown_negligible, shown_material or not_shown.", view => view.Of.Materiality)
+        .Word("verdict", "What the test says of leaving the group out.", FactWords.Verdicts, view => view.Of.Verdict)
+        .Word("materiality", "What the interval says of the effect against the policy's bound.", FactWords.Materialities, view => view.Of.Materiality)
         .Text("reason", "What the verdict rests on, in words.", view => view.Of.Reason);
 
     private static FactFamily<ExclusionView> Effect(FactFamily<ExclusionView> family) => family
@@ -62,7 +62,7 @@ public static class ExclusionFacts
         .Number("effective_rows", FactUnits.Rows, "Independent rows that the data are worth for this question.", view => view.Of.EffectiveRows, Why("effective_rows"))
         .Number("negligible_p", FactUnits.P, "p of the null that the partial R² is at least the policy's bound.", view => view.Of.Negligible.P, Negligible("p"))
         .Number("negligible_p_adjusted", FactUnits.P, "The same, adjusted for the number of groups.", view => view.Of.Negligible.PAdjusted, Negligible("p_adjusted"))
-        .Number("power_at_bound", FactUnits.Share, "Power of the basis test when the partial R² is at the policy's bound.", view => view.Of.Power.AtBound, Power("at_bound"))
+        .Number("power_at_bound", FactUnits.Probability, "Power of the basis test when the partial R² is at the policy's bound.", view => view.Of.Power.AtBound, Power("at_bound"))
         .Number("rows_needed", FactUnits.Rows, "Rows, clusters or periods needed for the policy's power at the bound.", view => view.Of.Power.RowsNeeded, Power("rows_needed"));
 
     private static Func<ExclusionView, string> Why(string path) => view => view.Why(path);

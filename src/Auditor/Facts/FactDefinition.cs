@@ -16,7 +16,11 @@ public enum FactType
 /// <summary>A fact as the catalogue lists it: rules may name it, and messages may show it.</summary>
 /// <param name="Unit">One of <see cref="FactUnits"/>, or the name of what is counted; empty when there is none.</param>
 /// <param name="Meaning">One sentence.</param>
-public sealed record FactDefinition(About About, string Name, FactType Type, string Unit, string Meaning);
+public sealed record FactDefinition(About About, string Name, FactType Type, string Unit, string Meaning)
+{
+    /// <summary>The only words the fact can be, so that a misspelt one in a rule is noticed; empty for free text and other types.</summary>
+    public IReadOnlyList<string> Words { get; init; } = [];
+}
 
 /// <summary>Units that decide how a number is shown.</summary>
 public static class FactUnits
@@ -28,6 +32,9 @@ public static class FactUnits
 
     /// <summary>0 to 1, shown as a percentage.</summary>
     public const string Share = "share";
+
+    /// <summary>0 to 1, shown as it is.</summary>
+    public const string Probability = "probability";
 
     public const string Rows = "rows";
 

@@ -23,6 +23,15 @@ internal sealed class FactFamily<T>(About about)
     public FactFamily<T> Text(string name, string meaning, Func<T, string?> get, Func<T, string>? why = null) =>
         Add(FactType.Text, name, FactUnits.None, meaning, source => FactValue.Of(get(source), Reason(source, why)));
 
+    /// <summary>A text that is one of a few words.</summary>
+    public FactFamily<T> Word(string name, string meaning, IReadOnlyList<string> words, Func<T, string?> get, Func<T, string>? why = null)
+    {
+        Text(name, meaning, get, why);
+        var (definition, value) = _facts[^1];
+        _facts[^1] = (definition with { Words = words }, value);
+        return this;
+    }
+
     /// <inheritdoc cref="Number"/>
     public FactFamily<T> Flag(string name, string meaning, Func<T, bool?> get, Func<T, string>? why = null) =>
         Add(FactType.Flag, name, FactUnits.None, meaning, source => FactValue.Of(get(source), Reason(source, why)));
