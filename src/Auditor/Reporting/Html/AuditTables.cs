@@ -1,0 +1,91 @@
+using Auditor.Results;
+
+namespace Auditor.Reporting.Html;
+
+/// <summary>The tables that stand once on a page.</summary>
+internal static class AuditTables
+{
+    public static ReportTable Checks(AuditRecord record, double level) => ReportTable.Of(
+        "Checks of the final model’s residuals",
+        record.Checks,
+        new("Assumption", "text", check => Cell.Words(CheckWords.Spaced(check.Assumption))),
+        new("At this level it is", "text", check => Cell.Words(CheckWords.Conclusion(check.Rejects))),
+        new("Check", "text", check => Cell.Words(CheckWords.Title(check.Check))),
+        new("Statistic", "number", check => Cell.Number(check.Statistic, check.Why)),
+        new("on df", "number", check => Cell.Df(check.Df, check.Df2, check.Why ?? "Its distribution has no degrees of freedom.")),
+        new("p", "number", check => Cell.Probability(check.P, null, level, check.Why)));
+
+    public static ReportTable Influence(Influence influence)
+    {
+        const string leverageOne = "The row has leverage 1: the fit passes through it.";
+        return ReportTable.Of(
+            "Rows that move the fit most, by Cook’s distance",
+            influence.Largest,
+            new("Row", "number", row => Cell.Count(row.Row)),
+            new("Label", "name", row => Cell.Name(row.Label, "The row has no label.")),
+            new("Cook’s distance", "number", row => Cell.Number(row.CooksDistance, leverageOne)),
+            new("Residual, studentised without the row", "number", row => Cell.Number(row.StudentisedResidual, leverageOne)),
+            new("Leverage", "number", row => Cell.Number(row.Leverage)),
+            new("DFFITS", "number", row => Cell.Number(row.Dffits, leverageOne)));
+    }
+
+    public static ReportTable Collinearity(Collinearity collinearity) => ReportTable.Of(
+        "How far each term can be told from the others",
+        collinearity.Terms,
+        new("Term", "name", term => Cell.Name(term.Term)),
+        new("Columns", "number", term => Cell.Count(term.Df)),
+        new("Interval widened by (per column)", "number", term => Cell.Number(term.GvifScaled, "The term is aliased.")),
+        new("Generalised variance inflation", "number", term => Cell.Number(term.Gvif, "The term is aliased.")));
+
+    public static ReportTable Proportions(Collinearity collinearity) => ReportTable.Of(
+        "Condition indices and the coefficients whose variance they carry",
+        collinearity.VarianceProportions,
+        new("Condition index", "number", index => Cell.Number(index.ConditionIndex)),
+        new("Coefficients with half of their variance or more here", "text", index => Cell.Words(Carried(index))));
+
+    public static ReportTable Entangled(AuditRecord record, double level)
+    {
+        const string why = "It was not computed for this set.";
+        return ReportTable.Of(
+            "Groups that hide or replace each other",
+            record.Entangled,
+            new("Groups", "name", set => Cell.Name(string.Join(" + ", set.Groups))),
+            new("How", "text", set => Cell.Words(Kind(set.Kind))),
+            new("F", "number", set => Cell.Number(set.F, why)),
+            new("on df", "number", set => Cell.Df(set.Df1, set.Df2, why)),
+            new("p", "number", set => Cell.Probability(set.P, null, level, why)),
+            new("p, adjusted", "number", set => Cell.Probability(set.PAdjusted, null, level, why)));
+    }
+
+    public static ReportTable Claims(AuditRecord record) => ReportTable.Of(
+        "Figures of the report, recomputed",
+        record.Claims,
+        new("Figure", "name", claim => Cell.Name(claim.Claim)),
+        new("Outcome", "text", claim => Cell.Words(CheckWords.Spaced(claim.Outcome))),
+        new("As reported", "number", claim => new Cell(claim.Reported, null, "number", null)),
+        new("Recomputed", "number", claim => Cell.Number(claim.Recomputed, "The figure cannot be recomputed.")));
+
+    public static ReportTable Elimination(AuditRecord record, double level) => ReportTable.Of(
+        "The author’s path, each step tested in that step’s model",
+        record.Elimination,
+        new("Step", "number", step => Cell.Count(step.Step)),
+        new("Dropped", "name", step => Cell.Name(step.Drop)),
+        new("Author’s rule", "text", step => step.BreaksRule is bool breaks ? Cell.Words(breaks ? "broken" : "kept") : Cell.Missing(step.Why)),
+        new("F", "number", step => Cell.Number(step.F, step.Why)),
+        new("on df", "number", step => Cell.Df(step.Df1, step.Df2, step.Why)),
+        new("p", "number", step => Cell.Probability(step.P, null, level, step.Why)));
+
+    private static string Carried(VarianceProportions index)
+    {
+        const double half = 0.5;
+        string[] names = [.. index.Proportions.Where(pair => pair.Value >= half).Select(pair => $"{pair.Key} ({NumberText.Percent(pair.Value)})")];
+        return names.Length == 0 ? "no coefficient" : string.Join(", ", names);
+    }
+
+    private static string Kind(string kind) => kind switch
+    {
+        "suppressors" => "rejected together, none of them alone: each hides another",
+        "stand_ins" => "needed together, none of them alone: each can replace another",
+        _ => CheckWords.Spaced(kind),
+    };
+}

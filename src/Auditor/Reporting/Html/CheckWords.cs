@@ -1,0 +1,34 @@
+namespace Auditor.Reporting.Html;
+
+/// <summary>What residual checks and their assumptions are called.</summary>
+internal static class CheckWords
+{
+    private static readonly Dictionary<string, string> Titles = new()
+    {
+        ["breusch_pagan"] = "Breusch–Pagan, studentised",
+        ["breusch_pagan_original"] = "Breusch–Pagan, original form",
+        ["white"] = "White",
+        ["jarque_bera"] = "Jarque–Bera",
+        ["shapiro_wilk"] = "Shapiro–Wilk",
+        ["anderson_darling"] = "Anderson–Darling",
+        ["durbin_watson"] = "Durbin–Watson",
+        ["breusch_godfrey_1"] = "Breusch–Godfrey, lag 1",
+        ["breusch_godfrey_4"] = "Breusch–Godfrey, lags 1 to 4",
+        ["ljung_box_4"] = "Ljung–Box, lags 1 to 4",
+        ["unit_root_residual"] = "Unit root of the residual",
+        ["reset"] = "RESET, powers 2 and 3",
+        ["largest_residual"] = "Largest studentised residual, Bonferroni",
+        ["chow"] = "Chow, at the declared split",
+    };
+
+    public static string Title(string check) => Titles.GetValueOrDefault(check) ?? Spaced(check);
+
+    public static string Spaced(string name) => name.Replace('_', ' ');
+
+    public static string Conclusion(bool? rejects) => rejects switch
+    {
+        true => "contradicted",
+        false => "not contradicted",
+        null => "not checked",
+    };
+}

@@ -1,0 +1,23 @@
+using System.Globalization;
+using Auditor.Findings;
+
+namespace Auditor.Reporting.Html;
+
+/// <summary>A finding as the page shows it.</summary>
+/// <param name="Accepted">Who accepted it, until when and why; null when nobody did.</param>
+internal sealed record FindingPage(Finding Finding, string Severity, string Subject, string? Accepted)
+{
+    /// <summary>The gravest first, otherwise in the record's order.</summary>
+    public static IReadOnlyList<FindingPage> Of(AuditRecord record) =>
+        [.. record.Findings.OrderByDescending(finding => finding.Severity).Select(finding => Of(finding, record))];
+
+    private static FindingPage Of(Finding finding, AuditRecord record) => new(
+        finding,
+        OutcomeSentence.Word(finding.Severity),
+        record.Checks.Any(check => check.Check == finding.Subject) ? CheckWords.Title(finding.Subject) : finding.Subject,
+        finding.Accepted is { } acceptance ? Words(acceptance) : null);
+
+    private static string Words(Acceptance acceptance) => string.Create(
+        CultureInfo.InvariantCulture,
+        $"Accepted by {acceptance.ApprovedBy} on {acceptance.ApprovedOn:yyyy-MM-dd}, until {acceptance.Expires:yyyy-MM-dd}: {acceptance.Because}");
+}

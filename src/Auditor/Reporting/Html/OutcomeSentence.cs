@@ -1,0 +1,77 @@
+using Auditor.Findings;
+using Auditor.Results;
+
+namespace Auditor.Reporting.Html;
+
+/// <summary>The answer in one sentence, and what must be said beside it.</summary>
+internal static class OutcomeSentence
+{
+    public static string Of(AuditRecord record)
+    {
+        int all = record.Exclusions.Count;
+        int contradicted = record.Exclusions.Count(VerdictWords.Contradicted);
+        return (all, contradicted, record.Outcome) switch
+        {
+            (0, _, Outcomes.Findings) => "No group is declared as left out; other findings need attention.",
+            (0, _, _) => "No group is declared as left out, and no rule found anything to raise.",
+            (1, 1, _) => "The only exclusion is not supported by the data.",
+            (_, > 0, _) => $"{NumberText.Count(contradicted)} of {NumberText.Count(all)} exclusions {(contradicted == 1 ? "is" : "are")} not supported by the data.",
+            (_, _, Outcomes.Findings) => "No exclusion is contradicted by the data beyond the negligible, but there are findings to look at.",
+            (1, _, _) => "The only exclusion is supported by the data, and no rule found anything to raise.",
+            _ => $"All {NumberText.Count(all)} exclusions are supported by the data, and no rule found anything to raise.",
+        };
+    }
+
+    /// <summary>Groups that the first sentence does not count, named apart.</summary>
+    public static IReadOnlyList<string> Beside(AuditRecord record)
+    {
+        var sentences = new List<string>();
+        Add("Rejected, but shown to be negligible and so not counted", record.Exclusions.Where(VerdictWords.RejectedButNegligible));
+        Add("The data cannot say", record.Exclusions.Where(exclusion => exclusion.Verdict == Verdicts.Inconclusive));
+        Add("Cannot be tested", record.Exclusions.Where(exclusion => exclusion.Verdict == Verdicts.Untestable));
+        if (record.Exclusions.Count == 0)
+        {
+            sentences.Add("The outcome rests on the checks and on the report's own figures alone.");
+        }
+
+        return sentences;
+
+        void Add(string lead, IEnumerable<Exclusion> groups)
+        {
+            string[] names = [.. groups.Select(exclusion => exclusion.Group)];
+            if (names.Length > 0)
+            {
+                sentences.Add($"{lead}: {Listed(names)}.");
+            }
+        }
+    }
+
+    /// <summary>"1 high, 2 medium" of the findings nobody has accepted.</summary>
+    public static string Findings(AuditRecord record)
+    {
+        string[] counts =
+        [
+            .. Enum.GetValues<Severity>().OrderDescending()
+                .Select(severity => (severity, count: record.Findings.Count(finding => finding.Severity == severity && finding.Accepted is null)))
+                .Where(pair => pair.count > 0)
+                .Select(pair => $"{NumberText.Count(pair.count)} {Word(pair.severity)}"),
+        ];
+        return counts.Length == 0 ? "none open" : string.Join(", ", counts);
+    }
+
+    public static string Word(Severity severity) => severity switch
+    {
+        Severity.High => "high",
+        Severity.Medium => "medium",
+        Severity.Low => "low",
+        _ => "note",
+    };
+
+    private static string Listed(string[] names)
+    {
+        const int most = 5;
+        return names.Length <= most
+            ? string.Join("; ", names)
+            : $"{string.Join("; ", names[..most])}; and {NumberText.Count(names.Length - most)} more";
+    }
+}
