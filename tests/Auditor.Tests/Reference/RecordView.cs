@@ -1,0 +1,30 @@
+using System.Text.Json;
+
+namespace Auditor.Tests.Reference;
+
+/// <summary>The parts of an audit's record that comparisons need.</summary>
+internal sealed class RecordView(JsonDocument document)
+{
+    public JsonElement Root => document.RootElement;
+
+    public JsonElement FinalFit => Root.GetProperty("final_fit");
+
+    public JsonElement Collinearity => Root.GetProperty("collinearity");
+
+    public JsonElement AllLeftOut => Root.GetProperty("all_left_out");
+
+    public JsonElement Exclusion(string group) =>
+        Root.GetProperty("exclusions").Find("group", group) ?? throw new InvalidOperationException("The record has no group " + group);
+
+    public JsonElement? Coefficient(string label) => FinalFit.GetProperty("coefficients").Find("name", label);
+
+    public static JsonElement? Test(JsonElement exclusion, string test)
+    {
+        Assert.True(exclusion.GetProperty("tests").TryGetProperty(test, out JsonElement found), "no test " + test);
+        return found.ValueKind == JsonValueKind.Null ? null : found;
+    }
+
+    /// <summary>Names of the columns reported as adding nothing, of a fit or of a group.</summary>
+    public static IReadOnlyList<string> Aliased(JsonElement owner) =>
+        [.. owner.GetProperty("aliased").EnumerateArray().Select(column => column.Text("column"))];
+}
