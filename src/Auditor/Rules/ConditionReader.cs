@@ -14,7 +14,7 @@ internal sealed class ConditionReader(About about, Policy policy, YamlProblems p
     private static readonly string[] AllKeys = [.. Keys, "any"];
 
     /// <returns>Null when there is a problem.</returns>
-    public IReadOnlyList<Condition>? Read(YamlMap rule, string what)
+    public IReadOnlyList<Condition>? Read(RuleMap rule, string what)
     {
         if (rule.Get("when") is not YamlSequenceNode { Children.Count: > 0 } lines)
         {
@@ -34,11 +34,11 @@ internal sealed class ConditionReader(About about, Policy policy, YamlProblems p
 
     private Condition? Condition(YamlNode node)
     {
-        var map = YamlMap.Read(node, What, AllKeys, problems);
+        var map = RuleMap.Read(node, What, AllKeys, problems);
         return map is null ? null : map.Get("any") is { } any ? Any(map, any) : Test(map);
     }
 
-    private AnyCondition? Any(YamlMap map, YamlNode any)
+    private AnyCondition? Any(RuleMap map, YamlNode any)
     {
         if (map.Keys.Count > 1 || any is not YamlSequenceNode { Children.Count: > 0 } alternatives)
         {
@@ -46,12 +46,12 @@ internal sealed class ConditionReader(About about, Policy policy, YamlProblems p
             return null;
         }
 
-        return Complete(alternatives, node => YamlMap.Read(node, What, Keys, problems) is { } one ? Test(one) : null) is { } tests
+        return Complete(alternatives, node => RuleMap.Read(node, What, Keys, problems) is { } one ? Test(one) : null) is { } tests
             ? new AnyCondition(tests)
             : null;
     }
 
-    private FactCondition? Test(YamlMap map)
+    private FactCondition? Test(RuleMap map)
     {
         var name = map.Text("fact", What, problems);
         var comparisons = map.Keys.Where(ComparisonWords.Comparisons.ContainsKey).ToList();

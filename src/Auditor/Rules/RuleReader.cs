@@ -48,7 +48,7 @@ public static class RuleReader
 
     private static Rule? Rule(YamlNode row, Policy policy, YamlProblems problems)
     {
-        if (YamlMap.Read(row, "a rule", Keys, problems) is not { } map || map.Text("id", "a rule", problems) is not { } id)
+        if (RuleMap.Read(row, "a rule", Keys, problems) is not { } map || map.Text("id", "a rule", problems) is not { } id)
         {
             return null;
         }
@@ -66,7 +66,7 @@ public static class RuleReader
             : null;
     }
 
-    private static void CheckId(string id, YamlMap map, YamlProblems problems)
+    private static void CheckId(string id, RuleMap map, YamlProblems problems)
     {
         if (!id.All(letter => char.IsAsciiLetterLower(letter) || char.IsAsciiDigit(letter) || letter == '-'))
         {
@@ -74,7 +74,7 @@ public static class RuleReader
         }
     }
 
-    private static About? About(YamlMap map, string what, YamlProblems problems)
+    private static About? About(RuleMap map, string what, YamlProblems problems)
     {
         var word = map.Text("about", what, problems);
         var about = word is null ? null : AboutWords.Parse(word);
@@ -86,7 +86,7 @@ public static class RuleReader
         return about;
     }
 
-    private static Severity? Severity(YamlMap map, string what, YamlProblems problems)
+    private static Severity? Severity(RuleMap map, string what, YamlProblems problems)
     {
         var word = map.Text("severity", what, problems);
         if (word is null)
@@ -103,7 +103,7 @@ public static class RuleReader
         return null;
     }
 
-    private static MessageTemplate? Template(YamlMap map, string key, string what, About? about, Policy policy, YamlProblems problems)
+    private static MessageTemplate? Template(RuleMap map, string key, string what, About? about, Policy policy, YamlProblems problems)
     {
         if (map.Text(key, what, problems) is not { } text)
         {

@@ -15,11 +15,11 @@ internal sealed class YamlProblems(string file)
 }
 
 /// <summary>A mapping whose keys are known beforehand: any other key is a problem with the nearest known one.</summary>
-internal sealed class YamlMap
+internal sealed class RuleMap
 {
     private readonly Dictionary<string, YamlNode> _values = new(StringComparer.Ordinal);
 
-    private YamlMap(YamlNode node) => Node = node;
+    private RuleMap(YamlNode node) => Node = node;
 
     public YamlNode Node { get; }
 
@@ -27,7 +27,7 @@ internal sealed class YamlMap
 
     /// <param name="what">What the mapping describes, for messages.</param>
     /// <returns>Null when the node is no mapping.</returns>
-    public static YamlMap? Read(YamlNode node, string what, IReadOnlyList<string> known, YamlProblems problems)
+    public static RuleMap? Read(YamlNode node, string what, IReadOnlyList<string> known, YamlProblems problems)
     {
         if (node is not YamlMappingNode mapping)
         {
@@ -35,7 +35,7 @@ internal sealed class YamlMap
             return null;
         }
 
-        var map = new YamlMap(node);
+        var map = new RuleMap(node);
         foreach (var (key, value) in mapping.Children)
         {
             map.Take(key, value, what, known, problems);

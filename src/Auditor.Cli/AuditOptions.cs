@@ -1,0 +1,76 @@
+using System.CommandLine;
+using Auditor.Findings;
+
+namespace Auditor.Cli;
+
+/// <summary>What one audit is asked to do.</summary>
+/// <param name="FailOn">Findings of this severity or graver make the exit status 1; null: never.</param>
+/// <param name="MemoryBytes">Most memory that the data's columns may take; null: no limit declared.</param>
+internal sealed record AuditRequest(
+    string Declaration,
+    string OutputFolder,
+    string? PolicyFile,
+    string? RulesFolder,
+    string? DataRoot,
+    IReadOnlyList<string> Formats,
+    Severity? FailOn,
+    int Threads,
+    long? MemoryBytes,
+    long Seed,
+    bool Quiet);
+
+/// <summary>The options of an audit, the same after a declaration and after <c>demo</c>.</summary>
+internal sealed class AuditOptions
+{
+    private readonly Option<string?> _out = Text("--out", "DIR", "Folder for the report and the record (default: audit-out beside the declaration; demo: ./audit-out).");
+    private readonly Option<string?> _policy = Text("--policy", "FILE", "The firm's overrides of rules/policy.yaml.");
+    private readonly Option<string?> _acceptances = Text("--acceptances", "FILE", "Findings that a named approver has accepted (not built yet).");
+    private readonly Option<string?> _asOf = Text("--as-of", "DATE", "The day that decides expiry, YYYY-MM-DD in UTC (default: today, or SOURCE_DATE_EPOCH).");
+    private readonly Option<string?> _rules = Text("--rules", "DIR", "Replaces the rule folder; without its own policy.yaml the shipped one holds.");
+    private readonly Option<string?> _dataRoot = Text("--data-root", "DIR", "Folder that the data may lie in, besides the declaration's own.");
+    private readonly Option<string?> _formats = Text("--formats", "LIST", "Any of html,json (default: both).");
+    private readonly Option<string?> _failOn = Text("--fail-on", "SEVERITY", "high | medium | low | never (default: high).");
+    private readonly Option<string?> _threads = Text("--threads", "N", "Threads to use (default: one for each processor).");
+    private readonly Option<string?> _memory = Text("--memory", "SIZE", "Most memory for the data, such as 512M or 4G.");
+    private readonly Option<string?> _seed = Text("--seed", "N", "Seed of everything drawn at random, kept in the record (default 1).");
+    private readonly Option<bool> _quiet = new("--quiet") { Description = "Nothing on standard output." };
+    private readonly Option<bool> _verbose = new("--verbose") { Description = "Steps on standard error." };
+    private readonly Option<bool> _noProgress = new("--no-progress") { Description = "No progress on the terminal." };
+
+    public void AddTo(Command command)
+    {
+        Option[] all = [_out, _policy, _acceptances, _asOf, _rules, _dataRoot, _formats, _failOn, _threads, _memory, _seed, _quiet, _verbose, _noProgress];
+        foreach (var option in all)
+        {
+            command.Options.Add(option);
+        }
+    }
+
+    /// <summary>The request, or null with what is wrong added to the problems.</summary>
+    public AuditRequest? Read(ParseResult parsed, string declaration, string defaultOut, ICollection<string> problems)
+    {
+        var before = problems.Count;
+        if (parsed.GetValue(_acceptances) is not null)
+        {
+            problems.Add("--acceptances: not built yet");
+        }
+
+        OptionValues.Date("--as-of", parsed.GetValue(_asOf), problems);
+        var request = new AuditRequest(
+            declaration,
+            parsed.GetValue(_out) ?? defaultOut,
+            parsed.GetValue(_policy),
+            parsed.GetValue(_rules),
+            parsed.GetValue(_dataRoot),
+            OptionValues.Formats(parsed.GetValue(_formats), problems),
+            OptionValues.FailOn(parsed.GetValue(_failOn), problems),
+            (int)OptionValues.Whole("--threads", parsed.GetValue(_threads), Environment.ProcessorCount, 1, 1024, problems),
+            OptionValues.Size("--memory", parsed.GetValue(_memory), problems),
+            OptionValues.Whole("--seed", parsed.GetValue(_seed), 1, 0, long.MaxValue, problems),
+            parsed.GetValue(_quiet));
+        return problems.Count == before ? request : null;
+    }
+
+    private static Option<string?> Text(string name, string value, string description) =>
+        new(name) { HelpName = value, Description = description };
+}

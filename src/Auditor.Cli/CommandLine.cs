@@ -1,0 +1,112 @@
+using System.CommandLine;
+using System.Reflection;
+
+namespace Auditor.Cli;
+
+/// <summary>The commands and their options, as one table; what they do is elsewhere.</summary>
+internal sealed class CommandLine
+{
+    private const string Program = "run-audit.sh";
+
+    private readonly Argument<string?> _declaration = new("DECLARATION.yaml")
+    {
+        Description = "The declaration of one model.",
+        Arity = ArgumentArity.ZeroOrOne,
+    };
+
+    private readonly AuditOptions _rootOptions = new();
+    private readonly AuditOptions _demoOptions = new();
+    private readonly Command _demo = new("demo", "Audit the bundled demo and say where the report is.");
+    private readonly Command _new = new("new", "Write a commented first declaration (not built yet).") { TreatUnmatchedTokensAsErrors = false };
+    private readonly Command _rules = new("rules", "List the rules and facts, or explain one.");
+    private readonly Argument<string?> _ruleId = new("ID") { Description = "The rule to explain.", Arity = ArgumentArity.ZeroOrOne };
+    private readonly Command _selfTest = new("self-test", "Certified and reference cases on this machine (not built yet).") { TreatUnmatchedTokensAsErrors = false };
+    private readonly RootCommand _root = new("Audits a declared regression model and the terms it left out, from its data.");
+
+    private CommandLine()
+    {
+        _root.Arguments.Add(_declaration);
+        _rootOptions.AddTo(_root);
+        _demoOptions.AddTo(_demo);
+        _rules.Arguments.Add(_ruleId);
+        foreach (var command in new[] { _demo, _new, _rules, _selfTest })
+        {
+            _root.Subcommands.Add(command);
+        }
+    }
+
+    /// <summary>The version that stands in every record.</summary>
+    public static string Version => typeof(CommandLine).Assembly.GetCustomAttribute<AssemblyInformationalVersionAttribute>()!.InformationalVersion;
+
+    public static int Run(string[] args) => new CommandLine().Dispatch(args);
+
+    private int Dispatch(string[] args)
+    {
+        if (args is ["--version"])
+        {
+            Console.Out.WriteLine(Version);
+            return ExitStatus.Audited;
+        }
+
+        var parsed = _root.Parse(args, new ParserConfiguration { ResponseFileTokenReplacer = null });
+        if (args.Any(arg => arg is "--help" or "-h" or "-?"))
+        {
+            return parsed.Invoke(new InvocationConfiguration { EnableDefaultExceptionHandler = false });
+        }
+
+        return Misplaced(args, parsed) is string misplaced ? Unusable([misplaced])
+            : parsed.Errors.Count > 0 ? Unusable(parsed.Errors.Select(error => error.Message))
+            : Run(parsed);
+    }
+
+    private int Run(ParseResult parsed)
+    {
+        var command = parsed.CommandResult.Command;
+        if (command == _demo)
+        {
+            return AuditOne(parsed, _demoOptions, BundledFiles.DemoDeclaration, Path.Combine(Environment.CurrentDirectory, "audit-out"));
+        }
+
+        if (command == _rules)
+        {
+            return RulesCommand.Run(parsed.GetValue(_ruleId));
+        }
+
+        if (command != _root)
+        {
+            return Unusable([$"{command.Name}: not built yet"]);
+        }
+
+        var declaration = parsed.GetValue(_declaration);
+        if (declaration is null || declaration.StartsWith('-'))
+        {
+            return Unusable([declaration is null ? "name a declaration, or say demo" : $"'{declaration}' is not an option of this program"]);
+        }
+
+        var folder = Path.GetDirectoryName(Path.GetFullPath(declaration)) ?? Environment.CurrentDirectory;
+        return AuditOne(parsed, _rootOptions, declaration, Path.Combine(folder, "audit-out"));
+    }
+
+    private static int AuditOne(ParseResult parsed, AuditOptions options, string declaration, string defaultOut)
+    {
+        var problems = new List<string>();
+        return options.Read(parsed, declaration, defaultOut, problems) is { } request ? AuditCommand.Run(request) : Unusable(problems);
+    }
+
+    /// <summary>An option or file before a command would be dropped in silence: options stand after the word they belong to.</summary>
+    private string? Misplaced(string[] args, ParseResult parsed) =>
+        parsed.CommandResult.Command is var command && command != _root && args[0] != command.Name
+            ? $"'{args[0]}' stands before '{command.Name}'; options stand after the word they belong to"
+            : null;
+
+    private static int Unusable(IEnumerable<string> problems)
+    {
+        foreach (var problem in problems)
+        {
+            Console.Error.WriteLine("error: " + problem);
+        }
+
+        Console.Error.WriteLine($"See {Program} --help.");
+        return ExitStatus.Unusable;
+    }
+}

@@ -1,0 +1,95 @@
+using System.Security.Cryptography;
+using Auditor.Data;
+using Auditor.Declaration;
+
+namespace Auditor.Cli;
+
+/// <summary>The data file that a declaration names, found, hashed, its columns held against the declaration's.</summary>
+internal sealed record DataFile(IDataSource Source, string Sha256)
+{
+    public static Reading<DataFile> Find(DeclarationReading reading, AuditRequest request)
+    {
+        var line = reading.Declaration?.Data.SourceLine;
+        if (reading.Sources is not [var source])
+        {
+            return reading.Sources.Count == 0 ? Reading<DataFile>.Failed() : Failed(request, line, "data.source: a list of files is not built yet");
+        }
+
+        var folder = Path.GetDirectoryName(Path.GetFullPath(request.Declaration))!;
+        var path = Path.GetFullPath(Path.Combine(folder, source));
+        var fault = Fault(path, source, folder, request);
+        return fault is null ? Open(path, source, line, reading, request) : Failed(request, line, "data.source: " + fault);
+    }
+
+    private static string? Fault(string path, string source, string folder, AuditRequest request)
+    {
+        if (!Within(path, folder) && !(request.DataRoot is { } root && Within(path, Path.GetFullPath(root))))
+        {
+            return $"'{source}' lies outside the declaration's folder; allow it with --data-root DIR";
+        }
+
+        if (Directory.Exists(path))
+        {
+            return $"'{source}' is a folder; a folder of files is not built yet";
+        }
+
+        if (!File.Exists(path))
+        {
+            return $"the file '{source}' does not exist{NearestFile(path)}";
+        }
+
+        if (DelimitedFormat.FromFileName(path) is null)
+        {
+            return path.EndsWith(".parquet", StringComparison.OrdinalIgnoreCase)
+                ? "Parquet is not built yet"
+                : $"'{source}' is not a kind of file this program reads: .csv, .tsv, .csv.gz or .tsv.gz";
+        }
+
+        return request.MemoryBytes is long most && new FileInfo(path).Length > most
+            ? $"'{source}' is larger than --memory allows; data that do not fit in memory are not built yet"
+            : null;
+    }
+
+    private static string NearestFile(string path) =>
+        Path.GetDirectoryName(path) is { } folder && Directory.Exists(folder)
+            ? Yaml.NearestName.DidYouMean(Path.GetFileName(path), Directory.GetFiles(folder).Select(file => Path.GetFileName(file)))
+            : "";
+
+    private static Reading<DataFile> Open(string path, string source, int? line, DeclarationReading reading, AuditRequest request)
+    {
+        try
+        {
+            var hash = Hash(path);
+            if (reading.Declaration?.Data.Sha256 is { } declared && !declared.Equals(hash, StringComparison.OrdinalIgnoreCase))
+            {
+                return Failed(request, line, $"data.sha256: the file is another one: declared {declared}, found {hash}");
+            }
+
+            var data = new CsvSource(source, () => File.OpenRead(path), DelimitedFormat.FromFileName(path)!);
+            var columns = data.ReadColumnNames();
+            var problems = columns.Value is { } names ? ColumnCheck.Unknown(request.Declaration, reading.Mentions, names) : columns.Problems;
+            return problems.Count > 0 ? Reading<DataFile>.Failed(problems) : Reading<DataFile>.Of(new DataFile(data, hash));
+        }
+        catch (Exception fault) when (fault is IOException or UnauthorizedAccessException)
+        {
+            return Failed(request, line, $"data.source: '{source}' cannot be read: {fault.Message}");
+        }
+    }
+
+    private static string Hash(string path)
+    {
+        using var stream = File.OpenRead(path);
+        return Convert.ToHexStringLower(SHA256.HashData(stream));
+    }
+
+    /// <summary>Links count as where they lead.</summary>
+    private static bool Within(string path, string folder)
+    {
+        var target = File.ResolveLinkTarget(path, returnFinalTarget: true)?.FullName ?? path;
+        var relative = Path.GetRelativePath(folder, target);
+        return relative != ".." && !relative.StartsWith(".." + Path.DirectorySeparatorChar, StringComparison.Ordinal) && !Path.IsPathRooted(relative);
+    }
+
+    private static Reading<DataFile> Failed(AuditRequest request, int? line, string message) =>
+        Reading<DataFile>.Failed(new Problem(request.Declaration, line, message));
+}

@@ -1,0 +1,36 @@
+using System.Security.Cryptography;
+using System.Text;
+
+namespace Auditor.Cli;
+
+/// <summary>A text file read whole: strict UTF-8, with the hash of its bytes.</summary>
+internal sealed record FileText(string Text, string Sha256)
+{
+    public static Reading<FileText> Read(string path)
+    {
+        try
+        {
+            var bytes = File.ReadAllBytes(path);
+            return Reading<FileText>.Of(new FileText(new UTF8Encoding(false, true).GetString(bytes), Hash(bytes)));
+        }
+        catch (DecoderFallbackException)
+        {
+            return Reading<FileText>.Failed(new Problem(path, null, "the file is not UTF-8 text"));
+        }
+        catch (Exception fault) when (fault is IOException or UnauthorizedAccessException or ArgumentException)
+        {
+            return Reading<FileText>.Failed(new Problem(path, null, FileFault.Of(path, fault)));
+        }
+    }
+
+    public static string Hash(ReadOnlySpan<byte> bytes) => Convert.ToHexStringLower(SHA256.HashData(bytes));
+}
+
+/// <summary>Why a file cannot be read, in words.</summary>
+internal static class FileFault
+{
+    public static string Of(string path, Exception fault) =>
+        Directory.Exists(path) ? "this is a folder, a file is needed"
+        : fault is FileNotFoundException or DirectoryNotFoundException ? "the file does not exist"
+        : "the file cannot be read: " + fault.Message;
+}

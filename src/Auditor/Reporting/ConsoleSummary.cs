@@ -1,0 +1,27 @@
+using System.Text;
+using Auditor.Reporting.Html;
+
+namespace Auditor.Reporting;
+
+/// <summary>The short verdict a person wants on the screen: one sentence, a line for each exclusion, what else was found.</summary>
+public static class ConsoleSummary
+{
+    private const int WidestName = 32;
+
+    public static string Of(AuditRecord record)
+    {
+        var text = new StringBuilder();
+        text.Append(record.Model.Title ?? record.Model.Id).Append('\n');
+        text.Append(OutcomeSentence.Of(record)).Append('\n');
+        var name = Math.Min(WidestName, record.Exclusions.Select(exclusion => exclusion.Group.Length).DefaultIfEmpty(0).Max());
+        foreach (var exclusion in record.Exclusions)
+        {
+            text.Append("  ").Append(exclusion.Group.PadRight(name)).Append("  ")
+                .Append(VerdictWords.Of(exclusion).Word).Append(". ").Append(exclusion.Reason).Append('\n');
+        }
+
+        text.Append("Findings: ").Append(OutcomeSentence.Findings(record)).Append(".\n");
+        text.Append("Statistical evidence, not approval: the firm's policy, local rules and qualified people decide.\n");
+        return text.ToString();
+    }
+}
