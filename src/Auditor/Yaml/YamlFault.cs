@@ -1,6 +1,5 @@
 using System.Globalization;
 using YamlDotNet.Core;
-using YamlDotNet.Core.Events;
 
 namespace Auditor.Yaml;
 
@@ -32,12 +31,6 @@ internal static class YamlFault
         }
     }
 
-    public static void Explain(string yaml, ParsingEvent? last, Mark? openBracket, ProblemList problems)
-    {
-        var at = openBracket ?? last?.End ?? Mark.Empty;
-        Explain(yaml, new YamlException(at, at, "it ends unexpectedly."), openBracket, problems);
-    }
-
     private static string Unclosed(Mark open) =>
         string.Create(CultureInfo.InvariantCulture, $"the bracket that opens in column {open.Column} is not closed, or what stands in it is not YAML");
 
@@ -64,8 +57,7 @@ internal static class YamlFault
     /// <summary>What is wrong outside brackets.</summary>
     private static string PlainStructure(YamlException fault) =>
         Says(fault, "found invalid mapping") ? "a second colon on a line, or a deeper line under a key that already has a value; put text with a colon in quotation marks"
-        : Says(fault, "did not find expected key") ? "expected a key here; is the indentation the same as above?"
-        : Says(fault, "expected '-'") ? "expected the next '-' of the list; is the indentation the same as above, with a space after the '-'?"
+        : Says(fault, "did not find expected key") || Says(fault, "expected '-'") ? "expected a key, or '-' and a space; is the indentation the same as above?"
         : fault.Message;
 
     private static bool Says(YamlException fault, string words) => fault.Message.Contains(words, StringComparison.Ordinal);

@@ -16,8 +16,7 @@ internal static class YamlFile
             return null;
         }
 
-        var parser = new Parser(new Scanner(new StringReader(yaml), skipComments: true));
-        var tree = new YamlTree(parser, problems);
+        var tree = new YamlTree(new LocatedParser(yaml), problems);
         try
         {
             return tree.ReadDocument();
@@ -25,13 +24,7 @@ internal static class YamlFile
         catch (YamlException fault)
         {
             YamlFault.Explain(yaml, fault, tree.OpenBracket, problems);
+            return null;
         }
-        catch (InvalidOperationException)
-        {
-            // The parser throws this without a position at a bracket that is not closed before a line with a colon.
-            YamlFault.Explain(yaml, parser.Current, tree.OpenBracket, problems);
-        }
-
-        return null;
     }
 }

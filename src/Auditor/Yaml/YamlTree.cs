@@ -21,14 +21,13 @@ internal sealed class YamlTree(IParser parser, ProblemList problems)
     public YamlValue? ReadDocument()
     {
         parser.Consume<StreamStart>();
-        if (parser.Accept<StreamEnd>(out _))
+        var root = parser.TryConsume<DocumentStart>(out _) ? Node(1) : null;
+        if (root is null or YamlScalar { IsPlain: true, Text: "" })
         {
             problems.Add(1, "the file is empty");
             return null;
         }
 
-        parser.Consume<DocumentStart>();
-        var root = Node(1);
         parser.Consume<DocumentEnd>();
         if (parser.Accept<DocumentStart>(out var second))
         {

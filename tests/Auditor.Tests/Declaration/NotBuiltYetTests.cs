@@ -1,0 +1,60 @@
+using Auditor.Declaration;
+
+namespace Auditor.Tests.Declaration;
+
+public sealed class NotBuiltYetTests
+{
+    [Fact]
+    public void What_cannot_be_computed_is_named_with_its_line() => Assert.Equal(
+        [
+            "full.yaml:13: not built yet: columns of kind date",
+            "full.yaml:24: not built yet: data.time, the order of rows",
+            "full.yaml:25: not built yet: data.period",
+            "full.yaml:26: not built yet: data.unit",
+            "full.yaml:27: not built yet: data.serial_lag",
+            "full.yaml:28: not built yet: data.split",
+            "full.yaml:29: not built yet: data.cluster",
+            "full.yaml:31: not built yet: data.segments",
+            "full.yaml:43: not built yet: spline terms",
+            "full.yaml:44: not built yet: bins terms",
+            "full.yaml:46: not built yet: step terms",
+            "full.yaml:47: not built yet: pulse terms",
+            "full.yaml:55: not built yet: season terms",
+            "full.yaml:56: not built yet: trend terms",
+            "full.yaml:58: not built yet: ratio terms",
+            "full.yaml:58: not built yet: minus terms",
+            "full.yaml:60: not built yet: winsorise terms",
+            "full.yaml:60: not built yet: cap terms",
+            "full.yaml:63: not built yet: moving_average terms",
+            "full.yaml:64: not built yet: lag terms",
+            "full.yaml:64: not built yet: change terms",
+        ],
+        NotBuiltYet.In(DeclarationReader.Read(FullDeclaration.Yaml, "full.yaml").Declaration!).Select(problem => problem.ToString()));
+
+    [Theory]
+    [InlineData("frequency")]
+    [InlineData("sampling")]
+    public void Two_kinds_of_weights_are_refused(string kind)
+    {
+        var declaration = Declared.Good("data: {source: leases.csv, weights: {column: w, kind: " + kind + "}}");
+
+        Assert.Equal(["lease.yaml:3: not built yet: weights of kind " + kind], NotBuiltYet.In(declaration).Select(problem => problem.ToString()));
+    }
+
+    [Fact]
+    public void The_files_own_order_and_nested_terms_are_found_too()
+    {
+        var declaration = Declared.Good("data: {source: leases.csv, time: {file_order: true}}", "response: {log: {lag: {of: {lag: {of: y, by: 1}}, by: 1}}}");
+
+        Assert.Equal(
+            ["lease.yaml:3: not built yet: data.time, the order of rows", "lease.yaml:4: not built yet: lag terms"],
+            NotBuiltYet.In(declaration).Select(problem => problem.ToString()));
+    }
+
+    [Fact]
+    public void What_is_built_passes() => Assert.Empty(NotBuiltYet.In(Declared.Good(
+        "data: {source: leases.csv, weights: {column: w, kind: precision}, columns: {region: {reference: north}}, keep: [{column: a, equals: 1}]}",
+        "final_model: {terms: [region, {log: a}, {product: [region, a]}, {power: {of: a, exponent: 3}}, {polynomial: {of: b, degree: 2}}, {indicator: {of: c, equals: 1}}]}",
+        "elimination: {rule: {drop_above: 0.05}}",
+        "reported: {f: 1.0}")));
+}
