@@ -43,7 +43,7 @@ public static class ExclusionFacts
         .Word("basis", "The test on which the verdict rests.", FactWords.Bases, view => view.Of.Basis)
         .Text("basis_reason", "Why that test.", view => view.Of.BasisReason)
         .Number("p", FactUnits.P, "p of the basis test.", view => view.Of.P, Why("p"))
-        .Number("p_adjusted", FactUnits.P, "The same, adjusted for the number of groups.", view => view.Of.PAdjusted, Why("p_adjusted"))
+        .Number("p_adjusted", FactUnits.P, "p of the basis test, adjusted for the number of groups.", view => view.Of.PAdjusted, Why("p_adjusted"))
         .Flag("rejects", "p is at most the policy's significance.", view => view.Rejects(view.Of.P), Why("p"))
         .Flag("rejects_adjusted", "p_adjusted is at most the policy's significance.", view => view.Rejects(view.Of.PAdjusted), Why("p_adjusted"))
         .Number("classical_p", FactUnits.P, "p of the classical partial F test.", view => view.Of.Tests.Classical?.P, view => view.NotTested("classical"))
@@ -61,7 +61,7 @@ public static class ExclusionFacts
         .Number("partial_r_squared_upper", FactUnits.PartialRSquared, "Upper limit of the basis interval.", view => view.Of.PartialRSquared.BasisUpper, Effect("basis_upper"))
         .Number("effective_rows", FactUnits.Rows, "Independent rows that the data are worth for this question.", view => view.Of.EffectiveRows, Why("effective_rows"))
         .Number("negligible_p", FactUnits.P, "p of the null that the partial R² is at least the policy's bound.", view => view.Of.Negligible.P, Negligible("p"))
-        .Number("negligible_p_adjusted", FactUnits.P, "The same, adjusted for the number of groups.", view => view.Of.Negligible.PAdjusted, Negligible("p_adjusted"))
+        .Number("negligible_p_adjusted", FactUnits.P, "negligible_p, adjusted for the number of groups.", view => view.Of.Negligible.PAdjusted, Negligible("p_adjusted"))
         .Number("power_at_bound", FactUnits.Probability, "Power of the basis test when the partial R² is at the policy's bound.", view => view.Of.Power.AtBound, Power("at_bound"))
         .Number("rows_needed", FactUnits.Rows, "Rows, clusters or periods needed for the policy's power at the bound.", view => view.Of.Power.RowsNeeded, Power("rows_needed"));
 
