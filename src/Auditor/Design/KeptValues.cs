@@ -1,5 +1,3 @@
-using Auditor.Numerics;
-
 namespace Auditor.Design;
 
 /// <summary>What a data-dependent transform takes from the kept rows: figures of the values that exist there, unweighted.</summary>
