@@ -117,8 +117,8 @@ public sealed class DataFrameTests
 
         Assert.Equal(
             [
-                "leases: row 2, column x: found \"Infinity\", expected a finite number; declare x with kind: levels if its cells are names, or put the text under missing if it means no value",
-                "leases: row 2, column n: found \"b\", expected a finite number; declare n with kind: levels if its cells are names, or put the text under missing if it means no value",
+                "leases: row 2, column x: found 'Infinity', expected a finite number; declare x with kind: levels if its cells are names, or put the text under missing if it means no value",
+                "leases: row 2, column n: found 'b', expected a finite number; declare n with kind: levels if its cells are names, or put the text under missing if it means no value",
             ],
             CsvText.Words(source.Read([new ColumnRequest("x", null), new ColumnRequest("n", ColumnKind.Number)], [])));
         Assert.Equal(["leases: column age is not in the data frame"], CsvText.Words(source.Read([new ColumnRequest("age", null)], [])));

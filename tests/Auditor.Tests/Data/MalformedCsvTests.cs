@@ -12,15 +12,15 @@ public sealed class MalformedCsvTests
     [InlineData("a,b\n", "leases.csv: found column names and no data rows, expected at least one row")]
     [InlineData("a,b\n\n\n", "leases.csv: found column names and no data rows, expected at least one row")]
     [InlineData("a,,b\n1,2,3\n", "leases.csv:1: column 2 of 3 has no name in the header")]
-    [InlineData("a,b,a\n1,2,3\n", "leases.csv:1: the header names \"a\" more than once, in columns 1 and 3")]
+    [InlineData("a,b,a\n1,2,3\n", "leases.csv:1: the header names 'a' more than once, in columns 1 and 3")]
     [InlineData("a,b\n1,2\n3\n", "leases.csv:3: row 2: found 1 field, expected 2 as in the header")]
     [InlineData("a,b\n1,2,3\n", "leases.csv:2: row 1: found 3 fields, expected 2 as in the header")]
     [InlineData("a,b\n1,2\n\n3,4\n", "leases.csv:3: row 2: found 1 field, expected 2 as in the header")]
     [InlineData("a,b\n\"x\ny\",2\n3\n", "leases.csv:4: row 2: found 1 field, expected 2 as in the header")]
-    [InlineData("a,b\n5\" pipe,1\n6\" pipe,2\n", "leases.csv:2: row 1: found a quotation mark in the field \"5\" pipe,1\\n6\" pipe\", expected the whole field between two marks and marks inside doubled")]
-    [InlineData("a,b\n\"x\"y,1\n", "leases.csv:2: row 1: found a quotation mark in the field \"\"x\"y\", expected the whole field between two marks and marks inside doubled")]
-    [InlineData("a,b\n1,2\n\"x,1\n3,4\n", "leases.csv:3: row 2: found a quotation mark in the field \"\"x,1\\n3,4\\n\", expected the whole field between two marks and marks inside doubled")]
-    [InlineData("\"a,b\n1,2\n", "leases.csv:1: found a quotation mark in the field \"\"a,b\\n1,2\\n\", expected the whole field between two marks and marks inside doubled")]
+    [InlineData("a,b\n5\" pipe,1\n6\" pipe,2\n", "leases.csv:2: row 1: found a quotation mark in the field '5\" pipe,1\\n6\" pipe', expected the whole field between two marks and marks inside doubled")]
+    [InlineData("a,b\n\"x\"y,1\n", "leases.csv:2: row 1: found a quotation mark in the field '\"x\"y', expected the whole field between two marks and marks inside doubled")]
+    [InlineData("a,b\n1,2\n\"x,1\n3,4\n", "leases.csv:3: row 2: found a quotation mark in the field '\"x,1\\n3,4\\n', expected the whole field between two marks and marks inside doubled")]
+    [InlineData("\"a,b\n1,2\n", "leases.csv:1: found a quotation mark in the field '\"a,b\\n1,2\\n', expected the whole field between two marks and marks inside doubled")]
     public void Says_where_what_was_found_and_what_expected(string text, string words) =>
         Assert.Equal([words], CsvText.Words(CsvText.ReadAll(text)));
 
@@ -36,7 +36,7 @@ public sealed class MalformedCsvTests
         var reading = CsvText.Read($"id,price\n1,\n2,{cell}\n", new ColumnRequest("price", kind));
 
         Assert.Equal(
-            [$"leases.csv:3: row 2, column price: found \"{cell}\", expected {expected}; declare price with kind: levels if its cells are names, or put the text under missing if it means no value"],
+            [$"leases.csv:3: row 2, column price: found '{cell}', expected {expected}; declare price with kind: levels if its cells are names, or put the text under missing if it means no value"],
             CsvText.Words(reading));
     }
 
@@ -67,8 +67,8 @@ public sealed class MalformedCsvTests
 
         Assert.Equal(3, words.Length);
         Assert.StartsWith("leases.csv:2: row 1: found 1 field", words[0], StringComparison.Ordinal);
-        Assert.StartsWith("leases.csv:4: row 3, column a: found \"x\"", words[1], StringComparison.Ordinal);
-        Assert.StartsWith("leases.csv:5: row 4, column b: found \"y\"", words[2], StringComparison.Ordinal);
+        Assert.StartsWith("leases.csv:4: row 3, column a: found 'x'", words[1], StringComparison.Ordinal);
+        Assert.StartsWith("leases.csv:5: row 4, column b: found 'y'", words[2], StringComparison.Ordinal);
     }
 
     [Fact]
@@ -76,7 +76,7 @@ public sealed class MalformedCsvTests
     {
         var words = CsvText.Words(CsvText.Read("x\n" + new string('a', 500) + "\n", new ColumnRequest("x", ColumnKind.Number)));
 
-        Assert.Contains("found \"" + new string('a', 40) + "…\", expected", Assert.Single(words), StringComparison.Ordinal);
+        Assert.Contains("found '" + new string('a', 40) + "…', expected", Assert.Single(words), StringComparison.Ordinal);
     }
 
     [Fact]
