@@ -1,3 +1,4 @@
+using Auditor.Numerics.Collinearity;
 using Auditor.Numerics.Distributions;
 using Auditor.Numerics.Factor;
 using Auditor.Numerics.SecondPass;
@@ -22,7 +23,8 @@ public sealed class Fit
         Sigma = ResidualDf > 0 ? Math.Sqrt(Rss / ResidualDf) : null;
         StandardErrors = Sigma is double sigma ? [.. UnscaledErrors(final).Select(error => error * sigma)] : null;
         TrustworthyDigits = Digits.Of(pass.Coefficients, StandardErrors);
-        ConditionNumber = ConditionIndices.Of(final).DefaultIfEmpty(1).Max();
+        Condition = ConditionIndices.Of(final);
+        ConditionNumber = Condition.Indices.DefaultIfEmpty(1).Max();
     }
 
     /// <summary>Design columns of the coefficients, in order; r of them.</summary>
@@ -49,6 +51,8 @@ public sealed class Fit
 
     /// <summary>Decimal digits of the least certain coefficient that a change in the last bit of the data leaves.</summary>
     public double TrustworthyDigits { get; }
+
+    public ConditionIndices Condition { get; }
 
     /// <summary>Largest scaled condition index: columns as declared at unit length, the intercept included.</summary>
     public double ConditionNumber { get; }

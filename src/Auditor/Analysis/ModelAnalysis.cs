@@ -1,7 +1,6 @@
 using Auditor.Declaration;
 using Auditor.Design;
 using Auditor.Facts;
-using Auditor.Numerics.Factor;
 using Auditor.Rows;
 using Auditor.Rules;
 
@@ -34,7 +33,7 @@ internal static class ModelAnalysis
             AllLeftOut.Of(model, fits.Common, policy, sampling),
             NotYet.ResidualChecks(),
             NotYet.Influence([]),
-            NotYet.Collinearity(ConditionIndices.Of(main.Final))));
+            CollinearityFigures.Of(main)));
     }
 
     private static Problem NoRows(ModelDeclaration declaration, bool common) => new(

@@ -32,8 +32,6 @@ internal static class NotYet
 
     public static Influence Influence(IReadOnlyList<int> leverageOne) => new(leverageOne, []) { Why = Why };
 
-    public static Collinearity Collinearity(IReadOnlyList<double> conditionIndices) => new([], conditionIndices, []) { Why = Why };
-
     public static IReadOnlyList<ClaimResult> Claims(ModelDeclaration declaration)
     {
         var claims = new List<ClaimResult>();
