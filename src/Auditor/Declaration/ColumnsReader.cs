@@ -11,7 +11,7 @@ internal static class ColumnsReader
     public static IReadOnlyDictionary<string, ColumnDeclaration> Read(Place place, ColumnNames columns)
     {
         var declared = new Dictionary<string, ColumnDeclaration>(StringComparer.Ordinal);
-        if (place.Node is not YamlMap map)
+        if (place.Node is not MapValue map)
         {
             if (!place.IsNothing)
             {
@@ -32,9 +32,9 @@ internal static class ColumnsReader
         return declared;
     }
 
-    private static ColumnDeclaration? Column(YamlEntry entry, Place all, ColumnNames columns)
+    private static ColumnDeclaration? Column(MapEntry entry, Place all, ColumnNames columns)
     {
-        var name = all with { Node = new YamlScalar(entry.Key, IsPlain: false, entry.Line) };
+        var name = all with { Node = new TextValue(entry.Key, IsPlain: false, entry.Line) };
         var mention = columns.Read(name, "data.columns");
         var place = all with { Node = entry.Value, Path = all.Path + "." + entry.Key };
         if (Keys.Of(place, Known) is not { } keys)

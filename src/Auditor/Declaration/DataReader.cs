@@ -35,7 +35,7 @@ internal sealed partial class DataReader(ColumnNames columns)
 
     private static IReadOnlyList<string> ReadSources(Place place)
     {
-        if (place.Node is not YamlList)
+        if (place.Node is not ListValue)
         {
             return place.Text("a file, a list of files or a folder") is { } one ? [one] : [];
         }
@@ -45,7 +45,7 @@ internal sealed partial class DataReader(ColumnNames columns)
 
     private static string? Sha256(Place place)
     {
-        if (place.Node is YamlScalar { Text: var text } && Hash().IsMatch(text))
+        if (place.Node is TextValue { Text: var text } && Hash().IsMatch(text))
         {
             return text.ToLowerInvariant();
         }

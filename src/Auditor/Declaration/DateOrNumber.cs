@@ -11,7 +11,7 @@ internal sealed record DateOrNumber(string Text, bool IsDate, double Value)
 
     public static DateOrNumber? Read(Place place)
     {
-        if (place.Node is not YamlScalar { Text: var text })
+        if (place.Node is not TextValue { Text: var text })
         {
             place.Refuse(Expected);
             return null;

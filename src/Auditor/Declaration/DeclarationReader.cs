@@ -47,7 +47,7 @@ public static class DeclarationReader
     private static void RequireVersion(Keys keys)
     {
         if (keys.Required("audit", "audit: 1, the version of this format") is { } version
-            && version.Node is not YamlScalar { Text: Version })
+            && version.Node is not TextValue { Text: Version })
         {
             version.Refuse("1, the only version of this format");
         }

@@ -18,7 +18,7 @@ internal static class FinalModelReader
         var intercept = keys.Optional("intercept") is not { } constant || constant.TrueOrFalse() != false;
         var list = keys.Required("terms", "a list of terms, which may be empty when there is an intercept");
         var terms = list?.Items("terms") is { } items ? items.Select(new TermReader(columns, Where).Read).OfType<Term>().ToList() : [];
-        if (!intercept && list is { IsNothing: true } or { Node: YamlList { Items.Count: 0 } })
+        if (!intercept && list is { IsNothing: true } or { Node: ListValue { Items.Count: 0 } })
         {
             keys.Add("a model without an intercept needs at least one term");
         }

@@ -51,7 +51,7 @@ internal sealed class KeepReader(ColumnNames columns)
 
     private static bool True(Place place)
     {
-        if (place.Node is YamlScalar { Text: "true" })
+        if (place.Node is TextValue { Text: "true" })
         {
             return true;
         }

@@ -42,7 +42,7 @@ internal static class LeftOutReader
     }
 
     private static string Path(Place item, int number) =>
-        item.Node is YamlMap map && map.Entries.FirstOrDefault(entry => entry.Key == "group")?.Value is YamlScalar { Text.Length: > 0 } name
+        item.Node is MapValue map && map.Entries.FirstOrDefault(entry => entry.Key == "group")?.Value is TextValue { Text.Length: > 0 } name
             ? Where(name.Text)
             : string.Create(CultureInfo.InvariantCulture, $"left_out, group {number}");
 }

@@ -25,7 +25,7 @@ internal static partial class ModelReader
     /// <summary>The id names the output files, so nothing that could lead out of their folder or surprise a file system.</summary>
     private static string? ReadId(Place place)
     {
-        if (place.Node is YamlScalar { Text: var text } && FileName().IsMatch(text))
+        if (place.Node is TextValue { Text: var text } && FileName().IsMatch(text))
         {
             return text;
         }

@@ -20,7 +20,7 @@ internal static class NumberTermKinds
     private static TransformTerm? Transform(NumberTransform transform, TermReader reader, Place argument)
     {
         var name = TermWords.Name(transform);
-        if (argument.Node is not YamlMap map || map.Entries is [{ Key: not ("of" or "plus") }])
+        if (argument.Node is not MapValue map || map.Entries is [{ Key: not ("of" or "plus") }])
         {
             return reader.ReadOneColumn(argument, name) is { } term ? new TransformTerm(transform, term) : null;
         }
@@ -51,9 +51,9 @@ internal static class NumberTermKinds
 
     private static IReadOnlyList<Term> Pair(TermReader reader, Place argument, string name)
     {
-        if (argument.Node is not YamlList { Items.Count: 2 } || argument.Items("terms") is not { } items)
+        if (argument.Node is not ListValue { Items.Count: 2 } || argument.Items("terms") is not { } items)
         {
-            argument.Add("expected a list of two terms, found " + (argument.Node is YamlList list ? list.Items.Count : Words.Found(argument.Node)));
+            argument.Add("expected a list of two terms, found " + (argument.Node is ListValue list ? list.Items.Count : Words.Found(argument.Node)));
             return [];
         }
 

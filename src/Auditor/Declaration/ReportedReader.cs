@@ -36,7 +36,7 @@ internal static partial class ReportedReader
 
     private static IReadOnlyList<ReportedCoefficient> Coefficients(Place place)
     {
-        if (place.Node is YamlMap map)
+        if (place.Node is MapValue map)
         {
             return [.. map.Entries.Select(entry => Coefficient(entry, place)).OfType<ReportedCoefficient>()];
         }
@@ -45,7 +45,7 @@ internal static partial class ReportedReader
         return [];
     }
 
-    private static ReportedCoefficient? Coefficient(YamlEntry entry, Place all)
+    private static ReportedCoefficient? Coefficient(MapEntry entry, Place all)
     {
         var place = all with { Node = entry.Value, Path = $"{all.Path}[{Words.Short(entry.Key)}]" };
         return SomeOf(place, "estimate", "standard_error", "p") is { } keys
@@ -61,7 +61,7 @@ internal static partial class ReportedReader
             return null;
         }
 
-        if (place.Node is YamlMap { Entries.Count: 0 })
+        if (place.Node is MapValue { Entries.Count: 0 })
         {
             place.Add("expected at least one of " + string.Join(", ", known));
         }
@@ -72,12 +72,12 @@ internal static partial class ReportedReader
     /// <summary>One or two degrees of freedom.</summary>
     private static IReadOnlyList<ReportedFigure> Df(Place place)
     {
-        if (place.Node is YamlList { Items.Count: 1 or 2 })
+        if (place.Node is ListValue { Items.Count: 1 or 2 })
         {
             return [.. place.Items("figures")!.Select(Figure).OfType<ReportedFigure>()];
         }
 
-        place.Add("expected a list of one or two figures, found " + (place.Node is YamlList list ? list.Items.Count : Words.Found(place.Node)));
+        place.Add("expected a list of one or two figures, found " + (place.Node is ListValue list ? list.Items.Count : Words.Found(place.Node)));
         return [];
     }
 
@@ -85,7 +85,7 @@ internal static partial class ReportedReader
 
     private static ReportedFigure? Figure(Place place)
     {
-        if (place.Node is YamlScalar { Text: var text } && Printed().IsMatch(text))
+        if (place.Node is TextValue { Text: var text } && Printed().IsMatch(text))
         {
             return new ReportedFigure(text, place.Line);
         }

@@ -10,9 +10,9 @@ internal sealed class StructureReader(ColumnNames columns)
     public StructureDeclaration Read(Keys data)
     {
         var time = data.Optional("time");
-        var fileOrder = time is { Node: YamlMap } && FileOrder(time);
+        var fileOrder = time is { Node: MapValue } && FileOrder(time);
         var structure = new StructureDeclaration(
-            time is { Node: not YamlMap } ? columns.Read(time, "data.time") : null,
+            time is { Node: not MapValue } ? columns.Read(time, "data.time") : null,
             fileOrder,
             data.Optional("period")?.OneOf(Periods),
             Column(data, "unit"),
@@ -41,7 +41,7 @@ internal sealed class StructureReader(ColumnNames columns)
             return false;
         }
 
-        if (order.Node is YamlScalar { Text: "true" })
+        if (order.Node is TextValue { Text: "true" })
         {
             return true;
         }

@@ -16,7 +16,7 @@ internal sealed class TermReader(ColumnNames columns, string where)
 
     public Term? Read(Place place)
     {
-        var term = place.Node is YamlMap map ? OfKind(place, map) : Column(place);
+        var term = place.Node is MapValue map ? OfKind(place, map) : Column(place);
         return term is null ? null : term with { Line = place.Line };
     }
 
@@ -47,7 +47,7 @@ internal sealed class TermReader(ColumnNames columns, string where)
 
     private ColumnTerm? Column(Place place)
     {
-        if (place.Node is YamlScalar)
+        if (place.Node is TextValue)
         {
             return ReadColumn(place);
         }
@@ -56,7 +56,7 @@ internal sealed class TermReader(ColumnNames columns, string where)
         return null;
     }
 
-    private Term? OfKind(Place place, YamlMap map)
+    private Term? OfKind(Place place, MapValue map)
     {
         if (map.Entries is not [var only])
         {

@@ -4,12 +4,12 @@ namespace Auditor.Yaml;
 internal sealed class Keys
 {
     private readonly Place _place;
-    private readonly Dictionary<string, YamlEntry> _entries;
+    private readonly Dictionary<string, MapEntry> _entries;
 
     /// <summary>The known keys that a misspelt one was probably meant to be: it is not also reported as missing.</summary>
     private readonly HashSet<string> _suggested = [];
 
-    private Keys(Place place, YamlMap map)
+    private Keys(Place place, MapValue map)
     {
         _place = place;
         _entries = map.Entries.ToDictionary(entry => entry.Key, StringComparer.Ordinal);
@@ -20,7 +20,7 @@ internal sealed class Keys
     /// <summary>The keys of a map, null with a problem when it is no map.</summary>
     public static Keys? Of(Place place, params IReadOnlyList<string> known)
     {
-        if (place.Node is not YamlMap map)
+        if (place.Node is not MapValue map)
         {
             place.Refuse("a map with " + (known.Count == 1 ? "the key " : "the keys ") + string.Join(", ", known));
             return null;
@@ -62,11 +62,11 @@ internal sealed class Keys
 
     public void Add(string message) => _place.Add(message);
 
-    private Place At(YamlEntry entry)
+    private Place At(MapEntry entry)
     {
         var path = _place.Path is DocumentPath ? entry.Key : _place.Path + "." + entry.Key;
         // A key with nothing after it is reported where the key stands, not where the parser noticed.
-        var node = entry.Value is YamlScalar { IsPlain: true, Text: "" } nothing ? nothing with { Line = entry.Line } : entry.Value;
+        var node = entry.Value is TextValue { IsPlain: true, Text: "" } nothing ? nothing with { Line = entry.Line } : entry.Value;
         return new Place(node, path, _place.Problems);
     }
 

@@ -12,7 +12,7 @@ internal sealed record Place(YamlValue Node, string Path, ProblemList Problems)
     public int Line => Node.Line;
 
     /// <summary>A key with nothing after it.</summary>
-    public bool IsNothing => Node is YamlScalar { IsPlain: true, Text: "" };
+    public bool IsNothing => Node is TextValue { IsPlain: true, Text: "" };
 
     public void Add(string message) => Problems.Add(Line, Path + ": " + message);
 
@@ -21,7 +21,7 @@ internal sealed record Place(YamlValue Node, string Path, ProblemList Problems)
     /// <summary>The text as written, not empty.</summary>
     public string? Text(string expected = "a text")
     {
-        if (Node is YamlScalar { Text.Length: > 0 } scalar)
+        if (Node is TextValue { Text.Length: > 0 } scalar)
         {
             return scalar.Text;
         }
@@ -31,11 +31,11 @@ internal sealed record Place(YamlValue Node, string Path, ProblemList Problems)
     }
 
     /// <summary>The text as written; an empty one must be in quotation marks.</summary>
-    public string? AnyText() => Node is YamlScalar { IsPlain: false } quoted ? quoted.Text : Text();
+    public string? AnyText() => Node is TextValue { IsPlain: false } quoted ? quoted.Text : Text();
 
     public double? Number(string expected = "a number", Func<double, bool>? holds = null)
     {
-        if (Node is YamlScalar scalar
+        if (Node is TextValue scalar
             && double.TryParse(scalar.Text, NumberStyle, CultureInfo.InvariantCulture, out var number)
             && double.IsFinite(number)
             && holds?.Invoke(number) != false)
@@ -49,7 +49,7 @@ internal sealed record Place(YamlValue Node, string Path, ProblemList Problems)
 
     public int? Whole(int least, int most)
     {
-        if (Node is YamlScalar scalar
+        if (Node is TextValue scalar
             && int.TryParse(scalar.Text, NumberStyles.AllowLeadingSign, CultureInfo.InvariantCulture, out var number)
             && number >= least
             && number <= most)
@@ -63,7 +63,7 @@ internal sealed record Place(YamlValue Node, string Path, ProblemList Problems)
 
     public bool? TrueOrFalse()
     {
-        if (Node is YamlScalar scalar && bool.TryParse(scalar.Text, out var value))
+        if (Node is TextValue scalar && bool.TryParse(scalar.Text, out var value))
         {
             return value;
         }
@@ -78,14 +78,14 @@ internal sealed record Place(YamlValue Node, string Path, ProblemList Problems)
     {
         foreach (var (word, value) in choices)
         {
-            if (Node is YamlScalar scalar && scalar.Text == word)
+            if (Node is TextValue scalar && scalar.Text == word)
             {
                 return value;
             }
         }
 
         string[] words = [.. choices.Select(choice => choice.Word)];
-        var hint = Node is YamlScalar { Text: var text } ? NearestName.DidYouMean(text, words) : "";
+        var hint = Node is TextValue { Text: var text } ? NearestName.DidYouMean(text, words) : "";
         Add($"expected {Words.Or(words)}, found {Words.Found(Node)}{hint}");
         return null;
     }
@@ -93,13 +93,13 @@ internal sealed record Place(YamlValue Node, string Path, ProblemList Problems)
     /// <summary>The items of a list, of which there must be at least so many; a key with nothing after it is an empty list.</summary>
     public IReadOnlyList<Place>? Items(string of, int least = 0)
     {
-        if (Node is not YamlList && !IsNothing)
+        if (Node is not ListValue && !IsNothing)
         {
             Refuse("a list of " + of);
             return null;
         }
 
-        IReadOnlyList<YamlValue> items = Node is YamlList list ? list.Items : [];
+        IReadOnlyList<YamlValue> items = Node is ListValue list ? list.Items : [];
         if (items.Count >= least)
         {
             return [.. items.Select(item => this with { Node = item })];

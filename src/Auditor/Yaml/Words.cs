@@ -7,10 +7,10 @@ internal static class Words
 
     public static string Found(YamlValue node) => node switch
     {
-        YamlScalar { IsPlain: true, Text: "" } => "nothing",
-        YamlScalar { Text: "" } => "an empty text",
-        YamlScalar scalar => "'" + Short(scalar.Text) + "'",
-        YamlList => "a list",
+        TextValue { IsPlain: true, Text: "" } => "nothing",
+        TextValue { Text: "" } => "an empty text",
+        TextValue scalar => "'" + Short(scalar.Text) + "'",
+        ListValue => "a list",
         _ => "a map",
     };
 

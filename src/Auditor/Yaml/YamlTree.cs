@@ -22,7 +22,7 @@ internal sealed class YamlTree(IParser parser, ProblemList problems)
     {
         parser.Consume<StreamStart>();
         var root = parser.TryConsume<DocumentStart>(out _) ? Node(1) : null;
-        if (root is null or YamlScalar { IsPlain: true, Text: "" })
+        if (root is null or TextValue { IsPlain: true, Text: "" })
         {
             problems.Add(1, "the file is empty");
             return null;
@@ -71,19 +71,19 @@ internal sealed class YamlTree(IParser parser, ProblemList problems)
         return start switch
         {
             Scalar scalar => Text(scalar),
-            SequenceStart list => new YamlList(InBrackets(list.Style == SequenceStyle.Flow, list, () => Items(depth)), LineOf(list)),
-            _ => new YamlMap(InBrackets(((MappingStart)start).Style == MappingStyle.Flow, start, () => Entries(depth)), LineOf(start)),
+            SequenceStart list => new ListValue(InBrackets(list.Style == SequenceStyle.Flow, list, () => Items(depth)), LineOf(list)),
+            _ => new MapValue(InBrackets(((MappingStart)start).Style == MappingStyle.Flow, start, () => Entries(depth)), LineOf(start)),
         };
     }
 
-    private YamlScalar Text(Scalar scalar)
+    private TextValue Text(Scalar scalar)
     {
         if (scalar.Value.Any(YamlCharacters.IsForbidden))
         {
             problems.Add(LineOf(scalar), "a control character cannot stand in a text");
         }
 
-        return new YamlScalar(scalar.Value, scalar.Style == ScalarStyle.Plain, LineOf(scalar));
+        return new TextValue(scalar.Value, scalar.Style == ScalarStyle.Plain, LineOf(scalar));
     }
 
     private T InBrackets<T>(bool brackets, NodeEvent start, Func<T> content)
@@ -110,14 +110,14 @@ internal sealed class YamlTree(IParser parser, ProblemList problems)
         return items;
     }
 
-    private List<YamlEntry> Entries(int depth)
+    private List<MapEntry> Entries(int depth)
     {
-        var entries = new Dictionary<string, YamlEntry>(StringComparer.Ordinal);
+        var entries = new Dictionary<string, MapEntry>(StringComparer.Ordinal);
         while (!parser.TryConsume<MappingEnd>(out _))
         {
             var key = Node(depth + 1);
             var value = Node(depth + 1);
-            if (KeyText(key) is { } text && !entries.TryAdd(text, new YamlEntry(text, key.Line, value)))
+            if (KeyText(key) is { } text && !entries.TryAdd(text, new MapEntry(text, key.Line, value)))
             {
                 problems.Add(key.Line, string.Create(CultureInfo.InvariantCulture, $"the key '{Words.Short(text)}' stands twice, first on line {entries[text].Line}"));
             }
@@ -130,10 +130,10 @@ internal sealed class YamlTree(IParser parser, ProblemList problems)
     {
         switch (key)
         {
-            case YamlScalar { IsPlain: true, Text: "<<" }:
+            case TextValue { IsPlain: true, Text: "<<" }:
                 problems.Add(key.Line, "merging with '<<' is not supported; write the keys out");
                 return null;
-            case YamlScalar text:
+            case TextValue text:
                 return text.Text;
             default:
                 problems.Add(key.Line, "expected a text as a key, found " + Words.Found(key));
@@ -152,7 +152,7 @@ internal sealed class YamlTree(IParser parser, ProblemList problems)
             problems.Add(LineOf(alias), $"the anchor '&{Words.Short(alias.Value.Value)}' contains itself");
         }
 
-        return node ?? new YamlScalar("*" + alias.Value.Value, IsPlain: false, LineOf(alias));
+        return node ?? new TextValue("*" + alias.Value.Value, IsPlain: false, LineOf(alias));
     }
 
     private static YamlValue Limited(YamlValue node, int depth, Mark at)

@@ -7,12 +7,12 @@ namespace Auditor.Yaml;
 internal abstract record YamlValue(int Line, long Size, int Depth);
 
 /// <param name="IsPlain">Written without quotes.</param>
-internal sealed record YamlScalar(string Text, bool IsPlain, int Line) : YamlValue(Line, 1, 1);
+internal sealed record TextValue(string Text, bool IsPlain, int Line) : YamlValue(Line, 1, 1);
 
-internal sealed record YamlList(IReadOnlyList<YamlValue> Items, int Line)
+internal sealed record ListValue(IReadOnlyList<YamlValue> Items, int Line)
     : YamlValue(Line, 1 + Items.Sum(item => item.Size), 1 + Items.Select(item => item.Depth).DefaultIfEmpty().Max());
 
-internal sealed record YamlMap(IReadOnlyList<YamlEntry> Entries, int Line)
+internal sealed record MapValue(IReadOnlyList<MapEntry> Entries, int Line)
     : YamlValue(Line, 1 + Entries.Sum(entry => 1 + entry.Value.Size), 1 + Entries.Select(entry => entry.Value.Depth).DefaultIfEmpty().Max());
 
-internal sealed record YamlEntry(string Key, int Line, YamlValue Value);
+internal sealed record MapEntry(string Key, int Line, YamlValue Value);
