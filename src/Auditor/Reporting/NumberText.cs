@@ -6,6 +6,7 @@ namespace Auditor.Reporting;
 internal static class NumberText
 {
     private const int UsualDigits = 4;
+    private const int ShareDigits = 3;
     private const int ProbabilityDigits = 3;
     private const double SmallestPlainProbability = 0.0001;
     private const int WidestPlainExponent = 9;
@@ -22,8 +23,14 @@ internal static class NumberText
     /// <summary>A whole number with its thousands set apart; one decimal when it is not whole, as degrees of freedom may be.</summary>
     public static string Count(double value) => value.ToString(value == Math.Floor(value) ? "N0" : "N1", Format);
 
+    /// <summary>One decimal, for what is compared by differences or counted in parts.</summary>
+    public static string Tenths(double value) => value.ToString("N1", Format);
+
     /// <summary>Four significant digits; digits before the decimal point are never rounded away.</summary>
     public static string Number(double value) => Significant(value, UsualDigits, WidestPlainExponent);
+
+    /// <summary>Three significant digits, for shares of variation and powers.</summary>
+    public static string Share(double value) => Significant(value, ShareDigits, WidestPlainExponent);
 
     /// <summary>At most as many significant digits as can be trusted: a long number becomes a power of ten rather than show more.</summary>
     /// <param name="trusted">Decimal digits that can be trusted; null when not known.</param>

@@ -47,7 +47,7 @@ internal static class AuditTables
     {
         const string why = "It was not computed for this set.";
         return ReportTable.Of(
-            "Groups that hide or replace each other",
+            "Entangled groups",
             record.Entangled,
             new("Groups", "name", set => Cell.Name(string.Join(" + ", set.Groups))),
             new("How", "text", set => Cell.Words(Kind(set.Kind))),

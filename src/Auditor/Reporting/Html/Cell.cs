@@ -19,6 +19,11 @@ internal sealed record Cell(string Text, string? Full, string Kind, string? Why)
 
     public static Cell Number(double? value, string? why = null) => Of(value, why, NumberText.Number);
 
+    public static Cell Tenths(double? value, string? why = null) => Of(value, why, NumberText.Tenths);
+
+    /// <summary>A share of variation: three significant digits.</summary>
+    public static Cell Share(double? value, string? why = null) => Of(value, why, NumberText.Share);
+
     public static Cell Count(double? value, string? why = null) => Of(value, why, NumberText.Count);
 
     public static Cell Trusted(double? value, double? digits, string? why = null) =>
@@ -49,3 +54,16 @@ internal sealed record Cell(string Text, string? Full, string Kind, string? Why)
 
 /// <summary>A named value outside a table, and what it means.</summary>
 internal sealed record Fact(string Label, Cell Cell, string? Meaning = null);
+
+/// <summary>Values outside a table; the missing ones are gathered by their reason.</summary>
+/// <param name="Missing">Label: the names, separated; cell: the reason.</param>
+internal sealed record FactList(IReadOnlyList<Fact> Present, IReadOnlyList<Fact> Missing)
+{
+    public static FactList Of(params IReadOnlyList<Fact> facts) => new(
+        [.. facts.Where(fact => fact.Cell.Why is null)],
+        Gathered(facts.Where(fact => fact.Cell.Why is not null).Select(fact => (fact.Label, fact.Cell.Why!))));
+
+    /// <summary>One fact a reason, in the order of first mention.</summary>
+    public static IReadOnlyList<Fact> Gathered(IEnumerable<(string Label, string Why)> missing) =>
+        [.. missing.GroupBy(item => item.Why, item => item.Label).Select(group => new Fact(string.Join("; ", group), Cell.Words(group.Key)))];
+}

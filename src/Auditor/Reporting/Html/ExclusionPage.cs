@@ -7,8 +7,8 @@ namespace Auditor.Reporting.Html;
 /// <param name="Anchor">Id of its section.</param>
 /// <param name="NotComputed">Reasons, each with the tests it kept from being computed.</param>
 internal sealed record ExclusionPage(
-    Exclusion Exclusion, string Anchor, VerdictWords Verdict, ReportTable Tests, IReadOnlyList<Fact> NotComputed, IReadOnlyList<Fact> Decision, IReadOnlyList<Fact> Size,
-    IReadOnlyList<Fact>? OtherRows)
+    Exclusion Exclusion, string Anchor, VerdictWords Verdict, ReportTable Tests, IReadOnlyList<Fact> NotComputed, FactList Decision, FactList Size,
+    FactList? OtherRows)
 {
     public static ExclusionPage Numbered(Exclusion exclusion, int index, double level) =>
         Of(exclusion, "exclusion-" + (index + 1).ToString(CultureInfo.InvariantCulture), level);
@@ -17,58 +17,49 @@ internal sealed record ExclusionPage(
         exclusion, anchor, VerdictWords.Of(exclusion), TestTable.Of(exclusion, level), NotComputedOf(exclusion), DecisionOf(exclusion, level), SizeOf(exclusion, level),
         exclusion.OtherRowSet is { } other ? OtherRowsOf(other, level) : null);
 
-    private static IReadOnlyList<Fact> NotComputedOf(Exclusion exclusion) =>
-    [
-        .. TestWords.All
-            .Where(test => exclusion.TestsNotComputed.ContainsKey(test.Name))
-            .GroupBy(test => exclusion.TestsNotComputed[test.Name])
-            .Select(group => new Fact(string.Join(", ", group.Select(test => test.Title)), Cell.Words(group.Key))),
-    ];
+    private static IReadOnlyList<Fact> NotComputedOf(Exclusion exclusion) => FactList.Gathered(
+        from test in TestWords.All
+        where exclusion.TestsNotComputed.ContainsKey(test.Name)
+        select (test.Title, exclusion.TestsNotComputed[test.Name]));
 
-    private static IReadOnlyList<Fact> DecisionOf(Exclusion exclusion, double level) =>
-    [
+    private static FactList DecisionOf(Exclusion exclusion, double level) => FactList.Of(
         new("Rests on", Cell.Words(TestWords.TitleOf(exclusion.Basis)), exclusion.BasisReason),
         new("p", Cell.Probability(exclusion.P, exclusion.Log10P, level, Why(exclusion, "p"))),
         new("p, adjusted for all groups", Cell.Probability(exclusion.PAdjusted, exclusion.Log10PAdjusted, level, Why(exclusion, "p_adjusted"))),
         new("p, given how the group was dropped", Cell.Probability(exclusion.Selective.P, null, level, exclusion.Selective.Why ?? Why(exclusion, "selective.p"))),
         new("p that the effect reaches the bound", Cell.Probability(exclusion.Negligible.P, null, level, NegligibleWhy(exclusion, "p")), "small: shown to be negligible"),
-        new("the same, adjusted for all groups", Cell.Probability(exclusion.Negligible.PAdjusted, null, level, NegligibleWhy(exclusion, "p_adjusted"))),
-    ];
+        new("the same, adjusted for all groups", Cell.Probability(exclusion.Negligible.PAdjusted, null, level, NegligibleWhy(exclusion, "p_adjusted"))));
 
-    private static IReadOnlyList<Fact> SizeOf(Exclusion exclusion, double level)
+    private static FactList SizeOf(Exclusion exclusion, double level)
     {
         EffectFigures effect = exclusion.PartialRSquared;
         PowerFigures power = exclusion.Power;
         string interval = NumberText.Percent(1 - (2 * level)) + " interval";
-        return
-        [
-            new("Size", Cell.Words(VerdictWords.Materiality(exclusion.Materiality)), $"against the bound {NumberText.Plain(exclusion.Negligible.Bound)} on partial R²"),
-            new("Partial R²", Cell.Number(effect.Estimate, EffectWhy("estimate")), "share of what the final model leaves over"),
-            new(interval + " of the basis", Cell.Range(effect.BasisLower, effect.BasisUpper, EffectWhy("basis_lower"), NumberText.Number)),
-            new(interval + ", classical", Cell.Range(effect.Lower, effect.Upper, EffectWhy("lower"), NumberText.Number)),
+        return FactList.Of(
+            new($"Against the bound {NumberText.Plain(exclusion.Negligible.Bound)}", Cell.Words(VerdictWords.Materiality(exclusion.Materiality))),
+            new("Partial R²", Cell.Share(effect.Estimate, EffectWhy("estimate")), "share of what the final model leaves over"),
+            new(interval + " of the basis", Cell.Range(effect.BasisLower, effect.BasisUpper, EffectWhy("basis_lower"), NumberText.Share)),
+            new(interval + ", classical", Cell.Range(effect.Lower, effect.Upper, EffectWhy("lower"), NumberText.Share)),
             new("Rows of this test", Cell.Count(exclusion.Rows)),
             new("Columns added", Cell.Count(exclusion.Df1, Why(exclusion, "df1"))),
             new("Rows these are worth", Whole(exclusion.EffectiveRows, Why(exclusion, "effective_rows")), "for this question, under the basis"),
-            new("Power at the bound", Cell.Number(power.AtBound, PowerWhy("at_bound")), "chance to reject an effect that large"),
-            new("Smallest effect found reliably", Cell.Number(power.SmallestDetectableFSquared, PowerWhy("smallest_detectable_f_squared")), "as Cohen’s f², at the policy’s power"),
-            new("Rows needed at the bound", Whole(power.RowsNeeded, PowerWhy("rows_needed")), "for the policy’s power"),
-        ];
+            new("Power at the bound", Cell.Share(power.AtBound, PowerWhy("at_bound")), "chance to reject an effect that large"),
+            new("Smallest effect found reliably", Cell.Share(power.SmallestDetectableFSquared, PowerWhy("smallest_detectable_f_squared")), "as Cohen’s f², at the policy’s power"),
+            new("Rows needed at the bound", Whole(power.RowsNeeded, PowerWhy("rows_needed")), "for the policy’s power"));
 
         string? EffectWhy(string name) => effect.Why ?? Why(exclusion, "partial_r_squared." + name);
         string? PowerWhy(string name) => power.Why ?? Why(exclusion, "power." + name);
     }
 
-    private static IReadOnlyList<Fact> OtherRowsOf(OtherRowSetFigures other, double level)
+    private static FactList OtherRowsOf(OtherRowSetFigures other, double level)
     {
         const string why = "It was not computed on these rows.";
-        return
-        [
+        return FactList.Of(
             new("Verdict there", Cell.Words(VerdictWords.WordOf(other.Verdict))),
             new("Rows", Cell.Count(other.Rows)),
             new("F", Cell.Number(other.F, why)),
             new("on degrees of freedom", Cell.Df(other.Df1, other.Df2, why)),
-            new("p, not adjusted", Cell.Probability(other.P, null, level, why)),
-        ];
+            new("p, not adjusted", Cell.Probability(other.P, null, level, why)));
     }
 
     private static Cell Whole(double? rows, string? why) =>

@@ -55,14 +55,14 @@ internal sealed record IntervalPicture(int Height, IReadOnlyList<PictureRow> Row
     /// <summary>The finding of one row in words, for who cannot see the picture.</summary>
     private static string Against(EffectFigures effect, double bound)
     {
-        string estimate = NumberText.Number(effect.Estimate!.Value);
+        string estimate = NumberText.Share(effect.Estimate!.Value);
         if ((effect.BasisLower ?? effect.Lower) is not double lower || (effect.BasisUpper ?? effect.Upper) is not double upper)
         {
             return $"{estimate}, without an interval";
         }
 
         string place = upper < bound ? "wholly below the bound" : lower > bound ? "wholly above the bound" : "on both sides of the bound";
-        return $"{estimate}, interval {NumberText.Number(lower)} to {NumberText.Number(upper)}, {place}";
+        return $"{estimate}, interval {NumberText.Share(lower)} to {NumberText.Share(upper)}, {place}";
     }
 
     private static IEnumerable<double> Ends(Exclusion exclusion)

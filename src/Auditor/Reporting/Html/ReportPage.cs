@@ -27,9 +27,9 @@ internal sealed record ReportPage(AuditRecord Record)
 
     public ExclusionPage? Jointly => Record.AllLeftOut is { } all ? ExclusionPage.Of(all, "all-left-out", Level) : null;
 
-    public FitPage FinalFit => FitPage.Of(Record.FinalFit, Level, "The final model, refitted");
+    public FitPage FinalFit => FitPage.Of(Record.FinalFit, Level, "Coefficients");
 
-    public FitPage? OtherFit => Record.OtherFit is { } other ? FitPage.Of(other, Level, "The final model on the other set of rows") : null;
+    public FitPage? OtherFit => Record.OtherFit is { } other ? FitPage.Of(other, Level, "Coefficients on the other set of rows") : null;
 
     public ReportTable Entangled => AuditTables.Entangled(Record, Level);
 
@@ -53,7 +53,7 @@ internal sealed record ReportPage(AuditRecord Record)
 
     public IReadOnlyList<FindingPage> Findings => FindingPage.Of(Record);
 
-    public IReadOnlyList<Fact> Policy => [.. Record.Policy.Select(pair => new Fact(CheckWords.Spaced(pair.Key), PolicyCell(pair.Value)))];
+    public FactList Policy => FactList.Of([.. Record.Policy.Select(pair => new Fact(CheckWords.Spaced(pair.Key), PolicyCell(pair.Value)))]);
 
     /// <summary>The words that make this page again, quoted for a shell.</summary>
     public string Command => string.Create(CultureInfo.InvariantCulture, $"./run-audit.sh {Quoted(Record.Provenance.Declaration)} --seed {Record.Provenance.Seed}");

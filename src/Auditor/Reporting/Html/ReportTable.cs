@@ -11,11 +11,11 @@ internal sealed record ReportTable(string Caption, IReadOnlyList<Heading> Headin
     public static ReportTable Of<T>(string caption, IEnumerable<T> items, params IReadOnlyList<Column<T>> columns)
     {
         var notes = new List<TableNote>();
-        Cell[][] rows = [.. items.Select(item => columns.Select(column => Noted(column.Cell(item), notes)).ToArray())];
+        Cell[][] rows = [.. items.Select(item => columns.Select(column => Noted(column.Cell(item), column.Kind, notes)).ToArray())];
         return new(caption, [.. columns.Select(column => new Heading(column.Heading, column.Kind))], rows, notes);
     }
 
-    private static Cell Noted(Cell cell, List<TableNote> notes)
+    private static Cell Noted(Cell cell, string kind, List<TableNote> notes)
     {
         if (cell.Why is null)
         {
@@ -28,7 +28,7 @@ internal sealed record ReportTable(string Caption, IReadOnlyList<Heading> Headin
             notes.Add(known = new(Letter(notes.Count), cell.Why));
         }
 
-        return cell with { Note = known.Letter };
+        return cell with { Note = known.Letter, Kind = kind };
     }
 
     /// <summary>a to z, then a2 and so on.</summary>
