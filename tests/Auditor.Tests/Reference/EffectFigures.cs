@@ -15,7 +15,7 @@ internal static class EffectFigures
         string.Create(CultureInfo.InvariantCulture, $"negligible_partial_r_squared: {fSquared / (1 + fSquared):R}");
 
     private static IEnumerable<(string Name, JsonElement Expected, JsonElement Actual)> Tested(CaseRun run) => run.Case.Groups
-        .Where(group => group.TryGetProperty("noncentrality", out _))
+        .Where(group => group.Optional("noncentrality").Optional("confidence_90") is not null)
         .Select(group => (group.Text("group"), group, run.Record.Exclusion(group.Text("group"))));
 
     private static IEnumerable<Figure> Interval(string name, JsonElement expected, JsonElement actual)
