@@ -1,4 +1,5 @@
 using System.Globalization;
+using csFastFloat;
 
 namespace Auditor.Data;
 
@@ -10,9 +11,14 @@ internal static class CellText
     /// <summary>A finite number: decimal point, exponent allowed, no thousands mark.</summary>
     public static bool TryNumber(ReadOnlySpan<char> text, out double value)
     {
+        // The fast parser stops at the first character it does not know and calls that a success ("26a" is 26): only a text read to its end counts.
+        if (FastDoubleParser.TryParseDouble(text, out int used, out value) && used == text.Length && double.IsFinite(value))
+        {
+            return true;
+        }
+
         // The parser of the platform takes "Infinity" and "NaN", turns 1e400 into infinity, and lets trailing null characters pass.
-        var read = double.TryParse(text, NumberStyle, CultureInfo.InvariantCulture, out value) && double.IsFinite(value) && text[^1] != '\0';
-        return read;
+        return double.TryParse(text, NumberStyle, CultureInfo.InvariantCulture, out value) && double.IsFinite(value) && text[^1] != '\0';
     }
 
     /// <summary>A date as YYYY-MM-DD, as days since 0001-01-01.</summary>
