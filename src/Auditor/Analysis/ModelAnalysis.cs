@@ -2,7 +2,6 @@ using Auditor.Declaration;
 using Auditor.Design;
 using Auditor.Facts;
 using Auditor.Numerics.Factor;
-using Auditor.Results;
 using Auditor.Rows;
 using Auditor.Rules;
 
