@@ -1,11 +1,10 @@
 using Auditor.Facts;
 using Auditor.Yaml;
-using YamlDotNet.RepresentationModel;
 
 namespace Auditor.Rules;
 
 /// <summary>Reads the <c>when</c> of one rule.</summary>
-internal sealed class ConditionReader(About about, Policy policy, YamlProblems problems)
+internal sealed class ConditionReader(About about, Policy policy, ProblemList problems)
 {
     private const string What = "a condition";
 
@@ -16,65 +15,65 @@ internal sealed class ConditionReader(About about, Policy policy, YamlProblems p
     /// <returns>Null when there is a problem.</returns>
     public IReadOnlyList<Condition>? Read(RuleMap rule, string what)
     {
-        if (rule.Get("when") is not YamlSequenceNode { Children.Count: > 0 } lines)
+        if (rule.Get("when") is not YamlList { Items.Count: > 0 } lines)
         {
-            problems.Add(rule.Get("when") ?? rule.Node, $"'when' of {what} must be a list of one condition or more");
+            problems.Add(rule.Get("when")?.Line ?? rule.Line, $"'when' of {what} must be a list of one condition or more");
             return null;
         }
 
-        return Complete(lines, Condition);
+        return Complete(lines.Items, Condition);
     }
 
-    private static List<T>? Complete<T>(IEnumerable<YamlNode> nodes, Func<YamlNode, T?> read)
+    private static List<T>? Complete<T>(IEnumerable<YamlValue> nodes, Func<YamlValue, T?> read)
         where T : class
     {
         var all = nodes.Select(read).ToList();
         return all.Contains(null) ? null : [.. all.OfType<T>()];
     }
 
-    private Condition? Condition(YamlNode node)
+    private Condition? Condition(YamlValue node)
     {
         var map = RuleMap.Read(node, What, AllKeys, problems);
         return map is null ? null : map.Get("any") is { } any ? Any(map, any) : Test(map);
     }
 
-    private AnyCondition? Any(RuleMap map, YamlNode any)
+    private AnyCondition? Any(RuleMap map, YamlValue any)
     {
-        if (map.Keys.Count > 1 || any is not YamlSequenceNode { Children.Count: > 0 } alternatives)
+        if (map.Keys.Count > 1 || any is not YamlList { Items.Count: > 0 } alternatives)
         {
-            problems.Add(any, "'any' stands alone and holds a list of conditions");
+            problems.Add(any.Line, "'any' stands alone and holds a list of conditions");
             return null;
         }
 
-        return Complete(alternatives, node => RuleMap.Read(node, What, Keys, problems) is { } one ? Test(one) : null) is { } tests
+        return Complete(alternatives.Items, node => RuleMap.Read(node, What, Keys, problems) is { } one ? Test(one) : null) is { } tests
             ? new AnyCondition(tests)
             : null;
     }
 
     private FactCondition? Test(RuleMap map)
     {
-        var name = map.Text("fact", What, problems);
+        var name = map.Text("fact", What);
         var comparisons = map.Keys.Where(ComparisonWords.Comparisons.ContainsKey).ToList();
         if (comparisons.Count != 1)
         {
-            problems.Add(map.Node, "a condition has exactly one of " + string.Join(", ", ComparisonWords.Comparisons.Keys));
+            problems.Add(map.Line, "a condition has exactly one of " + string.Join(", ", ComparisonWords.Comparisons.Keys));
         }
 
         if (name is not null && KnownNames.UnknownFact(about, name) is { } unknown)
         {
-            problems.Add(map.Get("fact")!, unknown);
+            problems.Add(map.Get("fact")!.Line, unknown);
             return null;
         }
 
         return name is null || comparisons.Count != 1 ? null : Test(FactCatalogue.Find(about, name)!, comparisons[0], map.Get(comparisons[0])!);
     }
 
-    private FactCondition? Test(FactDefinition fact, string word, YamlNode right)
+    private FactCondition? Test(FactDefinition fact, string word, YamlValue right)
     {
         var comparison = ComparisonWords.Comparisons[word];
         if (comparison.BySize() && fact.Type is FactType.Text or FactType.Flag)
         {
-            problems.Add(right, $"'{word}' compares numbers, and {fact.Name} is a {TypeWord(fact.Type)}");
+            problems.Add(right.Line, $"'{word}' compares numbers, and {fact.Name} is a {TypeWord(fact.Type)}");
             return null;
         }
 
@@ -84,37 +83,37 @@ internal sealed class ConditionReader(About about, Policy policy, YamlProblems p
             : null;
     }
 
-    private IReadOnlyList<YamlNode>? Several(FactDefinition fact, YamlNode right)
+    private IReadOnlyList<YamlValue>? Several(FactDefinition fact, YamlValue right)
     {
-        if (right is YamlSequenceNode { Children.Count: > 0 } list)
+        if (right is YamlList { Items.Count: > 0 } list)
         {
-            return [.. list.Children];
+            return [.. list.Items];
         }
 
-        problems.Add(right, $"'one_of' for {fact.Name} needs a list");
+        problems.Add(right.Line, $"'one_of' for {fact.Name} needs a list");
         return null;
     }
 
-    private Operand? Operand(FactDefinition fact, Comparison comparison, string word, YamlNode node)
+    private Operand? Operand(FactDefinition fact, Comparison comparison, string word, YamlValue node)
     {
-        if (node is not YamlScalarNode scalar)
+        if (node is not YamlScalar scalar)
         {
-            problems.Add(node, $"'{word}' for {fact.Name} needs one value");
+            problems.Add(node.Line, $"'{word}' for {fact.Name} needs one value");
             return null;
         }
 
         var type = comparison == Comparison.Present ? FactType.Flag : fact.Type;
-        return YamlScalars.IsPlain(scalar) && YamlScalars.Text(scalar).StartsWith(ComparisonWords.PolicyPrefix, StringComparison.Ordinal)
+        return scalar.IsPlain && scalar.Text.StartsWith(ComparisonWords.PolicyPrefix, StringComparison.Ordinal)
             ? FromPolicy(fact, type, scalar)
             : Written(fact, type, word, scalar);
     }
 
-    private Operand? FromPolicy(FactDefinition fact, FactType type, YamlScalarNode scalar)
+    private Operand? FromPolicy(FactDefinition fact, FactType type, YamlScalar scalar)
     {
-        var reference = YamlScalars.Text(scalar);
+        var reference = scalar.Text;
         if (KnownNames.UnknownPolicy(reference, policy) is { } unknown)
         {
-            problems.Add(scalar, unknown);
+            problems.Add(scalar.Line, unknown);
             return null;
         }
 
@@ -125,27 +124,27 @@ internal sealed class ConditionReader(About about, Policy policy, YamlProblems p
             return new Operand(null, name);
         }
 
-        problems.Add(scalar, $"{reference} does not fit {fact.Name}, which is a {TypeWord(type)}");
+        problems.Add(scalar.Line, $"{reference} does not fit {fact.Name}, which is a {TypeWord(type)}");
         return null;
     }
 
-    private Operand? Written(FactDefinition fact, FactType type, string word, YamlScalarNode scalar)
+    private Operand? Written(FactDefinition fact, FactType type, string word, YamlScalar scalar)
     {
         FactValue value = type switch
         {
-            FactType.Text => FactValue.Of(YamlScalars.Text(scalar), ""),
-            FactType.Flag => FactValue.Of(YamlScalars.Flag(scalar), "true or false"),
-            _ => FactValue.Of(YamlScalars.Number(scalar), "a number"),
+            FactType.Text => FactValue.Of(scalar.Text, ""),
+            FactType.Flag => FactValue.Of(scalar.Flag(), "true or false"),
+            _ => FactValue.Of(scalar.Number(), "a number"),
         };
         if (value is FactValue.NotComputable wanted)
         {
-            problems.Add(scalar, $"'{word}' for {fact.Name} needs {wanted.Why}, found '{scalar.Value}'");
+            problems.Add(scalar.Line, $"'{word}' for {fact.Name} needs {wanted.Why}, found '{scalar.Text}'");
             return null;
         }
 
         if (value is FactValue.Text { Value: var text } && fact.Words.Count > 0 && !fact.Words.Contains(text))
         {
-            problems.Add(scalar, $"{fact.Name} is never '{text}'" + NearestName.Hint(text, fact.Words));
+            problems.Add(scalar.Line, $"{fact.Name} is never '{text}'" + NearestName.Hint(text, fact.Words));
             return null;
         }
 

@@ -1,6 +1,5 @@
 using System.Globalization;
 using Auditor.Yaml;
-using YamlDotNet.RepresentationModel;
 
 namespace Auditor.Rules;
 
@@ -60,19 +59,15 @@ public static class PolicyReader
 
     private static List<PolicyEntry> Entries(string yaml, string file, List<Problem> problems)
     {
-        var loaded = YamlText.Load(yaml, file);
-        problems.AddRange(loaded.Problems);
-        if (loaded.Value is not YamlMappingNode map)
+        var found = new ProblemList(file);
+        var root = YamlFile.Read(yaml, found);
+        if (root is not null and not YamlMap)
         {
-            if (loaded.Value is { } other)
-            {
-                problems.Add(new Problem(file, YamlText.Line(other), "a policy is lines of 'name: value'"));
-            }
-
-            return [];
+            found.Add(root.Line, "a policy is lines of 'name: value'");
         }
 
-        return [.. map.Children.Select(pair => new PolicyEntry(file, pair.Key, pair.Value))];
+        problems.AddRange(found.InOrder);
+        return root is YamlMap map ? [.. map.Entries.Select(entry => new PolicyEntry(file, entry))] : [];
     }
 
     private static Reading<Policy> Checked(OrderedDictionary<string, PolicyValue> values, string file)

@@ -1,15 +1,14 @@
 using System.Globalization;
 using Auditor.Yaml;
-using YamlDotNet.RepresentationModel;
 
 namespace Auditor.Rules;
 
 /// <summary>One line of a policy file, not yet checked.</summary>
-internal sealed record PolicyEntry(string File, YamlNode Key, YamlNode Node)
+internal sealed record PolicyEntry(string File, YamlEntry Entry)
 {
-    public string Name => Key is YamlScalarNode scalar ? YamlScalars.Text(scalar) : Key.ToString();
+    public string Name => Entry.Key;
 
-    public Problem Problem(string message) => new(File, YamlText.Line(Key), message);
+    public Problem Problem(string message) => new(File, Entry.Line, message);
 }
 
 /// <summary>From a line of a policy file to a value of the right type and within its range.</summary>
@@ -18,7 +17,7 @@ internal static class PolicyValues
     /// <param name="shipped">The value it replaces, which gives the type; null for a line of the shipped file itself.</param>
     public static Reading<PolicyValue> Read(PolicyEntry entry, PolicyValue? shipped)
     {
-        if (entry.Node is not YamlScalarNode scalar || YamlScalars.Text(scalar).Length == 0)
+        if (entry.Entry.Value is not YamlScalar { Text.Length: > 0 } scalar)
         {
             return Failed(entry, $"{entry.Name} must be one value");
         }
@@ -28,30 +27,30 @@ internal static class PolicyValues
         return type switch
         {
             PolicyType.Text => Word(entry, scalar, fixedName),
-            PolicyType.Flag => YamlScalars.Flag(scalar) is bool flag
+            PolicyType.Flag => scalar.Flag() is bool flag
                 ? Reading<PolicyValue>.Of(PolicyValue.Of(flag))
-                : Failed(entry, $"{entry.Name} must be true or false, found '{scalar.Value}'"),
-            _ => YamlScalars.Number(scalar) is double number
+                : Failed(entry, $"{entry.Name} must be true or false, found '{scalar.Text}'"),
+            _ => scalar.Number() is double number
                 ? InRange(entry, scalar, type, number, fixedName?.Range)
                 : Failed(entry, $"{entry.Name} must be a number with a decimal point, found {Quoted(scalar)}"),
         };
     }
 
-    private static PolicyType TypeOf(string name, YamlScalarNode scalar)
+    private static PolicyType TypeOf(string name, YamlScalar scalar)
     {
-        if (YamlScalars.Number(scalar) is double number)
+        if (scalar.Number() is double number)
         {
             return name.EndsWith("_share", StringComparison.Ordinal) ? PolicyType.Share
-                : double.IsInteger(number) && !scalar.Value!.Contains('.', StringComparison.Ordinal) ? PolicyType.Count
+                : double.IsInteger(number) && !scalar.Text.Contains('.', StringComparison.Ordinal) ? PolicyType.Count
                 : PolicyType.Number;
         }
 
-        return YamlScalars.Flag(scalar) is null ? PolicyType.Text : PolicyType.Flag;
+        return scalar.Flag() is null ? PolicyType.Text : PolicyType.Flag;
     }
 
-    private static Reading<PolicyValue> Word(PolicyEntry entry, YamlScalarNode scalar, FixedName? fixedName)
+    private static Reading<PolicyValue> Word(PolicyEntry entry, YamlScalar scalar, FixedName? fixedName)
     {
-        var word = YamlScalars.Text(scalar);
+        var word = scalar.Text;
         if (fixedName is null)
         {
             return Reading<PolicyValue>.Of(PolicyValue.Of(word));
@@ -60,13 +59,10 @@ internal static class PolicyValues
         var usable = string.Join(", ", fixedName.Words.Except(fixedName.NotBuilt));
         return fixedName.NotBuilt.Contains(word) ? Failed(entry, $"{entry.Name} '{word}' is not built yet; use one of {usable}")
             : fixedName.Words.Contains(word) ? Reading<PolicyValue>.Of(PolicyValue.Of(word))
-            : Failed(entry, $"{entry.Name} must be one of {usable}; found '{word}'" + DidYouMean(word, fixedName.Words));
+            : Failed(entry, $"{entry.Name} must be one of {usable}; found '{word}'" + NearestName.DidYouMean(word, fixedName.Words));
     }
 
-    private static string DidYouMean(string word, IReadOnlyList<string> words) =>
-        NearestName.Of(word, words) is { } near ? $" (did you mean '{near}'?)" : "";
-
-    private static Reading<PolicyValue> InRange(PolicyEntry entry, YamlScalarNode scalar, PolicyType type, double number, Between? range)
+    private static Reading<PolicyValue> InRange(PolicyEntry entry, YamlScalar scalar, PolicyType type, double number, Between? range)
     {
         var wanted = range is not null ? Wanted(range, number) : type switch
         {
@@ -77,14 +73,14 @@ internal static class PolicyValues
         };
         return wanted is null
             ? Reading<PolicyValue>.Of(PolicyValue.Of(type, number))
-            : Failed(entry, $"{entry.Name} must be {wanted}, found {scalar.Value}");
+            : Failed(entry, $"{entry.Name} must be {wanted}, found {scalar.Text}");
     }
 
     private static string? Wanted(Between range, double number) => range.Holds(number)
         ? null
         : string.Create(CultureInfo.InvariantCulture, $"above {range.Low} and below {range.High}");
 
-    private static string Quoted(YamlScalarNode scalar) => YamlScalars.IsPlain(scalar) ? $"'{scalar.Value}'" : $"the text \"{scalar.Value}\"";
+    private static string Quoted(YamlScalar scalar) => scalar.IsPlain ? $"'{scalar.Text}'" : $"the text \"{scalar.Text}\"";
 
     private static Reading<PolicyValue> Failed(PolicyEntry entry, string message) => Reading<PolicyValue>.Failed(entry.Problem(message));
 }

@@ -1,7 +1,6 @@
 using Auditor.Facts;
 using Auditor.Findings;
 using Auditor.Yaml;
-using YamlDotNet.RepresentationModel;
 
 namespace Auditor.Rules;
 
@@ -21,34 +20,37 @@ public static class RuleReader
         var problems = new List<Problem>();
         foreach (var (file, yaml) in files)
         {
-            var loaded = YamlText.Load(yaml, file);
-            problems.AddRange(loaded.Problems);
-            if (loaded.Value is { } root)
+            var found = new ProblemList(file);
+            if (YamlFile.Read(yaml, found) is { } root)
             {
-                var found = new YamlProblems(file);
-                rules.AddRange(Rules(root, policy, found));
-                problems.AddRange(found.Found);
+                rules.AddRange(Rules(root, file, policy, found));
             }
+
+            problems.AddRange(found.InOrder);
         }
 
         problems.AddRange(Repeated(rules));
         return problems.Count == 0 ? Reading<IReadOnlyList<Rule>>.Of(rules) : Reading<IReadOnlyList<Rule>>.Failed(problems);
     }
 
-    private static List<Rule> Rules(YamlNode root, Policy policy, YamlProblems problems)
+    private static List<Rule> Rules(YamlValue root, string file, Policy policy, ProblemList problems)
     {
-        if (root is not YamlSequenceNode rows)
+        if (root is not YamlList rows)
         {
-            problems.Add(root, "a rule file is a list of rules, each starting with '- id:'");
+            problems.Add(root.Line, "a rule file is a list of rules, each starting with '- id:'");
             return [];
         }
 
-        return rows.Children.Select(row => Rule(row, policy, problems)).OfType<Rule>().ToList();
+        return rows.Items.Select(row => Rule(row, file, policy, problems)).OfType<Rule>().ToList();
     }
 
-    private static Rule? Rule(YamlNode row, Policy policy, YamlProblems problems)
+    private static Rule? Rule(YamlValue row, string file, Policy policy, ProblemList problems)
     {
+<<<<<<< HEAD
         if (RuleMap.Read(row, "a rule", Keys, problems) is not { } map || map.Text("id", "a rule", problems) is not { } id)
+=======
+        if (RuleMap.Read(row, "a rule", Keys, problems) is not { } map || map.Text("id", "a rule") is not { } id)
+>>>>>>> 7453df418958bf2918d9082322de6ed633f61b7f
         {
             return null;
         }
@@ -56,39 +58,51 @@ public static class RuleReader
         var what = $"rule '{id}'";
         var about = About(map, what, problems);
         var severity = Severity(map, what, problems);
-        var source = map.Text("source", what, problems);
+        var source = map.Text("source", what);
         var when = about is About kind ? new ConditionReader(kind, policy, problems).Read(map, what) : null;
         var message = Template(map, "message", what, about, policy, problems);
         var advice = Template(map, "advice", what, about, policy, problems);
         CheckId(id, map, problems);
         return about is About subject && when is not null && severity is Severity grave && message is not null && advice is not null && source is not null
-            ? new Rule(id, subject, when, grave, message, advice, source, problems.File, YamlText.Line(row))
+            ? new Rule(id, subject, when, grave, message, advice, source, file, row.Line)
             : null;
     }
 
+<<<<<<< HEAD
     private static void CheckId(string id, RuleMap map, YamlProblems problems)
+=======
+    private static void CheckId(string id, RuleMap map, ProblemList problems)
+>>>>>>> 7453df418958bf2918d9082322de6ed633f61b7f
     {
         if (!id.All(letter => char.IsAsciiLetterLower(letter) || char.IsAsciiDigit(letter) || letter == '-'))
         {
-            problems.Add(map.Get("id")!, $"rule id '{id}' may hold small letters, digits and hyphens only");
+            problems.Add(map.Get("id")!.Line, $"rule id '{id}' may hold small letters, digits and hyphens only");
         }
     }
 
+<<<<<<< HEAD
     private static About? About(RuleMap map, string what, YamlProblems problems)
+=======
+    private static About? About(RuleMap map, string what, ProblemList problems)
+>>>>>>> 7453df418958bf2918d9082322de6ed633f61b7f
     {
-        var word = map.Text("about", what, problems);
+        var word = map.Text("about", what);
         var about = word is null ? null : AboutWords.Parse(word);
         if (word is not null && about is null)
         {
-            problems.Add(map.Get("about")!, $"'about' of {what} cannot be '{word}'" + NearestName.Hint(word, AboutWords.All));
+            problems.Add(map.Get("about")!.Line, $"'about' of {what} cannot be '{word}'" + NearestName.Hint(word, AboutWords.All));
         }
 
         return about;
     }
 
+<<<<<<< HEAD
     private static Severity? Severity(RuleMap map, string what, YamlProblems problems)
+=======
+    private static Severity? Severity(RuleMap map, string what, ProblemList problems)
+>>>>>>> 7453df418958bf2918d9082322de6ed633f61b7f
     {
-        var word = map.Text("severity", what, problems);
+        var word = map.Text("severity", what);
         if (word is null)
         {
             return null;
@@ -99,13 +113,17 @@ public static class RuleReader
             return severity;
         }
 
-        problems.Add(map.Get("severity")!, $"'severity' of {what} cannot be '{word}'" + NearestName.Hint(word, ComparisonWords.Severities.Keys));
+        problems.Add(map.Get("severity")!.Line, $"'severity' of {what} cannot be '{word}'" + NearestName.Hint(word, ComparisonWords.Severities.Keys));
         return null;
     }
 
+<<<<<<< HEAD
     private static MessageTemplate? Template(RuleMap map, string key, string what, About? about, Policy policy, YamlProblems problems)
+=======
+    private static MessageTemplate? Template(RuleMap map, string key, string what, About? about, Policy policy, ProblemList problems)
+>>>>>>> 7453df418958bf2918d9082322de6ed633f61b7f
     {
-        if (map.Text(key, what, problems) is not { } text)
+        if (map.Text(key, what) is not { } text)
         {
             return null;
         }
@@ -113,7 +131,7 @@ public static class RuleReader
         var template = MessageTemplate.Parse(text);
         if (template is null)
         {
-            problems.Add(map.Get(key)!, $"'{key}' of {what} has a brace without its partner; write {{{{ or }}}} for the sign itself");
+            problems.Add(map.Get(key)!.Line, $"'{key}' of {what} has a brace without its partner; write {{{{ or }}}} for the sign itself");
         }
         else if (about is About kind)
         {
@@ -123,7 +141,7 @@ public static class RuleReader
         return template;
     }
 
-    private static void CheckNames(MessageTemplate template, YamlNode at, string where, About about, Policy policy, YamlProblems problems)
+    private static void CheckNames(MessageTemplate template, YamlValue at, string where, About about, Policy policy, ProblemList problems)
     {
         foreach (var name in template.Names)
         {
@@ -132,7 +150,7 @@ public static class RuleReader
                 : KnownNames.UnknownFact(about, name);
             if (wrong is not null)
             {
-                problems.Add(at, $"{where}: {wrong}");
+                problems.Add(at.Line, $"{where}: {wrong}");
             }
         }
     }

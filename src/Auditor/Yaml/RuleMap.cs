@@ -1,74 +1,61 @@
-using YamlDotNet.RepresentationModel;
-
 namespace Auditor.Yaml;
 
-/// <summary>Problems of one file, collected.</summary>
-internal sealed class YamlProblems(string file)
-{
-    private readonly List<Problem> _found = [];
-
-    public string File { get; } = file;
-
-    public IReadOnlyList<Problem> Found => _found;
-
-    public void Add(YamlNode at, string message) => _found.Add(new Problem(File, YamlText.Line(at), message));
-}
-
-/// <summary>A mapping whose keys are known beforehand: any other key is a problem with the nearest known one.</summary>
+/// <summary>A map of a rule file, whose keys are known beforehand: any other key is a problem with the nearest known one.</summary>
 internal sealed class RuleMap
 {
-    private readonly Dictionary<string, YamlNode> _values = new(StringComparer.Ordinal);
+    private readonly Dictionary<string, YamlValue> _values = new(StringComparer.Ordinal);
+    private readonly ProblemList _problems;
 
-    private RuleMap(YamlNode node) => Node = node;
+    private RuleMap(int line, ProblemList problems) => (Line, _problems) = (line, problems);
 
-    public YamlNode Node { get; }
+    public int Line { get; }
 
     public IReadOnlyCollection<string> Keys => _values.Keys;
 
-    /// <param name="what">What the mapping describes, for messages.</param>
-    /// <returns>Null when the node is no mapping.</returns>
-    public static RuleMap? Read(YamlNode node, string what, IReadOnlyList<string> known, YamlProblems problems)
+    /// <param name="what">What the map describes, for messages.</param>
+    /// <returns>Null when the node is no map.</returns>
+    public static RuleMap? Read(YamlValue node, string what, IReadOnlyList<string> known, ProblemList problems)
     {
-        if (node is not YamlMappingNode mapping)
+        if (node is not YamlMap { Entries: var entries })
         {
-            problems.Add(node, $"{what} must be 'key: value' pairs");
+            problems.Add(node.Line, $"{what} must be 'key: value' pairs");
             return null;
         }
 
-        var map = new RuleMap(node);
-        foreach (var (key, value) in mapping.Children)
+        var map = new RuleMap(node.Line, problems);
+        foreach (var entry in entries)
         {
-            map.Take(key, value, what, known, problems);
+            map.Take(entry, what, known);
         }
 
         return map;
     }
 
-    public YamlNode? Get(string key) => _values.GetValueOrDefault(key);
+    public YamlValue? Get(string key) => _values.GetValueOrDefault(key);
 
     /// <summary>The text under the key; a problem when it is missing, empty or no text.</summary>
-    public string? Text(string key, string what, YamlProblems problems)
+    public string? Text(string key, string what)
     {
         var node = Get(key);
-        if (node is YamlScalarNode scalar && !string.IsNullOrWhiteSpace(scalar.Value))
+        if (node is YamlScalar scalar && !string.IsNullOrWhiteSpace(scalar.Text))
         {
-            return YamlScalars.Text(scalar).Trim();
+            return scalar.Text.Trim();
         }
 
-        problems.Add(node ?? Node, node is null ? $"{what} lacks '{key}'" : $"'{key}' of {what} must be a text");
+        _problems.Add(node?.Line ?? Line, node is null ? $"{what} lacks '{key}'" : $"'{key}' of {what} must be a text");
         return null;
     }
 
-    private void Take(YamlNode key, YamlNode value, string what, IReadOnlyList<string> known, YamlProblems problems)
+    private void Take(YamlEntry entry, string what, IReadOnlyList<string> known)
     {
-        var name = key is YamlScalarNode scalar ? YamlScalars.Text(scalar) : key.ToString();
-        if (known.Contains(name))
+        if (known.Contains(entry.Key))
         {
-            _values[name] = value;
+            // A key with nothing after it is reported where the key stands.
+            _values[entry.Key] = entry.Value is YamlScalar { IsPlain: true, Text: "" } nothing ? nothing with { Line = entry.Line } : entry.Value;
         }
         else
         {
-            problems.Add(key, $"unknown key '{name}' of {what}" + NearestName.Hint(name, known));
+            _problems.Add(entry.Line, $"unknown key '{Words.Short(entry.Key)}' of {what}" + NearestName.Hint(entry.Key, known));
         }
     }
 }

@@ -17,9 +17,10 @@ public sealed class MessageTests
     [InlineData("partial_r_squared", 0.0, "0")]
     [InlineData("partial_r_squared", 0.0123456, "0.01235")]
     [InlineData("effective_rows", 63.218, "63.22")]
-    [InlineData("effective_rows", 123456.7, "123,500")]
-    [InlineData("rows_needed", 2.5e12, "2.5e12")]
+    [InlineData("effective_rows", 123456.7, "123,457")]
+    [InlineData("rows_needed", 99.96, "99.96")]
     [InlineData("df2", -7.25, "-7.25")]
+    [InlineData("df2", 2.5e12, "2.5e12")]
     public void Numbers_are_shown_by_what_they_are(string fact, double value, string shown) =>
         Assert.Equal(shown, Fill($"{{{fact}}}", About.Exclusion, (fact, new FactValue.Number(value))));
 

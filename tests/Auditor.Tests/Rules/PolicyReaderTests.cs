@@ -33,9 +33,9 @@ public sealed class PolicyReaderTests
         { "power: 0.04", "firm.yaml: power 0.04 must be above significance 0.05" },
         { "adjustment: max_t", "firm.yaml:1: adjustment 'max_t' is not built yet; use one of holm, hochberg, benjamini_hochberg, benjamini_yekutieli, none" },
         { "adjustment: closed", "firm.yaml:1: adjustment 'closed' is not built yet; use one of holm, hochberg, benjamini_hochberg, benjamini_yekutieli, none" },
-        { "adjustment: holms", "firm.yaml:1: adjustment must be one of holm, hochberg, benjamini_hochberg, benjamini_yekutieli, none; found 'holms' (did you mean 'holm'?)" },
+        { "adjustment: holms", "firm.yaml:1: adjustment must be one of holm, hochberg, benjamini_hochberg, benjamini_yekutieli, none; found 'holms'; did you mean 'holm'?" },
         { "row_set: all", "firm.yaml:1: row_set must be one of own, common; found 'all'" },
-        { "basis_without_structure: HC3", "firm.yaml:1: basis_without_structure must be one of hc3, classical; found 'HC3' (did you mean 'hc3'?)" },
+        { "basis_without_structure: HC3", "firm.yaml:1: basis_without_structure must be one of hc3, classical; found 'HC3'; did you mean 'hc3'?" },
         { "lost_share: 1.5", "firm.yaml:1: lost_share must be from 0 to 1, found 1.5" },
         { "few_rows: 2.5", "firm.yaml:1: few_rows must be a whole number of 0 or more, found 2.5" },
         { "digits: -1", "firm.yaml:1: digits must be 0 or more, found -1" },
@@ -43,9 +43,9 @@ public sealed class PolicyReaderTests
         { "row_set:", "firm.yaml:1: row_set must be one value" },
         { "row_set: [own]", "firm.yaml:1: row_set must be one value" },
         { "- row_set", "firm.yaml:1: a policy is lines of 'name: value'" },
-        { "# nothing", "firm.yaml: the file is empty" },
-        { "row_set: own\n---\nrow_set: common", "firm.yaml:2: a second document starts here; only one a file is read" },
-        { "power: &p 0.9\nsignificance: *p", "firm.yaml:2: '*p' repeats another part of the file; write the value out" },
+        { "# nothing", "firm.yaml:1: the file is empty" },
+        { "row_set: own\n---\nrow_set: common", "firm.yaml:2: a second document starts here; expected one document a file" },
+        { "significance: 0.05\nsignificance: 0.1", "firm.yaml:2: the key 'significance' stands twice, first on line 1" },
     };
 
     [Fact]
@@ -93,24 +93,12 @@ public sealed class PolicyReaderTests
         Assert.Equal([1, 2, 3], reading.Problems.Select(problem => problem.Line ?? 0));
     }
 
-    [Theory]
-    [InlineData("significance: 0.05\nsignificance: 0.1", 2)]
-    [InlineData("power: [0.8\nsignificance: 0.05", 1)]
-    public void Text_that_is_not_YAML_is_a_problem_with_its_line(string firm, int line)
-    {
-        var problem = Assert.Single(PolicyReader.Read(Base, "policy.yaml", firm, "firm.yaml").Problems);
-
-        Assert.Equal("firm.yaml", problem.File);
-        Assert.InRange(problem.Line ?? 0, line, line + 1);
-        Assert.StartsWith("not valid YAML: ", problem.Message, StringComparison.Ordinal);
-    }
-
     [Fact]
     public void Deep_nesting_is_refused_and_not_followed()
     {
         var problem = Assert.Single(PolicyReader.Read(Base, "policy.yaml", "power: " + new string('[', 100_000), "firm.yaml").Problems);
 
-        Assert.Equal("firm.yaml:1: nested too deeply", problem.ToString());
+        Assert.Equal("firm.yaml:1: nested more than 64 levels deep", problem.ToString());
     }
 
     [Fact]

@@ -38,7 +38,7 @@ public sealed class RuleReaderTests
         { "{fact: materiality, not: shown_negligible}", "materiality", "r.yaml:5: a condition must be 'key: value' pairs" },
         { "about: exclusion", "about: exclusions", "r.yaml:2: 'about' of rule 'rejected' cannot be 'exclusions'; did you mean 'exclusion'?" },
         { "severity: high", "severity: grave", "r.yaml:6: 'severity' of rule 'rejected' cannot be 'grave'; known: high, medium, low, note" },
-        { "severity: high", "severtiy: high", "r.yaml:6: unknown key 'severtiy' of a rule; did you mean 'severity'?|r.yaml:1: rule 'rejected' lacks 'severity'" },
+        { "severity: high", "severtiy: high", "r.yaml:1: rule 'rejected' lacks 'severity'|r.yaml:6: unknown key 'severtiy' of a rule; did you mean 'severity'?" },
         { "  source: common practice, no source", "", "r.yaml:1: rule 'rejected' lacks 'source'" },
         { "source: common practice, no source", "source:", "r.yaml:9: 'source' of rule 'rejected' must be a text" },
         { "{p_adjusted}", "{p_adjust}", "r.yaml:7: 'message' of rule 'rejected': unknown fact 'p_adjust' about 'exclusion'; did you mean 'p_adjusted'?" },
@@ -85,7 +85,7 @@ public sealed class RuleReaderTests
     }
 
     [Theory]
-    [InlineData("", "r.yaml: the file is empty")]
+    [InlineData("", "r.yaml:1: the file is empty")]
     [InlineData("id: rejected", "r.yaml:1: a rule file is a list of rules, each starting with '- id:'")]
     [InlineData("- rejected", "r.yaml:1: a rule must be 'key: value' pairs")]
     public void A_file_that_is_no_list_of_rules_is_refused(string yaml, string message) =>
