@@ -46,11 +46,7 @@ public static class RuleReader
 
     private static Rule? Rule(YamlValue row, string file, Policy policy, ProblemList problems)
     {
-<<<<<<< HEAD
-        if (RuleMap.Read(row, "a rule", Keys, problems) is not { } map || map.Text("id", "a rule", problems) is not { } id)
-=======
         if (RuleMap.Read(row, "a rule", Keys, problems) is not { } map || map.Text("id", "a rule") is not { } id)
->>>>>>> 7453df418958bf2918d9082322de6ed633f61b7f
         {
             return null;
         }
@@ -68,11 +64,7 @@ public static class RuleReader
             : null;
     }
 
-<<<<<<< HEAD
-    private static void CheckId(string id, RuleMap map, YamlProblems problems)
-=======
     private static void CheckId(string id, RuleMap map, ProblemList problems)
->>>>>>> 7453df418958bf2918d9082322de6ed633f61b7f
     {
         if (!id.All(letter => char.IsAsciiLetterLower(letter) || char.IsAsciiDigit(letter) || letter == '-'))
         {
@@ -80,11 +72,7 @@ public static class RuleReader
         }
     }
 
-<<<<<<< HEAD
-    private static About? About(RuleMap map, string what, YamlProblems problems)
-=======
     private static About? About(RuleMap map, string what, ProblemList problems)
->>>>>>> 7453df418958bf2918d9082322de6ed633f61b7f
     {
         var word = map.Text("about", what);
         var about = word is null ? null : AboutWords.Parse(word);
@@ -96,11 +84,7 @@ public static class RuleReader
         return about;
     }
 
-<<<<<<< HEAD
-    private static Severity? Severity(RuleMap map, string what, YamlProblems problems)
-=======
     private static Severity? Severity(RuleMap map, string what, ProblemList problems)
->>>>>>> 7453df418958bf2918d9082322de6ed633f61b7f
     {
         var word = map.Text("severity", what);
         if (word is null)
@@ -117,11 +101,7 @@ public static class RuleReader
         return null;
     }
 
-<<<<<<< HEAD
-    private static MessageTemplate? Template(RuleMap map, string key, string what, About? about, Policy policy, YamlProblems problems)
-=======
     private static MessageTemplate? Template(RuleMap map, string key, string what, About? about, Policy policy, ProblemList problems)
->>>>>>> 7453df418958bf2918d9082322de6ed633f61b7f
     {
         if (map.Text(key, what) is not { } text)
         {
