@@ -22,8 +22,8 @@ public static class NearestName
     public static string DidYouMean(string name, IEnumerable<string> known) => Of(name, known) is { } near ? $"; did you mean '{near}'?" : "";
 
     /// <summary>
-    /// The known name with the fewest slips, the first on a tie; null when none is near enough to be meant: one slip in names of two to five
-    /// letters (of the shorter), two from six, three from nine and so on.
+    /// The known name with the fewest slips, the first on a tie; null when none is near enough to be meant: one slip is, two when the shorter
+    /// name has six letters, three from nine and so on, but never so many that no letter is right.
     /// </summary>
     public static string? Of(string name, IEnumerable<string> known)
     {
@@ -72,8 +72,9 @@ public static class NearestName
     private static int? Slips(string name, string candidate)
     {
         var shorter = Math.Min(name.Length, candidate.Length);
-        var allowed = shorter < 2 ? 0 : Math.Max(1, shorter / LettersForEachSlip);
-        if (Math.Abs(name.Length - candidate.Length) > allowed)
+        var longer = Math.Max(name.Length, candidate.Length);
+        var allowed = Math.Min(longer - 1, Math.Max(1, shorter / LettersForEachSlip));
+        if (longer - shorter > allowed)
         {
             return null;
         }

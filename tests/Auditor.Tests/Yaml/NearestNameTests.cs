@@ -34,6 +34,8 @@ public sealed class NearestNameTests
     [InlineData("of", "df")]
     [InlineData("x", null)]
     [InlineData("P", "p")]
+    [InlineData("f", "df")]
+    [InlineData("q", null)]
     [InlineData("wholly_different", null)]
     [InlineData("", null)]
     public void The_nearest_is_the_one_that_was_meant(string name, string? meant) =>
