@@ -15,7 +15,7 @@ internal sealed class ConditionReader(About about, Policy policy, ProblemList pr
     /// <returns>Null when there is a problem.</returns>
     public IReadOnlyList<Condition>? Read(RuleMap rule, string what)
     {
-        if (rule.Get("when") is not YamlList { Items.Count: > 0 } lines)
+        if (rule.Get("when") is not ListValue { Items.Count: > 0 } lines)
         {
             problems.Add(rule.Get("when")?.Line ?? rule.Line, $"'when' of {what} must be a list of one condition or more");
             return null;
@@ -39,7 +39,7 @@ internal sealed class ConditionReader(About about, Policy policy, ProblemList pr
 
     private AnyCondition? Any(RuleMap map, YamlValue any)
     {
-        if (map.Keys.Count > 1 || any is not YamlList { Items.Count: > 0 } alternatives)
+        if (map.Keys.Count > 1 || any is not ListValue { Items.Count: > 0 } alternatives)
         {
             problems.Add(any.Line, "'any' stands alone and holds a list of conditions");
             return null;
@@ -85,7 +85,7 @@ internal sealed class ConditionReader(About about, Policy policy, ProblemList pr
 
     private IReadOnlyList<YamlValue>? Several(FactDefinition fact, YamlValue right)
     {
-        if (right is YamlList { Items.Count: > 0 } list)
+        if (right is ListValue { Items.Count: > 0 } list)
         {
             return [.. list.Items];
         }
@@ -96,7 +96,7 @@ internal sealed class ConditionReader(About about, Policy policy, ProblemList pr
 
     private Operand? Operand(FactDefinition fact, Comparison comparison, string word, YamlValue node)
     {
-        if (node is not YamlScalar scalar)
+        if (node is not TextValue scalar)
         {
             problems.Add(node.Line, $"'{word}' for {fact.Name} needs one value");
             return null;
@@ -108,7 +108,7 @@ internal sealed class ConditionReader(About about, Policy policy, ProblemList pr
             : Written(fact, type, word, scalar);
     }
 
-    private Operand? FromPolicy(FactDefinition fact, FactType type, YamlScalar scalar)
+    private Operand? FromPolicy(FactDefinition fact, FactType type, TextValue scalar)
     {
         var reference = scalar.Text;
         if (KnownNames.UnknownPolicy(reference, policy) is { } unknown)
@@ -128,7 +128,7 @@ internal sealed class ConditionReader(About about, Policy policy, ProblemList pr
         return null;
     }
 
-    private Operand? Written(FactDefinition fact, FactType type, string word, YamlScalar scalar)
+    private Operand? Written(FactDefinition fact, FactType type, string word, TextValue scalar)
     {
         FactValue value = type switch
         {

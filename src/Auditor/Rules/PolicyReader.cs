@@ -61,13 +61,13 @@ public static class PolicyReader
     {
         var found = new ProblemList(file);
         var root = YamlFile.Read(yaml, found);
-        if (root is not null and not YamlMap)
+        if (root is not null and not MapValue)
         {
             found.Add(root.Line, "a policy is lines of 'name: value'");
         }
 
         problems.AddRange(found.InOrder);
-        return root is YamlMap map ? [.. map.Entries.Select(entry => new PolicyEntry(file, entry))] : [];
+        return root is MapValue map ? [.. map.Entries.Select(entry => new PolicyEntry(file, entry))] : [];
     }
 
     private static Reading<Policy> Checked(OrderedDictionary<string, PolicyValue> values, string file)

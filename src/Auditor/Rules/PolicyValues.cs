@@ -4,7 +4,7 @@ using Auditor.Yaml;
 namespace Auditor.Rules;
 
 /// <summary>One line of a policy file, not yet checked.</summary>
-internal sealed record PolicyEntry(string File, YamlEntry Entry)
+internal sealed record PolicyEntry(string File, MapEntry Entry)
 {
     public string Name => Entry.Key;
 
@@ -17,7 +17,7 @@ internal static class PolicyValues
     /// <param name="shipped">The value it replaces, which gives the type; null for a line of the shipped file itself.</param>
     public static Reading<PolicyValue> Read(PolicyEntry entry, PolicyValue? shipped)
     {
-        if (entry.Entry.Value is not YamlScalar { Text.Length: > 0 } scalar)
+        if (entry.Entry.Value is not TextValue { Text.Length: > 0 } scalar)
         {
             return Failed(entry, $"{entry.Name} must be one value");
         }
@@ -36,7 +36,7 @@ internal static class PolicyValues
         };
     }
 
-    private static PolicyType TypeOf(string name, YamlScalar scalar)
+    private static PolicyType TypeOf(string name, TextValue scalar)
     {
         if (scalar.Number() is double number)
         {
@@ -48,7 +48,7 @@ internal static class PolicyValues
         return scalar.Flag() is null ? PolicyType.Text : PolicyType.Flag;
     }
 
-    private static Reading<PolicyValue> Word(PolicyEntry entry, YamlScalar scalar, FixedName? fixedName)
+    private static Reading<PolicyValue> Word(PolicyEntry entry, TextValue scalar, FixedName? fixedName)
     {
         var word = scalar.Text;
         if (fixedName is null)
@@ -62,7 +62,7 @@ internal static class PolicyValues
             : Failed(entry, $"{entry.Name} must be one of {usable}; found '{word}'" + NearestName.DidYouMean(word, fixedName.Words));
     }
 
-    private static Reading<PolicyValue> InRange(PolicyEntry entry, YamlScalar scalar, PolicyType type, double number, Between? range)
+    private static Reading<PolicyValue> InRange(PolicyEntry entry, TextValue scalar, PolicyType type, double number, Between? range)
     {
         var wanted = range is not null ? Wanted(range, number) : type switch
         {
@@ -80,7 +80,7 @@ internal static class PolicyValues
         ? null
         : string.Create(CultureInfo.InvariantCulture, $"above {range.Low} and below {range.High}");
 
-    private static string Quoted(YamlScalar scalar) => scalar.IsPlain ? $"'{scalar.Text}'" : $"the text \"{scalar.Text}\"";
+    private static string Quoted(TextValue scalar) => scalar.IsPlain ? $"'{scalar.Text}'" : $"the text \"{scalar.Text}\"";
 
     private static Reading<PolicyValue> Failed(PolicyEntry entry, string message) => Reading<PolicyValue>.Failed(entry.Problem(message));
 }

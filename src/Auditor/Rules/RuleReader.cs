@@ -35,7 +35,7 @@ public static class RuleReader
 
     private static List<Rule> Rules(YamlValue root, string file, Policy policy, ProblemList problems)
     {
-        if (root is not YamlList rows)
+        if (root is not ListValue rows)
         {
             problems.Add(root.Line, "a rule file is a list of rules, each starting with '- id:'");
             return [];

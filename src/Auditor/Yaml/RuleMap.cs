@@ -16,7 +16,7 @@ internal sealed class RuleMap
     /// <returns>Null when the node is no map.</returns>
     public static RuleMap? Read(YamlValue node, string what, IReadOnlyList<string> known, ProblemList problems)
     {
-        if (node is not YamlMap { Entries: var entries })
+        if (node is not MapValue { Entries: var entries })
         {
             problems.Add(node.Line, $"{what} must be 'key: value' pairs");
             return null;
@@ -37,7 +37,7 @@ internal sealed class RuleMap
     public string? Text(string key, string what)
     {
         var node = Get(key);
-        if (node is YamlScalar scalar && !string.IsNullOrWhiteSpace(scalar.Text))
+        if (node is TextValue scalar && !string.IsNullOrWhiteSpace(scalar.Text))
         {
             return scalar.Text.Trim();
         }
@@ -46,12 +46,12 @@ internal sealed class RuleMap
         return null;
     }
 
-    private void Take(YamlEntry entry, string what, IReadOnlyList<string> known)
+    private void Take(MapEntry entry, string what, IReadOnlyList<string> known)
     {
         if (known.Contains(entry.Key))
         {
             // A key with nothing after it is reported where the key stands.
-            _values[entry.Key] = entry.Value is YamlScalar { IsPlain: true, Text: "" } nothing ? nothing with { Line = entry.Line } : entry.Value;
+            _values[entry.Key] = entry.Value is TextValue { IsPlain: true, Text: "" } nothing ? nothing with { Line = entry.Line } : entry.Value;
         }
         else
         {

@@ -8,10 +8,10 @@ internal static class ScalarValues
     private const NumberStyles Style = NumberStyles.AllowLeadingSign | NumberStyles.AllowDecimalPoint | NumberStyles.AllowExponent;
 
     /// <summary>A finite number with a decimal point, exponent allowed; null when it is not one.</summary>
-    public static double? Number(this YamlScalar scalar) =>
+    public static double? Number(this TextValue scalar) =>
         scalar.IsPlain && double.TryParse(scalar.Text, Style, CultureInfo.InvariantCulture, out var number) && double.IsFinite(number) ? number : null;
 
-    public static bool? Flag(this YamlScalar scalar) => !scalar.IsPlain ? null : scalar.Text switch
+    public static bool? Flag(this TextValue scalar) => !scalar.IsPlain ? null : scalar.Text switch
     {
         "true" => true,
         "false" => false,
