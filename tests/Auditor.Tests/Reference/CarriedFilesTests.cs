@@ -68,6 +68,17 @@ public sealed class CarriedFilesTests
         Assert.All(OpenedElsewhere, file => Assert.Contains(file.Key, File.ReadAllText(Path.Combine(TestFolders.Root, file.Value)), StringComparison.Ordinal));
     }
 
+    [Fact]
+    public void Every_worked_case_has_a_test_that_names_it()
+    {
+        string tests = string.Concat(Directory.EnumerateFiles(Path.Combine(TestFolders.Root, "tests"), "*.cs", SearchOption.AllDirectories).Select(File.ReadAllText));
+        IReadOnlyList<string> cases = [.. Directory.EnumerateFiles(TestFolders.Vectors, "*.json").Select(path => Path.GetFileNameWithoutExtension(path))];
+        Assert.NotEmpty(cases);
+        Assert.All(cases, name => Assert.True(Names(tests, $"\"{name}\"") || Names(tests, $"{name}.json\""), name + " is opened by no test"));
+    }
+
+    private static bool Names(string tests, string literal) => tests.Contains(literal, StringComparison.Ordinal);
+
     /// <summary>The record's fingerprint of the data is that of the case's own file, so the audit did read it.</summary>
     private static void AssertDataWereRead(CaseRun run)
     {

@@ -14,20 +14,19 @@ internal static class FloorFile
 
     public static bool Raising => Environment.GetEnvironmentVariable(RaiseSwitch) == "1";
 
-    public static SortedDictionary<string, SortedDictionary<string, int>> Read() =>
-        JsonSerializer.Deserialize<SortedDictionary<string, SortedDictionary<string, int>>>(ReferenceFiles.ReadText(Name))!;
+    public static IReadOnlyDictionary<string, SortedDictionary<string, int>> Read() => ReadSorted();
 
     public static string Key(string name, string variant) => name + variant;
 
-    /// <summary>The floor that a measured number of digits deserves: whole digits, three tenths below what was measured, at most 13.</summary>
-    public static int Deserved(double digits) => (int)Math.Clamp(Math.Floor(digits - 0.3), 0, 13);
+    /// <summary>The floor that a measured number of digits deserves: whole digits, three tenths below what was measured, at most 12.</summary>
+    public static int Deserved(double digits) => (int)Math.Clamp(Math.Floor(digits - 0.3), 0, 12);
 
     public static void Raise(string key, IReadOnlyDictionary<string, double> measured)
     {
         lock (Gate)
         {
-            SortedDictionary<string, SortedDictionary<string, int>> floors = Read();
-            SortedDictionary<string, int> own = floors.TryGetValue(key, out SortedDictionary<string, int>? found) ? found : [];
+            SortedDictionary<string, SortedDictionary<string, int>> floors = ReadSorted();
+            SortedDictionary<string, int> own = floors.TryGetValue(key, out SortedDictionary<string, int>? found) ? found : new(StringComparer.Ordinal);
             foreach ((string kind, double digits) in measured)
             {
                 own[kind] = Math.Max(own.GetValueOrDefault(kind), Deserved(digits));
@@ -36,5 +35,12 @@ internal static class FloorFile
             floors[key] = own;
             File.WriteAllText(ReferenceFiles.FullPath(Name), JsonSerializer.Serialize(floors, Layout) + "\n");
         }
+    }
+
+    private static SortedDictionary<string, SortedDictionary<string, int>> ReadSorted()
+    {
+        var read = JsonSerializer.Deserialize<Dictionary<string, Dictionary<string, int>>>(ReferenceFiles.ReadText(Name))!;
+        var sorted = read.ToDictionary(line => line.Key, line => new SortedDictionary<string, int>(line.Value, StringComparer.Ordinal));
+        return new SortedDictionary<string, SortedDictionary<string, int>>(sorted, StringComparer.Ordinal);
     }
 }
