@@ -53,6 +53,37 @@ public sealed class NoncentralFTests
         }
     }
 
+    /// <summary>
+    /// df1 = 1, df2 = +inf: F' is (Z + sqrt(lambda))², so its tails are normal ones, in closed form.
+    /// </summary>
+    [Theory]
+    [InlineData(0.5, 0.3)]
+    [InlineData(0.1, 40)]
+    [InlineData(30, 400)]
+    [InlineData(900, 1)]
+    public void One_numerator_degree_over_infinitely_many_is_a_shifted_normal(double f, double lambda)
+    {
+        (double r, double shift) = (Math.Sqrt(f), Math.Sqrt(lambda));
+        double outside = StandardNormal.UpperTail(r - shift) + StandardNormal.UpperTail(r + shift);
+        Assert.Equal(1, NoncentralF.Survival(f, 1, double.PositiveInfinity, lambda) / outside, 1e-10);
+        double inside = StandardNormal.UpperTail(shift - r) - StandardNormal.UpperTail(shift + r);
+        Assert.Equal(1, NoncentralF.Cumulative(f, 1, double.PositiveInfinity, lambda) / inside, 1e-10);
+    }
+
+    /// <summary>
+    /// An all but perfect fit has a huge F. The numerator is then as good as fixed at lambda/df1, so P(F' &lt;= f) = P(chi-squared(df2) >= df2 lambda/(df1 f)).
+    /// </summary>
+    [Theory]
+    [InlineData(1e14, 0.05)]
+    [InlineData(1e25, 0.95)]
+    [InlineData(1e28, 0.025)]
+    [InlineData(1e120, 0.05)]
+    public void Noncentrality_of_a_huge_statistic_follows_from_the_denominator_alone(double f, double cumulative)
+    {
+        double lambda = NoncentralF.Noncentrality(f, 3, 17, cumulative) ?? double.NaN;
+        Assert.Equal(1, ChiSquared.Survival(17 * (lambda / (3 * f)), 17) / cumulative, 1e-10);
+    }
+
     [Fact]
     public void Limit_is_0_when_the_central_probability_is_already_small_enough()
     {
