@@ -68,6 +68,11 @@ internal readonly record struct BetaTail
 
     private static BetaTail Ordered(double f, double h, double a, double t)
     {
+        if (t == 0 && double.IsInfinity(a * f))
+        {
+            return new BetaTail(holdsLower: false, double.NegativeInfinity, 1);
+        }
+
         double odds = a * t * f;
         double y = 1 / (1 + odds);
         double x = odds < 1 ? odds * y : 1 / (1 + (1 / odds));
@@ -77,8 +82,8 @@ internal readonly record struct BetaTail
             return new BetaTail(h < 0, logDensity, Integral(f, h, a, t, y, logDensity));
         }
 
-        bool lower = a * f * y * (1 + ((a + 2) * t)) < a + 1;
-        return new BetaTail(lower, logDensity, lower ? LowerSeries(a, t, a * f * y) : UpperFraction(a, t, h, x, y));
+        bool lower = a * (f * y) * (1 + ((a + 2) * t)) < a + 1;
+        return new BetaTail(lower, logDensity, lower ? LowerSeries(a, t, a * (f * y)) : UpperFraction(a, t, h, x, y));
     }
 
     private static double LogDensityAt(double f, double h, double a, double t)
@@ -111,11 +116,6 @@ internal readonly record struct BetaTail
     private static double UpperFraction(double a, double t, double h, double x, double y)
     {
         double lambda = a * y * h; // b - (a+b) y
-        if (double.IsInfinity(lambda))
-        {
-            return 0;
-        }
-
         double c = Floor((lambda + 1) / (1 + t));
         double d = 0;
         double value = c;
@@ -142,7 +142,7 @@ internal readonly record struct BetaTail
     private static double Integral(double f, double h, double a, double t, double y, double logDensity)
     {
         double slope = a * y * Math.Abs(h);
-        double curvature = a * f * y * y * (1 + (a * t));
+        double curvature = a * (f * y) * y * (1 + (a * t)); // in this order f y, below 1/(a t), cannot overflow
         double stretch = (h < 0 ? -80 : 80) / (slope + Math.Sqrt((slope * slope) + (80 * curvature)));
         double sum = 0;
         for (int i = 0; i < Rule.Order; i++)

@@ -7,7 +7,7 @@ namespace Auditor.Numerics.Distributions;
 /// <remarks>
 /// Arguments: f in [0, +inf] (between 0 and 1e-280 it is taken as 1e-280); df1 and df2 above 0, at most one of them infinite (df2 = +inf is chi-squared over df1). Anything else throws.
 /// Verified to 1e-10 relative, on the logarithm where that is asked, against 80-digit values (a hypergeometric series, and quadrature of
-/// the density) for df1 from 0.02 to 1e5 and df2 from 0.2 to 3.3e10, tails down to exp(-46000), and against printed critical values of R 4.2.2.
+/// the density) for df1 from 0.02 to 1e10 and df2 from 0.2 to 3e12, tails down to exp(-46000), and against printed critical values of R 4.2.2.
 /// A double holds f to 1e-16 only: where the tail falls like f to the power -k, that alone moves its value by k times 1e-16.
 /// Below df1 or df2 of about 0.01 the tail taken as a complement slowly loses digits. Cost: a microsecond or two, some twenty
 /// at most, when both are in the millions. How: see <see cref="BetaTail"/>.

@@ -18,7 +18,7 @@ internal struct PeakSum
     {
         Scale = first.LogTerm;
         Term = 1;
-        Step = Math.Exp(first.LogStep - first.LogTerm);
+        Step = double.IsNegativeInfinity(Scale) ? 0 : Math.Min(Math.Exp(first.LogStep - Scale), Large);
         _firstStep = Step;
         _terms = Term;
         _steps = Step;
@@ -40,6 +40,11 @@ internal struct PeakSum
     /// <summary>Adds a term; false when it falls and no longer counts.</summary>
     public bool Add(double term, double step)
     {
+        if (!double.IsFinite(term + step))
+        {
+            return false; // only where the logarithm of the sum is so far below 0 that its own rounding overflows: the sum is 0
+        }
+
         bool counts = term >= Term || term >= _terms * Negligible;
         (Term, Step) = (term, step);
         _terms += term;

@@ -116,6 +116,14 @@ public sealed class NoncentralFTests
     }
 
     [Theory]
+    [InlineData(1e300, 1e9, 1e9, 1e-5)]
+    [InlineData(1e100, 1e-3, double.PositiveInfinity, 1e-5)]
+    [InlineData(1e300, 0.1, double.PositiveInfinity, 1e20)]
+    [InlineData(1e-300, 0.5, 1e9, 1e300)]
+    public void Far_corners_end_and_add_up_to_1(double f, double df1, double df2, double lambda) =>
+        Assert.Equal(1, NoncentralF.Survival(f, df1, df2, lambda) + NoncentralF.Cumulative(f, df1, df2, lambda), 1e-11);
+
+    [Theory]
     [InlineData(-1, 2, 1)]
     [InlineData(1, double.PositiveInfinity, 1)]
     [InlineData(1, 2, -1)]
