@@ -1,3 +1,5 @@
+using MathNet.Numerics.Integration;
+
 namespace Auditor.Numerics.Distributions;
 
 /// <summary>
@@ -9,11 +11,15 @@ namespace Auditor.Numerics.Distributions;
 /// b enters only through 1/b, so b = +inf (the gamma distribution) needs no code of its own. Nothing is formed as 1 - x: x, 1 - x and
 /// a(1-x) - b x all come from f and h = f - 1. Prefactor x^a (1-x)^b / B(a, b): Stirling errors and deviances as in Loader 2000.
 /// Lower tail: the series of positive terms DLMF 8.17.7 (a form of 2F1(a+b, 1; a+1; x)). Upper tail: the continued fraction of
-/// DiDonato and Morris 1992 (TOMS 708), by the modified Lentz method. Work grows like the square root of min(a, b).
+/// DiDonato and Morris 1992 (TOMS 708), by the modified Lentz method. Their work grows like the square root of min(a, b); where that is above
+/// a million, the nearly normal density is integrated instead, at a fixed cost.
 /// </remarks>
 internal readonly record struct BetaTail
 {
     private const double Tiny = 1e-300;
+    private const double Vanishing = 1e-305;
+    private const double IntegratedFrom = 1e6;
+    private static readonly GaussLegendreRule Rule = new(0, 1, 64);
 
     private BetaTail(bool holdsLower, double logDensity, double ratio)
     {
@@ -41,9 +47,14 @@ internal readonly record struct BetaTail
 
     private double Held => Math.Min(Math.Exp(LogHeld), 1);
 
-    /// <summary>The tails at 0 &lt; f &lt; +inf; a and b above 0, at most one of them infinite.</summary>
+    /// <summary>The tails at 0 &lt; f &lt; +inf (below 1e-305 as at 0); a and b above 0, at most one of them infinite.</summary>
     public static BetaTail At(double f, double a, double b)
     {
+        if (f < Vanishing)
+        {
+            return new BetaTail(holdsLower: true, double.NegativeInfinity, 1);
+        }
+
         double h = f - 1;
         if (a <= b)
         {
@@ -57,12 +68,22 @@ internal readonly record struct BetaTail
 
     private static BetaTail Ordered(double f, double h, double a, double t)
     {
+        if (t == 0 && double.IsInfinity(a * f))
+        {
+            return new BetaTail(holdsLower: false, double.NegativeInfinity, 1);
+        }
+
         double odds = a * t * f;
         double y = 1 / (1 + odds);
         double x = odds < 1 ? odds * y : 1 / (1 + (1 / odds));
         double logDensity = LogDensityAt(f, h, a, t);
-        bool lower = a * f * y * (1 + ((a + 2) * t)) < a + 1;
-        return new BetaTail(lower, logDensity, lower ? LowerSeries(a, t, a * f * y) : UpperFraction(a, t, h, x, y));
+        if (a > IntegratedFrom)
+        {
+            return new BetaTail(h < 0, logDensity, Integral(f, h, a, t, y, logDensity));
+        }
+
+        bool lower = a * (f * y) * (1 + ((a + 2) * t)) < a + 1;
+        return new BetaTail(lower, logDensity, lower ? LowerSeries(a, t, a * (f * y)) : UpperFraction(a, t, h, x, y));
     }
 
     private static double LogDensityAt(double f, double h, double a, double t)
@@ -112,6 +133,26 @@ internal readonly record struct BetaTail
         }
 
         return 1 / value;
+    }
+
+    /// <summary>
+    /// Tail over prefactor on the side away from f = 1, as the integral of the density over log f. It is so nearly normal here that a stretch of
+    /// 40 in the exponent and 64 nodes do.
+    /// </summary>
+    private static double Integral(double f, double h, double a, double t, double y, double logDensity)
+    {
+        double slope = a * y * Math.Abs(h);
+        double curvature = a * (f * y) * y * (1 + (a * t)); // in this order f y, below 1/(a t), cannot overflow
+        double stretch = (h < 0 ? -80 : 80) / (slope + Math.Sqrt((slope * slope) + (80 * curvature)));
+        double sum = 0;
+        for (int i = 0; i < Rule.Order; i++)
+        {
+            double s = stretch * Rule.Abscissas[i];
+            double there = h - (f * Deviance.OneMinusExp(s));
+            sum += Rule.Weights[i] * Math.Exp(LogDensityAt(f * Math.Exp(s), there, a, t) - logDensity);
+        }
+
+        return sum * Math.Abs(stretch);
     }
 
     private static double Floor(double v) => Math.Abs(v) < Tiny ? Tiny : v;

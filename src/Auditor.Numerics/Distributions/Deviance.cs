@@ -47,7 +47,7 @@ internal static class Deviance
     public static double LogComplement(double v) =>
         v > -Math.Log(2) ? Math.Log(OneMinusExp(v)) : Log1P(-Math.Exp(v));
 
-    /// <summary>1 - exp(v) for v at most 0, with full relative accuracy near 0.</summary>
+    /// <summary>1 - exp(v), with full relative accuracy near 0.</summary>
     public static double OneMinusExp(double v)
     {
         if (v < -0.5)

@@ -16,8 +16,10 @@ internal readonly struct NoncentralTail
 {
     private const double StridedFrom = 2e6;
     private const double FixedFrom = 1e25;
-    private const double Negligible = 1e-18;
-    private const double Large = 1e200;
+
+    // Some 40 strides reach across a peak; more are met only where the tail is 0 in any case and the mode has no more digits than the stride.
+    private const int MostStrides = 1000;
+    private const double Negligible = PeakSum.Negligible;
 
     private readonly double _f;
     private readonly double _a;
@@ -100,34 +102,17 @@ internal readonly struct NoncentralTail
             bound *= _mu / (j + 1) * Math.Min(1, Math.Max(StepRatio(j), _x));
         }
 
-        (double scale, double logStep) = Term(j, j - _mu);
-        double term = 1;
-        double step = Math.Exp(logStep - scale);
-        double sum = term;
-        double steps = step;
-        while (j > 0)
+        var sum = new PeakSum(Term(j, j - _mu));
+        bool counts = true;
+        while (counts && j > 0)
         {
             j--;
             double ratio = (j + 1) / _mu;
-            step *= ratio / StepRatio(j);
-            double next = (term * ratio) + step;
-            bool falls = next < term;
-            term = next;
-            sum += term;
-            steps += step;
-            if (falls && term < sum * Negligible)
-            {
-                break;
-            }
-
-            if (sum > Large)
-            {
-                (term, step, sum, steps) = (term / Large, step / Large, sum / Large, steps / Large);
-                scale += Math.Log(Large);
-            }
+            double step = sum.Step * ratio / StepRatio(j);
+            counts = sum.Add((sum.Term * ratio) + step, step);
         }
 
-        return (scale + Math.Log(sum), steps / sum / 2);
+        return sum.Result;
     }
 
     private (double LogTail, double Rate) SumUpwards()
@@ -139,63 +124,36 @@ internal readonly struct NoncentralTail
             bound *= j / _mu * (_b > 1 ? Math.Min(1, 1 / StepRatio(j - 1)) : 1);
         }
 
-        (double scale, double logStep) = Term(j, j - _mu);
-        double term = 1;
-        double step = Math.Exp(logStep - scale);
-        double sum = term;
-        double steps = step;
-        while (true)
+        var sum = new PeakSum(Term(j, j - _mu));
+        bool counts = true;
+        while (counts)
         {
             double ratio = _mu / (j + 1);
-            double next = (term + step) * ratio;
-            bool falls = next < term;
-            step *= ratio * StepRatio(j);
-            term = next;
-            sum += term;
-            steps += step;
+            counts = sum.Add((sum.Term + sum.Step) * ratio, sum.Step * ratio * StepRatio(j));
             j++;
-            if (falls && term < sum * Negligible)
-            {
-                break;
-            }
-
-            if (sum > Large)
-            {
-                (term, step, sum, steps) = (term / Large, step / Large, sum / Large, steps / Large);
-                scale += Math.Log(Large);
-            }
         }
 
-        return (scale + Math.Log(sum), steps / sum / 2);
+        return sum.Result;
     }
 
     private (double LogTail, double Rate) Strided()
     {
         double mode = Mode();
         double stride = Math.Sqrt(mode) / 4;
-        (double scale, double logStep) = Term(mode, mode - _mu);
-        double sum = 1;
-        double steps = Math.Exp(logStep - scale);
-        foreach (double direction in (ReadOnlySpan<double>)[-stride, stride])
+        var sum = new PeakSum(Term(mode, mode - _mu));
+        foreach (double move in (ReadOnlySpan<double>)[-stride, stride])
         {
-            double before = 1;
-            for (int k = 1; mode + (k * direction) > 0; k++)
+            sum.BackToFirst();
+            bool counts = true;
+            for (int k = 1; counts && k < MostStrides && mode + (k * move) > 0; k++)
             {
-                double j = mode + (k * direction);
-                (double logTerm, logStep) = Term(j, mode - _mu + (k * direction));
-                double term = Math.Exp(logTerm - scale);
-                sum += term;
-                steps += Math.Exp(logStep - scale);
-                if (term < before && term < sum * Negligible)
-                {
-                    break;
-                }
-
-                before = term;
+                (double logTerm, double logStep) = Term(mode + (k * move), mode - _mu + (k * move));
+                counts = sum.Add(Math.Exp(logTerm - sum.Scale), Math.Exp(logStep - sum.Scale));
             }
         }
 
-        return (scale + Math.Log(sum * stride), steps / sum / 2);
+        (double logTail, double rate) = sum.Result;
+        return (logTail + Math.Log(stride), rate);
     }
 
     private (double LogTail, double Rate) Fixed()

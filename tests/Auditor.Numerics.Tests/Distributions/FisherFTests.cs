@@ -5,7 +5,7 @@ namespace Auditor.Numerics.Tests.Distributions;
 /// <summary>Against 80-digit values: values/make_values.py.</summary>
 public sealed class FisherFTests
 {
-    private static List<Dictionary<string, string>> Rows => ValueFile.Rows("fisher_f.csv", 700);
+    private static List<Dictionary<string, string>> Rows => ValueFile.Rows("fisher_f.csv", 750);
 
     [Fact]
     public void Survival_agrees_with_high_precision_values() =>
@@ -60,6 +60,20 @@ public sealed class FisherFTests
         Assert.Equal(double.PositiveInfinity, FisherF.UpperQuantile(0, 3, 7));
         Assert.Equal(0, FisherF.UpperQuantile(1, 3, 7));
         Assert.Equal(double.PositiveInfinity, FisherF.UpperQuantile(1e-300, 3, 0.5));
+    }
+
+    /// <summary>
+    /// Far out the tail is C f^(-df2/2): its logarithm falls by df2/2 times the step in log f, whatever the size of the degrees of freedom.
+    /// </summary>
+    [Theory]
+    [InlineData(1e200, 3, 7)]
+    [InlineData(1e200, 2e3, 1e3)]
+    [InlineData(1e200, 1e9, 1e9)]
+    [InlineData(1e200, 1e9, 4e6)]
+    public void Tail_far_out_is_a_power_of_f(double f, double df1, double df2)
+    {
+        double fall = FisherF.LogSurvival(f, df1, df2) - FisherF.LogSurvival(f * 1e100, df1, df2);
+        Assert.Equal(1, fall / (df2 / 2 * Math.Log(1e100)), 1e-10);
     }
 
     [Theory]

@@ -6,9 +6,9 @@ namespace Auditor.Numerics.Tests.Distributions;
 /// <summary>Against 80-digit values (values/make_values.py), and six points made elsewhere at 40 digits (vectors/noncentral_f.json).</summary>
 public sealed class NoncentralFTests
 {
-    private static List<Dictionary<string, string>> Rows => ValueFile.Rows("noncentral_f.csv", 400);
+    private static List<Dictionary<string, string>> Rows => ValueFile.Rows("noncentral_f.csv", 500);
 
-    private static List<Dictionary<string, string>> Inverses => ValueFile.Rows("noncentral_f_inverse.csv", 300);
+    private static List<Dictionary<string, string>> Inverses => ValueFile.Rows("noncentral_f_inverse.csv", 450);
 
     [Fact]
     public void Cumulative_agrees_with_high_precision_values() =>
@@ -53,6 +53,37 @@ public sealed class NoncentralFTests
         }
     }
 
+    /// <summary>
+    /// df1 = 1, df2 = +inf: F' is (Z + sqrt(lambda))², so its tails are normal ones, in closed form.
+    /// </summary>
+    [Theory]
+    [InlineData(0.5, 0.3)]
+    [InlineData(0.1, 40)]
+    [InlineData(30, 400)]
+    [InlineData(900, 1)]
+    public void One_numerator_degree_over_infinitely_many_is_a_shifted_normal(double f, double lambda)
+    {
+        (double r, double shift) = (Math.Sqrt(f), Math.Sqrt(lambda));
+        double outside = StandardNormal.UpperTail(r - shift) + StandardNormal.UpperTail(r + shift);
+        Assert.Equal(1, NoncentralF.Survival(f, 1, double.PositiveInfinity, lambda) / outside, 1e-10);
+        double inside = StandardNormal.UpperTail(shift - r) - StandardNormal.UpperTail(shift + r);
+        Assert.Equal(1, NoncentralF.Cumulative(f, 1, double.PositiveInfinity, lambda) / inside, 1e-10);
+    }
+
+    /// <summary>
+    /// An all but perfect fit has a huge F. The numerator is then as good as fixed at lambda/df1, so P(F' &lt;= f) = P(chi-squared(df2) >= df2 lambda/(df1 f)).
+    /// </summary>
+    [Theory]
+    [InlineData(1e14, 0.05)]
+    [InlineData(1e25, 0.95)]
+    [InlineData(1e28, 0.025)]
+    [InlineData(1e120, 0.05)]
+    public void Noncentrality_of_a_huge_statistic_follows_from_the_denominator_alone(double f, double cumulative)
+    {
+        double lambda = NoncentralF.Noncentrality(f, 3, 17, cumulative) ?? double.NaN;
+        Assert.Equal(1, ChiSquared.Survival(17 * (lambda / (3 * f)), 17) / cumulative, 1e-10);
+    }
+
     [Fact]
     public void Limit_is_0_when_the_central_probability_is_already_small_enough()
     {
@@ -83,6 +114,14 @@ public sealed class NoncentralFTests
         Assert.Equal(FisherF.Cumulative(1.7, 2, 50), NoncentralF.Cumulative(1.7, 2, 50, 0));
         Assert.Equal(FisherF.Survival(1.7, 2, 50), NoncentralF.Survival(1.7, 2, 50, 0));
     }
+
+    [Theory]
+    [InlineData(1e300, 1e9, 1e9, 1e-5)]
+    [InlineData(1e100, 1e-3, double.PositiveInfinity, 1e-5)]
+    [InlineData(1e300, 0.1, double.PositiveInfinity, 1e20)]
+    [InlineData(1e-300, 0.5, 1e9, 1e300)]
+    public void Far_corners_end_and_add_up_to_1(double f, double df1, double df2, double lambda) =>
+        Assert.Equal(1, NoncentralF.Survival(f, df1, df2, lambda) + NoncentralF.Cumulative(f, df1, df2, lambda), 1e-11);
 
     [Theory]
     [InlineData(-1, 2, 1)]

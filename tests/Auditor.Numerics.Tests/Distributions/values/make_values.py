@@ -196,9 +196,7 @@ def scaled_normal(f, df2, lam):
 
     def integrand(s):
         w = mp.exp(s)
-        r = mp.sqrt(f * w / b / 2 * 1)
-        # W = 2 w, so sqrt(f W/df2) = sqrt(f w/b)
-        r = mp.sqrt(f * w / b)
+        r = mp.sqrt(f * w / b)  # W = 2 w, so this is sqrt(f W/df2)
         inside = (mp.erfc((root - r) / mp.sqrt(2)) - mp.erfc((root + r) / mp.sqrt(2))) / 2
         return inside * mp.exp(b * s - w - mp.loggamma(b))
     # Locate the mode and the width on a coarse grid, then panels of that width.
@@ -252,7 +250,7 @@ def f_points():
         a2 = float('%.5g' % math.exp(rng.uniform(math.log(0.5), math.log(3000))))
         b2 = float('%.5g' % math.exp(rng.uniform(0, math.log(1e8))))
         points.append((point_at(math.exp(rng.uniform(-3, 6.5)), a2 / 2, b2 / 2, rng.random() < 0.7), a2, b2))
-    for f, a2, b2 in [(3.49, 2, 1e8), (3.49, 1, 1e12), (1.2, 5000, 5000), (0.8, 2e4, 3e5), (1.01, 1e5, 1e6), (4, 0.1, 50), (30, 0.05, 0.2), (0.1, 0.02, 3), (1.5, 7, 0.3), (1e-20, 3, 8), (1e20, 3, 8)]:
+    for f, a2, b2 in [(3.49, 2, 1e8), (3.49, 1, 1e12), (1.2, 5000, 5000), (0.8, 2e4, 3e5), (1.01, 1e5, 1e6), (4, 0.1, 50), (30, 0.05, 0.2), (0.1, 0.02, 3), (1.5, 7, 0.3), (1.0003, 3e7, 5e7), (0.9996, 3e7, 1e9), (1.00001, 1e10, 3e12), (0.999, 2.5e6, 1e8), (1.2, 5e6, 5e6), (1.004, 2.1e6, 1e12), (0.99, 3e6, 4e6), (1.03, 1e7, 3e6), (0.9999, 4e8, 2e7), (1.0, 1e7, 4e6), (1.0, 4e6, 1e7), (1e-20, 3, 8), (1e20, 3, 8)]:
         points.append((float(f), float(a2), float(b2)))
     return [p for p in points if p[0] is not None]
 
@@ -303,8 +301,8 @@ def noncentral_points():
     points = []
     for a2 in [0.5, 1, 2, 5.5, 30, 300, 3000]:
         for b2 in [1, 3.5, 12.25, 100, 1998, 1e5, 1e6, 1e8]:
-            for lam in [1e-3, 0.4, 2.2, 12.5, 80, 1000, 20000]:
-                if rng.random() < (0.14 if lam > 5000 else 0.62):
+            for lam in [1e-3, 0.03, 0.4, 2.2, 12.5, 80, 1000, 20000]:
+                if rng.random() < (0.2 if lam > 5000 else 0.9):
                     spread = (2 * (a2 + 2 * lam) / a2 ** 2 + 2 * (1 + lam / a2) ** 2 / b2) ** 0.5
                     mean = 1 + lam / a2
                     z = rng.choice([-30, -8, -4, -1.6, -0.5, 0.7, 2.5, 6, 15, 40])
@@ -313,7 +311,11 @@ def noncentral_points():
     for lam in [1e5, 1e5, 1e5, 3e5]:
         a2, b2 = rng.choice([1.0, 12.0, 250.5]), rng.choice([45.5, 1e4, 1e7])
         f = (1 + lam / a2) * (1 + rng.choice([-1, 1]) * rng.uniform(3, 25) * ((4 / lam) + 2 / b2) ** 0.5)
-        points.append((float('%.6g' % f), a2, b2, lam))
+        points.append((float('%.6g' % abs(f)), a2, b2, lam))
+    for lam, b2 in [(1e6, 33.5), (1e6, 1e4), (1e6, 1e8), (1e6, 1e8), (1e7, 55.5), (1e7, 1e6), (1e7, 3e8), (3e7, 999.5), (3e7, 1e6)]:
+        a2 = rng.choice([0.7, 3.0, 41.0])
+        f = (1 + lam / a2) * (1 + rng.choice([-1, 1]) * rng.uniform(1, 20) * ((4 / lam) + 2 / b2) ** 0.5 * 0.7)
+        points.append((float('%.9g' % abs(f)), a2, b2, lam))
     points += [(1.5, 2.0, 20.0, 2.2), (0.4, 1.0, 199998.0, 12.5), (1e-12, 3.0, 50.0, 9.0), (400.0, 1.0, 1e6, 30.0), (600.0, 2.0, 1e8, 4.0), (0.9, 8.0, 0.7, 3.0)]
     return points
 
@@ -340,11 +342,11 @@ def noncentral_row(p):
     row = [repr(f), repr(a2), repr(b2), repr(lam), text(lower), text(upper)]
     inverse = []
     central = f_tails(f, a2, b2)
-    # Only where the inverse is well posed: the value must differ from the central one by more than its own rounding.
-    if in_range(lower) and central[0] - lower > mpf('1e-4') * min(lower, upper) and upper > mpf('1e-4'):
+    # Only where the inverse is well posed: the value must differ from the central one by a thousandth of itself.
+    if in_range(lower) and central[0] - lower > mpf('1e-3') * min(lower, upper) and upper > mpf('1e-4'):
         c = float(lower)
         inverse.append(['cumulative', repr(f), repr(a2), repr(b2), repr(c), text(mpf(lam) + (lower - mpf(c)) / slope)])
-    if in_range(upper) and central[0] - lower > mpf('1e-4') * min(lower, upper) and lower > mpf('1e-4'):
+    if in_range(upper) and central[0] - lower > mpf('1e-3') * min(lower, upper) and lower > mpf('1e-4'):
         c = float(upper)
         inverse.append(['power', repr(f), repr(a2), repr(b2), repr(c), text(mpf(lam) - (upper - mpf(c)) / slope)])
     return row, inverse
@@ -412,7 +414,7 @@ def main():
         if not wanted or 't' in wanted:
             points = []
             for df in [0.5, 1, 2, 2.7, 5, 11.3, 30, 100, 998.5, 1e4, 1e6, 1e8, 2e11]:
-                for t in [1e-3, 0.05, 0.67, 1.3, 1.96, 2.6, 3.3, 4.5, 6, 8.4, 11, 15, 22, 30, 37, 60, 120, 250, 1e3, 1e6, 1e30, 1e140]:
+                for t in [1e-3, 0.05, 0.3, 0.67, 1, 1.3, 1.65, 1.96, 2.3, 2.6, 3.3, 4.5, 6, 8.4, 11, 15, 22, 30, 37, 60, 120, 250, 1e3, 1e6, 1e30, 1e140]:
                     if t * t < 46000 * 3 or df < 20:
                         points.append((float('%.9g' % (t * rng.uniform(0.9, 1.1))), float(df)))
             both = pool.map(t_row, points, 8)
@@ -430,7 +432,7 @@ def main():
                     points.append((float('%.8g' % (df * share)), float(df)))
             write('chi_squared.csv', 'chi-squared distribution', ['x', 'df', 'survival', 'log_survival'], pool.map(chi_row, points, 8), gamma)
         if not wanted or 'z' in wanted:
-            zs = [float('%.7g' % rng.uniform(-38, 38)) for _ in range(150)] + [float('%.7g' % rng.gauss(0, 2)) for _ in range(150)]
+            zs = [float('%.7g' % rng.uniform(-38, 38)) for _ in range(250)] + [float('%.7g' % rng.gauss(0, 2)) for _ in range(250)]
             zs += [0.0, 1e-9, -1e-9, 1.959963984540054, 37.5, -37.5]
             both = pool.map(normal_row, zs, 8)
             write('standard_normal.csv', 'normal upper tail', ['z', 'upper_tail'], [r for r, _ in both], mpf(0))
@@ -438,7 +440,6 @@ def main():
         if not wanted or 'n' in wanted:
             both = pool.map(noncentral_row, noncentral_points(), 1)
             rows = [r for r, _ in both] + pool.map(laguerre_row, laguerre_points(), 4)
-            rows = [r for r in rows if min(mpf(r[4]), mpf(r[5])) > mpf('-1')]
             write('noncentral_f.csv', 'noncentral F (mixture, then Laguerre sums)', ['f', 'df1', 'df2', 'lambda', 'cumulative', 'survival'], rows, max(mixed, normal))
             write('noncentral_f_inverse.csv', 'noncentrality with this cumulative or power', ['kind', 'f', 'df1', 'df2', 'p', 'lambda'], [i for _, each in both for i in each], max(mixed, normal))
 
