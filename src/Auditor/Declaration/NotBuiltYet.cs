@@ -17,19 +17,6 @@ public static class NotBuiltYet
         new("data.split", declaration => [declaration.Data.Structure.Split?.Line]),
         new("data.cluster", declaration => [declaration.Data.Structure.Cluster?.Line]),
         new("data.segments", declaration => [declaration.Data.Structure.Segments is [var first, ..] ? first.Line : null]),
-        new("weights of kind frequency", declaration => Weights(declaration, WeightKind.Frequency)),
-        new("weights of kind sampling", declaration => Weights(declaration, WeightKind.Sampling)),
-        new("columns of kind date", declaration => declaration.Data.Columns.Values.Where(column => column.Kind == Data.ColumnKind.Date).Select(column => (int?)column.Line)),
-        new("spline terms", Terms<SplineTerm>),
-        new("bins terms", Terms<BinsTerm>),
-        new("step terms", Terms<StepTerm>),
-        new("pulse terms", Terms<PulseTerm>),
-        new("season terms", Terms<SeasonTerm>),
-        new("trend terms", Terms<TrendTerm>),
-        new("ratio terms", Terms<RatioTerm>),
-        new("minus terms", Terms<MinusTerm>),
-        new("winsorise terms", Terms<WinsoriseTerm>),
-        new("cap terms", Terms<CapTerm>),
         new("lag terms", declaration => InTimeOrder(declaration, TimeOrderOperation.Lag)),
         new("change terms", declaration => InTimeOrder(declaration, TimeOrderOperation.Change)),
         new("moving_average terms", declaration => InTimeOrder(declaration, TimeOrderOperation.MovingAverage)),
@@ -45,12 +32,6 @@ public static class NotBuiltYet
                     select new Problem(declaration.File, line, "not built yet: " + entry.Subject);
         return [.. found];
     }
-
-    private static IEnumerable<int?> Weights(ModelDeclaration declaration, WeightKind kind) =>
-        [declaration.Data.Weights is { } weights && weights.Kind == kind ? weights.Line : null];
-
-    private static IEnumerable<int?> Terms<T>(ModelDeclaration declaration)
-        where T : Term => TermWalk.All(declaration.Response, declaration.FinalModel, declaration.LeftOut).OfType<T>().Select(term => (int?)term.Line);
 
     private static IEnumerable<int?> InTimeOrder(ModelDeclaration declaration, TimeOrderOperation operation) =>
         TermWalk.All(declaration.Response, declaration.FinalModel, declaration.LeftOut)
