@@ -10,7 +10,7 @@ namespace Auditor.Numerics.Distributions;
 /// Source: the Poisson mixture of central beta tails (Johnson, Kotz and Balakrishnan 1995, chapter 30, from memory), summed as
 /// <see cref="NoncentralTail"/> says. Work is bounded: about 20 sqrt(lambda) additions up to lambda of 4e6, fewer than a hundred central tails above.
 /// Verified to 1e-10 relative against 80-digit values (plain mixture; for even df2 a finite Laguerre sum with no mixture in it) for df1 from 0.5 to
-/// 3000, df2 from 0.7 to 3e8, lambda from 3e-9 to 3e7 (mixture) and 1e30 (Laguerre), both tails down to 1e-305; the inverses for lambda from 1e-3 to 3e7
+/// 3000, df2 from 0.7 to 3e8, lambda from 3e-9 to 3e7 (mixture) and 1e30 (Laguerre), both tails down to 1e-230; the inverses for lambda from 1e-3 to 3e7
 /// where the probability asked for differs from the central one by at least a thousandth of itself.
 /// Limits of a double: lambda and f are held to 1e-16, which above a lambda of about 1e8 alone moves a very small probability by more than 1e-10.
 /// </remarks>
