@@ -30,7 +30,7 @@ public sealed class IndicatorAndTimeBindingTests
     [Fact]
     public void An_indicator_of_a_level_that_is_not_there_names_the_nearest_or_the_few_there_are()
     {
-        Assert.Equal(["model.yaml:5: grade = 2: no kept row of column grade has '2'; known: 02, A, B, C"], Refused(_table, new IndicatorTerm(_grade, "2") { Line = 5 }));
+        Assert.Equal(["model.yaml:5: grade = 2: no kept row of column grade has '2'; did you mean '02'?"], Refused(_table, new IndicatorTerm(_grade, "2") { Line = 5 }));
         Assert.Equal(["model.yaml: region = sauth: no kept row of column region has 'sauth'; did you mean 'south'?"], Refused(Table(Levels("region", "south", "north")), new IndicatorTerm(Region, "sauth")));
         Assert.Equal(["model.yaml: note = west: no kept row of column note has 'west'; known: x, y, z"], Refused(_table, new IndicatorTerm(new ColumnTerm("note"), "west")));
         Assert.Equal(["model.yaml: year = new: column year holds numbers, found 'new'"], Refused(_table, new IndicatorTerm(_year, "new")));
