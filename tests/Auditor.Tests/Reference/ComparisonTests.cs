@@ -16,6 +16,15 @@ public sealed class ComparisonTests
 
     [Theory]
     [MemberData(nameof(Runs.Declarations), MemberType = typeof(Runs))]
+    public void Variance_inflation_agrees_with_other_programs(string name, string variant)
+    {
+        CaseRun run = CaseRun.Of(name, variant);
+        IReadOnlyList<Figure> figures = [.. VarianceInflationFigures.Of(run)];
+        Assert.All(figures, figure => Assert.True(figure.Holds(run.Case.Tolerance), figure.Describe()));
+    }
+
+    [Theory]
+    [MemberData(nameof(Runs.Declarations), MemberType = typeof(Runs))]
     public void Columns_that_add_nothing_are_named(string name, string variant)
     {
         CaseRun run = CaseRun.Of(name, variant);
