@@ -88,7 +88,7 @@ internal static class ExclusionFigures
             Figure("hc1", evidence?.Hc[1]),
             Figure("hc2", evidence?.Hc[2]),
             Figure("hc3", evidence?.Hc[3]),
-            Figure("score", evidence?.Score),
+            Figure("score", evidence?.Score) is { } score ? score with { CeilingP = evidence!.Ceiling.P } : null,
             null,
             null,
             null,

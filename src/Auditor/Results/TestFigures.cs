@@ -4,6 +4,7 @@ namespace Auditor.Results;
 
 /// <summary>One test as the record shows it.</summary>
 /// <param name="F">Null when the statistic has no finite value; <paramref name="Why"/> then says so.</param>
+/// <param name="CeilingP">Of a score form: the least p that an effect in this direction can reach, however large.</param>
 /// <param name="P">Upper tail probability; 0 when below 1e-300, and then <paramref name="Log10P"/> holds it.</param>
 public sealed record TestFigures(
     double? F,
@@ -11,7 +12,8 @@ public sealed record TestFigures(
     double? Df2,
     double? P,
     [property: JsonIgnore(Condition = JsonIgnoreCondition.WhenWritingNull)] double? Log10P = null,
-    [property: JsonIgnore(Condition = JsonIgnoreCondition.WhenWritingNull)] string? Why = null);
+    [property: JsonIgnore(Condition = JsonIgnoreCondition.WhenWritingNull)] string? Why = null,
+    [property: JsonIgnore(Condition = JsonIgnoreCondition.WhenWritingNull)] double? CeilingP = null);
 
 /// <summary>Every test of one group. One not computed is null and <see cref="Exclusion.TestsNotComputed"/> says why under its record name.</summary>
 public sealed record GroupTests(
