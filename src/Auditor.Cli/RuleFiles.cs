@@ -1,4 +1,5 @@
 using System.Text;
+using Auditor.Policies;
 using Auditor.Rules;
 
 namespace Auditor.Cli;

@@ -4,6 +4,7 @@ using Auditor.Declaration;
 using Auditor.Design;
 using Auditor.Facts;
 using Auditor.Findings;
+using Auditor.Policies;
 using Auditor.Reporting;
 using Auditor.Results;
 using Auditor.Rules;

@@ -1,6 +1,7 @@
 using System.Text.Json;
 using Auditor.Data;
 using Auditor.Declaration;
+using Auditor.Policies;
 using Auditor.Reporting;
 using Auditor.Rules;
 

@@ -1,6 +1,6 @@
 using Auditor.Numerics;
 using Auditor.Numerics.GroupTests;
-using Auditor.Rules;
+using Auditor.Policies;
 
 namespace Auditor.Analysis;
 

@@ -1,7 +1,7 @@
 using Auditor.Numerics;
 using Auditor.Numerics.GroupTests;
+using Auditor.Policies;
 using Auditor.Results;
-using Auditor.Rules;
 
 namespace Auditor.Analysis;
 

@@ -1,6 +1,6 @@
 using Auditor.Design;
+using Auditor.Policies;
 using Auditor.Results;
-using Auditor.Rules;
 
 namespace Auditor.Analysis;
 

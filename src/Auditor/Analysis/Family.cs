@@ -1,5 +1,5 @@
 using Auditor.Numerics.GroupTests;
-using Auditor.Rules;
+using Auditor.Policies;
 
 namespace Auditor.Analysis;
 

@@ -1,8 +1,8 @@
 using Auditor.Declaration;
 using Auditor.Design;
-using Auditor.Facts;
+using Auditor.Policies;
+using Auditor.Results;
 using Auditor.Rows;
-using Auditor.Rules;
 
 namespace Auditor.Analysis;
 

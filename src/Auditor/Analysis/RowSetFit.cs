@@ -1,8 +1,8 @@
+using Auditor.Data;
 using Auditor.Design;
 using Auditor.Numerics;
 using Auditor.Numerics.Factor;
 using Auditor.Numerics.SecondPass;
-using Auditor.Rows;
 
 namespace Auditor.Analysis;
 

@@ -1,7 +1,7 @@
 using System.Globalization;
 using Auditor.Numerics;
+using Auditor.Policies;
 using Auditor.Results;
-using Auditor.Rules;
 
 namespace Auditor.Analysis;
 

@@ -1,6 +1,6 @@
+using Auditor.Data;
 using Auditor.Declaration;
 using Auditor.Numerics.Factor;
-using Auditor.Rows;
 
 namespace Auditor.Design;
 

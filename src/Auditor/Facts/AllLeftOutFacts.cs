@@ -1,5 +1,5 @@
+using Auditor.Policies;
 using Auditor.Results;
-using Auditor.Rules;
 
 namespace Auditor.Facts;
 

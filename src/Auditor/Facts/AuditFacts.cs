@@ -1,7 +1,7 @@
 using Auditor.Declaration;
 using Auditor.Design;
+using Auditor.Policies;
 using Auditor.Results;
-using Auditor.Rules;
 
 namespace Auditor.Facts;
 
@@ -51,17 +51,3 @@ internal static class AuditFacts
         _ => [],
     };
 }
-
-/// <summary>The results that facts are drawn from.</summary>
-internal sealed record AuditResults(
-    string ModelId,
-    RowAccount Rows,
-    FitSummary FinalFit,
-    FitSummary? OtherFit,
-    bool Perfect,
-    IReadOnlyList<Exclusion> Exclusions,
-    IReadOnlyList<ExclusionInputs> ExclusionInputs,
-    Exclusion? AllLeftOut,
-    IReadOnlyList<CheckResult> Checks,
-    Influence Influence,
-    Collinearity Collinearity);

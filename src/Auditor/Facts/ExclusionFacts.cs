@@ -1,12 +1,7 @@
+using Auditor.Policies;
 using Auditor.Results;
-using Auditor.Rules;
 
 namespace Auditor.Facts;
-
-/// <summary>What an exclusion's facts need beside its result.</summary>
-/// <param name="ProductsElsewhere">Labels of the products outside the group that hold one of its terms.</param>
-/// <param name="OwnRows">Rows whose leverage is 1 with the group and below 1 without it: the group holds their own dummies.</param>
-public sealed record ExclusionInputs(IReadOnlyList<string> ProductsElsewhere, IReadOnlyList<int> OwnRows);
 
 /// <summary>The facts of one left-out group.</summary>
 public static class ExclusionFacts

@@ -1,3 +1,4 @@
+using Auditor.Data;
 using Auditor.Design;
 
 namespace Auditor.Rows;

@@ -1,4 +1,5 @@
 using Auditor.Facts;
+using Auditor.Policies;
 using Auditor.Yaml;
 
 namespace Auditor.Rules;

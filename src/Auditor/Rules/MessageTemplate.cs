@@ -1,5 +1,6 @@
 using System.Text;
 using Auditor.Facts;
+using Auditor.Policies;
 
 namespace Auditor.Rules;
 

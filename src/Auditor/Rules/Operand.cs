@@ -1,4 +1,5 @@
 using Auditor.Facts;
+using Auditor.Policies;
 
 namespace Auditor.Rules;
 

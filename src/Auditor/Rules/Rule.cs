@@ -1,5 +1,6 @@
 using Auditor.Facts;
 using Auditor.Findings;
+using Auditor.Policies;
 
 namespace Auditor.Rules;
 

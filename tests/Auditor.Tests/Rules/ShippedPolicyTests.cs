@@ -1,4 +1,4 @@
-using Auditor.Rules;
+using Auditor.Policies;
 
 namespace Auditor.Tests.Rules;
 

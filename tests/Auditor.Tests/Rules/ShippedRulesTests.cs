@@ -1,5 +1,6 @@
 using System.Globalization;
 using Auditor.Facts;
+using Auditor.Policies;
 using Auditor.Rules;
 
 namespace Auditor.Tests.Rules;

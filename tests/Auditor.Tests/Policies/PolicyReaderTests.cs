@@ -1,7 +1,7 @@
 using System.Globalization;
-using Auditor.Rules;
+using Auditor.Policies;
 
-namespace Auditor.Tests.Rules;
+namespace Auditor.Tests.Policies;
 
 public sealed class PolicyReaderTests
 {

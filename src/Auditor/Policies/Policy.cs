@@ -1,6 +1,6 @@
 using System.Diagnostics.CodeAnalysis;
 
-namespace Auditor.Rules;
+namespace Auditor.Policies;
 
 /// <summary>How p-values are adjusted for the number of left-out groups.</summary>
 public enum AdjustmentMethod

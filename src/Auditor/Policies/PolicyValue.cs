@@ -1,6 +1,4 @@
-using Auditor.Facts;
-
-namespace Auditor.Rules;
+namespace Auditor.Policies;
 
 /// <summary>What a policy value is; a firm's own value must be of the same type as the shipped one.</summary>
 public enum PolicyType
@@ -36,14 +34,5 @@ public sealed record PolicyValue(PolicyType Type, double? Number, bool? Flag, st
         PolicyType.Flag => Flag!.Value,
         PolicyType.Text => Text!,
         _ => Number!.Value,
-    };
-
-    /// <summary>The value as the right side of a comparison with a fact.</summary>
-    internal FactValue AsFact() => Type switch
-    {
-        PolicyType.Count => new FactValue.Count((long)Number!.Value),
-        PolicyType.Flag => new FactValue.Flag(Flag!.Value),
-        PolicyType.Text => new FactValue.Text(Text!),
-        _ => new FactValue.Number(Number!.Value),
     };
 }

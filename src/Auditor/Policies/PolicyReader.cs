@@ -1,7 +1,7 @@
 using System.Globalization;
 using Auditor.Yaml;
 
-namespace Auditor.Rules;
+namespace Auditor.Policies;
 
 /// <summary>
 /// Reads the shipped policy, which defines every name, and lays a firm's own values over it. All problems are listed, the shipped

@@ -1,7 +1,7 @@
 using System.Globalization;
 using Auditor.Yaml;
 
-namespace Auditor.Rules;
+namespace Auditor.Policies;
 
 /// <summary>One line of a policy file, not yet checked.</summary>
 internal sealed record PolicyEntry(string File, MapEntry Entry)

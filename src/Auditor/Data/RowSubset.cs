@@ -1,4 +1,4 @@
-namespace Auditor.Rows;
+namespace Auditor.Data;
 
 /// <summary>Some rows of the table, ascending, 0-based. Two subsets are equal when they hold the same rows: groups with one missing pattern share a factor.</summary>
 public sealed class RowSubset(int[] rows) : IEquatable<RowSubset>

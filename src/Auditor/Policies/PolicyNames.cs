@@ -1,4 +1,4 @@
-namespace Auditor.Rules;
+namespace Auditor.Policies;
 
 /// <summary>The fixed names of a policy, their words and their ranges. Every further name is defined by the shipped file alone.</summary>
 internal static class PolicyNames
@@ -23,14 +23,14 @@ internal static class PolicyNames
 
     public static readonly OrderedDictionary<string, BasisWithoutStructure> Bases = new(StringComparer.Ordinal)
     {
-        ["hc3"] = Rules.BasisWithoutStructure.Hc3,
-        ["classical"] = Rules.BasisWithoutStructure.Classical,
+        ["hc3"] = Policies.BasisWithoutStructure.Hc3,
+        ["classical"] = Policies.BasisWithoutStructure.Classical,
     };
 
     public static readonly OrderedDictionary<string, RowSet> RowSets = new(StringComparer.Ordinal)
     {
-        ["own"] = Rules.RowSet.Own,
-        ["common"] = Rules.RowSet.Common,
+        ["own"] = Policies.RowSet.Own,
+        ["common"] = Policies.RowSet.Common,
     };
 
     /// <summary>What may stand under each fixed name, and its default.</summary>

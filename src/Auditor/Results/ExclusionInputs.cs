@@ -1,0 +1,6 @@
+namespace Auditor.Results;
+
+/// <summary>What an exclusion's facts need beside its result.</summary>
+/// <param name="ProductsElsewhere">Labels of the products outside the group that hold one of its terms.</param>
+/// <param name="OwnRows">Rows whose leverage is 1 with the group and below 1 without it: the group holds their own dummies.</param>
+public sealed record ExclusionInputs(IReadOnlyList<string> ProductsElsewhere, IReadOnlyList<int> OwnRows);
