@@ -12,20 +12,20 @@ internal static class AuditCommand
         var inputs = InputFiles.Read(request);
         if (inputs.Value is null)
         {
-            return Unusable(inputs.Problems);
+            return Complaint.Unusable(inputs.Problems);
         }
 
         Log.Debug("Auditing {Model} on {Rows} rows", inputs.Value.Declaration.Model.Id, inputs.Value.Table.RowCount);
         var audited = Audit.Run(inputs.Value);
         if (audited.Value is not { } record)
         {
-            return Unusable(audited.Problems);
+            return Complaint.Unusable(audited.Problems);
         }
 
         var written = OutputFiles.Write(request, record);
         if (written.Value is null)
         {
-            return Unusable(written.Problems);
+            return Complaint.Unusable(written.Problems);
         }
 
         if (!request.Quiet)
@@ -44,14 +44,4 @@ internal static class AuditCommand
         failOn is { } least && record.Findings.Any(finding => finding.Accepted is null && finding.Severity >= least)
             ? ExitStatus.Found
             : ExitStatus.Audited;
-
-    private static int Unusable(IReadOnlyList<Problem> problems)
-    {
-        foreach (var problem in problems)
-        {
-            Console.Error.WriteLine(problem);
-        }
-
-        return ExitStatus.Unusable;
-    }
 }

@@ -22,24 +22,23 @@ internal sealed record AuditRequest(
 /// <summary>The options of an audit, the same after a declaration and after <c>demo</c>.</summary>
 internal sealed class AuditOptions
 {
-    private readonly Option<string?> _out = Text("--out", "DIR", "Folder for the report and the record (default: audit-out beside the declaration; demo: ./audit-out).");
-    private readonly Option<string?> _policy = Text("--policy", "FILE", "The firm's overrides of rules/policy.yaml.");
-    private readonly Option<string?> _acceptances = Text("--acceptances", "FILE", "Findings that a named approver has accepted (not built yet).");
-    private readonly Option<string?> _asOf = Text("--as-of", "DATE", "The day that decides expiry, YYYY-MM-DD in UTC (default: today, or SOURCE_DATE_EPOCH).");
-    private readonly Option<string?> _rules = Text("--rules", "DIR", "Replaces the rule folder; without its own policy.yaml the shipped one holds.");
-    private readonly Option<string?> _dataRoot = Text("--data-root", "DIR", "Folder that the data may lie in, besides the declaration's own.");
-    private readonly Option<string?> _formats = Text("--formats", "LIST", "Any of html,json (default: both).");
-    private readonly Option<string?> _failOn = Text("--fail-on", "SEVERITY", "high | medium | low | never (default: high).");
-    private readonly Option<string?> _threads = Text("--threads", "N", "Threads to use (default: one for each processor).");
-    private readonly Option<string?> _memory = Text("--memory", "SIZE", "Most memory for the data, such as 512M or 4G.");
-    private readonly Option<string?> _seed = Text("--seed", "N", "Seed of everything drawn at random, kept in the record (default 1).");
+    private readonly RuleOptions _rules = new();
+    private readonly Option<string?> _out = Options.Text("--out", "DIR", "Folder for the report and the record (default: audit-out beside the declaration; demo: ./audit-out).");
+    private readonly Option<string?> _acceptances = Options.Text("--acceptances", "FILE", "Findings that a named approver has accepted (not built yet).");
+    private readonly Option<string?> _asOf = Options.Text("--as-of", "DATE", "The day that decides expiry, YYYY-MM-DD in UTC (default: today, or SOURCE_DATE_EPOCH).");
+    private readonly Option<string?> _dataRoot = Options.Text("--data-root", "DIR", "Folder that the data may lie in, besides the declaration's own.");
+    private readonly Option<string?> _formats = Options.Text("--formats", "LIST", "Any of html,json (default: both).");
+    private readonly Option<string?> _failOn = Options.Text("--fail-on", "SEVERITY", "high | medium | low | never (default: high).");
+    private readonly Option<string?> _threads = Options.Text("--threads", "N", "Threads to use (default: one for each processor).");
+    private readonly Option<string?> _memory = Options.Text("--memory", "SIZE", "Most memory for the data, such as 512M or 4G.");
+    private readonly Option<string?> _seed = Options.Text("--seed", "N", "Seed of everything drawn at random, kept in the record (default 1).");
     private readonly Option<bool> _quiet = new("--quiet") { Description = "Nothing on standard output." };
     private readonly Option<bool> _verbose = new("--verbose") { Description = "Steps on standard error." };
     private readonly Option<bool> _noProgress = new("--no-progress") { Description = "No progress on the terminal." };
 
     public void AddTo(Command command)
     {
-        Option[] all = [_out, _policy, _acceptances, _asOf, _rules, _dataRoot, _formats, _failOn, _threads, _memory, _seed, _quiet, _verbose, _noProgress];
+        Option[] all = [_out, .. _rules.All, _acceptances, _asOf, _dataRoot, _formats, _failOn, _threads, _memory, _seed, _quiet, _verbose, _noProgress];
         foreach (var option in all)
         {
             command.Options.Add(option);
@@ -59,8 +58,8 @@ internal sealed class AuditOptions
         var request = new AuditRequest(
             declaration,
             parsed.GetValue(_out) ?? defaultOut,
-            parsed.GetValue(_policy),
-            parsed.GetValue(_rules),
+            _rules.PolicyFile(parsed),
+            _rules.Folder(parsed),
             parsed.GetValue(_dataRoot),
             OptionValues.Formats(parsed.GetValue(_formats), problems),
             OptionValues.FailOn(parsed.GetValue(_failOn), problems),
@@ -70,7 +69,4 @@ internal sealed class AuditOptions
             parsed.GetValue(_quiet));
         return problems.Count == before ? request : null;
     }
-
-    private static Option<string?> Text(string name, string value, string description) =>
-        new(name) { HelpName = value, Description = description };
 }

@@ -16,6 +16,7 @@ internal sealed class CommandLine
 
     private readonly AuditOptions _rootOptions = new();
     private readonly AuditOptions _demoOptions = new();
+    private readonly RuleOptions _ruleOptions = new();
     private readonly Command _demo = new("demo", "Audit the bundled demo and say where the report is.");
     private readonly Command _new = new("new", "Write a commented first declaration (not built yet).") { TreatUnmatchedTokensAsErrors = false };
     private readonly Command _rules = new("rules", "List the rules and facts, or explain one.");
@@ -30,6 +31,11 @@ internal sealed class CommandLine
         _demoOptions.AddTo(_demo);
         _root.SetAction(_ => ExitStatus.Audited); // The parser wants one; what runs is decided in Run.
         _rules.Arguments.Add(_ruleId);
+        foreach (var option in _ruleOptions.All)
+        {
+            _rules.Options.Add(option);
+        }
+
         foreach (var command in new[] { _demo, _new, _rules, _selfTest })
         {
             _root.Subcommands.Add(command);
@@ -70,7 +76,7 @@ internal sealed class CommandLine
 
         if (command == _rules)
         {
-            return RulesCommand.Run(parsed.GetValue(_ruleId));
+            return RulesCommand.Run(parsed.GetValue(_ruleId), _ruleOptions.Folder(parsed), _ruleOptions.PolicyFile(parsed));
         }
 
         if (command != _root)

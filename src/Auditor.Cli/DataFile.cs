@@ -23,7 +23,7 @@ internal sealed record DataFile(IDataSource Source, string Sha256)
 
     private static string? Fault(string path, string source, string folder, AuditRequest request)
     {
-        if (!Within(path, folder) && !(request.DataRoot is { } root && Within(path, Path.GetFullPath(root))))
+        if (!RealPath.Within(path, folder) && !(request.DataRoot is { } root && RealPath.Within(path, root)))
         {
             return $"'{source}' lies outside the declaration's folder; allow it with --data-root DIR";
         }
@@ -67,7 +67,7 @@ internal sealed record DataFile(IDataSource Source, string Sha256)
 
             var data = new CsvSource(source, () => File.OpenRead(path), DelimitedFormat.FromFileName(path)!);
             var columns = data.ReadColumnNames();
-            var problems = columns.Value is { } names ? ColumnCheck.Unknown(request.Declaration, reading.Mentions, names) : columns.Problems;
+            var problems = columns.Value is { } names ? ColumnCheck.Problems(request.Declaration, reading.Mentions, names) : columns.Problems;
             return problems.Count > 0 ? Reading<DataFile>.Failed(problems) : Reading<DataFile>.Of(new DataFile(data, hash));
         }
         catch (Exception fault) when (fault is IOException or UnauthorizedAccessException)
@@ -80,14 +80,6 @@ internal sealed record DataFile(IDataSource Source, string Sha256)
     {
         using var stream = File.OpenRead(path);
         return Convert.ToHexStringLower(SHA256.HashData(stream));
-    }
-
-    /// <summary>Links count as where they lead.</summary>
-    private static bool Within(string path, string folder)
-    {
-        var target = File.ResolveLinkTarget(path, returnFinalTarget: true)?.FullName ?? path;
-        var relative = Path.GetRelativePath(folder, target);
-        return relative != ".." && !relative.StartsWith(".." + Path.DirectorySeparatorChar, StringComparison.Ordinal) && !Path.IsPathRooted(relative);
     }
 
     private static Reading<DataFile> Failed(AuditRequest request, int? line, string message) =>

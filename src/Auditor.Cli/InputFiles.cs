@@ -46,6 +46,6 @@ internal static class InputFiles
             CommandLine.Version,
             request.Seed,
             Clock.Started);
-        return Reading<AuditInputs>.Of(new AuditInputs(declaration, mentions, table.Value, rules.Policy, rules.Rules, provenance));
+        return Reading<AuditInputs>.Of(new AuditInputs(declaration, mentions, table.Value, rules.Policy, rules.Rules, provenance, request.Threads));
     }
 }

@@ -3,7 +3,7 @@ using Auditor.Reporting;
 
 namespace Auditor.Cli;
 
-/// <summary>Writes all outputs under temporary names and renames them together: a run that does not finish leaves no half of any.</summary>
+/// <summary>The report and the record of an audit, put in place together.</summary>
 internal static class OutputFiles
 {
     /// <summary>The paths written, or why the folder cannot be used.</summary>
@@ -12,27 +12,9 @@ internal static class OutputFiles
         var outputs = request.Formats
             .Select(format => (Path: Path.Combine(request.OutputFolder, record.Model.Id + "." + format), Bytes: Render(format, record)))
             .ToList();
-        var temporary = outputs.Select(output => output.Path + ".tmp-" + Guid.NewGuid().ToString("N")).ToList();
-        try
-        {
-            Directory.CreateDirectory(request.OutputFolder);
-            foreach (var (output, path) in outputs.Zip(temporary))
-            {
-                File.WriteAllBytes(path, output.Bytes);
-            }
-
-            foreach (var (output, path) in outputs.Zip(temporary))
-            {
-                File.Move(path, output.Path, overwrite: true);
-            }
-
-            return Reading<IReadOnlyList<string>>.Of([.. outputs.Select(output => output.Path)]);
-        }
-        catch (Exception fault) when (fault is IOException or UnauthorizedAccessException)
-        {
-            temporary.ForEach(File.Delete);
-            return Reading<IReadOnlyList<string>>.Failed(new Problem(request.OutputFolder, null, "the outputs cannot be written here: " + fault.Message));
-        }
+        return FilesTogether.Put(request.OutputFolder, outputs) is { } fault
+            ? Reading<IReadOnlyList<string>>.Failed(new Problem(request.OutputFolder, null, "the outputs cannot be written here: " + fault))
+            : Reading<IReadOnlyList<string>>.Of([.. outputs.Select(output => output.Path)]);
     }
 
     private static byte[] Render(string format, AuditRecord record) => format switch

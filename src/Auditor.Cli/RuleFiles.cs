@@ -24,12 +24,16 @@ internal sealed record RuleFiles(Policy Policy, IReadOnlyList<Rule> Rules, strin
         var policyFile = File.Exists(own) ? own : BundledFiles.Policy;
         var names = Directory.GetFiles(rules, "*.yaml").Where(file => Path.GetFileName(file) != PolicyName).Order(StringComparer.Ordinal);
         string[] paths = [policyFile, .. firmPolicy is null ? Array.Empty<string>() : [firmPolicy], .. names];
-        var texts = paths.Select(path => (Path: path, Reading: FileText.Read(path))).ToList();
+        var texts = paths.Select(path => (Path: Named(path), Reading: FileText.Read(path))).ToList();
         var unread = texts.SelectMany(text => text.Reading.Problems).ToList();
-        return unread.Count > 0 ? Reading<RuleFiles>.Failed(unread) : Read(texts.ConvertAll(text => (text.Path, text.Reading.Value!)), firmPolicy is not null);
+        return unread.Count > 0 ? Reading<RuleFiles>.Failed(unread) : Read(rules, texts.ConvertAll(text => (text.Path, text.Reading.Value!)), firmPolicy is not null);
     }
 
-    private static Reading<RuleFiles> Read(List<(string Path, FileText Text)> files, bool withFirm)
+    /// <summary>A shipped file is named as in the documentation, not by where this copy of the program lies.</summary>
+    private static string Named(string path) =>
+        Path.GetDirectoryName(path) == BundledFiles.Rules ? "rules/" + Path.GetFileName(path) : path;
+
+    private static Reading<RuleFiles> Read(string folder, List<(string Path, FileText Text)> files, bool withFirm)
     {
         var policy = PolicyReader.Read(
             files[0].Text.Text, files[0].Path, withFirm ? files[1].Text.Text : null, withFirm ? files[1].Path : null);
@@ -40,8 +44,8 @@ internal sealed record RuleFiles(Policy Policy, IReadOnlyList<Rule> Rules, strin
 
         var rules = RuleReader.Read([.. files.Skip(withFirm ? 2 : 1).Select(file => (file.Path, file.Text.Text))], policy.Value);
         var hashes = string.Join('\n', files.Select(file => file.Text.Sha256));
-        return rules.Value is null
-            ? Reading<RuleFiles>.Failed(rules.Problems)
+        return rules.Value is null ? Reading<RuleFiles>.Failed(rules.Problems)
+            : rules.Value.Count == 0 ? Reading<RuleFiles>.Failed(new Problem(folder, null, "found no rule in this folder, expected at least one in its .yaml files"))
             : Reading<RuleFiles>.Of(new RuleFiles(policy.Value, rules.Value, FileText.Hash(Encoding.UTF8.GetBytes(hashes))));
     }
 }

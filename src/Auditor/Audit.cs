@@ -28,7 +28,7 @@ public static class Audit
         }
 
         var mentioned = inputs.Mentions.Select(mention => mention.Column).ToHashSet(StringComparer.Ordinal);
-        var analysis = ModelAnalysis.Run(declaration, bound.Value.Model, mentioned, inputs.Policy);
+        var analysis = ModelAnalysis.Run(declaration, bound.Value.Model, mentioned, inputs.Policy, inputs.Threads);
         if (analysis.Value is not { } results)
         {
             return Reading<AuditRecord>.Failed(analysis.Problems);
@@ -80,10 +80,12 @@ public static class Audit
 
 /// <summary>All that an audit depends on.</summary>
 /// <param name="Mentions">Every data column that the declaration names.</param>
+/// <param name="Threads">Most threads to compute with. No result depends on it.</param>
 public sealed record AuditInputs(
     ModelDeclaration Declaration,
     IReadOnlyList<ColumnMention> Mentions,
     DataTable Table,
     Policy Policy,
     IReadOnlyList<Rule> Rules,
-    Provenance Provenance);
+    Provenance Provenance,
+    int Threads = 1);

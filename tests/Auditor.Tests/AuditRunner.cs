@@ -25,18 +25,24 @@ internal static class AuditRunner
 
     public static Reading<AuditRecord> Try(string declaration, Func<string, Stream> open, string policyYaml = "")
     {
+        var inputs = Inputs(declaration, open, policyYaml);
+        return inputs.Value is null ? Reading<AuditRecord>.Failed(inputs.Problems) : Audit.Run(inputs.Value);
+    }
+
+    public static Reading<AuditInputs> Inputs(string declaration, Func<string, Stream> open, string policyYaml = "")
+    {
         var reading = DeclarationReader.Read(declaration, "declaration.yaml");
         if (reading.Declaration is not { } model)
         {
-            return Reading<AuditRecord>.Failed(reading.Problems);
+            return Reading<AuditInputs>.Failed(reading.Problems);
         }
 
         var source = new CsvSource(model.Data.Sources[0], () => open(model.Data.Sources[0]), DelimitedFormat.FromFileName(model.Data.Sources[0])!);
         var table = source.Read(ColumnCheck.Requests(model, reading.Mentions), model.Data.Missing);
         var policy = Value(PolicyReader.Read(Shipped("policy.yaml"), "policy.yaml", policyYaml.Length > 0 ? policyYaml : null, "test-policy.yaml"));
         return table.Value is null
-            ? Reading<AuditRecord>.Failed(table.Problems)
-            : Audit.Run(new AuditInputs(
+            ? Reading<AuditInputs>.Failed(table.Problems)
+            : Reading<AuditInputs>.Of(new AuditInputs(
                 model, reading.Mentions, table.Value, policy, Rules(policy), Provenance with { DataSha256 = Hash(open, model.Data.Sources[0]) }));
     }
 

@@ -9,7 +9,7 @@ namespace Auditor.Analysis;
 /// <summary>From a bound model to all results: row sets, fits, exclusions, checks.</summary>
 internal static class ModelAnalysis
 {
-    public static Reading<AuditResults> Run(ModelDeclaration declaration, BoundModel model, IReadOnlyCollection<string> mentioned, Policy policy)
+    public static Reading<AuditResults> Run(ModelDeclaration declaration, BoundModel model, IReadOnlyCollection<string> mentioned, Policy policy, int threads)
     {
         var selection = RowSelection.Of(model);
         var common = policy.RowSet == RowSet.Common;
@@ -18,7 +18,7 @@ internal static class ModelAnalysis
             return Reading<AuditResults>.Failed(NoRows(declaration, common));
         }
 
-        var fits = ModelFits.Compute(model, selection);
+        var fits = ModelFits.Compute(model, selection, threads);
         var sampling = model.Weights?.Kind == WeightKind.Sampling;
         var main = (common ? fits.Common : fits.Final)!;
         var other = selection.Final.Equals(selection.Common) ? null : common ? fits.Final : fits.Common;

@@ -22,7 +22,30 @@ internal sealed class ModelFits
     /// <summary>The final model and all groups on the rows complete for everything; null when there is no such row.</summary>
     public RowSetFit? Common => On(Selection.Common);
 
-    public static ModelFits Compute(BoundModel model, RowSelection selection)
+    /// <param name="threads">Most row sets to work on at once; each is computed by itself, so no result depends on it.</param>
+    public static ModelFits Compute(BoundModel model, RowSelection selection, int threads)
+    {
+        var wanted = Wanted(model, selection).Where(entry => entry.Key.Count > 0).ToArray();
+        var computed = new RowSetFit[wanted.Length];
+        Parallel.For(
+            0,
+            wanted.Length,
+            new ParallelOptions { MaxDegreeOfParallelism = threads },
+            at => computed[at] = RowSetFit.Compute(model, wanted[at].Key, [.. wanted[at].Value], wanted[at].Key.Equals(selection.Common)));
+        var fits = new ModelFits(selection);
+        foreach (var fit in computed)
+        {
+            fits._fits[fit.Rows] = fit;
+        }
+
+        return fits;
+    }
+
+    /// <summary>The fit of a group's own rows; null when it has none.</summary>
+    public RowSetFit? Own(int group) => On(Selection.Own[group]);
+
+    /// <summary>The groups to be tested on each distinct row set.</summary>
+    private static Dictionary<RowSubset, SortedSet<int>> Wanted(BoundModel model, RowSelection selection)
     {
         var wanted = new Dictionary<RowSubset, SortedSet<int>> { [selection.Final] = [] };
         wanted.TryAdd(selection.Common, []);
@@ -33,17 +56,8 @@ internal sealed class ModelFits
             wanted[selection.Common].Add(g);
         }
 
-        var fits = new ModelFits(selection);
-        foreach (var (rows, groups) in wanted.Where(entry => entry.Key.Count > 0))
-        {
-            fits._fits[rows] = RowSetFit.Compute(model, rows, [.. groups], rows.Equals(selection.Common));
-        }
-
-        return fits;
+        return wanted;
     }
-
-    /// <summary>The fit of a group's own rows; null when it has none.</summary>
-    public RowSetFit? Own(int group) => On(Selection.Own[group]);
 
     private RowSetFit? On(RowSubset rows) => _fits.GetValueOrDefault(rows);
 }

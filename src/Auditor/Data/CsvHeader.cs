@@ -3,7 +3,10 @@ using nietras.SeparatedValues;
 
 namespace Auditor.Data;
 
-/// <summary>The first row of a delimited file: the column names, exactly as they stand.</summary>
+/// <summary>
+/// The first row of a delimited file: the column names, exactly as they stand. Names may be blank or stand twice (row numbers written by
+/// another program often have no name); only a column that is asked for must have a name of its own.
+/// </summary>
 internal static class CsvHeader
 {
     private const int Line = 1;
@@ -28,20 +31,27 @@ internal static class CsvHeader
             names.Add(QuotedField.Content(field).ToString());
         }
 
-        return names is [""] ? [Empty(file)] : [.. Nameless(file, names), .. Repeated(file, names)];
+        return names is [""] ? [Empty(file)] : [];
     }
 
+    /// <summary>One problem for each wanted column that the header does not name exactly once.</summary>
+    public static IReadOnlyList<Problem> Check(string file, IReadOnlyList<string> names, IEnumerable<string> wanted) =>
+        [.. from column in wanted.Distinct(StringComparer.Ordinal)
+            let places = Places(names, column)
+            where places.Count != 1
+            select new Problem(file, Line, places.Count == 0 ? $"column {column} is not in the header" : Repeated(column, places))];
+
+    /// <summary>The positions of a name, 1-based.</summary>
+    public static IReadOnlyList<int> Places(IReadOnlyList<string> names, string column) =>
+        [.. Enumerable.Range(1, names.Count).Where(place => names[place - 1] == column)];
+
+    public static string Repeated(string column, IReadOnlyList<int> places) =>
+        $"the header names {CellText.Shown(column)} more than once, in columns {string.Join(" and ", places)}";
+
+    /// <summary>A column as lists name it: a blank name would be lost in them.</summary>
+    public static string Shown(string name, int index) => string.IsNullOrWhiteSpace(name)
+        ? string.Create(CultureInfo.InvariantCulture, $"column {index + 1} (no name)")
+        : name;
+
     private static Problem Empty(string file) => new(file, null, "found no text on the first line, expected the column names");
-
-    private static IEnumerable<Problem> Nameless(string file, List<string> names) =>
-        from index in Enumerable.Range(0, names.Count)
-        where string.IsNullOrWhiteSpace(names[index])
-        select new Problem(file, Line, string.Create(CultureInfo.InvariantCulture, $"column {index + 1} of {names.Count} has no name in the header"));
-
-    private static IEnumerable<Problem> Repeated(string file, List<string> names) =>
-        from index in Enumerable.Range(0, names.Count)
-        where !string.IsNullOrWhiteSpace(names[index])
-        group index + 1 by names[index] into places
-        where places.Count() > 1
-        select new Problem(file, Line, $"the header names {CellText.Shown(places.Key)} more than once, in columns {string.Join(" and ", places)}");
 }

@@ -23,10 +23,8 @@ public sealed class CsvSource(string name, Func<Stream> open, DelimitedFormat fo
             return Reading<DataTable>.Failed(header.Problems);
         }
 
-        var unknown = columns.Where(column => !names.Contains(column.Column, StringComparer.Ordinal)).ToList();
-        return unknown.Count == 0
-            ? Read(names, columns, new MissingTexts(missing))
-            : Reading<DataTable>.Failed([.. unknown.Select(column => new Problem(name, 1, $"column {column.Column} is not in the header"))]);
+        var problems = CsvHeader.Check(name, names, columns.Select(column => column.Column));
+        return problems.Count == 0 ? Read(names, columns, new MissingTexts(missing)) : Reading<DataTable>.Failed(problems);
     }
 
     private Reading<DataTable> Read(IReadOnlyList<string> names, IReadOnlyList<ColumnRequest> requests, MissingTexts missing)
@@ -75,8 +73,7 @@ public sealed class CsvSource(string name, Func<Stream> open, DelimitedFormat fo
         IReadOnlyList<string> names, List<(string Column, ColumnKind Kind)> columns, MissingTexts missing, int expectedRows, int most = int.MaxValue)
     {
         List<ColumnBuilder> builders = [.. columns.Select(column => ColumnBuilder.Of(column.Kind, column.Column, missing, expectedRows))];
-        var position = names.Select((column, index) => (column, index)).ToDictionary(pair => pair.column, pair => pair.index, StringComparer.Ordinal);
-        var rows = new CsvRows(name, names.Count, [.. columns.Select(column => position[column.Column])], builders);
+        var rows = new CsvRows(name, names.Count, [.. columns.Select(column => CsvHeader.Places(names, column.Column)[0] - 1)], builders);
         return new FullPass(builders, rows, _file.Pass(reader => rows.Read(reader, most)));
     }
 

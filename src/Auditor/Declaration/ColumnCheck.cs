@@ -6,15 +6,15 @@ namespace Auditor.Declaration;
 /// <summary>Holds the columns that a declaration names against the columns of the data.</summary>
 public static class ColumnCheck
 {
-    /// <summary>One problem for each mention of a column that the data do not have.</summary>
-    public static IReadOnlyList<Problem> Unknown(string file, IReadOnlyList<ColumnMention> mentions, IReadOnlyList<string> columns)
+    /// <summary>One problem for each mention of a column that the data do not have, or have more than once.</summary>
+    public static IReadOnlyList<Problem> Problems(string file, IReadOnlyList<ColumnMention> mentions, IReadOnlyList<string> columns)
     {
-        var known = columns.ToHashSet(StringComparer.Ordinal);
-        return [.. mentions
-            .Where(mention => !known.Contains(mention.Column))
-            .Select(mention => new Problem(
-                file, mention.Line, $"{mention.Where}: the data have no column '{mention.Column}'" + NearestName.Hint(mention.Column, columns)))
-            .Distinct()];
+        string[] named = [.. columns.Where(column => !string.IsNullOrWhiteSpace(column)).Distinct(StringComparer.Ordinal)];
+        var problems = from mention in mentions
+                       let fault = Fault(mention.Column, columns, named)
+                       where fault is not null
+                       select new Problem(file, mention.Line, mention.Where + ": " + fault);
+        return [.. problems.Distinct()];
     }
 
     /// <summary>What to read: every mentioned column once, with its declared kind; a row label is text.</summary>
@@ -23,6 +23,13 @@ public static class ColumnCheck
             .Select(mention => mention.Column)
             .Distinct(StringComparer.Ordinal)
             .Select(column => new ColumnRequest(column, Kind(declaration, mentions, column)))];
+
+    private static string? Fault(string column, IReadOnlyList<string> columns, IReadOnlyCollection<string> named) => CsvHeader.Places(columns, column) switch
+    {
+        [] => $"the data have no column '{column}'" + NearestName.Hint(column, named),
+        [_] => null,
+        var places => CsvHeader.Repeated(column, places) + "; rename one of them in the data",
+    };
 
     private static ColumnKind? Kind(ModelDeclaration declaration, IReadOnlyList<ColumnMention> mentions, string column)
     {

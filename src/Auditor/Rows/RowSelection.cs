@@ -56,8 +56,11 @@ public sealed class RowSelection
             (common ? Common : Final).Count,
             MissingByColumn(),
             UndefinedByTerm(),
-            [.. _model.Table.SourceColumns.Where(name => !mentioned.Contains(name))]);
+            Unmentioned(mentioned));
     }
+
+    private IReadOnlyList<string> Unmentioned(IReadOnlyCollection<string> mentioned) =>
+        [.. _model.Table.SourceColumns.Index().Where(column => !mentioned.Contains(column.Item)).Select(column => CsvHeader.Shown(column.Item, column.Index))];
 
     private bool LacksGroupValue(int row) =>
         _model.Groups.Any(group => group.Terms.Any(term => term.Sources.Any(source => source.IsMissing(row))));
