@@ -1,0 +1,39 @@
+using System.CommandLine;
+using System.Diagnostics;
+
+namespace Auditor.Simulation;
+
+/// <summary>Measures the tests, verdicts and intervals of the audit on simulated data; README.md says how and what came out.</summary>
+internal static class Program
+{
+    private const string Results = "tests/Auditor.Simulation/results.md";
+
+    public static int Main(string[] args)
+    {
+        var draws = new Option<int>("--draws") { Description = "Data sets for each cell.", DefaultValueFactory = _ => 2000 };
+        var seed = new Option<ulong>("--seed") { Description = "Seed of all random numbers.", DefaultValueFactory = _ => 1 };
+        var write = new Option<string?>("--write")
+        {
+            Description = "Write the tables to a file too, as seen from the root of the repository: " + Results,
+            HelpName = "FILE",
+            Arity = ArgumentArity.ZeroOrOne,
+        };
+        var root = new RootCommand("Simulation of the audit's tests, verdicts and intervals.") { draws, seed, write };
+        root.SetAction(parsed => Run(parsed.GetValue(draws), parsed.GetValue(seed), parsed.GetResult(write) is null ? null : parsed.GetValue(write) ?? Results));
+        return root.Parse(args).Invoke();
+    }
+
+    private static void Run(int draws, ulong seed, string? file)
+    {
+        var (clock, policies) = (Stopwatch.StartNew(), Policies.Read());
+        var results = new Study(policies, seed, draws).Run();
+        var text = ResultText.Of(results, new RunFacts(draws, seed, DateTimeOffset.UtcNow, clock.Elapsed), policies.Hc3);
+        Console.Out.Write(text);
+        if (file is not null)
+        {
+            File.WriteAllText(file, text);
+        }
+    }
+}
+
+internal sealed record RunFacts(int Draws, ulong Seed, DateTimeOffset Moment, TimeSpan Took);
