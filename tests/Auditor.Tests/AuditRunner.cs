@@ -46,7 +46,10 @@ internal static class AuditRunner
                 model, reading.Mentions, table.Value, policy, Rules(policy), Provenance with { DataSha256 = Hash(open, model.Data.Sources[0]) }));
     }
 
-    public static Provenance Provenance { get; } = new("", "", "", "", "", "test", 1, "2026-01-01T00:00:00Z");
+    public static Provenance Provenance { get; } =
+        new(NoHash, "data.csv", NoHash, "declaration.yaml", NoHash, "test", 1, "2026-01-01T00:00:00Z");
+
+    private static string NoHash => new('0', 64);
 
     private static IReadOnlyList<Rule> Rules(Policy policy)
     {

@@ -4,6 +4,12 @@ namespace Auditor.Numerics.Factor;
 internal static class Householder
 {
     /// <summary>
+    /// A squared length below this is nothing: when columns outnumber rows, rounding is reflected again and again and shrinks each time, until its squares
+    /// would underflow. A column as small as that counts as zero.
+    /// </summary>
+    private const double Nothing = 1e-200;
+
+    /// <summary>
     /// Factors the block stacked under the triangle into the triangle. The block is used up. The reflection of column j touches row j of the
     /// triangle and all rows of the block.
     /// </summary>
@@ -13,7 +19,7 @@ internal static class Householder
         {
             var below = block.Column(j);
             var squared = BlockKernels.Dot(below, below);
-            if (squared == 0)
+            if (squared < Nothing)
             {
                 continue;
             }

@@ -20,6 +20,9 @@ public sealed class OrthogonalFactor
         Lengths = [.. Enumerable.Range(0, r.Columns).Select(CentredLength)];
     }
 
+    /// <summary>A design must hold smaller values than this: the squares of larger ones could overflow.</summary>
+    public const double LargestValue = 1e100;
+
     public DesignLayout Layout { get; }
 
     /// <summary>P x P, zero below the diagonal; rows beyond n are zero.</summary>

@@ -32,11 +32,11 @@ internal static class TestFigure
     public static double? Log10(double logP) =>
         double.IsFinite(logP) && logP < Math.Log(LeastP) ? logP / Math.Log(10) : null;
 
-    /// <summary>Natural log of p, minus infinity for a perfect fit, null when there is no p.</summary>
-    public static double? LogP(TestResult result) => result switch
+    /// <summary>p with its logarithm; null when there is no p.</summary>
+    public static PValue? P(TestResult result) => result switch
     {
-        FTest test => test.LogP,
-        PerfectWithGroup => double.NegativeInfinity,
+        FTest test => new PValue(test.Probability, test.LogP),
+        PerfectWithGroup => new PValue(0, double.NegativeInfinity),
         _ => null,
     };
 }

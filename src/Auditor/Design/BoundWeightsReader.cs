@@ -7,6 +7,7 @@ namespace Auditor.Design;
 internal static class BoundWeightsReader
 {
     private const int MostShown = 5;
+    private const double LargestWeight = 1e50;
 
     public static BoundWeights? Read(ModelDeclaration declaration, DataTable table, int[] rows, List<Problem> problems)
     {
@@ -36,6 +37,7 @@ internal static class BoundWeightsReader
     {
         double.NaN => "the weight is missing; give one, or take the row out with data.keep",
         < 0 => "the weight is negative",
+        > LargestWeight => "the weight is larger than 1e50; weights may be rescaled by any factor",
         _ when kind == WeightKind.Frequency && !double.IsInteger(weight) => "a frequency must be a whole number",
         _ => null,
     };

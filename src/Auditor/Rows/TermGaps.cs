@@ -1,9 +1,13 @@
 using Auditor.Data;
 using Auditor.Design;
+using Auditor.Numerics.Factor;
 
 namespace Auditor.Rows;
 
-/// <summary>Where some terms have no value: rows with a missing source, and rows where a transform has none although its sources do.</summary>
+/// <summary>
+/// Where some terms have no value: rows with a missing source, and rows where a transform has none, or one too large to compute with, although its
+/// sources do.
+/// </summary>
 internal sealed class TermGaps
 {
     private const int BlockRows = 1024;
@@ -70,7 +74,7 @@ internal sealed class TermGaps
     {
         for (var c = 0; c < columns; c++)
         {
-            if (!double.IsFinite(values[(c * BlockRows) + row]))
+            if (!(Math.Abs(values[(c * BlockRows) + row]) < OrthogonalFactor.LargestValue))
             {
                 return false;
             }

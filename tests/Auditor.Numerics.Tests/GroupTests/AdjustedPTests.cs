@@ -21,15 +21,16 @@ public sealed class AdjustedPTests
     public void Agrees_with_R(string method, double[] expected)
     {
         var adjusted = Adjust(method, P);
-        Assert.All(expected.Zip(adjusted), pair => VectorFile.Near(pair.First, Math.Exp(pair.Second), 1e-12));
+        Assert.All(expected.Zip(adjusted), pair => VectorFile.Near(pair.First, pair.Second, 1e-12));
     }
 
     [Fact]
     public void Orders_p_values_below_the_least_double()
     {
-        var adjusted = AdjustedP.Holm([-2000, -3000, -1]);
-        Assert.Equal(Math.Log(2) - 2000, adjusted[0], 1e-12);
-        Assert.Equal(Math.Log(3) - 3000, adjusted[1], 1e-12);
+        var adjusted = AdjustedP.Holm([new PValue(0, -2000), new PValue(0, -3000), PValue.Of(0.3)]);
+        Assert.Equal(Math.Log(2) - 2000, adjusted[0].Log, 1e-12);
+        Assert.Equal(Math.Log(3) - 3000, adjusted[1].Log, 1e-12);
+        Assert.Equal((0, 0.3), (adjusted[0].P, adjusted[2].P));
     }
 
     /// <summary>Common practice, no source: no method makes a p smaller, and none reorders two of them.</summary>
@@ -42,7 +43,7 @@ public sealed class AdjustedPTests
                 var adjusted = Adjust(method, p);
                 for (var i = 0; i < p.Length; i++)
                 {
-                    Assert.True(adjusted[i] >= Math.Log(p[i]) - 1e-12);
+                    Assert.True(adjusted[i] >= p[i]);
                     Assert.All(Enumerable.Range(0, p.Length).Where(j => p[j] > p[i]), j => Assert.True(adjusted[j] >= adjusted[i]));
                 }
             }
@@ -50,13 +51,14 @@ public sealed class AdjustedPTests
 
     private static double[] Adjust(string method, double[] p)
     {
-        double[] log = [.. p.Select(value => Math.Log(value))];
-        return method switch
+        PValue[] log = [.. p.Select(PValue.Of)];
+        var adjusted = method switch
         {
             "holm" => AdjustedP.Holm(log),
             "hochberg" => AdjustedP.Hochberg(log),
             "BH" => AdjustedP.BenjaminiHochberg(log),
             _ => AdjustedP.BenjaminiYekutieli(log),
         };
+        return [.. adjusted.Select(value => value.P)];
     }
 }

@@ -16,7 +16,7 @@ public sealed partial class LayerTests(ITestOutputHelper output)
         ["Policies"] = ["Yaml"],
         ["Declaration"] = ["Data", "Yaml"],
         ["Design"] = ["Data", "Declaration", "Numerics", "Yaml"],
-        ["Rows"] = ["Data", "Design", "Results"],
+        ["Rows"] = ["Data", "Design", "Numerics", "Results"],
         ["Analysis"] = ["Data", "Declaration", "Design", "Numerics", "Policies", "Results", "Rows"],
         ["Facts"] = ["Data", "Declaration", "Design", "Policies", "Results"],
         ["Rules"] = ["Facts", "Findings", "Policies", "Yaml"],

@@ -3,13 +3,11 @@ using System.Text;
 using System.Text.Json;
 using System.Text.Json.Nodes;
 using Auditor.Reporting;
-using Json.Schema;
 
 namespace Auditor.Tests.Reporting;
 
 public sealed class JsonRecordTests
 {
-    private static readonly JsonSchema Schema = JsonSchema.FromText(JsonRecord.Schema);
 
     [Fact]
     public void A_record_with_every_part_filled_satisfies_the_schema() => Assert.Empty(Faults(Parsed(SampleRecords.Full)));
@@ -110,11 +108,5 @@ public sealed class JsonRecordTests
 
     private static JsonNode Parsed(AuditRecord record) => JsonNode.Parse(Encoding.UTF8.GetString(JsonRecord.Write(record)))!;
 
-    private static List<string> Faults(JsonNode record)
-    {
-        EvaluationResults results = Schema.Evaluate(JsonSerializer.SerializeToElement(record), new EvaluationOptions { OutputFormat = OutputFormat.List, RequireFormatValidation = true });
-        return results.IsValid
-            ? []
-            : [.. (results.Details ?? []).Where(detail => detail.Errors is not null).Select(detail => $"{detail.InstanceLocation}: {string.Join("; ", detail.Errors!.Values)}")];
-    }
+    private static List<string> Faults(JsonNode record) => RecordSchema.Faults(JsonSerializer.SerializeToElement(record));
 }
