@@ -1,6 +1,6 @@
 using System.Globalization;
 using System.Text;
-using Auditor.Rules;
+using Auditor.Policies;
 
 namespace Auditor.Simulation;
 

@@ -4,7 +4,7 @@ using Auditor.Numerics.Factor;
 using Auditor.Numerics.GroupTests;
 using Auditor.Numerics.SecondPass;
 using Auditor.Results;
-using Auditor.Rules;
+using Auditor.Policies;
 
 namespace Auditor.Simulation;
 
