@@ -6,8 +6,8 @@ namespace Auditor.Results;
 /// <param name="Meaning">What the evidence is, and what it is not.</param>
 public sealed record SelfTestRecord(int SelfTest, bool Passed, string Meaning, Installation Installation, IReadOnlyList<SelfTestCase> Cases)
 {
-    public const string Evidence =
-        "Evidence that this installation computes these cases correctly. It is no approval of any model, and says nothing of data or declarations other than these.";
+    public const string WhatItShows =
+        "This shows whether this installation computes these cases correctly. It is no approval of any model, and says nothing of data or declarations other than these.";
 }
 
 /// <summary>Where the self-test ran.</summary>

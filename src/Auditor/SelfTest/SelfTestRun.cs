@@ -22,7 +22,7 @@ public sealed class SelfTestRun(Func<string, Stream> open, Policy policy)
             .. plan.Audits.Select(planned => Guarded(planned.Id, () => Audited(planned, floors[planned.Id], installation))),
             .. plan.Distributions.Select(file => Guarded(file, () => Distribution(file, floors[FloorTable.Distribution(file)]))),
         ];
-        return new SelfTestRecord(1, cases.Length > 0 && cases.All(one => one.Passed), SelfTestRecord.Evidence, installation, cases);
+        return new SelfTestRecord(1, cases.Length > 0 && cases.All(one => one.Passed), SelfTestRecord.WhatItShows, installation, cases);
     }
 
     private static SelfTestCase Guarded(string id, Func<SelfTestCase> compare)

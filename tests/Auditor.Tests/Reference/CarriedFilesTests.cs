@@ -58,6 +58,7 @@ public sealed class CarriedFilesTests
         }
 
         FloorFile.Read();
+        SelfTestPlan.Read(ReferenceFiles.ReadText);
         Sources_name_every_case();
         The_script_that_made_the_values_makes_every_case();
         The_tolerances_are_those_of_the_agreement_of_two_routes();
