@@ -48,7 +48,7 @@ internal sealed record CasePage(SelfTestCase Case)
         new("Compared", "number", kind => Cell.Count(kind.Quantities.Count)),
         new("Fewest digits", "number", kind => kind.Worst.Digits is null && kind.Worst.Passed ? Cell.Missing(Absent) : SelfTestPage.Fewest([kind.Worst])),
         new("Floor", "number", kind => kind.Worst.Floor is null && kind.Worst.Passed ? Cell.Missing(Absent) : Cell.Count(kind.Worst.Floor, "No floor is kept for this quantity.")),
-        new("Where", "text", kind => Cell.Words(kind.Where)),
+        new("Where", "name", kind => Cell.Name(kind.Where)),
         new("Expected there", "number", kind => Value(kind.Worst.Expected, kind.Worst.Log10)),
         new("Found there", "number", kind => Value(kind.Worst.Found, kind.Worst.Log10)),
         new("Result", "text", kind => SelfTestPage.Result(kind.Quantities.All(quantity => quantity.Passed))));
