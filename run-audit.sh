@@ -15,7 +15,8 @@ fi
 
 is_current() {
     [ -f "$stamp" ] && [ -f "$build/$(cat "$stamp")/Auditor.Cli.dll" ] &&
-        [ -z "$(find "$here/src" "$here/rules" "$here/templates" "$here"/Directory.*.props "$here/global.json" \
+        [ -z "$(find "$here/src" "$here/rules" "$here/templates" "$here/tests/reference" "$here/tests/Auditor.Numerics.Tests/Distributions/values" \
+            "$here"/Directory.*.props "$here/global.json" \
             \( -name bin -o -name obj \) -prune -o -newer "$stamp" -type f -print -quit)" ]
 }
 

@@ -21,7 +21,8 @@ internal sealed class CommandLine
     private readonly Command _new = new("new", "Write a commented first declaration (not built yet).") { TreatUnmatchedTokensAsErrors = false };
     private readonly Command _rules = new("rules", "List the rules and facts, or explain one.");
     private readonly Argument<string?> _ruleId = new("ID") { Description = "The rule to explain.", Arity = ArgumentArity.ZeroOrOne };
-    private readonly Command _selfTest = new("self-test", "Certified and reference cases on this machine (not built yet).") { TreatUnmatchedTokensAsErrors = false };
+    private readonly Command _selfTest = new("self-test", "Certified and reference cases on this machine; writes self-test.json and self-test.html.");
+    private readonly Option<string?> _selfTestOut = new("--out") { HelpName = "DIR", Description = "Folder for the evidence (default: ./audit-out)." };
     private readonly RootCommand _root = new("Audits a declared regression model and the terms it left out, from its data.");
 
     private CommandLine()
@@ -36,6 +37,7 @@ internal sealed class CommandLine
             _rules.Options.Add(option);
         }
 
+        _selfTest.Options.Add(_selfTestOut);
         foreach (var command in new[] { _demo, _new, _rules, _selfTest })
         {
             _root.Subcommands.Add(command);
@@ -71,12 +73,17 @@ internal sealed class CommandLine
         var command = parsed.CommandResult.Command;
         if (command == _demo)
         {
-            return AuditOne(parsed, _demoOptions, BundledFiles.DemoDeclaration, Path.Combine(Environment.CurrentDirectory, "audit-out"));
+            return AuditOne(parsed, _demoOptions, BundledFiles.DemoDeclaration, DefaultOut);
         }
 
         if (command == _rules)
         {
             return RulesCommand.Run(parsed.GetValue(_ruleId), _ruleOptions.Folder(parsed), _ruleOptions.PolicyFile(parsed));
+        }
+
+        if (command == _selfTest)
+        {
+            return SelfTestCommand.Run(BundledFiles.SelfTestCases, parsed.GetValue(_selfTestOut) ?? DefaultOut);
         }
 
         if (command != _root)
@@ -93,6 +100,8 @@ internal sealed class CommandLine
         var folder = Path.GetDirectoryName(Path.GetFullPath(declaration)) ?? Environment.CurrentDirectory;
         return AuditOne(parsed, _rootOptions, declaration, Path.Combine(folder, "audit-out"));
     }
+
+    private static string DefaultOut => Path.Combine(Environment.CurrentDirectory, "audit-out");
 
     private static int AuditOne(ParseResult parsed, AuditOptions options, string declaration, string defaultOut)
     {

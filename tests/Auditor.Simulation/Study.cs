@@ -3,8 +3,8 @@ using Auditor.Numerics;
 using Auditor.Numerics.Factor;
 using Auditor.Numerics.GroupTests;
 using Auditor.Numerics.SecondPass;
-using Auditor.Results;
 using Auditor.Policies;
+using Auditor.Results;
 
 namespace Auditor.Simulation;
 

@@ -1,9 +1,8 @@
 using System.Text.Json;
-using Auditor.Data;
-using Auditor.Declaration;
 using Auditor.Policies;
 using Auditor.Reporting;
 using Auditor.Rules;
+using Auditor.SelfTest;
 
 namespace Auditor.Tests;
 
@@ -31,19 +30,11 @@ internal static class AuditRunner
 
     public static Reading<AuditInputs> Inputs(string declaration, Func<string, Stream> open, string policyYaml = "")
     {
-        var reading = DeclarationReader.Read(declaration, "declaration.yaml");
-        if (reading.Declaration is not { } model)
-        {
-            return Reading<AuditInputs>.Failed(reading.Problems);
-        }
-
-        var source = new CsvSource(model.Data.Sources[0], () => open(model.Data.Sources[0]), DelimitedFormat.FromFileName(model.Data.Sources[0])!);
-        var table = source.Read(ColumnCheck.Requests(model, reading.Mentions), model.Data.Missing);
         var policy = Value(PolicyReader.Read(Shipped("policy.yaml"), "policy.yaml", policyYaml.Length > 0 ? policyYaml : null, "test-policy.yaml"));
-        return table.Value is null
-            ? Reading<AuditInputs>.Failed(table.Problems)
-            : Reading<AuditInputs>.Of(new AuditInputs(
-                model, reading.Mentions, table.Value, policy, Rules(policy), Provenance with { DataSha256 = Hash(open, model.Data.Sources[0]) }));
+        var read = CaseInputs.Read(declaration, "declaration.yaml", open, policy, Rules(policy), Provenance);
+        return read.Value is not { } inputs
+            ? read
+            : Reading<AuditInputs>.Of(inputs with { Provenance = Provenance with { DataSha256 = Hash(open, inputs.Declaration.Data.Sources[0]) } });
     }
 
     public static Provenance Provenance { get; } =

@@ -1,5 +1,6 @@
 using System.Text;
 using Auditor.Reporting.Html;
+using Auditor.Results;
 
 namespace Auditor.Reporting;
 
@@ -23,5 +24,20 @@ public static class ConsoleSummary
         text.Append("Findings: ").Append(OutcomeSentence.Findings(record)).Append(".\n");
         text.Append("Statistical evidence, not approval: the firm's policy, local rules and qualified people decide.\n");
         return text.ToString();
+    }
+
+    /// <summary>The outcome of a self-test, and each case that does not agree.</summary>
+    public static string Of(SelfTestRecord record)
+    {
+        var page = new SelfTestPage(record);
+        var text = new StringBuilder();
+        text.Append(page.Outcome).Append(" (").Append(page.Compared).Append(").\n");
+        foreach (var one in record.Cases.Where(one => !one.Passed))
+        {
+            var below = one.Quantities.Where(quantity => !quantity.Passed).Select(quantity => quantity.Kind).Distinct();
+            text.Append("  ").Append(one.Id).Append(": ").Append(one.Fault ?? string.Join(", ", below)).Append('\n');
+        }
+
+        return text.Append(record.Meaning).Append('\n').ToString();
     }
 }

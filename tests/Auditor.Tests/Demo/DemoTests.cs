@@ -1,4 +1,5 @@
 using System.Text.Json;
+using Auditor.SelfTest;
 using Auditor.Tests.Reference;
 
 namespace Auditor.Tests.Demo;
@@ -10,7 +11,7 @@ namespace Auditor.Tests.Demo;
 public sealed class DemoTests
 {
     private const double Tolerance = 1e-8;
-    private static readonly Lazy<RecordView> Record = new(() => new RecordView(AuditRunner.Run(Path.Combine(TestFolders.Demo, "declaration.yaml"), "")));
+    private static readonly Lazy<RecordView> Record = new(() => new RecordView(AuditRunner.Run(Path.Combine(TestFolders.Demo, "declaration.yaml"), "").RootElement));
     private static readonly Lazy<JsonElement> Values = new(ReadValues);
 
     public static TheoryData<string> Groups => [.. Values.Value.EnumerateArray().Select(group => group.Text("group"))];

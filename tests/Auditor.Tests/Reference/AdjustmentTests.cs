@@ -1,3 +1,5 @@
+using Auditor.SelfTest;
+
 namespace Auditor.Tests.Reference;
 
 /// <summary>Adjusted p-values against R's p.adjust over the classical p (case.json).</summary>
@@ -10,7 +12,7 @@ public sealed class AdjustmentTests
         get
         {
             TheoryData<string, string> rows = [];
-            foreach (ReferenceCase one in ReferenceCase.All)
+            foreach (ReferenceCase one in ReferenceCases.All)
             {
                 foreach (string adjustment in Adjustments)
                 {
@@ -26,7 +28,7 @@ public sealed class AdjustmentTests
     [MemberData(nameof(Rows))]
     public void Adjusted_p_values_agree(string name, string adjustment)
     {
-        CaseRun run = CaseRun.Of(name, policyLine: adjustment == "holm" ? "" : "adjustment: " + adjustment);
+        CaseRun run = CaseRuns.Of(name, policyLine: adjustment == "holm" ? "" : "adjustment: " + adjustment);
         Report.AssertAllHold([.. AdjustmentFigures.Of(run, adjustment)], run.Case.Tolerance);
     }
 }

@@ -1,5 +1,6 @@
 using System.Security.Cryptography;
 using System.Text.RegularExpressions;
+using Auditor.SelfTest;
 
 namespace Auditor.Tests.Reference;
 
@@ -14,7 +15,7 @@ public sealed class CarriedFilesTests
 
     [Theory]
     [MemberData(nameof(Runs.Declarations), MemberType = typeof(Runs))]
-    public void The_audit_read_the_data_of_its_case(string name, string variant) => AssertDataWereRead(CaseRun.Of(name, variant));
+    public void The_audit_read_the_data_of_its_case(string name, string variant) => AssertDataWereRead(CaseRuns.Of(name, variant));
 
     [Fact]
     public void Sources_name_every_case() => AssertNamesEveryCase("SOURCES.md", name => $"| {name} |");
@@ -26,7 +27,7 @@ public sealed class CarriedFilesTests
     public void The_tolerances_are_those_of_the_agreement_of_two_routes()
     {
         string agreement = ReferenceFiles.ReadText("AGREEMENT.md");
-        foreach (ReferenceCase one in ReferenceCase.All)
+        foreach (ReferenceCase one in ReferenceCases.All)
         {
             Match line = Regex.Match(agreement, $@"^\| {one.Name} \|.*\| (?<tolerance>[0-9e-]+) \|$", RegexOptions.Multiline);
             Assert.True(line.Success, one.Name);
@@ -51,12 +52,13 @@ public sealed class CarriedFilesTests
     [Fact]
     public void Every_carried_file_is_opened()
     {
-        foreach (ReferenceCase one in ReferenceCase.All)
+        foreach (ReferenceCase one in ReferenceCases.All)
         {
-            Assert.All(one.Variants, variant => AssertDataWereRead(CaseRun.Of(one.Name, variant)));
+            Assert.All(one.Variants(), variant => AssertDataWereRead(CaseRuns.Of(one.Name, variant)));
         }
 
         FloorFile.Read();
+        SelfTestPlan.Read(ReferenceFiles.ReadText);
         Sources_name_every_case();
         The_script_that_made_the_values_makes_every_case();
         The_tolerances_are_those_of_the_agreement_of_two_routes();
@@ -89,6 +91,6 @@ public sealed class CarriedFilesTests
     private static void AssertNamesEveryCase(string file, Func<string, string> mention)
     {
         string text = ReferenceFiles.ReadText(file);
-        Assert.All(ReferenceCase.All, one => Assert.Contains(mention(one.Name), text, StringComparison.Ordinal));
+        Assert.All(ReferenceCases.All, one => Assert.Contains(mention(one.Name), text, StringComparison.Ordinal));
     }
 }

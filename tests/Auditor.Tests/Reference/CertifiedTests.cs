@@ -1,3 +1,5 @@
+using Auditor.SelfTest;
+
 namespace Auditor.Tests.Reference;
 
 /// <summary>
@@ -27,7 +29,7 @@ public sealed class CertifiedTests
     [MemberData(nameof(Certified))]
     public void Certified_values_are_met(string name, string variant, double digits)
     {
-        IReadOnlyList<Figure> figures = [.. Runs.Certified(CaseRun.Of(name, variant))];
+        IReadOnlyList<Figure> figures = [.. CertifiedFigures.Of(CaseRuns.Of(name, variant))];
         Assert.NotEmpty(figures);
         Assert.All(figures, figure => Assert.True(figure.CorrectDigits >= digits, figure.Describe()));
     }
@@ -37,7 +39,7 @@ public sealed class CertifiedTests
     [InlineData("-largest-powers")]
     public void A_perfect_fit_leaves_only_rounding(string variant)
     {
-        CaseRun run = CaseRun.Of("nist_wampler1", variant);
+        CaseRun run = CaseRuns.Of("nist_wampler1", variant);
         double withFewerTerms = run.Case.Values.GetProperty("final_model").Number("rss")!.Value.Number;
         Assert.InRange(run.Record.FinalFit.Number("rss")!.Value.Number / withFewerTerms, 0, 1e-18);
     }

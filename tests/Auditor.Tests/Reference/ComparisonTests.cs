@@ -1,3 +1,5 @@
+using Auditor.SelfTest;
+
 namespace Auditor.Tests.Reference;
 
 /// <summary>
@@ -10,15 +12,15 @@ public sealed class ComparisonTests
     [MemberData(nameof(Runs.Declarations), MemberType = typeof(Runs))]
     public void The_record_agrees_with_other_programs(string name, string variant)
     {
-        CaseRun run = CaseRun.Of(name, variant);
-        Report.AssertAllHold(Runs.Figures(run), run.Case.Tolerance);
+        CaseRun run = CaseRuns.Of(name, variant);
+        Report.AssertAllHold(run.Figures(), run.Case.Tolerance);
     }
 
     [Theory]
     [MemberData(nameof(Runs.Declarations), MemberType = typeof(Runs))]
     public void Variance_inflation_agrees_with_other_programs(string name, string variant)
     {
-        CaseRun run = CaseRun.Of(name, variant);
+        CaseRun run = CaseRuns.Of(name, variant);
         IReadOnlyList<Figure> figures = [.. VarianceInflationFigures.Of(run)];
         Assert.All(figures, figure => Assert.True(figure.Holds(run.Case.Tolerance), figure.Describe()));
     }
@@ -27,7 +29,7 @@ public sealed class ComparisonTests
     [MemberData(nameof(Runs.Declarations), MemberType = typeof(Runs))]
     public void Columns_that_add_nothing_are_named(string name, string variant)
     {
-        CaseRun run = CaseRun.Of(name, variant);
+        CaseRun run = CaseRuns.Of(name, variant);
         Assert.Equal(Dropped(run, run.Fit), Sorted(RecordView.Aliased(run.Record.FinalFit)));
         if (!run.IsLargest)
         {
@@ -38,7 +40,7 @@ public sealed class ComparisonTests
     [Fact]
     public void A_group_that_adds_no_column_cannot_be_tested()
     {
-        var group = CaseRun.Of("pea_yield_npk").Record.Exclusion("field_half");
+        var group = CaseRuns.Of("pea_yield_npk").Record.Exclusion("field_half");
         Assert.Equal("untestable", group.Text("verdict"));
         Assert.Null(group.Number("p"));
         Assert.Null(RecordView.Test(group, "classical").Number("f"));
@@ -47,7 +49,7 @@ public sealed class ComparisonTests
     [Fact]
     public void A_perfect_larger_model_has_no_f_and_p_zero()
     {
-        RecordView record = CaseRun.Of("nist_wampler1").Record;
+        RecordView record = CaseRuns.Of("nist_wampler1").Record;
         Assert.Null(RecordView.Test(record.AllLeftOut, "classical").Number("f"));
         Assert.Equal(0, RecordView.Test(record.AllLeftOut, "classical").Number("p")?.Number);
     }

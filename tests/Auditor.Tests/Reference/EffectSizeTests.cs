@@ -1,3 +1,5 @@
+using Auditor.SelfTest;
+
 namespace Auditor.Tests.Reference;
 
 /// <summary>
@@ -11,7 +13,7 @@ public sealed class EffectSizeTests
         get
         {
             TheoryData<string, double> rows = [];
-            foreach (ReferenceCase one in ReferenceCase.All)
+            foreach (ReferenceCase one in ReferenceCases.All)
             {
                 rows.Add(one.Name, 0.02);
                 rows.Add(one.Name, 0.15);
@@ -26,7 +28,7 @@ public sealed class EffectSizeTests
     [MemberData(nameof(Runs.Cases), MemberType = typeof(Runs))]
     public void The_interval_of_partial_r_squared_agrees(string name)
     {
-        CaseRun run = CaseRun.Of(name);
+        CaseRun run = CaseRuns.Of(name);
         Report.AssertAllHold([.. EffectFigures.Intervals(run)], run.Case.Tolerance);
     }
 
@@ -34,7 +36,7 @@ public sealed class EffectSizeTests
     [MemberData(nameof(Effects))]
     public void Power_agrees(string name, double fSquared)
     {
-        CaseRun run = CaseRun.Of(name, policyLine: EffectFigures.PolicyLine(fSquared));
+        CaseRun run = CaseRuns.Of(name, policyLine: EffectFigures.PolicyLine(fSquared));
         Report.AssertAllHold([.. EffectFigures.Power(run, fSquared)], 1e-8);
     }
 }

@@ -1,4 +1,5 @@
 using System.Text.Json;
+using Auditor.SelfTest;
 
 namespace Auditor.Tests.Reference;
 
@@ -14,7 +15,7 @@ internal static class FloorFile
 
     public static bool Raising => Environment.GetEnvironmentVariable(RaiseSwitch) == "1";
 
-    public static IReadOnlyDictionary<string, SortedDictionary<string, int>> Read() => ReadSorted();
+    public static SortedDictionary<string, SortedDictionary<string, int>> Read() => FloorTable.Read(ReferenceFiles.ReadText(Name));
 
     public static string Key(string name, string variant) => name + variant;
 
@@ -25,7 +26,7 @@ internal static class FloorFile
     {
         lock (Gate)
         {
-            SortedDictionary<string, SortedDictionary<string, int>> floors = ReadSorted();
+            SortedDictionary<string, SortedDictionary<string, int>> floors = Read();
             SortedDictionary<string, int> own = floors.TryGetValue(key, out SortedDictionary<string, int>? found) ? found : new(StringComparer.Ordinal);
             foreach ((string kind, double digits) in measured)
             {
@@ -35,12 +36,5 @@ internal static class FloorFile
             floors[key] = own;
             File.WriteAllText(ReferenceFiles.FullPath(Name), JsonSerializer.Serialize(floors, Layout) + "\n");
         }
-    }
-
-    private static SortedDictionary<string, SortedDictionary<string, int>> ReadSorted()
-    {
-        var read = JsonSerializer.Deserialize<Dictionary<string, Dictionary<string, int>>>(ReferenceFiles.ReadText(Name))!;
-        var sorted = read.ToDictionary(line => line.Key, line => new SortedDictionary<string, int>(line.Value, StringComparer.Ordinal));
-        return new SortedDictionary<string, SortedDictionary<string, int>>(sorted, StringComparer.Ordinal);
     }
 }

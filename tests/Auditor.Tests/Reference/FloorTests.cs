@@ -1,4 +1,5 @@
 using System.Globalization;
+using Auditor.SelfTest;
 
 namespace Auditor.Tests.Reference;
 
@@ -10,7 +11,7 @@ public sealed class FloorTests(ITestOutputHelper output)
     public void Correct_digits_are_at_least_the_floor(string name, string variant)
     {
         string key = FloorFile.Key(name, variant);
-        IReadOnlyDictionary<string, double> measured = Measured(CaseRun.Of(name, variant));
+        IReadOnlyDictionary<string, double> measured = Measured(CaseRuns.Of(name, variant));
         if (FloorFile.Raising)
         {
             FloorFile.Raise(key, measured);
@@ -22,7 +23,7 @@ public sealed class FloorTests(ITestOutputHelper output)
     }
 
     /// <summary>The fewest correct digits of each kind of figure.</summary>
-    private static Dictionary<string, double> Measured(CaseRun run) => Runs.Figures(run)
+    private static Dictionary<string, double> Measured(CaseRun run) => run.Figures()
         .Where(figure => !figure.MustBeAbsent)
         .GroupBy(figure => figure.Kind)
         .ToDictionary(kind => kind.Key, kind => kind.Min(figure => figure.CorrectDigits));

@@ -1,3 +1,5 @@
+using Auditor.SelfTest;
+
 namespace Auditor.Tests.Reference;
 
 /// <summary>Turns figures that do not hold into one message.</summary>

@@ -1,4 +1,5 @@
 using System.Text.Json;
+using Auditor.SelfTest;
 
 namespace Auditor.Tests.Reference;
 

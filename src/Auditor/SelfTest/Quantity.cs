@@ -1,6 +1,6 @@
 using System.Globalization;
 
-namespace Auditor.Tests.Reference;
+namespace Auditor.SelfTest;
 
 /// <summary>A number to compare; a p-value that underflows is held by its decimal logarithm.</summary>
 internal readonly record struct Quantity(double Number, double? Log10 = null)
@@ -22,12 +22,14 @@ internal readonly record struct Quantity(double Number, double? Log10 = null)
     /// </summary>
     public double DigitsIn(Quantity actual, double scale)
     {
-        bool byLogarithm = Math.Abs(Number) < Underflow && Log10 is not null && actual.Log10 is not null;
+        bool byLogarithm = IsComparedByLogarithm(actual);
         double truth = byLogarithm ? Log10!.Value : Number;
         double found = byLogarithm ? actual.Log10!.Value : actual.Number;
         double difference = Math.Abs(truth - found);
         return difference == 0 ? 16 : Math.Min(16, -Math.Log10(difference / Math.Max(Math.Max(Math.Abs(truth), scale), Underflow)));
     }
+
+    public bool IsComparedByLogarithm(Quantity actual) => Math.Abs(Number) < Underflow && Log10 is not null && actual.Log10 is not null;
 
     public override string ToString() =>
         string.Create(CultureInfo.InvariantCulture, $"{Number:R}") + (Log10 is { } log ? string.Create(CultureInfo.InvariantCulture, $" (log10 {log:R})") : "");

@@ -1,6 +1,7 @@
+using System.Globalization;
 using System.Text.Json;
 
-namespace Auditor.Tests.Reference;
+namespace Auditor.SelfTest;
 
 /// <summary>The refit of the declared final model: its summary figures and the conditioning of its design.</summary>
 internal static class FitFigures
@@ -48,14 +49,15 @@ internal static class FitFigures
         yield return Fit("condition_number", design.Number("condition_number_of_design_with_unit_length_columns"), null, fit.Number("condition_number"));
         double[] expected = Sorted(design.GetProperty("condition_indices"));
         double[] actual = Sorted(run.Record.Collinearity.GetProperty("condition_indices"));
-        Assert.Equal(expected.Length, actual.Length);
-        for (int i = 0; i < expected.Length; i++)
+        for (int i = 0; i < Math.Max(expected.Length, actual.Length); i++)
         {
-            yield return new Figure("condition index", $"{i + 1}", new Quantity(expected[i]), null, new Quantity(actual[i]));
+            yield return new Figure("condition index", string.Create(CultureInfo.InvariantCulture, $"{i + 1}"), At(expected, i), null, At(actual, i));
         }
     }
 
     private static double[] Sorted(JsonElement numbers) => [.. numbers.EnumerateArray().Select(number => number.GetDouble()).Order()];
+
+    private static Quantity? At(double[] numbers, int i) => i < numbers.Length ? new Quantity(numbers[i]) : null;
 
     private static Figure Fit(string name, Quantity? expected, Quantity? exact, Quantity? actual, double scale = 0) =>
         new("fit " + name, "", expected, exact, actual, scale);

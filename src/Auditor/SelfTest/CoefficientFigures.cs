@@ -1,6 +1,6 @@
 using System.Text.Json;
 
-namespace Auditor.Tests.Reference;
+namespace Auditor.SelfTest;
 
 /// <summary>Every coefficient with its classical test and interval; estimates and limits relative to max(|b|, standard error).</summary>
 internal static class CoefficientFigures

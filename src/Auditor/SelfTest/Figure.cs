@@ -1,6 +1,6 @@
 using System.Globalization;
 
-namespace Auditor.Tests.Reference;
+namespace Auditor.SelfTest;
 
 /// <summary>One number of the record beside what it should be.</summary>
 /// <param name="Kind">What is compared, over all rows of the same kind: <c>coefficient estimate</c>, <c>hc3 f</c>.</param>

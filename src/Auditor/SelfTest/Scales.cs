@@ -1,4 +1,4 @@
-namespace Auditor.Tests.Reference;
+namespace Auditor.SelfTest;
 
 /// <summary>What a difference is relative to when the value itself is smaller, as AGREEMENT.md has it for values near zero.</summary>
 internal static class Scales

@@ -1,6 +1,6 @@
 using System.Text.Json;
 
-namespace Auditor.Tests.Reference;
+namespace Auditor.SelfTest;
 
 /// <summary>Every test of one left-out group and of all groups together that the reference holds.</summary>
 internal static class GroupFigures

@@ -1,6 +1,6 @@
 using System.Text.Json;
 
-namespace Auditor.Tests.Reference;
+namespace Auditor.SelfTest;
 
 /// <summary>The values certified by NIST (Statistical Reference Datasets, linear least squares), as printed in case.json.</summary>
 internal static class CertifiedFigures

@@ -1,6 +1,6 @@
 using System.Text.Json;
 
-namespace Auditor.Tests.Reference;
+namespace Auditor.SelfTest;
 
 /// <summary>A group given everything else tried: last into the largest model, and its own sum of squares over the largest model's mean square.</summary>
 internal static class LastInFigures

@@ -1,6 +1,6 @@
 using System.Text.Json;
 
-namespace Auditor.Tests.Reference;
+namespace Auditor.SelfTest;
 
 /// <summary>Numbers out of JSON: null for null, an error for a name that is not there.</summary>
 internal static class JsonNumbers
@@ -16,7 +16,11 @@ internal static class JsonNumbers
             return null;
         }
 
-        Assert.True(element.TryGetProperty(name, out JsonElement value), $"no \"{name}\" in {Start(element)}");
+        if (!element.TryGetProperty(name, out JsonElement value))
+        {
+            throw new KeyNotFoundException($"no \"{name}\" in {Start(element)}");
+        }
+
         return value.ValueKind switch
         {
             JsonValueKind.Null => null,

@@ -1,15 +1,12 @@
-using System.Collections.Concurrent;
 using System.Globalization;
 using System.Text.Json;
 
-namespace Auditor.Tests.Reference;
+namespace Auditor.SelfTest;
 
-/// <summary>A reference case beside the record of auditing one of its declarations. Records are made once and kept.</summary>
+/// <summary>A reference case beside the record of auditing one of its declarations.</summary>
 /// <param name="Variant">The ending of the declaration: empty, -largest, -powers, -largest-powers.</param>
 internal sealed record CaseRun(ReferenceCase Case, string Variant, RecordView Record)
 {
-    private static readonly ConcurrentDictionary<string, Lazy<CaseRun>> Kept = new();
-
     /// <summary>The declaration has the largest model as its final one and leaves nothing out.</summary>
     public bool IsLargest => Variant.Contains("-largest", StringComparison.Ordinal);
 
@@ -21,19 +18,20 @@ internal sealed record CaseRun(ReferenceCase Case, string Variant, RecordView Re
 
     public JsonElement? ExactFit => Case.Exact.Optional(FitName);
 
-    /// <param name="policyLine">One more line of policy, or nothing.</param>
-    public static CaseRun Of(string name, string variant = "", string policyLine = "") =>
-        Kept.GetOrAdd(string.Join('|', name, variant, policyLine), _ => new Lazy<CaseRun>(() => Make(name, variant, policyLine))).Value;
-
     /// <summary>The record's label of a column that case.json calls by its own conventions: <c>a[l]:b</c> is <c>a = l * b</c>.</summary>
     public string Label(string column) => column == "(intercept)" ? "intercept" : string.Join(" * ", column.Split(':').Select(Part));
 
-    private static CaseRun Make(string name, string variant, string policyLine)
-    {
-        string policy = ReferenceFiles.ReadText("policy-reference.yaml") + policyLine + "\n";
-        JsonDocument record = AuditRunner.Run(ReferenceFiles.FullPath($"{name}/declaration{variant}.yaml"), policy);
-        return new CaseRun(ReferenceCase.Named(name), variant, new RecordView(record));
-    }
+    /// <summary>NIST certifies values for this declaration's final model.</summary>
+    public bool IsCertified => Case.Name.StartsWith("nist_", StringComparison.Ordinal) && IsLargest == Case.Name is not ("nist_norris" or "nist_noint1");
+
+    /// <summary>Every figure of the record that the case's own files hold.</summary>
+    public IReadOnlyList<Figure> Figures() =>
+    [
+        .. FitFigures.Of(this),
+        .. CoefficientFigures.Of(this),
+        .. GroupFigures.Of(this),
+        .. IsCertified ? CertifiedFigures.Of(this) : [],
+    ];
 
     private string Part(string part)
     {
