@@ -118,6 +118,17 @@ public sealed class EdgeCaseTests
         Why(Impediment.RestsOnOneRow, ScoreF.Of(group, sums));
     }
 
+    /// <summary>LM = n when e(F) qz is the same in every row: here F is zero in all rows that the group's column reaches.</summary>
+    [Fact]
+    public void A_score_in_which_every_row_pulls_alike_has_no_finite_F()
+    {
+        double[] half = [1, 1, 1, 1, 0, 0, 0, 0];
+        double[] other = [.. half.Select(value => 1 - value)];
+        var analysis = new GroupAnalysis(new MatrixDesign(false, [half], [[other]], [1, 2, 3, 4, 2, 2, 2, 2]));
+        Why(Impediment.NotFinite, ScoreF.Of(analysis.Groups[0], analysis.Sums(0)));
+        Assert.IsType<FTest>(PartialF.Of(analysis.Groups[0]));
+    }
+
     [Fact]
     public void Without_an_intercept_sums_of_squares_are_about_zero()
     {
