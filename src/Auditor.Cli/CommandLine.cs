@@ -97,11 +97,6 @@ internal sealed class CommandLine
             return NewCommand.Run(parsed.GetValue(_data)!, parsed.GetValue(_response)!, parsed.GetValue(_newFile));
         }
 
-        if (command != _root)
-        {
-            return Unusable([$"{command.Name}: not built yet"]);
-        }
-
         var declaration = parsed.GetValue(_declaration);
         if (string.IsNullOrEmpty(declaration))
         {

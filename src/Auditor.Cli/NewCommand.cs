@@ -12,7 +12,7 @@ internal static class NewCommand
     {
         var id = StartRequest.IdOf(Path.GetFileName(data));
         var target = file ?? id + ".yaml";
-        if (DataFile.Unreadable(data, data) is { } fault)
+        if (DataFile.Unreadable(Path.GetFullPath(data), data) is { } fault)
         {
             return Complaint.Unusable([new Problem(data, null, fault)]);
         }

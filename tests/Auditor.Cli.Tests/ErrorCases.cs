@@ -28,7 +28,15 @@ internal static class ErrorCases
         ErrorCase.Of("an @ does not name a file of options", "@options"),
         ErrorCase.Of("an unknown rule", "rules", "exclusion-not-suported"),
         ErrorCase.Of("two rules", "rules", "a", "b"),
-        ErrorCase.Of("the self-test", "self-test"),
+        ErrorCase.Of("a word after the self-test", "self-test", "longley"),
+        ErrorCase.Of("a first declaration without data", "new"),
+        ErrorCase.Of("a first declaration without a response", "new", "leases.csv"),
+        ErrorCase.Of("a first declaration of data that are not there", "new", "leasse.csv", "--response", "loss"),
+        ErrorCase.Of("a first declaration of no data file", "new", "lease.yaml", "--response", "loss"),
+        ErrorCase.Of("a response that is not there", "new", "leases.csv", "--response", "los"),
+        ErrorCase.Of("a response of levels", "new", "leases.csv", "--response", "region"),
+        ErrorCase.Of("a first declaration over a file", "new", "leases.csv", "--response", "loss", "--out", "lease.yaml"),
+        ErrorCase.Of("a first declaration in no folder", "new", "leases.csv", "--response", "loss", "--out", "nowhere/lease.yaml"),
     ];
 
     private static IEnumerable<ErrorCase> Declarations() =>

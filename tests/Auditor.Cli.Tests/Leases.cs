@@ -31,12 +31,15 @@ internal static class Leases
             var south = row % 3 == 0;
             var engine = 500 + (row * 61 % 89 * 10);
             var age = row * 29 % 13;
-            var loss = (0.1 * price) + (south ? 1 : 0) + (hours * engine) + Math.Sin(row * 12.9898);
+            var loss = (0.1 * price) + (south ? 1 : 0) + (hours * engine) + Noise(row);
             text.Append(CultureInfo.InvariantCulture, $"L{row},{loss:R},{price},{(south ? "south" : "north")},{engine},{age},n{row}\n");
         }
 
         return text.ToString();
     }
+
+    /// <summary>From -1 to 1, made of whole numbers so that it is the same on every machine.</summary>
+    private static double Noise(int row) => ((row * 7919 % 1009) - 504) / 504.0;
 
     /// <summary>A folder with the declaration lease.yaml and the data leases.csv.</summary>
     public static TemporaryFolder Folder(string? declaration = null, string? data = null) =>

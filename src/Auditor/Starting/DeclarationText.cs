@@ -71,7 +71,7 @@ internal static class DeclarationText
     private static string Named(IReadOnlyList<string> names) => string.Join(", ", names.Distinct(StringComparer.Ordinal).Select(name => CellText.Shown(name)));
 
     private static string Line(string text, string? comment = null) =>
-        comment is null ? text : text.PadRight(CommentColumn - 1) + " # " + YamlText.Comment(comment);
+        comment is null ? text : text.PadRight(CommentColumn - 2) + "  # " + YamlText.Comment(comment);
 
     private static string Word(ColumnKind kind) => kind switch
     {

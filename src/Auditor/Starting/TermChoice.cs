@@ -37,7 +37,7 @@ internal sealed record TermChoice(ColumnProfile Column, ColumnDoubt? Doubt, stri
     public static string Described(ColumnProfile column)
     {
         var values = column.Kind == ColumnKind.Number
-            ? string.Create(CultureInfo.InvariantCulture, $"number, {column.Numbers.Min():R} to {column.Numbers.Max():R}")
+            ? string.Create(CultureInfo.InvariantCulture, $"number, {column.Numbers.Min():G6} to {column.Numbers.Max():G6}")
             : "levels: " + Levels([.. CodePointOrder.Sort(column.Texts)]);
         return column.Missing == 0 ? values : string.Create(CultureInfo.InvariantCulture, $"{values}; no value in {column.Missing} of {column.Rows} rows");
     }
