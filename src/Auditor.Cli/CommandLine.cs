@@ -18,7 +18,10 @@ internal sealed class CommandLine
     private readonly AuditOptions _demoOptions = new();
     private readonly RuleOptions _ruleOptions = new();
     private readonly Command _demo = new("demo", "Audit the bundled demo and say where the report is.");
-    private readonly Command _new = new("new", "Write a commented first declaration (not built yet).") { TreatUnmatchedTokensAsErrors = false };
+    private readonly Command _new = new("new", "Write a commented first declaration for a data file.");
+    private readonly Argument<string> _data = new("DATA") { Description = "The data file." };
+    private readonly Option<string?> _response = Options.Text("--response", "COLUMN", "The column that the model explains.");
+    private readonly Option<string?> _newFile = Options.Text("--out", "FILE", "Where to write it (default: NAME.yaml here); never over a file that is there.");
     private readonly Command _rules = new("rules", "List the rules and facts, or explain one.");
     private readonly Argument<string?> _ruleId = new("ID") { Description = "The rule to explain.", Arity = ArgumentArity.ZeroOrOne };
     private readonly Command _selfTest = new("self-test", "Certified and reference cases on this machine; writes self-test.json and self-test.html.");
@@ -31,6 +34,10 @@ internal sealed class CommandLine
         _rootOptions.AddTo(_root);
         _demoOptions.AddTo(_demo);
         _root.SetAction(_ => ExitStatus.Audited); // The parser wants one; what runs is decided in Run.
+        _response.Required = true;
+        _new.Arguments.Add(_data);
+        _new.Options.Add(_response);
+        _new.Options.Add(_newFile);
         _rules.Arguments.Add(_ruleId);
         foreach (var option in _ruleOptions.All)
         {
@@ -63,9 +70,8 @@ internal sealed class CommandLine
             return parsed.Invoke(new InvocationConfiguration { EnableDefaultExceptionHandler = false });
         }
 
-        return Misplaced(args, parsed) is string misplaced ? Unusable([misplaced])
-            : parsed.Errors.Count > 0 ? Unusable(parsed.Errors.Select(error => error.Message))
-            : Run(parsed);
+        var misfits = Misplaced(args, parsed) is string misplaced ? [misplaced] : UnknownWords.In(parsed, parsed.GetValue(_declaration));
+        return misfits.Count > 0 ? Unusable(misfits) : Run(parsed);
     }
 
     private int Run(ParseResult parsed)
@@ -86,15 +92,15 @@ internal sealed class CommandLine
             return SelfTestCommand.Run(BundledFiles.SelfTestCases, parsed.GetValue(_selfTestOut) ?? DefaultOut);
         }
 
-        if (command != _root)
+        if (command == _new)
         {
-            return Unusable([$"{command.Name}: not built yet"]);
+            return NewCommand.Run(parsed.GetValue(_data)!, parsed.GetValue(_response)!, parsed.GetValue(_newFile));
         }
 
         var declaration = parsed.GetValue(_declaration);
-        if (declaration is null || declaration.StartsWith('-'))
+        if (string.IsNullOrEmpty(declaration))
         {
-            return Unusable([declaration is null ? "name a declaration, or say demo" : $"'{declaration}' is not an option of this program"]);
+            return Unusable(["name a declaration, or say demo"]);
         }
 
         var folder = Path.GetDirectoryName(Path.GetFullPath(declaration)) ?? Environment.CurrentDirectory;

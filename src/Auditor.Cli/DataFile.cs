@@ -23,11 +23,25 @@ internal sealed record DataFile(IDataSource Source, string Sha256)
 
     private static string? Fault(string path, string source, string folder, AuditRequest request)
     {
+        if (RealPath.Of(path) is null)
+        {
+            return $"'{source}' leads through links that run in a circle";
+        }
+
         if (!RealPath.Within(path, folder) && !(request.DataRoot is { } root && RealPath.Within(path, root)))
         {
             return $"'{source}' lies outside the declaration's folder; allow it with --data-root DIR";
         }
 
+        return Unreadable(path, source) ?? (request.MemoryBytes is long most && new FileInfo(path).Length > most
+            ? $"'{source}' is larger than --memory allows; data that do not fit in memory are not built yet"
+            : null);
+    }
+
+    /// <summary>Why a path is no data file of a kind that is read; null when it is one.</summary>
+    /// <param name="source">The path as the person wrote it.</param>
+    public static string? Unreadable(string path, string source)
+    {
         if (Directory.Exists(path))
         {
             return $"'{source}' is a folder; a folder of files is not built yet";
@@ -38,16 +52,9 @@ internal sealed record DataFile(IDataSource Source, string Sha256)
             return $"the file '{source}' does not exist{NearestFile(path)}";
         }
 
-        if (DelimitedFormat.FromFileName(path) is null)
-        {
-            return path.EndsWith(".parquet", StringComparison.OrdinalIgnoreCase)
-                ? "Parquet is not built yet"
-                : $"'{source}' is not a kind of file this program reads: .csv, .tsv, .csv.gz or .tsv.gz";
-        }
-
-        return request.MemoryBytes is long most && new FileInfo(path).Length > most
-            ? $"'{source}' is larger than --memory allows; data that do not fit in memory are not built yet"
-            : null;
+        return DelimitedFormat.FromFileName(path) is not null ? null
+            : path.EndsWith(".parquet", StringComparison.OrdinalIgnoreCase) ? "Parquet is not built yet"
+            : $"'{source}' is not a kind of file this program reads: .csv, .tsv, .csv.gz or .tsv.gz";
     }
 
     private static string NearestFile(string path) =>
@@ -62,7 +69,7 @@ internal sealed record DataFile(IDataSource Source, string Sha256)
             var hash = Hash(path);
             if (reading.Declaration?.Data.Sha256 is { } declared && !declared.Equals(hash, StringComparison.OrdinalIgnoreCase))
             {
-                return Failed(request, line, $"data.sha256: the file is another one: declared {declared}, found {hash}");
+                return Failed(request, line, $"data.source: '{source}' is another file than data.sha256 says: declared {declared}, found {hash}");
             }
 
             var data = new CsvSource(source, () => File.OpenRead(path), DelimitedFormat.FromFileName(path)!);
@@ -76,7 +83,7 @@ internal sealed record DataFile(IDataSource Source, string Sha256)
         }
     }
 
-    private static string Hash(string path)
+    public static string Hash(string path)
     {
         using var stream = File.OpenRead(path);
         return Convert.ToHexStringLower(SHA256.HashData(stream));

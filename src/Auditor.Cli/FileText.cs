@@ -1,5 +1,6 @@
 using System.Security.Cryptography;
 using System.Text;
+using Auditor.Data;
 
 namespace Auditor.Cli;
 
@@ -8,14 +9,15 @@ internal sealed record FileText(string Text, string Sha256)
 {
     public static Reading<FileText> Read(string path)
     {
+        byte[] bytes = [];
         try
         {
-            var bytes = File.ReadAllBytes(path);
+            bytes = File.ReadAllBytes(path);
             return Reading<FileText>.Of(new FileText(new UTF8Encoding(false, true).GetString(bytes), Hash(bytes)));
         }
         catch (DecoderFallbackException)
         {
-            return Reading<FileText>.Failed(new Problem(path, null, "the file is not UTF-8 text"));
+            return Reading<FileText>.Failed(Utf8Check.Problem(path, new MemoryStream(bytes)));
         }
         catch (Exception fault) when (fault is IOException or UnauthorizedAccessException or ArgumentException)
         {

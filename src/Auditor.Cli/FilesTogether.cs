@@ -21,9 +21,9 @@ internal static class FilesTogether
 
             foreach (var (path, _) in files)
             {
-                SetAside(path, mark);
+                KeepCopy(path, mark);
                 placed.Add(path);
-                File.Move(New(path, mark), path);
+                File.Move(New(path, mark), path, overwrite: true);
             }
 
             placed.ForEach(path => File.Delete(Old(path, mark)));
@@ -32,9 +32,9 @@ internal static class FilesTogether
         catch (Exception fault) when (fault is IOException or UnauthorizedAccessException)
         {
             placed.ForEach(path => PutBack(path, mark));
-            foreach (var (path, _) in files.Where(file => File.Exists(New(file.Path, mark))))
+            foreach (var left in files.SelectMany(file => new[] { New(file.Path, mark), Old(file.Path, mark) }).Where(File.Exists))
             {
-                File.Delete(New(path, mark));
+                File.Delete(left);
             }
 
             return fault.Message;
@@ -45,7 +45,8 @@ internal static class FilesTogether
 
     private static string Old(string path, string mark) => path + ".old-" + mark;
 
-    private static void SetAside(string path, string mark)
+    /// <summary>A copy, so that there is no moment without the file.</summary>
+    private static void KeepCopy(string path, string mark)
     {
         if (Directory.Exists(path))
         {
@@ -54,7 +55,7 @@ internal static class FilesTogether
 
         if (File.Exists(path))
         {
-            File.Move(path, Old(path, mark));
+            File.Copy(path, Old(path, mark));
         }
     }
 

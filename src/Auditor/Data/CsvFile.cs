@@ -53,8 +53,6 @@ internal sealed class CsvFile(string name, Func<Stream> open, DelimitedFormat fo
     private Problem NotUtf8()
     {
         using var stream = Content();
-        return Utf8Check.FirstFault(stream) is var (line, column, found)
-            ? new Problem(Name, line, string.Create(CultureInfo.InvariantCulture, $"found byte 0x{found:X2} at byte {column} of the line, expected UTF-8; store the file as UTF-8"))
-            : new Problem(Name, null, "found bytes that are not UTF-8; store the file as UTF-8");
+        return Utf8Check.Problem(Name, stream);
     }
 }

@@ -18,6 +18,13 @@ internal readonly record struct KindCounts(int Numbers, int Dates, int Others)
         }
     }
 
+    /// <summary>The counts with a text that stands in several cells.</summary>
+    public KindCounts With(string text, int cells)
+    {
+        var one = default(KindCounts).With(text);
+        return new(Numbers + (one.Numbers * cells), Dates + (one.Dates * cells), Others + (one.Others * cells));
+    }
+
     /// <summary>The counts with one more cell.</summary>
     public KindCounts With(ReadOnlySpan<char> cell) =>
         CellText.TryNumber(cell, out _) ? this with { Numbers = Numbers + 1 }

@@ -20,7 +20,7 @@ internal sealed class LevelsColumnBuilder : ColumnBuilder
 
     /// <summary>Each distinct text is looked at once and counted as often as it stands.</summary>
     public override KindCounts Counts => _texts.Zip(_cellsOfText).Aggregate(
-        default(KindCounts), (counts, text) => Add(counts, default(KindCounts).With(text.First), text.Second));
+        default(KindCounts), (counts, text) => counts.With(text.First, text.Second));
 
     public override bool Add(ReadOnlySpan<char> cell)
     {
@@ -31,9 +31,6 @@ internal sealed class LevelsColumnBuilder : ColumnBuilder
     public override void AddMissing() => _codes.Add(-1);
 
     public override DataColumn Build() => new LevelsColumn(Name, _codes.ToExactArray(), _texts);
-
-    private static KindCounts Add(KindCounts counts, KindCounts one, int times) => new(
-        counts.Numbers + (one.Numbers * times), counts.Dates + (one.Dates * times), counts.Others + (one.Others * times));
 
     private int CodeOf(ReadOnlySpan<char> cell)
     {

@@ -1,11 +1,17 @@
 using System.Buffers;
+using System.Globalization;
 using System.Text;
 
 namespace Auditor.Data;
 
 /// <summary>Finds the first byte of a stream that is not UTF-8, after decoding has failed.</summary>
-internal static class Utf8Check
+public static class Utf8Check
 {
+    /// <summary>The place of the first such byte, in words.</summary>
+    public static Problem Problem(string file, Stream stream) => FirstFault(stream) is var (line, column, found)
+        ? new Problem(file, line, string.Create(CultureInfo.InvariantCulture, $"found byte 0x{found:X2} at byte {column} of the line, expected UTF-8; store the file as UTF-8"))
+        : new Problem(file, null, "found bytes that are not UTF-8; store the file as UTF-8");
+
     /// <summary>1-based line, 1-based byte within the line, and the byte; null when all is well.</summary>
     public static (int Line, int Byte, byte Found)? FirstFault(Stream stream)
     {

@@ -1,7 +1,0 @@
-namespace Auditor.Cli.Tests;
-
-public sealed class PlaceholderTests
-{
-    [Fact]
-    public void Runs() => Assert.True(true);
-}

@@ -1,0 +1,50 @@
+using System.Diagnostics;
+
+namespace Auditor.Cli.Tests;
+
+/// <summary>One run of the built program in a process of its own.</summary>
+internal sealed record ProgramRun(int Status, string Output, string Errors)
+{
+    private const int MostMilliseconds = 120_000;
+
+    /// <summary>2026-01-01, so that two runs can be compared.</summary>
+    private const string Moment = "1767225600";
+
+    public static string Folder => AppContext.BaseDirectory;
+
+    public static ProgramRun In(TemporaryFolder folder, params string[] arguments) => Of(Path.Combine(Folder, "Auditor.Cli.dll"), folder.Root, Moment, arguments);
+
+    /// <param name="moment">SOURCE_DATE_EPOCH; null leaves it unset.</param>
+    public static ProgramRun Of(string program, string folder, string? moment, params string[] arguments)
+    {
+        var start = new ProcessStartInfo(Environment.GetEnvironmentVariable("DOTNET_HOST_PATH") ?? "dotnet", [program, .. arguments])
+        {
+            WorkingDirectory = folder,
+            RedirectStandardOutput = true,
+            RedirectStandardError = true,
+        };
+        start.Environment.Remove("SOURCE_DATE_EPOCH");
+        if (moment is not null)
+        {
+            start.Environment["SOURCE_DATE_EPOCH"] = moment;
+        }
+
+        using var process = Process.Start(start)!;
+        var output = process.StandardOutput.ReadToEndAsync();
+        var errors = process.StandardError.ReadToEndAsync();
+        if (!process.WaitForExit(MostMilliseconds))
+        {
+            process.Kill(entireProcessTree: true);
+        }
+
+        process.WaitForExit();
+        return new ProgramRun(process.ExitCode, output.GetAwaiter().GetResult(), errors.GetAwaiter().GetResult());
+    }
+
+    /// <summary>Asserts the exit status, showing what the program said when it is another.</summary>
+    public ProgramRun Ends(int status)
+    {
+        Assert.True(Status == status, $"exit status {Status}, expected {status}\n{Output}{Errors}");
+        return this;
+    }
+}
