@@ -28,7 +28,7 @@ public static class Audit
         }
 
         var mentioned = inputs.Mentions.Select(mention => mention.Column).ToHashSet(StringComparer.Ordinal);
-        var analysis = ModelAnalysis.Run(declaration, bound.Value.Model, mentioned, inputs.Policy, inputs.Threads);
+        var analysis = ModelAnalysis.Run(declaration, bound.Value.Model, mentioned, inputs.Policy, new RunSettings(inputs.Threads, inputs.Provenance.Seed));
         if (analysis.Value is not { } results)
         {
             return Reading<AuditRecord>.Failed(analysis.Problems);

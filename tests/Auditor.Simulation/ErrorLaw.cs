@@ -1,3 +1,5 @@
+using Auditor.Numerics.Random;
+
 namespace Auditor.Simulation;
 
 /// <summary>How the errors of a cell are made. Variances are set by the row's first tested column z.</summary>

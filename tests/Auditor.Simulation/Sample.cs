@@ -1,3 +1,4 @@
+using Auditor.Numerics.Random;
 using Auditor.Numerics.Factor;
 
 namespace Auditor.Simulation;

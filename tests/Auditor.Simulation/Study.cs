@@ -1,4 +1,5 @@
 using Auditor.Analysis;
+using Auditor.Numerics.Random;
 using Auditor.Numerics;
 using Auditor.Numerics.Factor;
 using Auditor.Numerics.GroupTests;

@@ -1,5 +1,6 @@
 using Auditor.Declaration;
 using Auditor.Design;
+using Auditor.Numerics.ResidualChecks;
 using Auditor.Policies;
 using Auditor.Results;
 using Auditor.Rows;
@@ -9,7 +10,7 @@ namespace Auditor.Analysis;
 /// <summary>From a bound model to all results: row sets, fits, exclusions, checks.</summary>
 internal static class ModelAnalysis
 {
-    public static Reading<AuditResults> Run(ModelDeclaration declaration, BoundModel model, IReadOnlyCollection<string> mentioned, Policy policy, int threads)
+    public static Reading<AuditResults> Run(ModelDeclaration declaration, BoundModel model, IReadOnlyCollection<string> mentioned, Policy policy, RunSettings run)
     {
         var selection = RowSelection.Of(model);
         var common = policy.RowSet == RowSet.Common;
@@ -18,9 +19,11 @@ internal static class ModelAnalysis
             return Reading<AuditResults>.Failed(NoRows(declaration, common));
         }
 
-        var fits = ModelFits.Compute(model, selection, threads);
+        var fits = ModelFits.Compute(model, selection, common ? selection.Common : selection.Final, run.Threads);
         var sampling = model.Weights?.Kind == WeightKind.Sampling;
         var main = (common ? fits.Common : fits.Final)!;
+        var fit = CheckedFits.Of(model, main, fits.Residuals, sampling);
+        var influence = RowInfluence.OfAll(fit);
         var other = selection.Final.Equals(selection.Common) ? null : common ? fits.Final : fits.Common;
         return Reading<AuditResults>.Of(new AuditResults(
             declaration.Model.Id,
@@ -31,8 +34,8 @@ internal static class ModelAnalysis
             Exclusions.Of(model, fits, policy, sampling),
             [.. Enumerable.Range(0, model.Groups.Count).Select(group => Inputs(model, fits, group, common))],
             AllLeftOut.Of(model, fits.Common, policy, sampling),
-            NotYet.ResidualChecks(),
-            NotYet.Influence([]),
+            ResidualCheckFigures.Of(fit, influence, main.Rows, policy.Significance, run.Seed),
+            InfluenceFigures.Of(influence, main.Rows, model.RowLabel),
             CollinearityFigures.Of(main)));
     }
 
@@ -51,3 +54,8 @@ internal static class ModelAnalysis
             rows is null ? [] : [.. rows[group].Sums.RestsOn.Select(position => rows.Rows.Rows[position] + 1)]);
     }
 }
+
+/// <summary>How an audit is to be run; no result but those drawn at random depends on it.</summary>
+/// <param name="Threads">Most row sets to work on at once.</param>
+/// <param name="Seed">Seed of everything drawn at random.</param>
+internal sealed record RunSettings(int Threads, long Seed);

@@ -1,5 +1,6 @@
 using Auditor.Data;
 using Auditor.Design;
+using Auditor.Numerics.ResidualChecks;
 using Auditor.Rows;
 
 namespace Auditor.Analysis;
@@ -16,23 +17,28 @@ internal sealed class ModelFits
 
     public RowSelection Selection { get; }
 
+    /// <summary>Residual and leverage of every row of the fit that is shown.</summary>
+    public required ResidualStore Residuals { get; init; }
+
     /// <summary>The final model on the rows complete for it alone.</summary>
     public RowSetFit? Final => On(Selection.Final);
 
     /// <summary>The final model and all groups on the rows complete for everything; null when there is no such row.</summary>
     public RowSetFit? Common => On(Selection.Common);
 
+    /// <param name="main">The rows of the fit that is shown and checked: their residuals are kept.</param>
     /// <param name="threads">Most row sets to work on at once; each is computed by itself, so no result depends on it.</param>
-    public static ModelFits Compute(BoundModel model, RowSelection selection, int threads)
+    public static ModelFits Compute(BoundModel model, RowSelection selection, RowSubset main, int threads)
     {
         var wanted = Wanted(model, selection).Where(entry => entry.Key.Count > 0).ToArray();
+        var residuals = new ResidualStore();
         var computed = new RowSetFit[wanted.Length];
         Parallel.For(
             0,
             wanted.Length,
             new ParallelOptions { MaxDegreeOfParallelism = threads },
-            at => computed[at] = RowSetFit.Compute(model, wanted[at].Key, [.. wanted[at].Value], wanted[at].Key.Equals(selection.Common)));
-        var fits = new ModelFits(selection);
+            at => computed[at] = RowSetFit.Compute(model, wanted[at].Key, [.. wanted[at].Value], wanted[at].Key.Equals(selection.Common), wanted[at].Key.Equals(main) ? residuals : null));
+        var fits = new ModelFits(selection) { Residuals = residuals };
         foreach (var fit in computed)
         {
             fits._fits[fit.Rows] = fit;

@@ -9,29 +9,6 @@ internal static class NotYet
     private const string Why = "not built yet";
     private const string NotCompared = "not_compared";
 
-    private static readonly (string Check, string Assumption)[] Checks =
-    [
-        ("breusch_pagan", "equal_variance"),
-        ("breusch_pagan_original", "equal_variance"),
-        ("white", "equal_variance"),
-        ("jarque_bera", "normality"),
-        ("shapiro_wilk", "normality"),
-        ("anderson_darling", "normality"),
-        ("durbin_watson", "no_serial_correlation"),
-        ("breusch_godfrey_1", "no_serial_correlation"),
-        ("breusch_godfrey_4", "no_serial_correlation"),
-        ("ljung_box_4", "no_serial_correlation"),
-        ("unit_root_residual", "stationary_residual"),
-        ("reset", "functional_form"),
-        ("largest_residual", "no_outlier"),
-        ("chow", "stable_coefficients"),
-    ];
-
-    public static IReadOnlyList<CheckResult> ResidualChecks() =>
-        [.. Checks.Select(check => new CheckResult(check.Check, null, null, null, null, check.Assumption, null, WhyOf(check.Check)))];
-
-    public static Influence Influence(IReadOnlyList<int> leverageOne) => new(leverageOne, []) { Why = Why };
-
     public static IReadOnlyList<ClaimResult> Claims(ModelDeclaration declaration)
     {
         var claims = new List<ClaimResult>();
@@ -59,13 +36,6 @@ internal static class NotYet
 
     public static IReadOnlyList<StepResult> Elimination(ModelDeclaration declaration) =>
         [.. (declaration.Elimination?.Steps ?? []).Select((step, index) => new StepResult(index + 1, step.Drop, null, null, null, null, null, Why))];
-
-    private static string WhyOf(string check) => check switch
-    {
-        "durbin_watson" or "breusch_godfrey_1" or "breusch_godfrey_4" or "ljung_box_4" or "unit_root_residual" => "no time order declared",
-        "chow" => "no split declared",
-        _ => Why,
-    };
 
     private static void AddFit(ReportedFigures? reported, Action<string, ReportedFigure?> add)
     {

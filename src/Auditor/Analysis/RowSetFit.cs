@@ -2,6 +2,7 @@ using Auditor.Data;
 using Auditor.Design;
 using Auditor.Numerics;
 using Auditor.Numerics.Factor;
+using Auditor.Numerics.ResidualChecks;
 using Auditor.Numerics.SecondPass;
 
 namespace Auditor.Analysis;
@@ -34,14 +35,15 @@ internal sealed class RowSetFit
 
     /// <param name="groups">Positions of the groups to be tested on these rows.</param>
     /// <param name="jointly">Whether all of them together, and each last, are wanted too.</param>
-    public static RowSetFit Compute(BoundModel model, RowSubset rows, IReadOnlyList<int> groups, bool jointly)
+    /// <param name="residuals">Keeps every row's residual and leverage; null when they are not wanted.</param>
+    public static RowSetFit Compute(BoundModel model, RowSubset rows, IReadOnlyList<int> groups, bool jointly, ResidualStore? residuals)
     {
         var plan = new DesignPlan(model, groups);
         var design = new DesignRows(model, plan, rows);
         var final = FinalFactor.Of(FactorBuilder.Build(design));
         var added = plan.Layout.Groups.Select(range => AddedGroup.Of(final, [.. range.Indices])).ToList();
         var joint = jointly && groups.Count > 0 ? AddedGroup.Of(final, Columns(plan, [.. Enumerable.Range(0, groups.Count)])) : null;
-        var pass = RowPass.Run(design, final, joint is null ? added : [.. added, joint], []);
+        var pass = RowPass.Run(design, final, joint is null ? added : [.. added, joint], residuals is null ? [] : [residuals]);
         var result = new RowSetFit(rows, plan, final, new Fit(final, pass));
         for (var g = 0; g < groups.Count; g++)
         {

@@ -12,7 +12,11 @@ public sealed record BoundModel(
     BoundTerm Response,
     IReadOnlyList<BoundTerm> FinalTerms,
     IReadOnlyList<BoundGroup> Groups,
-    BoundWeights? Weights);
+    BoundWeights? Weights)
+{
+    /// <summary>The declared column that names rows for readers.</summary>
+    public DataColumn? RowLabel { get; init; }
+}
 
 /// <summary>A left-out group whose terms are bound.</summary>
 public sealed record BoundGroup(LeftOutGroup Declared, IReadOnlyList<BoundTerm> Terms);

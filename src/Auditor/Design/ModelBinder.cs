@@ -24,7 +24,10 @@ public static class ModelBinder
         return problems.Count > 0
             ? Reading<BoundDeclaration>.Failed([.. problems.OrderBy(problem => problem.Line)])
             : Reading<BoundDeclaration>.Of(new BoundDeclaration(
-                new BoundModel(table, rows.Rows, declaration.FinalModel.Intercept, response!, final, groups, weights),
+                new BoundModel(table, rows.Rows, declaration.FinalModel.Intercept, response!, final, groups, weights)
+                {
+                    RowLabel = declaration.Data.RowLabel is { } label ? table[label.Column] : null,
+                },
                 [.. rows.Notes, .. binder.Notes]));
     }
 

@@ -11,7 +11,20 @@ public sealed record CheckResult(
     double? P,
     string Assumption,
     bool? Rejects,
-    [property: JsonIgnore(Condition = JsonIgnoreCondition.WhenWritingNull)] string? Why);
+    [property: JsonIgnore(Condition = JsonIgnoreCondition.WhenWritingNull)] string? Why)
+{
+    /// <summary>p by simulation, on which <see cref="Rejects"/> then rests.</summary>
+    [JsonIgnore(Condition = JsonIgnoreCondition.WhenWritingNull)]
+    public double? PSimulated { get; init; }
+
+    /// <summary>The row that the check is about, 1-based in the source.</summary>
+    [JsonIgnore(Condition = JsonIgnoreCondition.WhenWritingNull)]
+    public int? Row { get; init; }
+
+    /// <summary>How the check was made, where there is more than one way.</summary>
+    [JsonIgnore(Condition = JsonIgnoreCondition.WhenWritingNull)]
+    public string? Variant { get; init; }
+}
 
 public sealed record Influence(IReadOnlyList<int> LeverageOne, IReadOnlyList<InfluentialRow> Largest)
 {

@@ -1,13 +1,13 @@
 using System.Numerics;
 
-namespace Auditor.Simulation;
+namespace Auditor.Numerics.Random;
 
 /// <summary>A stream of random numbers of its own for each key, so that results do not depend on which thread draws when.</summary>
 /// <remarks>
 /// xoshiro256** by Blackman and Vigna 2021, ACM Transactions on Mathematical Software 47, its state filled by splitmix64 as they advise (from memory);
 /// normal numbers by Box and Muller 1958.
 /// </remarks>
-internal sealed class Generator
+public sealed class Generator
 {
     private const double Unit = 1.0 / (1UL << 53);
 

@@ -1,0 +1,34 @@
+using Auditor.Numerics.Factor;
+
+namespace Auditor.Numerics.ResidualChecks;
+
+/// <summary>
+/// A second design made row by row from a first one: the auxiliary regressions of the checks. Each block of the first is handed over with the position of
+/// its first row; the derived block has as many rows.
+/// </summary>
+/// <param name="fill">Fills the derived block (its rows are set) from the source block.</param>
+/// <param name="keepWeights">Whether the rows keep their weights; copies are always kept.</param>
+internal sealed class DerivedRows(IDesignRows source, DesignLayout layout, bool keepWeights, Action<RowBlock, RowBlock> fill) : IDesignRows
+{
+    public DesignLayout Layout => layout;
+
+    public IEnumerable<RowBlock> Blocks()
+    {
+        RowBlock? derived = null;
+        foreach (var block in source.Blocks())
+        {
+            derived ??= new RowBlock(block.Stride, layout.Columns);
+            derived.FirstRow = block.FirstRow;
+            derived.Rows = block.Rows;
+            derived.Weights = keepWeights ? block.Weights : null;
+            derived.Copies = block.Copies;
+            if (layout.Intercept)
+            {
+                derived.Column(0).Fill(1);
+            }
+
+            fill(block, derived);
+            yield return derived;
+        }
+    }
+}
