@@ -5,7 +5,8 @@ namespace Auditor.Numerics.ResidualChecks;
 
 /// <summary>
 /// White's check. Null: the error variance does not depend on the final model's columns, their squares and cross products. n R² of the squared residuals on an
-/// intercept and all of these; chi-square on rank - 1. With more than 100 auxiliary columns, on the fitted value and its square instead, and the result says so.
+/// intercept and all of these; chi-square on rank - 1. Squares of 0/1 columns and products that are zero in every row are
+/// no columns. With more than 100 auxiliary columns, on the fitted value and its square instead, and the result says so.
 /// </summary>
 /// <remarks>White 1980, Econometrica 48; the short form in Wooldridge, Introductory Econometrics (from memory). Verified against numpy and statsmodels (tests/reference).</remarks>
 public static class White
@@ -19,35 +20,31 @@ public static class White
             return CheckOutcome.None(impediment);
         }
 
-        var slopes = fit.Slopes;
-        var full = slopes.Length * (slopes.Length + 3) / 2;
-        var short_ = full + 1 > WidestInFull;
-        var auxiliary = short_
-            ? AuxiliaryRegression.Of(fit.Design, 2, (source, derived) => FillShort(fit, source, derived))
-            : AuxiliaryRegression.Of(fit.Design, full, (source, derived) => FillFull(fit, slopes, source, derived));
+        var columns = WhiteColumns.Of(fit);
+        var inFull = columns.Count <= WidestInFull;
+        var auxiliary = inFull
+            ? AuxiliaryRegression.Of(fit.Design, columns.Count - 1, (source, derived) => FillFull(fit, columns, source, derived))
+            : AuxiliaryRegression.Of(fit.Design, 2, (source, derived) => FillShort(fit, source, derived));
         if (auxiliary.Df == 0)
         {
             return CheckOutcome.None(CheckImpediment.NothingToRelate);
         }
 
         var value = auxiliary.N * auxiliary.RSquared;
-        return new CheckStatistic(value, auxiliary.Df, null, ChiSquared.Survival(value, auxiliary.Df)) { OnFittedValues = short_ };
+        return new CheckStatistic(value, auxiliary.Df, null, ChiSquared.Survival(value, auxiliary.Df)) { OnFittedValues = !inFull };
     }
 
-    private static void FillFull(CheckedFit fit, int[] slopes, RowBlock source, RowBlock derived)
+    private static void FillFull(CheckedFit fit, WhiteColumns columns, RowBlock source, RowBlock derived)
     {
         var next = 1;
-        foreach (var column in slopes)
+        foreach (var column in columns.Linear)
         {
             source.Column(column).CopyTo(derived.Column(next++));
         }
 
-        for (var a = 0; a < slopes.Length; a++)
+        foreach (var (a, b) in columns.Products)
         {
-            for (var b = 0; b <= a; b++)
-            {
-                BlockKernels.Multiply(source.Column(slopes[a]), source.Column(slopes[b]), derived.Column(next++));
-            }
+            BlockKernels.Multiply(source.Column(a), source.Column(b), derived.Column(next++));
         }
 
         SquaredResiduals.Fill(fit.Store, fit.Fit.Rss / fit.Fit.N, derived);

@@ -11,6 +11,10 @@ internal sealed class RecordView(JsonElement root)
 
     public JsonElement Collinearity => Root.GetProperty("collinearity");
 
+    public JsonElement Checks => Root.GetProperty("checks");
+
+    public JsonElement Influence => Root.GetProperty("influence");
+
     public JsonElement AllLeftOut => Root.GetProperty("all_left_out");
 
     public JsonElement Exclusion(string group) =>
