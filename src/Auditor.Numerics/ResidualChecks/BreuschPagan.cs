@@ -1,4 +1,3 @@
-using Auditor.Numerics.Distributions;
 using Auditor.Numerics.Factor;
 
 namespace Auditor.Numerics.ResidualChecks;
@@ -33,7 +32,7 @@ public static class BreuschPagan
         }
 
         var value = statistic(auxiliary);
-        return new CheckStatistic(value, auxiliary.Df, null, ChiSquared.Survival(value, auxiliary.Df));
+        return ChiSquaredCheck.Of(value, auxiliary.Df);
     }
 
     private static void Fill(ResidualStore store, int[] slopes, double variance, RowBlock source, RowBlock derived)

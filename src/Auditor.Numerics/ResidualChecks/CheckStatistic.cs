@@ -1,3 +1,5 @@
+using Auditor.Numerics.Distributions;
+
 namespace Auditor.Numerics.ResidualChecks;
 
 /// <summary>The result of a residual check: a statistic with its p, or the reason why there is none.</summary>
@@ -11,6 +13,9 @@ public abstract record CheckOutcome
 /// <param name="P">Upper tail probability under the null.</param>
 public sealed record CheckStatistic(double Statistic, double? Df, double? Df2, double P) : CheckOutcome
 {
+    /// <summary>Natural logarithm of p where it can be given beyond underflow; null otherwise.</summary>
+    public double? LogP { get; init; }
+
     /// <summary>p by simulation, where the approximation is not trusted; null otherwise.</summary>
     public double? SimulatedP { get; init; }
 
@@ -22,6 +27,13 @@ public sealed record CheckStatistic(double Statistic, double? Df, double? Df2, d
 }
 
 public sealed record NoCheck(CheckImpediment Why) : CheckOutcome;
+
+/// <summary>Checks whose statistic is chi-square under the null.</summary>
+internal static class ChiSquaredCheck
+{
+    public static CheckStatistic Of(double statistic, double df) =>
+        new(statistic, df, null, ChiSquared.Survival(statistic, df)) { LogP = ChiSquared.LogSurvival(statistic, df) };
+}
 
 /// <summary>Why a check has no value.</summary>
 public enum CheckImpediment

@@ -1,4 +1,3 @@
-using Auditor.Numerics.Distributions;
 using Auditor.Numerics.Random;
 
 namespace Auditor.Numerics.ResidualChecks;
@@ -27,7 +26,7 @@ public static class JarqueBera
             return CheckOutcome.None(CheckImpediment.TooFew);
         }
 
-        return new CheckStatistic(value, 2, null, ChiSquared.Survival(value, 2))
+        return ChiSquaredCheck.Of(value, 2) with
         {
             SimulatedP = residuals.Length < SimulatedBelow ? Simulate(value, residuals.Length, seed) : null,
         };

@@ -28,7 +28,7 @@ public static class Reset
         var rows = new DerivedRows(fit.Design, layout, keepWeights: true, (source, derived) => Fill(fit, centre, scale, source, derived));
         var group = AddedGroup.Of(FinalFactor.Of(FactorBuilder.Build(rows)), [columns, columns + 1]);
         return PartialF.Of(group) is FTest f
-            ? new CheckStatistic(f.Statistic, f.Df1, f.Df2, f.Probability)
+            ? new CheckStatistic(f.Statistic, f.Df1, f.Df2, f.Probability) { LogP = f.LogP }
             : CheckOutcome.None(group.Rank == 0 ? CheckImpediment.NothingToRelate : CheckImpediment.NoResiduals);
     }
 

@@ -1,4 +1,3 @@
-using Auditor.Numerics.Distributions;
 using Auditor.Numerics.Factor;
 
 namespace Auditor.Numerics.ResidualChecks;
@@ -31,7 +30,7 @@ public static class White
         }
 
         var value = auxiliary.N * auxiliary.RSquared;
-        return new CheckStatistic(value, auxiliary.Df, null, ChiSquared.Survival(value, auxiliary.Df)) { OnFittedValues = !inFull };
+        return ChiSquaredCheck.Of(value, auxiliary.Df) with { OnFittedValues = !inFull };
     }
 
     private static void FillFull(CheckedFit fit, WhiteColumns columns, RowBlock source, RowBlock derived)

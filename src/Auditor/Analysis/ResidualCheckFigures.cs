@@ -36,8 +36,9 @@ internal static class ResidualCheckFigures
     private static CheckResult Shown(string name, string assumption, CheckOutcome outcome, RowSubset rows, double significance) => outcome switch
     {
         CheckStatistic check => new CheckResult(
-            name, check.Statistic, check.Df, check.Df2, check.P, assumption, (check.SimulatedP ?? check.P) <= significance, null)
+            name, check.Statistic, check.Df, check.Df2, TestFigure.ShownP(check.P), assumption, (check.SimulatedP ?? check.P) <= significance, null)
         {
+            Log10P = check.LogP is double log ? TestFigure.Log10(log) : null,
             PSimulated = check.SimulatedP,
             Row = check.Position is int position ? rows.Rows[position] + 1 : null,
             Variant = check.OnFittedValues ? "on the fitted value and its square, because the full form has more than 100 columns" : null,

@@ -13,6 +13,9 @@ public sealed record CheckResult(
     bool? Rejects,
     [property: JsonIgnore(Condition = JsonIgnoreCondition.WhenWritingNull)] string? Why)
 {
+    [JsonPropertyName("log10_p"), JsonIgnore(Condition = JsonIgnoreCondition.WhenWritingNull)]
+    public double? Log10P { get; init; }
+
     /// <summary>p by simulation, on which <see cref="Rejects"/> then rests.</summary>
     [JsonIgnore(Condition = JsonIgnoreCondition.WhenWritingNull)]
     public double? PSimulated { get; init; }
