@@ -67,7 +67,7 @@ internal sealed class CommandLine
         var parsed = _root.Parse(args, new ParserConfiguration { ResponseFileTokenReplacer = null });
         if (args.Any(arg => arg is "--help" or "-h" or "-?"))
         {
-            return parsed.Invoke(new InvocationConfiguration { EnableDefaultExceptionHandler = false });
+            return Help(parsed);
         }
 
         var misfits = Misplaced(args, parsed) is string misplaced ? [misplaced] : UnknownWords.In(parsed, parsed.GetValue(_declaration));
@@ -113,6 +113,15 @@ internal sealed class CommandLine
     {
         var problems = new List<string>();
         return options.Read(parsed, declaration, defaultOut, problems) is { } request ? AuditCommand.Run(request) : Unusable(problems);
+    }
+
+    /// <summary>The parser names the program after its file; people start it by the script's name.</summary>
+    private static int Help(ParseResult parsed)
+    {
+        var text = new StringWriter(System.Globalization.CultureInfo.InvariantCulture);
+        var status = parsed.Invoke(new InvocationConfiguration { EnableDefaultExceptionHandler = false, Output = text });
+        Console.Out.Write(text.ToString().Replace(typeof(CommandLine).Assembly.GetName().Name! + " ", "./" + Program + " ", StringComparison.Ordinal));
+        return status;
     }
 
     /// <summary>An option or file before a command would be dropped in silence: options stand after the word they belong to.</summary>
