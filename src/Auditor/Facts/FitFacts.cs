@@ -5,7 +5,9 @@ namespace Auditor.Facts;
 /// <summary>What the fit's facts need beside the fit.</summary>
 /// <param name="Perfect">The residual sum of squares is at rounding level.</param>
 /// <param name="LeftOutGroups">Groups of terms declared as left out.</param>
-public sealed record FitInputs(bool Perfect, int LeftOutGroups);
+/// <param name="Influence">How single rows bear on the fit.</param>
+/// <param name="Collinearity">How the fit's terms depend on each other.</param>
+public sealed record FitInputs(bool Perfect, int LeftOutGroups, Influence Influence, Collinearity Collinearity);
 
 /// <summary>The facts of the final model's fit on its own rows.</summary>
 public static class FitFacts
@@ -32,11 +34,33 @@ public static class FitFacts
         .Text("nearly_aliased", "Those columns.", view => ColumnLists.Names(view.Fit.NearlyAliased))
         .Number("digits_lost", FactUnits.Digits, "Most digits lost by one of them.", view => ColumnLists.MostDigitsLost(view.Fit.NearlyAliased), ColumnLists.NoneNearlyAliased)
         .Count("left_out_groups", "groups", "Groups of terms declared as left out.", view => view.Inputs.LeftOutGroups)
+        .Flag("has_leverage_one_rows", "At least one row has leverage 1: the model fits it whatever its response.", view => view.Inputs.Influence.LeverageOne.Count > 0)
+        .Text("leverage_one_rows", "Those rows, by number.", view => ColumnLists.Numbers(view.Inputs.Influence.LeverageOne))
+        .Number("largest_cooks_distance", FactUnits.None, "Largest Cook's distance of a row.", view => MostInfluential(view)?.CooksDistance, NoInfluence)
+        .Text("most_influential_row", "The row of that distance, with its label where there is one.", view => RowName(MostInfluential(view)), NoInfluence)
+        .Number("largest_gvif_scaled", FactUnits.None, "Largest generalised variance inflation of a term, to the power 1/(2 df).", view => MostInflated(view)?.GvifScaled, NoTerm)
+        .Text("most_inflated_term", "The term of that inflation.", view => MostInflated(view)?.Term, NoTerm)
         .Flag("has_left_out_groups", "At least one group is declared as left out.", view => view.Inputs.LeftOutGroups > 0);
 
     public static IReadOnlyList<FactDefinition> Definitions => Family.Definitions;
 
     public static FactSet From(string modelId, FitSummary fit, FitInputs inputs) => Family.From(new FitView(fit, inputs), modelId, null);
+
+    private static InfluentialRow? MostInfluential(FitView view) => view.Inputs.Influence.Largest is [var first, ..] ? first : null;
+
+    private static string? RowName(InfluentialRow? row) => row switch
+    {
+        null => null,
+        { Label: { } label } => string.Create(System.Globalization.CultureInfo.InvariantCulture, $"{row.Row} ({label})"),
+        _ => row.Row.ToString(System.Globalization.CultureInfo.InvariantCulture),
+    };
+
+    private static TermCollinearity? MostInflated(FitView view) =>
+        view.Inputs.Collinearity.Terms.Where(term => term.GvifScaled is not null).MaxBy(term => term.GvifScaled);
+
+    private static string NoInfluence(FitView view) => view.Inputs.Influence.Why ?? "no row has a Cook's distance";
+
+    private static string NoTerm(FitView view) => "no term beside the intercept has a variance inflation";
 
     private static string Why(FitView view) => view.Fit.Why ?? "the fit gives no value";
 

@@ -30,7 +30,7 @@ public sealed class FactCatalogueTests
         [
             ExclusionFacts.From(Samples.Tested with { OtherRowSet = new OtherRowSetFigures(1, 1, 1, 1, 1, "supported") }, new ExclusionInputs([], []), Samples.Policy()),
             AllLeftOutFacts.From(Samples.Tested, [], 480, Samples.Policy()),
-            FitFacts.From("m", Samples.Fit, new FitInputs(false, 1)),
+            FitFacts.From("m", Samples.Fit, new FitInputs(false, 1, Samples.Influence, Samples.Collinearity)),
             RowFacts.From("m", Samples.Rows),
             ColumnFacts.From(ColumnInputs.NobodyMentions("memo")),
             CheckFacts.From(new CheckResult("reset", 2, 2, 400, 0.1, "form", false, null)),

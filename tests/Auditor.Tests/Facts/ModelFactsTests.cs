@@ -32,7 +32,7 @@ public sealed class ModelFactsTests
     [InlineData(0.0, true, true, false)]
     public void A_saturated_fit_is_not_called_perfect(double df, bool atRounding, bool saturated, bool perfect)
     {
-        var facts = FitFacts.From("m", Samples.Fit with { DfResidual = df }, new FitInputs(atRounding, 1));
+        var facts = FitFacts.From("m", Samples.Fit with { DfResidual = df }, new FitInputs(atRounding, 1, Samples.Influence, Samples.Collinearity));
 
         Assert.Equal(new FactValue.Flag(saturated), facts["saturated"]);
         Assert.Equal(new FactValue.Flag(perfect), facts["perfect"]);
@@ -41,7 +41,7 @@ public sealed class ModelFactsTests
     [Fact]
     public void A_fit_gives_rows_per_coefficient_and_its_reason_for_nulls()
     {
-        var facts = FitFacts.From("m", Samples.Fit with { FP = null, Why = "only an intercept" }, new FitInputs(false, 0));
+        var facts = FitFacts.From("m", Samples.Fit with { FP = null, Why = "only an intercept" }, new FitInputs(false, 0, Samples.Influence, Samples.Collinearity));
 
         Assert.Equal(new FactValue.Number(80), facts["rows_per_coefficient"]);
         Assert.Equal(new FactValue.NotComputable("only an intercept"), facts["f_p"]);

@@ -8,6 +8,10 @@ internal static class Samples
 {
     public static readonly GroupTests NoTests = new(null, null, null, null, null, null, null, null, null, null, null, null, null, null, null);
 
+    public static readonly Influence Influence = new([17], [new InfluentialRow(3, "QL-10003", 0.4, 2.1, 1.2, 1.8)]);
+
+    public static readonly Collinearity Collinearity = new([new TermCollinearity("engine_hours", 1, 12, 3.46)], [1, 40], []);
+
     public static readonly Exclusion Tested = new(
         "engine condition", ["engine_hours", "engine_hours^2"], 480, 2, 470, 12.5, 12.1,
         NoTests with { Classical = new TestFigures(7.8, 2, 470, 0.0005) },
