@@ -19,9 +19,9 @@ public static class White
             return CheckOutcome.None(impediment);
         }
 
-        var columns = WhiteColumns.Of(fit);
-        var inFull = columns.Count <= WidestInFull;
-        var auxiliary = inFull
+        var columns = fit.Slopes.Length < WidestInFull ? WhiteColumns.Of(fit) : null;
+        var inFull = columns?.Count <= WidestInFull;
+        var auxiliary = columns is not null && inFull
             ? AuxiliaryRegression.Of(fit.Design, columns.Count - 1, (source, derived) => FillFull(fit, columns, source, derived))
             : AuxiliaryRegression.Of(fit.Design, 2, (source, derived) => FillShort(fit, source, derived));
         if (auxiliary.Df == 0)

@@ -6,6 +6,12 @@ namespace Auditor.Analysis;
 /// <summary>Collinearity of the final model as the record shows it.</summary>
 internal static class CollinearityFigures
 {
+    /// <summary>Up to so many coefficients the proportions of all indices are given.</summary>
+    private const int FewCoefficients = 100;
+
+    /// <summary>Beyond that, those of so many of the largest.</summary>
+    private const int LargestShown = 20;
+
     public static Results.Collinearity Of(RowSetFit rows)
     {
         var condition = rows.Fit.Condition;
@@ -13,7 +19,11 @@ internal static class CollinearityFigures
         return new Results.Collinearity(
             Terms(rows),
             condition.Indices,
-            [.. condition.Indices.Select((index, j) => new VarianceProportions(index, Proportions(condition, j, labels)))]);
+            [.. Enumerable.Range(0, labels.Count).Skip(labels.Count <= FewCoefficients ? 0 : labels.Count - LargestShown)
+                .Select(j => new VarianceProportions(condition.Indices[j], Proportions(condition, j, labels)))])
+        {
+            Why = labels.Count <= FewCoefficients ? null : "variance proportions are given for the 20 largest condition indices only: the model has more than 100 coefficients",
+        };
     }
 
     private static List<TermCollinearity> Terms(RowSetFit rows)

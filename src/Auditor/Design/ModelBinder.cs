@@ -6,6 +6,8 @@ namespace Auditor.Design;
 /// <summary>Binds a checked declaration to its table: filter, weights, then every term; all problems at once.</summary>
 public static class ModelBinder
 {
+    private const int MostColumns = 10_000;
+
     public static Reading<BoundDeclaration> Bind(ModelDeclaration declaration, DataTable table)
     {
         var kept = KeepFilter.Apply(table, declaration.Data.Keep, declaration.File);
@@ -21,6 +23,7 @@ public static class ModelBinder
         var groups = declaration.LeftOut.Select(group => new BoundGroup(group, All(binder, group.Terms, problems))).ToList();
         var weights = BoundWeightsReader.Read(declaration, table, rows.Rows, problems);
         CheckResponse(declaration, response, problems);
+        CheckWidth(declaration, [.. final, .. groups.SelectMany(group => group.Terms)], problems);
         return problems.Count > 0
             ? Reading<BoundDeclaration>.Failed([.. problems.OrderBy(problem => problem.Line)])
             : Reading<BoundDeclaration>.Of(new BoundDeclaration(
@@ -29,6 +32,19 @@ public static class ModelBinder
                     RowLabel = declaration.Data.RowLabel is { } label ? table[label.Column] : null,
                 },
                 [.. rows.Notes, .. binder.Notes]));
+    }
+
+    /// <summary>The factor has as many rows as columns: beyond this many it would not fit in memory.</summary>
+    private static void CheckWidth(ModelDeclaration declaration, IReadOnlyList<BoundTerm> terms, List<Problem> problems)
+    {
+        var columns = terms.Sum(term => (long)term.ColumnLabels.Count);
+        if (columns > MostColumns)
+        {
+            var widest = terms.MaxBy(term => term.ColumnLabels.Count)!;
+            problems.Add(new Problem(declaration.File, widest.Term.Line, string.Create(
+                System.Globalization.CultureInfo.InvariantCulture,
+                $"the terms make {columns:#,0} columns, more than the {MostColumns:#,0} that can be audited at once; the widest, {widest.Term.Label}, makes {widest.ColumnLabels.Count:#,0}")));
+        }
     }
 
     private static void CheckResponse(ModelDeclaration declaration, BoundTerm? response, List<Problem> problems)

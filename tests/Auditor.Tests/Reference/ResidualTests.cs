@@ -22,6 +22,23 @@ public sealed class ResidualTests
         Report.AssertAllHold([.. InfluenceFigures.Of(run)], run.Case.Tolerance);
     }
 
+    [Fact]
+    public void Variance_proportions_agree_with_other_programs()
+    {
+        int compared = 0;
+        foreach (CaseRun run in ReferenceCases.All.Select(one => CaseRuns.Of(one.Name, "")))
+        {
+            IReadOnlyList<Figure> figures = [.. VarianceProportionFigures.Of(run)];
+            compared += figures.Count;
+            if (figures.Count > 0)
+            {
+                Report.AssertAllHold(figures, Math.Max(1e-6, run.Case.Tolerance));
+            }
+        }
+
+        Assert.True(compared > 150, $"only {compared} proportions compared");
+    }
+
     [Theory]
     [MemberData(nameof(Runs.Cases), MemberType = typeof(Runs))]
     public void Rows_with_leverage_one_are_named(string name)
