@@ -25,7 +25,7 @@ public sealed record AuditRecord(
     IReadOnlyDictionary<string, object> Policy,
     Provenance Provenance)
 {
-    /// <summary>Points of the pictures: a way of showing the residuals, not a figure, and so not in the JSON record. Null when nobody asked for them.</summary>
+    /// <summary>Points of the pictures: a way of showing the residuals, not a figure, and so not in the JSON record. Null in a record that was made without them.</summary>
     [JsonIgnore]
     public PlotData? Plots { get; init; }
 }
