@@ -7,7 +7,6 @@ internal sealed record PictureAxis(double Low, double High, double From, double 
 {
     private const double Margin = 0.04;
     private const double NarrowestRange = 1e-9;
-    private const int MostTicks = 6;
     private static readonly double[] Steps = [1, 2, 5, 10];
 
     /// <summary>Covers all values with a small margin; a range too narrow to divide is widened.</summary>
@@ -24,20 +23,21 @@ internal sealed record PictureAxis(double Low, double High, double From, double 
 
     public double At(double value) => From + ((To - From) * (value - Low) / (High - Low));
 
-    /// <summary>Round values within the range, at most six.</summary>
-    public IReadOnlyList<PictureTick> Ticks()
+    /// <summary>Round values within the range.</summary>
+    /// <param name="most">Most steps that have room.</param>
+    public IReadOnlyList<PictureTick> Ticks(int most)
     {
-        double step = Step(High - Low);
+        double step = Step(High - Low, most);
         double first = Math.Ceiling(Low / step), last = Math.Floor(High / step);
         return [.. Enumerable.Range(0, (int)(last - first) + 1).Select(index => Tick((first + index) * step, step))];
     }
 
     private PictureTick Tick(double value, double step) => new(PicturePath.Place(At(value)), NumberText.Tick(value, step));
 
-    /// <summary>The smallest of 1, 2 and 5 times a power of ten that gives few enough ticks.</summary>
-    private static double Step(double range)
+    /// <summary>The smallest of 1, 2 and 5 times a power of ten that gives few enough steps.</summary>
+    private static double Step(double range, int most)
     {
-        double power = Math.Pow(10, Math.Floor(Math.Log10(range / MostTicks)));
-        return power * Steps.First(step => range / (power * step) <= MostTicks - 1 || step == Steps[^1]);
+        double power = Math.Pow(10, Math.Floor(Math.Log10(range / most)));
+        return power * Steps.First(step => range / (power * step) <= most || step == Steps[^1]);
     }
 }

@@ -16,9 +16,9 @@ internal sealed record ResidualPicture(
     public const int Top = 24;
     public const int Bottom = 252;
 
-    public IReadOnlyList<PictureTick> XTicks => X.Ticks();
+    public IReadOnlyList<PictureTick> XTicks => X.Ticks(5);
 
-    public IReadOnlyList<PictureTick> YTicks => Y.Ticks();
+    public IReadOnlyList<PictureTick> YTicks => Y.Ticks(7);
 
     public static PictureAxis Horizontal(IEnumerable<double> values) => PictureAxis.Covering(values, Left, Right);
 
