@@ -57,7 +57,10 @@ public static class Audit
         rules.Findings,
         rules.Undecided,
         inputs.Policy.Effective,
-        inputs.Provenance);
+        inputs.Provenance)
+    {
+        Plots = results.Plots,
+    };
 
     private static ModelInfo Model(ModelDeclaration declaration) => new(
         declaration.Model.Id,

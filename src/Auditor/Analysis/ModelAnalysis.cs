@@ -36,7 +36,8 @@ internal static class ModelAnalysis
             AllLeftOut.Of(model, fits.Common, policy, sampling),
             ResidualCheckFigures.Of(fit, influence, main.Rows, policy.Significance, run.Seed),
             InfluenceFigures.Of(influence, main.Rows, model.RowLabel),
-            CollinearityFigures.Of(main)));
+            CollinearityFigures.Of(main),
+            PlotFigures.Of(fit, influence, main.Rows, model.RowLabel, weighted: model.Weights is { Kind: not WeightKind.Frequency })));
     }
 
     private static Problem NoRows(ModelDeclaration declaration, bool common) => new(

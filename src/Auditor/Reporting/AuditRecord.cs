@@ -1,3 +1,4 @@
+using System.Text.Json.Serialization;
 using Auditor.Findings;
 using Auditor.Results;
 
@@ -22,7 +23,12 @@ public sealed record AuditRecord(
     IReadOnlyList<Finding> Findings,
     IReadOnlyList<Undecided> Undecided,
     IReadOnlyDictionary<string, object> Policy,
-    Provenance Provenance);
+    Provenance Provenance)
+{
+    /// <summary>Points of the pictures: a way of showing the residuals, not a figure, and so not in the JSON record. Null in a record that was made without them.</summary>
+    [JsonIgnore]
+    public PlotData? Plots { get; init; }
+}
 
 /// <param name="Response">The response's label.</param>
 public sealed record ModelInfo(string Id, string? Title, string? Version, string? PreparedBy, string Response, IReadOnlyList<string> Terms, bool Intercept);

@@ -43,6 +43,17 @@ internal static class NumberText
     /// <summary>A value as the policy states it: all its digits.</summary>
     public static string Plain(double value) => value.ToString("R", Format);
 
+    /// <summary>A mark of an axis: as many decimals as its steps need.</summary>
+    public static string Tick(double value, double step)
+    {
+        int exponent = (int)Math.Floor(Math.Log10(step) + 1e-9);
+        double rounded = Math.Round(value / step) * step;
+        return Math.Abs(rounded) < step / 2 ? "0"
+            : exponent < NarrowestPlainExponent || Math.Abs(rounded) >= Math.Pow(10, WidestPlainExponent)
+                ? Significant(rounded, Math.Clamp((int)Math.Floor(Math.Log10(Math.Abs(rounded)) + 1e-9) - exponent + 1, 1, 15), 0)
+                : rounded.ToString("N" + Math.Max(0, -exponent).ToString(CultureInfo.InvariantCulture), Format);
+    }
+
     /// <summary>Every digit of the double, for a title.</summary>
     public static string Full(double value) => value.ToString("R", CultureInfo.InvariantCulture);
 

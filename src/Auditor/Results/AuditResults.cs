@@ -12,4 +12,5 @@ internal sealed record AuditResults(
     Exclusion? AllLeftOut,
     IReadOnlyList<CheckResult> Checks,
     Influence Influence,
-    Collinearity Collinearity);
+    Collinearity Collinearity,
+    PlotData Plots);

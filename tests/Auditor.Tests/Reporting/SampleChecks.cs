@@ -15,14 +15,14 @@ internal static class SampleChecks
         new("jarque_bera", 5.11, 2, null, 0.07769223, "normality", false, null),
         new("shapiro_wilk", 0.9986, null, null, 0.0412, "normality", true, null),
         new("anderson_darling", 0.61, null, null, 0.1121, "normality", false, null),
-        new("durbin_watson", null, null, null, null, "independence", null, NoOrder),
-        new("breusch_godfrey_1", null, null, null, null, "independence", null, NoOrder),
-        new("breusch_godfrey_4", null, null, null, null, "independence", null, NoOrder),
-        new("ljung_box_4", null, null, null, null, "independence", null, NoOrder),
-        new("unit_root_residual", null, null, null, null, "stationarity", null, NoOrder),
+        new("durbin_watson", null, null, null, null, "no_serial_correlation", null, NoOrder),
+        new("breusch_godfrey_1", null, null, null, null, "no_serial_correlation", null, NoOrder),
+        new("breusch_godfrey_4", null, null, null, null, "no_serial_correlation", null, NoOrder),
+        new("ljung_box_4", null, null, null, null, "no_serial_correlation", null, NoOrder),
+        new("unit_root_residual", null, null, null, null, "stationary_residual", null, NoOrder),
         new("reset", 2.31, 2, 2419, 0.09948018, "functional_form", false, null),
-        new("largest_residual", 4.61, 2420, null, 0.01029781, "outliers", true, null),
-        new("chow", null, null, null, null, "stability", null, "no split declared"),
+        new("largest_residual", 4.61, 2420, null, 0.01029781, "no_outlier", true, null),
+        new("chow", null, null, null, null, "stable_coefficients", null, "no split declared"),
     ];
 
     public static Influence Influence { get; } = new(

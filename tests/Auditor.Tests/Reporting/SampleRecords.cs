@@ -34,7 +34,10 @@ internal static class SampleRecords
         SampleFindings.All,
         [new("influential-row", "warranty extension", "Cook's distance was not computed on this group's rows.")],
         Policy,
-        new(Sha, "leases.csv", Sha.Replace('3', 'a'), "tractor lease/audit.yaml", Sha.Replace('f', '0'), "0.1.0", 1, "2026-03-01T06:30:00Z"));
+        new(Sha, "leases.csv", Sha.Replace('3', 'a'), "tractor lease/audit.yaml", Sha.Replace('f', '0'), "0.1.0", 1, "2026-03-01T06:30:00Z"))
+    {
+        Plots = SamplePlots.Some,
+    };
 
     /// <summary>No left-out group, no check, no claim, and no number that can be null.</summary>
     public static AuditRecord MostlyNull { get; } = new(

@@ -35,6 +35,10 @@ internal sealed record ReportPage(AuditRecord Record)
 
     public ReportTable Checks => AuditTables.Checks(Record, Level);
 
+    public IReadOnlyList<CheckConsequence> Consequences => CheckConsequence.Of(Record);
+
+    public IReadOnlyList<ResidualPicture> ResidualPictures => Html.ResidualPictures.Of(Record, Level);
+
     public ReportTable Influence => AuditTables.Influence(Record.Influence);
 
     public ReportTable Collinearity => AuditTables.Collinearity(Record.Collinearity);

@@ -1,0 +1,29 @@
+namespace Auditor.Reporting.Html;
+
+/// <summary>One picture of the residuals, laid out; the page scales it to the room there is.</summary>
+/// <param name="Title">What it shows here.</param>
+/// <param name="Finding">The numbers behind the title.</param>
+/// <param name="Reading">How to read the picture.</param>
+/// <param name="Paths">From back to front.</param>
+internal sealed record ResidualPicture(
+    string Anchor, string Name, string Title, string Finding, string Reading, string Across, string Up,
+    PictureAxis X, PictureAxis Y, IReadOnlyList<PicturePath> Paths, IReadOnlyList<PictureLabel> Labels)
+{
+    public const int Width = 420;
+    public const int Height = 300;
+    public const int Left = 54;
+    public const int Right = 410;
+    public const int Top = 24;
+    public const int Bottom = 252;
+
+    public IReadOnlyList<PictureTick> XTicks => X.Ticks(5);
+
+    public IReadOnlyList<PictureTick> YTicks => Y.Ticks(7);
+
+    public static PictureAxis Horizontal(IEnumerable<double> values) => PictureAxis.Covering(values, Left, Right);
+
+    public static PictureAxis Vertical(IEnumerable<double> values) => PictureAxis.Covering(values, Bottom, Top);
+}
+
+/// <param name="Anchor">start, middle or end: which part of the text stands at the place.</param>
+internal sealed record PictureLabel(string X, string Y, string Anchor, string Text, string Kind);
