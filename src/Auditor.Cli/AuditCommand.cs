@@ -30,7 +30,7 @@ internal static class AuditCommand
 
         if (!request.Quiet)
         {
-            Console.Out.Write(ConsoleSummary.Of(record));
+            Console.Out.Write(Terminal.Safe(ConsoleSummary.Of(record)));
             foreach (var file in written.Value)
             {
                 Console.Out.WriteLine("Written: " + file);

@@ -25,16 +25,16 @@ internal sealed class AuditOptions
     private readonly RuleOptions _rules = new();
     private readonly Option<string?> _out = Options.Text("--out", "DIR", "Folder for the report and the record (default: audit-out beside the declaration; demo: ./audit-out).");
     private readonly Option<string?> _acceptances = Options.Text("--acceptances", "FILE", "Findings that a named approver has accepted (not built yet).");
-    private readonly Option<string?> _asOf = Options.Text("--as-of", "DATE", "The day that decides expiry, YYYY-MM-DD in UTC (default: today, or SOURCE_DATE_EPOCH).");
+    private readonly Option<string?> _asOf = Options.Text("--as-of", "DATE", "The day that decides whether an acceptance has expired, YYYY-MM-DD in UTC; there are none to decide on yet.");
     private readonly Option<string?> _dataRoot = Options.Text("--data-root", "DIR", "Folder that the data may lie in, besides the declaration's own.");
     private readonly Option<string?> _formats = Options.Text("--formats", "LIST", "Any of html,json (default: both).");
     private readonly Option<string?> _failOn = Options.Text("--fail-on", "SEVERITY", "high | medium | low | never (default: high).");
     private readonly Option<string?> _threads = Options.Text("--threads", "N", "Threads to use (default: one for each processor).");
-    private readonly Option<string?> _memory = Options.Text("--memory", "SIZE", "Most memory for the data, such as 512M or 4G.");
+    private readonly Option<string?> _memory = Options.Text("--memory", "SIZE", "Refuse a data file larger than this, such as 512M or 4G.");
     private readonly Option<string?> _seed = Options.Text("--seed", "N", "Seed of everything drawn at random, kept in the record (default 1).");
     private readonly Option<bool> _quiet = new("--quiet") { Description = "Nothing on standard output." };
     private readonly Option<bool> _verbose = new("--verbose") { Description = "Steps on standard error." };
-    private readonly Option<bool> _noProgress = new("--no-progress") { Description = "No progress on the terminal." };
+    private readonly Option<bool> _noProgress = new("--no-progress") { Description = "No progress on the terminal (none is shown yet)." };
 
     public void AddTo(Command command)
     {

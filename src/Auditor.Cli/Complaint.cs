@@ -7,7 +7,7 @@ internal static class Complaint
     {
         foreach (var problem in problems)
         {
-            Console.Error.WriteLine(problem);
+            Console.Error.WriteLine(Terminal.Safe(problem.ToString()));
         }
 
         return ExitStatus.Unusable;

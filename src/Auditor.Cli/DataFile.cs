@@ -23,6 +23,11 @@ internal sealed record DataFile(IDataSource Source, string Sha256)
 
     private static string? Fault(string path, string source, string folder, AuditRequest request)
     {
+        if (request.DataRoot is { } declared && !Directory.Exists(declared))
+        {
+            return $"the folder given with --data-root does not exist: '{declared}'";
+        }
+
         if (RealPath.Of(path) is null)
         {
             return $"'{source}' leads through links that run in a circle";
@@ -49,18 +54,13 @@ internal sealed record DataFile(IDataSource Source, string Sha256)
 
         if (!File.Exists(path))
         {
-            return $"the file '{source}' does not exist{NearestFile(path)}";
+            return $"the file '{source}' does not exist{NearestFile.Hint(path)}";
         }
 
         return DelimitedFormat.FromFileName(path) is not null ? null
             : path.EndsWith(".parquet", StringComparison.OrdinalIgnoreCase) ? "Parquet is not built yet"
             : $"'{source}' is not a kind of file this program reads: .csv, .tsv, .csv.gz or .tsv.gz";
     }
-
-    private static string NearestFile(string path) =>
-        Path.GetDirectoryName(path) is { } folder && Directory.Exists(folder)
-            ? Yaml.NearestName.DidYouMean(Path.GetFileName(path), Directory.GetFiles(folder).Select(file => Path.GetFileName(file)))
-            : "";
 
     private static Reading<DataFile> Open(string path, string source, int? line, DeclarationReading reading, AuditRequest request)
     {

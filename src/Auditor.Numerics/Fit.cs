@@ -84,6 +84,11 @@ public sealed class Fit
                 return TestResult.None(Impediment.AddsNothing);
             }
 
+            if (PerfectFit.Is(_final, ExplainedSumOfSquares + Rss))
+            {
+                return TestResult.None(Impediment.PerfectWithoutGroup);
+            }
+
             if (Perfect || Sigma is not double sigma)
             {
                 return Perfect && ResidualDf > 0
@@ -108,9 +113,8 @@ public sealed class Fit
 
     private int Intercepts => _final.Factor.Layout.Intercept ? 1 : 0;
 
-    /// <summary>Half the width of a coefficient's classical interval, in standard errors.</summary>
-    public double? IntervalHalfWidth(double confidence) =>
-        ResidualDf > 0 ? StudentT.UpperQuantile((1 - confidence) / 2, ResidualDf) : null;
+    /// <summary>Half the width of a coefficient's classical interval at 1 - alpha, in standard errors.</summary>
+    public double? IntervalHalfWidth(double alpha) => ResidualDf > 0 ? StudentT.UpperQuantile(alpha / 2, ResidualDf) : null;
 
     private static double? Ratio(double part, double whole) => whole > 0 ? part / whole : null;
 

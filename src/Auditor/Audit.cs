@@ -59,6 +59,7 @@ public static class Audit
         inputs.Policy.Effective,
         inputs.Provenance)
     {
+        PolicyOverridden = inputs.Policy.Overridden,
         Plots = results.Plots,
     };
 

@@ -41,6 +41,12 @@ public enum CheckImpediment
     /// <summary>The residuals are rounding, or no degrees of freedom are left.</summary>
     NoResiduals,
 
+    /// <summary>All residuals are equal.</summary>
+    ResidualsDoNotVary,
+
+    /// <summary>Without one of the rows the model fits to rounding: its residual has no finite studentised value.</summary>
+    PerfectWithoutOneRow,
+
     /// <summary>Too few observations for the check.</summary>
     TooFew,
 

@@ -14,5 +14,6 @@ public sealed record CheckedFit(IDesignRows Design, FinalFactor Final, Fit Fit, 
     internal CheckImpediment? Impediment =>
         Sampling ? CheckImpediment.SamplingWeights
         : Fit.Perfect || Fit.ResidualDf <= 0 || Fit.Rss <= 0 ? CheckImpediment.NoResiduals
+        : !Store.Vary ? CheckImpediment.ResidualsDoNotVary
         : null;
 }

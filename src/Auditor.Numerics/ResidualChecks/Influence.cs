@@ -1,8 +1,9 @@
 using Auditor.Numerics.Distributions;
+using Auditor.Numerics.SecondPass;
 
 namespace Auditor.Numerics.ResidualChecks;
 
-/// <summary>How one row bears on the fit. Null values: the row has leverage 1, so the fit without it says nothing of it.</summary>
+/// <summary>How one row bears on the fit. Null values: the row has leverage 1, or without it the fit is perfect or has no degrees of freedom.</summary>
 /// <param name="Position">0-based, within the row set.</param>
 /// <param name="StudentisedResidual">Externally: e / (s_(i) sqrt(1 - h)), t on n - r - 1.</param>
 /// <param name="CooksDistance">e² h / (r s² (1 - h)²).</param>
@@ -10,9 +11,10 @@ namespace Auditor.Numerics.ResidualChecks;
 /// <remarks>Belsley, Kuh and Welsch 1980; Cook 1977, Technometrics 19. Of one copy under frequency weights. Verified against R's influence.measures (tests/reference).</remarks>
 public sealed record RowInfluence(int Position, double Leverage, double? StudentisedResidual, double? CooksDistance, double? Dffits)
 {
-    private const double LeverageOne = 1e-10;
+    /// <summary>What is left of RSS without a row, relative to RSS, below which it is rounding: without the row the fit is perfect.</summary>
+    private const double Rounding = 1e-12;
 
-    public bool HasLeverageOne => 1 - Leverage <= LeverageOne;
+    public bool HasLeverageOne => 1 - Leverage <= GroupAccumulator.LeverageOne;
 
     /// <summary>Every row, in order; empty for a fit without residuals.</summary>
     public static IReadOnlyList<RowInfluence> OfAll(CheckedFit fit) =>
@@ -24,7 +26,7 @@ public sealed record RowInfluence(int Position, double Leverage, double? Student
     {
         var (e, h) = (fit.Store.Residuals[i], Math.Min(1, fit.Store.Leverages[i]));
         var free = 1 - h;
-        if (free <= LeverageOne)
+        if (free <= GroupAccumulator.LeverageOne)
         {
             return new RowInfluence(i, h, null, null, null);
         }
@@ -32,7 +34,7 @@ public sealed record RowInfluence(int Position, double Leverage, double? Student
         var meanSquare = fit.Fit.Rss / fit.Fit.ResidualDf;
         var without = (fit.Fit.Rss - (e * e / free)) / (fit.Fit.ResidualDf - 1);
         var cook = fit.Fit.Rank == 0 ? 0 : e * e * h / (fit.Fit.Rank * meanSquare * free * free);
-        return without > 0
+        return fit.Fit.ResidualDf > 1 && without * (fit.Fit.ResidualDf - 1) > Rounding * fit.Fit.Rss
             ? new RowInfluence(i, h, e / Math.Sqrt(without * free), cook, e / Math.Sqrt(without * free) * Math.Sqrt(h / free))
             : new RowInfluence(i, h, null, cook, null);
     }
@@ -57,6 +59,11 @@ public static class LargestResidual
         if (df <= 0 || studentised.Count == 0)
         {
             return CheckOutcome.None(CheckImpediment.TooFew);
+        }
+
+        if (rows.Any(row => row.StudentisedResidual is null && !row.HasLeverageOne))
+        {
+            return CheckOutcome.None(CheckImpediment.PerfectWithoutOneRow);
         }
 
         var largest = studentised.MaxBy(row => Math.Abs(row.StudentisedResidual!.Value))!;

@@ -20,54 +20,47 @@ public static class JarqueBera
             return CheckOutcome.None(impediment);
         }
 
-        var residuals = fit.Store.Expanded();
-        if (Statistic(residuals) is not double value)
+        var n = fit.Fit.N;
+        if (Statistic(fit.Store.Counted, n) is not double value)
         {
             return CheckOutcome.None(CheckImpediment.TooFew);
         }
 
-        return ChiSquaredCheck.Of(value, 2) with
-        {
-            SimulatedP = residuals.Length < SimulatedBelow ? Simulate(value, residuals.Length, seed) : null,
-        };
+        return ChiSquaredCheck.Of(value, 2) with { SimulatedP = n < SimulatedBelow ? Simulate(value, (int)n, seed) : null };
     }
 
-    /// <summary>The statistic of a sample, null when it has fewer than 3 values or does not vary.</summary>
-    internal static double? Statistic(ReadOnlySpan<double> values)
+    /// <summary>The statistic of n values, each with its number of copies; null when there are fewer than 3 or they do not vary.</summary>
+    internal static double? Statistic(IEnumerable<(double Value, double Copies)> values, double n)
     {
-        var mean = 0.0;
-        foreach (var value in values)
-        {
-            mean += value / values.Length;
-        }
-
+        var counted = values as IReadOnlyList<(double Value, double Copies)> ?? [.. values];
+        var mean = counted.Sum(one => one.Copies * one.Value / n);
         var (second, third, fourth) = (0.0, 0.0, 0.0);
-        foreach (var value in values)
+        foreach (var (value, copies) in counted)
         {
             var d = value - mean;
-            second += d * d / values.Length;
-            third += d * d * d / values.Length;
-            fourth += d * d * d * d / values.Length;
+            second += copies * d * d / n;
+            third += copies * d * d * d / n;
+            fourth += copies * d * d * d * d / n;
         }
 
         var (skewness, excess) = (third / Math.Pow(second, 1.5), (fourth / (second * second)) - 3);
-        var statistic = values.Length / 6.0 * ((skewness * skewness) + (excess * excess / 4));
-        return values.Length >= 3 && double.IsFinite(statistic) ? statistic : null;
+        var statistic = n / 6 * ((skewness * skewness) + (excess * excess / 4));
+        return n >= 3 && double.IsFinite(statistic) ? statistic : null;
     }
 
     /// <summary>(b + 1) / (B + 1), b the draws with a statistic at least as large.</summary>
     private static double Simulate(double observed, int n, ulong seed)
     {
         var generator = new Generator(seed, (ulong)n);
-        var (sample, larger) = (new double[n], 0);
+        var (sample, larger) = (new (double, double)[n], 0);
         for (var draw = 0; draw < Draws; draw++)
         {
             for (var i = 0; i < n; i++)
             {
-                sample[i] = generator.Normal();
+                sample[i] = (generator.Normal(), 1);
             }
 
-            larger += Statistic(sample) >= observed ? 1 : 0;
+            larger += Statistic(sample, n) >= observed ? 1 : 0;
         }
 
         return (larger + 1.0) / (Draws + 1);

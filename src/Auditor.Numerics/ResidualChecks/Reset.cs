@@ -29,7 +29,7 @@ public static class Reset
         var group = AddedGroup.Of(FinalFactor.Of(FactorBuilder.Build(rows)), [columns, columns + 1]);
         return PartialF.Of(group) is FTest f
             ? new CheckStatistic(f.Statistic, f.Df1, f.Df2, f.Probability) { LogP = f.LogP }
-            : CheckOutcome.None(group.Rank == 0 ? CheckImpediment.NothingToRelate : CheckImpediment.NoResiduals);
+            : CheckOutcome.None(group.Rank == 0 ? CheckImpediment.NothingToRelate : PartialF.ResidualDf(group) <= 0 ? CheckImpediment.TooFew : CheckImpediment.NoResiduals);
     }
 
     private static void Fill(CheckedFit fit, double centre, double scale, RowBlock source, RowBlock derived)

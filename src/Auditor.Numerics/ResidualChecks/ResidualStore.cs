@@ -18,6 +18,12 @@ public sealed class ResidualStore : IAccumulator
     /// <summary>How many equal rows each row stands for; all one without frequency weights.</summary>
     public IReadOnlyList<double> Copies => _copies;
 
+    /// <summary>Whether the residuals differ by more than rounding.</summary>
+    public bool Vary => _residuals.Count > 0 && _residuals.Max() - _residuals.Min() > 1e-12 * _residuals.Max(Math.Abs);
+
+    /// <summary>Residuals with the number of copies of each.</summary>
+    public IEnumerable<(double Residual, double Copies)> Counted => _residuals.Zip(_copies);
+
     public void Add(ResidualBlock block)
     {
         for (var i = 0; i < block.Rows; i++)

@@ -43,10 +43,18 @@ public static class White
 
         foreach (var (a, b) in columns.Products)
         {
-            BlockKernels.Multiply(source.Column(a), source.Column(b), derived.Column(next++));
+            Multiply(source.Column(a), columns.Origins[a], source.Column(b), columns.Origins[b], derived.Column(next++));
         }
 
         SquaredResiduals.Fill(fit.Store, fit.Fit.Rss / fit.Fit.N, derived);
+    }
+
+    private static void Multiply(ReadOnlySpan<double> a, double originA, ReadOnlySpan<double> b, double originB, Span<double> into)
+    {
+        for (var i = 0; i < into.Length; i++)
+        {
+            into[i] = (a[i] - originA) * (b[i] - originB);
+        }
     }
 
     private static void FillShort(CheckedFit fit, RowBlock source, RowBlock derived)

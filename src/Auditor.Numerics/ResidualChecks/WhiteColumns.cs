@@ -8,7 +8,8 @@ namespace Auditor.Numerics.ResidualChecks;
 /// </summary>
 /// <param name="Linear">Design columns.</param>
 /// <param name="Products">Pairs of design columns to be multiplied.</param>
-internal sealed record WhiteColumns(IReadOnlyList<int> Linear, IReadOnlyList<(int A, int B)> Products)
+/// <param name="Origins">What is taken off each design column before it is multiplied, so that large values lose no digits; the space spanned stays.</param>
+internal sealed record WhiteColumns(IReadOnlyList<int> Linear, IReadOnlyList<(int A, int B)> Products, IReadOnlyDictionary<int, double> Origins)
 {
     /// <summary>All columns, the intercept included.</summary>
     public int Count => 1 + Linear.Count + Products.Count;
@@ -29,7 +30,8 @@ internal sealed record WhiteColumns(IReadOnlyList<int> Linear, IReadOnlyList<(in
             }
         }
 
-        return new WhiteColumns(slopes, products);
+        var first = fit.Design.Blocks().First();
+        return new WhiteColumns(slopes, products, Enumerable.Range(0, slopes.Length).ToDictionary(k => slopes[k], k => isBinary[k] ? 0 : first.Values[slopes[k] * first.Stride]));
     }
 
     /// <summary>Which columns hold only 0 and 1, and which of them are 1 in the same row.</summary>

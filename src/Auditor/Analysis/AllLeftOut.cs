@@ -17,9 +17,7 @@ internal static class AllLeftOut
         }
 
         var evidence = common?.Joint is { } joint ? new GroupEvidence(joint, policy, sampling) : null;
-        var product = model.FinalTerms.Select(term => term.Term).OfType<Declaration.ProductTerm>()
-            .FirstOrDefault(term => model.Groups.SelectMany(group => group.Terms).Any(bound => term.Factors.Contains(bound.Term)));
-        var judgement = Judgement.OfFamily([new JudgedGroup(evidence, product?.Label)], policy)[0];
+        var judgement = Judgement.OfFamily([new JudgedGroup(evidence, ProductsElsewhere.OfAll(model) is [var product, ..] ? product : null)], policy)[0];
         var terms = model.Groups.SelectMany(group => group.Terms).Select(term => term.Term.Label);
         var identity = new GroupIdentity(Name, [.. terms], null, null);
         return ExclusionFigures.Of(identity, judgement, common, null, common?.Joint, policy, sampling);

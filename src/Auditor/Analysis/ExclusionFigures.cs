@@ -96,8 +96,31 @@ internal static class ExclusionFigures
             null,
             null,
             null,
-            Figure("last_in", Against(common?.LastIn, sampling, PartialF.Of)),
-            Figure("largest_model_denominator", Against(common?.Largest, sampling, largest => PartialF.WithMeanSquareOf(common!.Added, largest))));
+            JointOnly(common, "last_in", notComputed) ? null : LastIn(Against(common?.LastIn, sampling, PartialF.Of), Figure, notComputed),
+            JointOnly(common, "largest_model_denominator", notComputed) ? null : Figure("largest_model_denominator", Against(common?.Largest, sampling, largest => PartialF.WithMeanSquareOf(common!.Added, largest))));
+    }
+
+    private static TestFigures? LastIn(TestResult? result, Func<string, TestResult?, TestFigures?> figure, IDictionary<string, string> notComputed)
+    {
+        var shown = figure("last_in", result);
+        if (result is NotComputable { Why: Impediment.AddsNothing })
+        {
+            notComputed["last_in"] = "the group adds no direction to the model with all other groups in it";
+        }
+
+        return shown;
+    }
+
+    /// <summary>All groups together are the largest model: both tests would be the partial F again.</summary>
+    private static bool JointOnly(GroupFit? common, string name, IDictionary<string, string> notComputed)
+    {
+        var joint = common is { Largest: null };
+        if (joint)
+        {
+            notComputed[name] = "all groups together are the largest model: the same as the partial F";
+        }
+
+        return joint;
     }
 
     private static TestResult? Against(Numerics.Factor.AddedGroup? model, bool sampling, Func<Numerics.Factor.AddedGroup, TestResult> test) =>

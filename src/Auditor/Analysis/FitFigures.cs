@@ -51,13 +51,18 @@ internal static class FitFigures
             return "the model fits these rows to rounding: figures that need residuals are not given";
         }
 
-        return fit.ResidualDf <= 0 ? Saturated : overall is NotComputable ? "the model has no term beside the intercept, so there is no F" : null;
+        return fit.ResidualDf <= 0 ? Saturated : overall switch
+        {
+            NotComputable { Why: Impediment.PerfectWithoutGroup } => "the response does not vary, so there is no F",
+            NotComputable => "the model has no term beside the intercept, so there is no F",
+            _ => null,
+        };
     }
 
     private static List<CoefficientFigures> Coefficients(RowSetFit rows, double significance, bool sampling)
     {
         var errors = sampling ? null : rows.Fit.StandardErrors;
-        var halfWidth = rows.Fit.IntervalHalfWidth(1 - significance);
+        var halfWidth = rows.Fit.IntervalHalfWidth(significance);
         var why = sampling ? Sampling : errors is null ? Saturated : null;
         var byColumn = rows.Fit.Columns.Select((column, k) => (column, k)).ToDictionary(pair => pair.column, pair => pair.k);
         return [.. Enumerable.Range(0, rows.Plan.Layout.FinalColumns).Select(column => byColumn.TryGetValue(column, out var k)

@@ -10,7 +10,8 @@ internal sealed class GroupEvidence
     public GroupEvidence(GroupFit fit, Policy policy, bool sampling)
     {
         Fit = fit;
-        Classical = sampling ? TestResult.None(Impediment.SamplingWeights) : PartialF.Of(fit.Added);
+        var partial = PartialF.Of(fit.Added);
+        Classical = sampling && partial is not NotComputable ? TestResult.None(Impediment.SamplingWeights) : partial;
         Hc = [.. Enum.GetValues<Heteroskedastic>().Select(estimator => WaldF.Of(fit.Added, fit.Sums, estimator))];
         Score = ScoreF.Of(fit.Added, fit.Sums);
         Ceiling = ScoreF.Ceiling(fit.Added, fit.Sums);

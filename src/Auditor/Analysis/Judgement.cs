@@ -11,6 +11,9 @@ namespace Auditor.Analysis;
 internal sealed record Judgement(
     GroupEvidence? Evidence, PValue? Adjusted, double? NegligiblePAdjusted, string Verdict, string Materiality, string Reason)
 {
+    /// <summary>The only test of its family: adjustment changes nothing.</summary>
+    public bool Alone { get; init; }
+
     public double? PAdjusted => Adjusted is { } p ? TestFigure.ShownP(p.P) : null;
 
     /// <summary>Judges all groups on one kind of row set as one family.</summary>
@@ -19,10 +22,10 @@ internal sealed record Judgement(
     {
         var adjusted = Family.Adjust([.. groups.Select(group => group.Evidence is null ? null : TestFigure.P(group.Evidence.Basis.Test))], policy.Adjustment);
         var negligible = Family.Adjust([.. groups.Select(group => group.Evidence?.NegligibleP is double p ? PValue.Of(p) : (PValue?)null)], AdjustmentMethod.Holm);
-        return [.. groups.Select((group, g) => Of(group, adjusted[g], negligible[g], policy))];
+        return [.. groups.Select((group, g) => Of(group, adjusted[g], negligible[g], adjusted.Count(p => p is not null) <= 1, policy))];
     }
 
-    private static Judgement Of(JudgedGroup group, PValue? adjusted, PValue? negligible, Policy policy)
+    private static Judgement Of(JudgedGroup group, PValue? adjusted, PValue? negligible, bool alone, Policy policy)
     {
         var level = policy.Significance;
         var verdict = adjusted switch
@@ -34,7 +37,7 @@ internal sealed record Judgement(
             _ => Verdicts.Inconclusive,
         };
         var materiality = MaterialityOf(group.Evidence?.BasisInterval, policy.NegligiblePartialRSquared);
-        var judgement = new Judgement(group.Evidence, adjusted, negligible?.P, verdict, materiality, "");
+        var judgement = new Judgement(group.Evidence, adjusted, negligible?.P, verdict, materiality, "") { Alone = alone };
         return judgement with { Reason = VerdictReason.Of(judgement, group.ProductElsewhere, policy) };
     }
 

@@ -52,6 +52,8 @@ internal static class ResidualCheckFigures
     private static string Words(CheckImpediment why) => why switch
     {
         CheckImpediment.NoResiduals => "the final model leaves no residuals to check: it fits to rounding, or no degrees of freedom are left",
+        CheckImpediment.ResidualsDoNotVary => "all residuals are equal",
+        CheckImpediment.PerfectWithoutOneRow => "without one of the rows the model fits to rounding, so that row's residual has no finite studentised value",
         CheckImpediment.TooFew => "too few rows for this check",
         CheckImpediment.TooMany => "more rows than this check is defined for",
         CheckImpediment.NothingToRelate => "the final model has nothing but a constant to relate the residuals to",

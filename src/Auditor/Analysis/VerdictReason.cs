@@ -34,19 +34,23 @@ internal static class VerdictReason
         Verdicts.NotSupported =>
             $"The data contradict leaving it out: jointly, its terms explain more than chance would ({Test(judgement, policy)}).",
         Verdicts.Supported =>
-            $"No effect is found ({Test(judgement, policy)}) and the data show that any effect is negligible: partial R² is below {Bound(policy)} "
+            $"The test does not reject leaving it out ({Test(judgement, policy)}), and the data show that any effect is negligible: partial R² is below {Bound(policy)} "
             + $"(negligible-effect test, adjusted {PlainNumber.PAgainst(judgement.NegligiblePAdjusted!.Value, policy.Significance)}).",
-        _ => $"No effect is found ({Test(judgement, policy)}), but the data cannot show that it is negligible: {Possible(evidence, policy)}{Needed(evidence, policy)}.",
+        _ => $"The test does not reject leaving it out ({Test(judgement, policy)}), but the data cannot show that its effect is negligible: {Possible(evidence, policy)}{Needed(evidence, policy)}.",
     };
 
     private static string Test(Judgement judgement, Policy policy)
     {
         var test = judgement.Evidence!.Basis.Test;
-        var p = judgement.PAdjusted is double adjusted ? "adjusted " + PlainNumber.PAgainst(adjusted, policy.Significance) : "no p";
+        var p = judgement.PAdjusted is double adjusted ? (judgement.Alone ? "" : "adjusted ") + PlainNumber.PAgainst(adjusted, policy.Significance) : "no p";
+        p += RejectedBeforeAdjustment(judgement, policy) ? ", before adjustment " + PlainNumber.PAgainst(test.P!.Value, policy.Significance) : "";
         return test is FTest f
             ? string.Create(CultureInfo.InvariantCulture, $"{BasisWords.Of(judgement.Evidence.Basis.Name)} F = {PlainNumber.Digits(f.Statistic, 3)} on {PlainNumber.Digits(f.Df1, 4)} and {Df2(f)} degrees of freedom, {p}")
             : p;
     }
+
+    private static bool RejectedBeforeAdjustment(Judgement judgement, Policy policy) =>
+        judgement.PAdjusted > policy.Significance && judgement.Evidence!.Basis.Test.P <= policy.Significance;
 
     private static string Df2(FTest f) => double.IsInteger(f.Df2) ? PlainNumber.Count(f.Df2) : PlainNumber.Digits(f.Df2, 4);
 
@@ -62,7 +66,7 @@ internal static class VerdictReason
 
     private static string Needed(GroupEvidence evidence, Policy policy) =>
         evidence.Power?.RowsNeeded is double rows && evidence.Power.AtBound < policy.Power
-            ? $"; about {PlainNumber.Count(rows)} rows like these would find an effect of that size with {PlainNumber.Digits(100 * policy.Power, 3)} % power"
+            ? $"; about {PlainNumber.Count(rows)} rows like these would make the test reject an effect of that size with {PlainNumber.Digits(100 * policy.Power, 3)} % power, before adjustment"
             : "";
 }
 

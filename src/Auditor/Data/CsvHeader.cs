@@ -31,8 +31,19 @@ internal static class CsvHeader
             names.Add(QuotedField.Content(field).ToString());
         }
 
-        return names is [""] ? [Empty(file)] : [];
+        return names is [""] ? [Empty(file)] : names is [var only] && OtherSeparator(only) is { } other ? [Unsplit(file, other)] : [];
     }
+
+    /// <summary>One name with another usual separator in it: the file is separated by that.</summary>
+    private static string? OtherSeparator(string name) =>
+        name.Contains(';', StringComparison.Ordinal) ? "';'"
+        : name.Contains('|', StringComparison.Ordinal) ? "'|'"
+        : name.Contains('\t', StringComparison.Ordinal) ? "tabs"
+        : name.Contains(',', StringComparison.Ordinal) ? "','"
+        : null;
+
+    private static Problem Unsplit(string file, string separator) => new(
+        file, Line, $"the column names are separated by {separator}; a .csv file is separated by commas, a .tsv file by tabs");
 
     /// <summary>One problem for each wanted column that the header does not name exactly once.</summary>
     public static IReadOnlyList<Problem> Check(string file, IReadOnlyList<string> names, IEnumerable<string> wanted) =>

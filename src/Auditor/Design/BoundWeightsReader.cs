@@ -7,7 +7,9 @@ namespace Auditor.Design;
 internal static class BoundWeightsReader
 {
     private const int MostShown = 5;
+    private const double SmallestWeight = 1e-50;
     private const double LargestWeight = 1e50;
+    private const double MostObservations = int.MaxValue;
 
     public static BoundWeights? Read(ModelDeclaration declaration, DataTable table, int[] rows, List<Problem> problems)
     {
@@ -30,6 +32,11 @@ internal static class BoundWeightsReader
             problems.Add(new Problem(declaration.File, declared.Line, string.Create(System.Globalization.CultureInfo.InvariantCulture, $"weights: {faults.Count - MostShown} more rows like these")));
         }
 
+        if (declared.Kind == WeightKind.Frequency && rows.Sum(row => column.Values[row]) > MostObservations)
+        {
+            problems.Add(new Problem(declaration.File, declared.Line, $"weights: the frequencies of column {declared.Column} add up to more than 2,147,483,647 observations"));
+        }
+
         return new BoundWeights(column, declared.Kind, declared);
     }
 
@@ -37,6 +44,7 @@ internal static class BoundWeightsReader
     {
         double.NaN => "the weight is missing; give one, or take the row out with data.keep",
         < 0 => "the weight is negative",
+        > 0 and < SmallestWeight => "the weight is smaller than 1e-50; weights may be rescaled by any factor",
         > LargestWeight => "the weight is larger than 1e50; weights may be rescaled by any factor",
         _ when kind == WeightKind.Frequency && !double.IsInteger(weight) => "a frequency must be a whole number",
         _ => null,

@@ -6,7 +6,7 @@ namespace Auditor.Design;
 /// <summary>Binds a checked declaration to its table: filter, weights, then every term; all problems at once.</summary>
 public static class ModelBinder
 {
-    private const int MostColumns = 10_000;
+    private const int MostColumns = 5_000;
 
     public static Reading<BoundDeclaration> Bind(ModelDeclaration declaration, DataTable table)
     {

@@ -67,6 +67,9 @@ public sealed record Policy
     /// <summary>Every value under its name in the order of the file: a double, long, bool or string. What the record's "policy" shows.</summary>
     public IReadOnlyDictionary<string, object> Effective { get; }
 
+    /// <summary>Names whose value is not the shipped one, with the shipped value.</summary>
+    public IReadOnlyDictionary<string, object> Overridden { get; init; } = new Dictionary<string, object>();
+
     /// <summary>Every name in the order of the file.</summary>
     public IReadOnlyList<string> Names => [.. _values.Keys];
 

@@ -24,12 +24,13 @@ public static class PolicyReader
             values.TryAdd(name, known.Default);
         }
 
+        var shipped = new OrderedDictionary<string, PolicyValue>(values, StringComparer.Ordinal);
         if (problems.Count == 0 && firmYaml is not null)
         {
             Override(Entries(firmYaml, firmFile ?? "policy", problems), values, problems);
         }
 
-        return problems.Count == 0 ? Checked(values, firmFile ?? shippedFile) : Reading<Policy>.Failed(problems);
+        return problems.Count == 0 ? Checked(values, shipped, firmFile ?? shippedFile) : Reading<Policy>.Failed(problems);
     }
 
     private static void Override(IReadOnlyList<PolicyEntry> entries, OrderedDictionary<string, PolicyValue> values, List<Problem> problems)
@@ -70,9 +71,16 @@ public static class PolicyReader
         return root is MapValue map ? [.. map.Entries.Select(entry => new PolicyEntry(file, entry))] : [];
     }
 
-    private static Reading<Policy> Checked(OrderedDictionary<string, PolicyValue> values, string file)
+    private static Reading<Policy> Checked(
+        OrderedDictionary<string, PolicyValue> values, OrderedDictionary<string, PolicyValue> shipped, string file)
     {
-        var policy = new Policy(values);
+        var changed = new OrderedDictionary<string, object>(StringComparer.Ordinal);
+        foreach (var (name, value) in shipped.Where(entry => entry.Value != values[entry.Key]))
+        {
+            changed[name] = value.Shown;
+        }
+
+        var policy = new Policy(values) { Overridden = changed };
         return policy.Power > policy.Significance
             ? Reading<Policy>.Of(policy)
             : Reading<Policy>.Failed(new Problem(file, null, string.Create(

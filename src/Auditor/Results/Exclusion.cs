@@ -43,7 +43,12 @@ public sealed record Exclusion(
     public int? Line { get; init; }
 
     /// <summary>For values that are null: record path below the exclusion, and why.</summary>
+    [JsonIgnore]
     public IReadOnlyDictionary<string, string> Why { get; init; } = new Dictionary<string, string>();
+
+    /// <summary>Why p and what follows from it is null; absent when it is not.</summary>
+    [JsonPropertyName("why"), JsonIgnore(Condition = JsonIgnoreCondition.WhenWritingNull)]
+    public string? WhyNull => P is null ? Why.GetValueOrDefault("p") : null;
 }
 
 public sealed record SelectiveFigures(double? P, [property: JsonIgnore(Condition = JsonIgnoreCondition.WhenWritingNull)] string? Why);

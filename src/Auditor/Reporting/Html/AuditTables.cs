@@ -63,7 +63,7 @@ internal static class AuditTables
         new("Figure", "name", claim => Cell.Name(claim.Claim)),
         new("Outcome", "text", claim => Cell.Words(CheckWords.Spaced(claim.Outcome))),
         new("As reported", "number", claim => new Cell(claim.Reported, null, "number", null)),
-        new("Recomputed", "number", claim => Cell.Number(claim.Recomputed, "The figure cannot be recomputed.")));
+        new("Recomputed", "number", claim => Cell.Number(claim.Recomputed, "not compared yet")));
 
     public static ReportTable Elimination(AuditRecord record, double level) => ReportTable.Of(
         "The author’s path, each step tested in that step’s model",

@@ -27,7 +27,7 @@ internal sealed record ExclusionPage(
         new("p", Cell.Probability(exclusion.P, exclusion.Log10P, level, Why(exclusion, "p"))),
         new("p, adjusted for all groups", Cell.Probability(exclusion.PAdjusted, exclusion.Log10PAdjusted, level, Why(exclusion, "p_adjusted"))),
         new("p, given how the group was dropped", Cell.Probability(exclusion.Selective.P, null, level, exclusion.Selective.Why ?? Why(exclusion, "selective.p"))),
-        new("p that the effect reaches the bound", Cell.Probability(exclusion.Negligible.P, null, level, NegligibleWhy(exclusion, "p")), "small: shown to be negligible"),
+        new("p of the test that the effect is at least the bound", Cell.Probability(exclusion.Negligible.P, null, level, NegligibleWhy(exclusion, "p")), "small: shown to be negligible"),
         new("the same, adjusted for all groups", Cell.Probability(exclusion.Negligible.PAdjusted, null, level, NegligibleWhy(exclusion, "p_adjusted"))));
 
     private static FactList SizeOf(Exclusion exclusion, double level)
@@ -36,8 +36,8 @@ internal sealed record ExclusionPage(
         PowerFigures power = exclusion.Power;
         string interval = NumberText.Percent(1 - (2 * level)) + " interval";
         return FactList.Of(
-            new($"Against the bound {NumberText.Plain(exclusion.Negligible.Bound)}", Cell.Words(VerdictWords.Materiality(exclusion.Materiality))),
-            new("Partial R²", Cell.Share(effect.Estimate, EffectWhy("estimate")), "share of what the final model leaves over"),
+            new($"Against the bound {NumberText.Plain(exclusion.Negligible.Bound)}", Cell.Words(VerdictWords.Materiality(exclusion.Materiality)), "by this group’s own interval, before adjustment for the number of groups"),
+            new("Partial R²", Cell.Share(effect.Estimate, EffectWhy("estimate")), "share of what the final model leaves over, as the classical fit has it; the intervals allow for chance and can lie beside it"),
             new(interval + " of the basis", Cell.Range(effect.BasisLower, effect.BasisUpper, EffectWhy("basis_lower"), NumberText.Share)),
             new(interval + ", classical", Cell.Range(effect.Lower, effect.Upper, EffectWhy("lower"), NumberText.Share)),
             new("Rows of this test", Cell.Count(exclusion.Rows)),
@@ -45,7 +45,7 @@ internal sealed record ExclusionPage(
             new("Rows these are worth", Whole(exclusion.EffectiveRows, Why(exclusion, "effective_rows")), "for this question, under the basis"),
             new("Power at the bound", Cell.Share(power.AtBound, PowerWhy("at_bound")), "chance to reject an effect that large"),
             new("Smallest effect found reliably", Cell.Share(power.SmallestDetectableFSquared, PowerWhy("smallest_detectable_f_squared")), "as Cohen’s f², at the policy’s power"),
-            new("Rows needed at the bound", Whole(power.RowsNeeded, PowerWhy("rows_needed")), "for the policy’s power"));
+            new("Rows needed at the bound", Whole(power.RowsNeeded, PowerWhy("rows_needed")), "for the policy’s power, before adjustment"));
 
         string? EffectWhy(string name) => effect.Why ?? Why(exclusion, "partial_r_squared." + name);
         string? PowerWhy(string name) => power.Why ?? Why(exclusion, "power." + name);

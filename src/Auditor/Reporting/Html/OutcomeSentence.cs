@@ -16,6 +16,7 @@ internal static class OutcomeSentence
             (0, _, _) => "No group is declared as left out, and no rule found anything to raise.",
             (1, 1, _) => "The only exclusion is not supported by the data.",
             (_, > 0, _) => $"{NumberText.Count(contradicted)} of {NumberText.Count(all)} exclusions {(contradicted == 1 ? "is" : "are")} not supported by the data.",
+            _ when Unsettled(record) is > 0 and var unsettled => $"No exclusion is contradicted by the data, but they do not support {NumberText.Count(unsettled)} of {NumberText.Count(all)} either.",
             (_, _, Outcomes.Findings) => "No exclusion is contradicted by the data beyond the negligible, but there are findings to look at.",
             (1, _, _) => "The only exclusion is supported by the data, and no rule found anything to raise.",
             _ => $"All {NumberText.Count(all)} exclusions are supported by the data, and no rule found anything to raise.",
@@ -26,12 +27,23 @@ internal static class OutcomeSentence
     public static IReadOnlyList<string> Beside(AuditRecord record)
     {
         var sentences = new List<string>();
+        if (record.Exclusions.Any(VerdictWords.Contradicted) || Unsettled(record) > 0)
+        {
+            Add("Supported", record.Exclusions.Where(exclusion => exclusion.Verdict == Verdicts.Supported));
+        }
+
         Add("Rejected, but shown to be negligible and so not counted", record.Exclusions.Where(VerdictWords.RejectedButNegligible));
         Add("The data cannot say", record.Exclusions.Where(exclusion => exclusion.Verdict == Verdicts.Inconclusive));
         Add("Cannot be tested", record.Exclusions.Where(exclusion => exclusion.Verdict == Verdicts.Untestable));
         if (record.Exclusions.Count == 0)
         {
             sentences.Add("The outcome rests on the checks and on the report's own figures alone.");
+        }
+
+        if (record.PolicyOverridden.Count > 0)
+        {
+            sentences.Add("Judged by a policy that differs from the shipped one: "
+                + string.Join("; ", record.PolicyOverridden.Select(pair => $"{CheckWords.Spaced(pair.Key)} {PolicyValue(record.Policy[pair.Key])} (shipped {PolicyValue(pair.Value)})")) + ".");
         }
 
         return sentences;
@@ -45,6 +57,12 @@ internal static class OutcomeSentence
             }
         }
     }
+
+    private static string PolicyValue(object value) => value is double number ? NumberText.Plain(number) : Convert.ToString(value, System.Globalization.CultureInfo.InvariantCulture) ?? "";
+
+    /// <summary>Groups that the data neither contradict nor support.</summary>
+    private static int Unsettled(AuditRecord record) =>
+        record.Exclusions.Count(exclusion => exclusion.Verdict is Verdicts.Inconclusive or Verdicts.Untestable);
 
     /// <summary>"1 high, 2 medium" of the findings nobody has accepted.</summary>
     public static string Findings(AuditRecord record)

@@ -57,10 +57,13 @@ internal sealed record ReportPage(AuditRecord Record)
 
     public IReadOnlyList<FindingPage> Findings => FindingPage.Of(Record);
 
-    public FactList Policy => FactList.Of([.. Record.Policy.Select(pair => new Fact(CheckWords.Spaced(pair.Key), PolicyCell(pair.Value)))]);
+    public FactList Policy => FactList.Of([.. Record.Policy.Select(pair => new Fact(CheckWords.Spaced(pair.Key), PolicyCell(pair.Value), ShippedNote(pair.Key)))]);
 
     /// <summary>The words that make this page again, quoted for a shell.</summary>
     public string Command => string.Create(CultureInfo.InvariantCulture, $"./run-audit.sh {Quoted(Record.Provenance.Declaration)} --seed {Record.Provenance.Seed}");
+
+    private string? ShippedNote(string name) =>
+        Record.PolicyOverridden.TryGetValue(name, out object? shipped) ? "shipped: " + PolicyCell(shipped).Text : null;
 
     private static Cell PolicyCell(object value) => value is IFormattable number
         ? Cell.Number(Convert.ToDouble(number, CultureInfo.InvariantCulture)) with { Text = NumberText.Plain(Convert.ToDouble(number, CultureInfo.InvariantCulture)) }
