@@ -3,7 +3,6 @@ using System.Net;
 using System.Text.RegularExpressions;
 using Auditor.Reporting;
 using Auditor.Reporting.Html;
-using Auditor.Results;
 
 namespace Auditor.Tests.Reporting;
 
