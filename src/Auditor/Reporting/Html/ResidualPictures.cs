@@ -26,7 +26,7 @@ internal static class ResidualPictures
         string residual = plots.Weighted ? "Residual times the root of its weight" : "Residual";
         return new(
             "residuals-fitted", "Residuals against fitted values", findings.Title(CheckFindings.Form), findings.Evidence(CheckFindings.Form),
-            Dots(cloud) + Trend(cloud, "mean residual"), "Fitted value" + Units, residual + Units,
+            (Dots(cloud) + Trend(cloud, "mean residual")).Trim(), "Fitted value" + Units, residual + Units,
             x, y, [Level(zero, x, y), .. Cloud(cloud, x, y)], []);
     }
 
@@ -58,7 +58,7 @@ internal static class ResidualPictures
         var y = ResidualPicture.Vertical(cloud.Points.Select(point => point.Y).Append(0));
         return new(
             "residuals-scale", "Scale against fitted values", findings.Title(CheckFindings.EqualVariance), findings.Evidence(CheckFindings.EqualVariance),
-            Dots(cloud) + Trend(cloud, "mean height; level when the spread is equal"), "Fitted value" + Units, "Root of the absolute studentised residual",
+            (Dots(cloud) + Trend(cloud, "mean height; level when the spread is equal")).Trim(), "Fitted value" + Units, "Root of the absolute studentised residual",
             x, y, Cloud(cloud, x, y), []);
     }
 
