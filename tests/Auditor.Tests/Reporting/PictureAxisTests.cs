@@ -13,7 +13,7 @@ public sealed class PictureAxisTests
     [InlineData(-3e-7, 3e-7, "−3 × 10⁻⁷ −2 × 10⁻⁷ −1 × 10⁻⁷ 0 1 × 10⁻⁷ 2 × 10⁻⁷ 3 × 10⁻⁷")]
     [InlineData(2e12, 4e12, "2.0 × 10¹² 2.5 × 10¹² 3.0 × 10¹² 3.5 × 10¹² 4.0 × 10¹²")]
     public void Ticks_are_round_and_no_longer_than_needed(double low, double high, string ticks) =>
-        Assert.Equal(ticks, string.Join(' ', PictureAxis.Covering([low, high], 0, 100).Ticks(7).Select(tick => tick.Text)).Replace('\u202F', ' ').Replace('\u00A0', ' '));
+        Assert.Equal(ticks, string.Join(' ', PictureAxis.Covering([low, high], 0, 100).Ticks(8).Select(tick => tick.Text)).Replace('\u202F', ' ').Replace('\u00A0', ' '));
 
     [Theory]
     [InlineData(5, 5)]
@@ -23,8 +23,8 @@ public sealed class PictureAxisTests
     [InlineData(-1e150, 1e150)]
     public void Any_range_has_a_few_ticks_within_the_picture(double low, double high)
     {
-        var ticks = PictureAxis.Covering([low, high], 0, 100).Ticks(7);
-        Assert.InRange(ticks.Count, 2, 8);
+        var ticks = PictureAxis.Covering([low, high], 0, 100).Ticks(8);
+        Assert.InRange(ticks.Count, 2, 9);
         Assert.All(ticks, tick => Assert.InRange(double.Parse(tick.At, CultureInfo.InvariantCulture), 0, 100));
         Assert.Distinct(ticks.Select(tick => tick.Text));
     }

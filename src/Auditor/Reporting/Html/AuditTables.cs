@@ -13,7 +13,7 @@ internal static class AuditTables
         new("Check", "text", check => Cell.Words(CheckWords.Title(check.Check))),
         new("Statistic", "number", check => Cell.Number(check.Statistic, check.Why)),
         new("on df", "number", check => Cell.Df(check.Df, check.Df2, check.Why ?? "Its distribution has no degrees of freedom.")),
-        new("p", "number", check => Cell.Probability(check.P, null, level, check.Why)));
+        new("p", "number", check => Cell.Probability(check.P, check.Log10P, level, check.Why)));
 
     public static ReportTable Influence(Influence influence)
     {

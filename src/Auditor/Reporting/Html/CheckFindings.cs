@@ -37,14 +37,16 @@ internal sealed class CheckFindings(IReadOnlyList<CheckResult> checks, double le
     }
 
     private string Evidence(CheckResult check) =>
-        $"{CheckWords.Title(check.Check)}: {Probability((check.PSimulated ?? check.P)!.Value)}" + (check.Check == NeedsNormality ? " (needs normal errors besides)" : "");
+        $"{CheckWords.Title(check.Check)}: {Probability(check)}" + (check.Check == NeedsNormality ? " (needs normal errors besides)" : "");
 
     private List<CheckResult> Made(string assumption) =>
         [.. checks.Where(check => check.Assumption == assumption && check.Rejects is not null && (check.PSimulated ?? check.P) is not null)];
 
-    private string Probability(double p)
+    private string Probability(CheckResult check)
     {
-        string text = NumberText.Probability(p, null, level);
+        string text = check.PSimulated is double simulated
+            ? NumberText.Probability(simulated, null, level)
+            : NumberText.Probability(check.P!.Value, check.Log10P, level);
         return text[0] is '<' or '>' ? "p\u00A0" + text : "p\u00A0=\u00A0" + text;
     }
 }

@@ -17,8 +17,12 @@ internal sealed record PicturePath(string Kind, string D)
     public static IReadOnlyList<PicturePath> Dots(IEnumerable<PlotPoint> points, PictureAxis x, PictureAxis y) =>
     [
         .. points.GroupBy(point => Array.FindIndex(Sizes, size => point.Count <= size.Most)).OrderByDescending(group => group.Key)
-            .Select(group => new PicturePath(Sizes[group.Key].Kind, string.Concat(group.Select(point => "M" + Pair(point.X, point.Y, x, y) + "h0").Distinct()))),
+            .Select(group => Marks(Sizes[group.Key].Kind, group.Select(point => (point.X, point.Y)), x, y)),
     ];
+
+    /// <summary>Dots of one size.</summary>
+    public static PicturePath Marks(string kind, IEnumerable<(double X, double Y)> points, PictureAxis x, PictureAxis y) =>
+        new(kind, string.Concat(points.Select(point => "M" + Pair(point.X, point.Y, x, y) + "h0").Distinct()));
 
     public static PicturePath Line(string kind, IEnumerable<(double X, double Y)> points, PictureAxis x, PictureAxis y) =>
         new(kind, "M" + string.Join("L", points.Select(point => Pair(point.X, point.Y, x, y)).Distinct()));

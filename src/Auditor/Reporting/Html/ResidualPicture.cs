@@ -18,7 +18,7 @@ internal sealed record ResidualPicture(
 
     public IReadOnlyList<PictureTick> XTicks => X.Ticks(5);
 
-    public IReadOnlyList<PictureTick> YTicks => Y.Ticks(7);
+    public IReadOnlyList<PictureTick> YTicks => Y.Ticks(8);
 
     public static PictureAxis Horizontal(IEnumerable<double> values) => PictureAxis.Covering(values, Left, Right);
 

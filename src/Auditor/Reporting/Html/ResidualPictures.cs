@@ -26,7 +26,7 @@ internal static class ResidualPictures
         string residual = plots.Weighted ? "Residual times the root of its weight" : "Residual";
         return new(
             "residuals-fitted", "Residuals against fitted values", findings.Title(CheckFindings.Form), findings.Evidence(CheckFindings.Form),
-            Dots(cloud) + Trend(cloud, "mean residual"), "Fitted value" + Units, residual + Units,
+            (Dots(cloud) + Trend(cloud, "mean residual")).Trim(), "Fitted value" + Units, residual + Units,
             x, y, [Level(zero, x, y), .. Cloud(cloud, x, y)], []);
     }
 
@@ -58,22 +58,24 @@ internal static class ResidualPictures
         var y = ResidualPicture.Vertical(cloud.Points.Select(point => point.Y).Append(0));
         return new(
             "residuals-scale", "Scale against fitted values", findings.Title(CheckFindings.EqualVariance), findings.Evidence(CheckFindings.EqualVariance),
-            Dots(cloud) + Trend(cloud, "mean height; level when the spread is equal"), "Fitted value" + Units, "Root of the absolute studentised residual",
+            (Dots(cloud) + Trend(cloud, "mean height; level when the spread is equal")).Trim(), "Fitted value" + Units, "Root of the absolute studentised residual",
             x, y, Cloud(cloud, x, y), []);
     }
 
     private static ResidualPicture Leverage(ResidualPlots plots, CheckFindings findings)
     {
         var cloud = plots.Leverage;
-        var x = ResidualPicture.Horizontal(cloud.Points.Select(point => point.X).Append(0).Append(plots.HighLeverage));
-        var y = ResidualPicture.Vertical(cloud.Points.Select(point => point.Y).Append(0));
+        // A named row may have gone into a cell of the grid: it is drawn again, at its own place.
+        var named = plots.Named.Select(point => (point.X, point.Y)).ToList();
+        var x = ResidualPicture.Horizontal(cloud.Points.Select(point => point.X).Concat(named.Select(point => point.X)).Append(0).Append(plots.HighLeverage));
+        var y = ResidualPicture.Vertical(cloud.Points.Select(point => point.Y).Concat(named.Select(point => point.Y)).Append(0));
         var high = PicturePath.Line("bound", [(plots.HighLeverage, y.Low), (plots.HighLeverage, y.High)], x, y);
         return new(
             "residuals-leverage", "Leverage against studentised residuals", LeverageTitle(plots),
             (LargestByCook(plots.Named) + " " + findings.Evidence(CheckFindings.Outlier) + LeverageOne(plots.LeverageOne)).Trim(),
             Dots(cloud) + $"Dashed: leverage {NumberText.Share(plots.HighLeverage)}, twice the mean (common practice). Named: the largest Cook’s distances.",
             "Leverage", "Studentised residual",
-            x, y, [Level(0, x, y), high, .. Cloud(cloud, x, y)], PictureLabels.Of(plots.Named, x, y));
+            x, y, [Level(0, x, y), high, .. Cloud(cloud, x, y), PicturePath.Marks("dot named", named, x, y)], PictureLabels.Of(plots.Named, x, y));
     }
 
     private static string LeverageTitle(ResidualPlots plots) => plots.AboveHighLeverage switch
