@@ -38,14 +38,9 @@ public sealed class CsvSource(string name, Func<Stream> open, DelimitedFormat fo
 
         var builders = Corrected(names, requests, missing, pass);
         IReadOnlyList<Problem> problems = [.. pass.Problems, .. builders.SelectMany(builder => builder.Bad.Problems(name, builder.Name, builder.Kind))];
-        return problems.Count == 0 ? Built(names, requests, pass.Rows.Count, builders) : Reading<DataTable>.Failed(problems);
-    }
-
-    private Reading<DataTable> Built(IReadOnlyList<string> names, IReadOnlyList<ColumnRequest> requests, int rows, List<ColumnBuilder> builders)
-    {
-        List<DataColumn> columns = [.. builders.Select(builder => builder.Build())];
-        List<Problem> problems = [.. columns.Zip(requests, (column, request) => DecimalCommas.In(name, column, request)).OfType<Problem>()];
-        return problems.Count == 0 ? Reading<DataTable>.Of(new DataTable(rows, names, columns)) : Reading<DataTable>.Failed(problems);
+        return problems.Count == 0
+            ? Reading<DataTable>.Of(new DataTable(pass.Rows.Count, names, [.. builders.Select(builder => builder.Build())]))
+            : Reading<DataTable>.Failed(problems);
     }
 
     /// <summary>Reads the first rows as text for a guess of each column's kind and of the number of rows. Its problems come again in the full pass.</summary>
