@@ -19,6 +19,23 @@ public sealed class ResidualCheckEdgeTests
         Assert.All(All(Checked([X], Y, sampling: true)), outcome => Assert.Equal(CheckImpediment.SamplingWeights, Why(outcome)));
 
     [Fact]
+    public void Equal_residuals_say_nothing_of_the_errors()
+    {
+        double[] alternating = [.. Enumerable.Range(0, 40).Select(i => i % 2 == 0 ? 1.0 : -1.0)];
+        var design = new MatrixDesign(false, [alternating], [], [.. alternating.Select(_ => 1.0)]);
+        Assert.All(All(Checked(design)), outcome => Assert.Equal(CheckImpediment.ResidualsDoNotVary, Why(outcome)));
+    }
+
+    [Fact]
+    public void A_row_without_which_the_fit_is_perfect_has_no_studentised_residual()
+    {
+        double[] line = [.. X.Select((x, i) => 2 + (3 * x) + (i == 5 ? 10 : 0))];
+        var fit = Checked([X], line);
+        Assert.Null(RowInfluence.OfAll(fit)[5].StudentisedResidual);
+        Assert.Equal(CheckImpediment.PerfectWithoutOneRow, Why(LargestResidual.Of(fit, RowInfluence.OfAll(fit))));
+    }
+
+    [Fact]
     public void A_model_of_a_constant_has_nothing_to_relate()
     {
         var fit = Checked([], Y);
@@ -88,7 +105,11 @@ public sealed class ResidualCheckEdgeTests
 
     private static CheckedFit Checked(double[][] columns, double[] y, double[]? copies = null, bool sampling = false)
     {
-        var design = new MatrixDesign(true, columns, [], y, copies: copies);
+        return Checked(new MatrixDesign(true, columns, [], y, copies: copies), sampling);
+    }
+
+    private static CheckedFit Checked(MatrixDesign design, bool sampling = false)
+    {
         var final = FinalFactor.Of(FactorBuilder.Build(design));
         var store = new ResidualStore();
         var pass = RowPass.Run(design, final, [], [store]);

@@ -1,5 +1,5 @@
-using Auditor.Numerics.Random;
 using Auditor.Numerics.Factor;
+using Auditor.Numerics.Random;
 
 namespace Auditor.Simulation;
 

@@ -1,8 +1,8 @@
 using Auditor.Analysis;
-using Auditor.Numerics.Random;
 using Auditor.Numerics;
 using Auditor.Numerics.Factor;
 using Auditor.Numerics.GroupTests;
+using Auditor.Numerics.Random;
 using Auditor.Numerics.SecondPass;
 using Auditor.Policies;
 using Auditor.Results;

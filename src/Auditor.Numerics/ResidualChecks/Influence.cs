@@ -68,7 +68,7 @@ public static class LargestResidual
 
         var largest = studentised.MaxBy(row => Math.Abs(row.StudentisedResidual!.Value))!;
         var t = largest.StudentisedResidual!.Value;
-        return new CheckStatistic(t, df, null, Math.Min(1, fit.Fit.N * StudentT.TwoSided(t, df))) 
+        return new CheckStatistic(t, df, null, Math.Min(1, fit.Fit.N * StudentT.TwoSided(t, df)))
         {
             Position = largest.Position,
             LogP = Math.Min(0, Math.Log(fit.Fit.N) + StudentT.LogTwoSided(t, df)),

@@ -140,6 +140,10 @@ public sealed class EdgeCaseTests
     }
 
     [Fact]
+    public void A_response_that_does_not_vary_has_no_overall_F() =>
+        Why(Impediment.PerfectWithoutGroup, new GroupAnalysis(new MatrixDesign(true, [X], [], [.. X.Select(_ => 5.0)])).Fit.OverallF);
+
+    [Fact]
     public void A_model_of_the_intercept_alone()
     {
         var fit = new GroupAnalysis(new MatrixDesign(true, [], [[Z]], Response())).Fit;
