@@ -1,5 +1,6 @@
 using System.CommandLine;
 using System.Diagnostics;
+using System.Globalization;
 
 namespace Auditor.Simulation;
 
@@ -26,7 +27,7 @@ internal static class Program
     private static void Run(int draws, ulong seed, string? file)
     {
         var (clock, policies) = (Stopwatch.StartNew(), Policies.Read());
-        var results = new Study(policies, seed, draws).Run();
+        var results = new Study(policies, seed, draws, new Percentages()).Run();
         var text = ResultText.Of(results, new RunFacts(draws, seed, DateTimeOffset.UtcNow, clock.Elapsed), policies.Hc3);
         Console.Out.Write(text);
         if (file is not null)
@@ -37,3 +38,18 @@ internal static class Program
 }
 
 internal sealed record RunFacts(int Draws, ulong Seed, DateTimeOffset Moment, TimeSpan Took);
+
+/// <summary>Says on standard error how far the run is, each tenth once.</summary>
+internal sealed class Percentages : IProgress<double>
+{
+    private int _tenths;
+
+    public void Report(double value)
+    {
+        if ((int)(value * 10) > _tenths)
+        {
+            _tenths = (int)(value * 10);
+            Console.Error.WriteLine(string.Create(CultureInfo.InvariantCulture, $"{10 * _tenths} %"));
+        }
+    }
+}

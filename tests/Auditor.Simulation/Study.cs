@@ -10,7 +10,7 @@ using Auditor.Results;
 namespace Auditor.Simulation;
 
 /// <summary>Runs the tool's own passes, tests and verdict on simulated data. Draw k of a cell has a stream of its own: threads change nothing.</summary>
-internal sealed class Study(Policies policies, ulong seed, int draws)
+internal sealed class Study(Policies policies, ulong seed, int draws, IProgress<double> progress)
 {
     private const int Batch = 50;
 
@@ -18,16 +18,19 @@ internal sealed class Study(Policies policies, ulong seed, int draws)
     public IReadOnlyDictionary<Cell, IReadOnlyList<Tally>> Run()
     {
         var results = Cell.All.ToDictionary(cell => cell, _ => NewTallies());
-        var batches = from cell in Cell.All orderby cell.N descending from first in Batches() select (cell, first);
-        Parallel.ForEach(batches.ToList(), batch =>
+        var batches = (from cell in Cell.All orderby cell.N descending from first in Batches() select (cell, first)).ToList();
+        var done = 0;
+        Parallel.ForEach(batches, new ParallelOptions { MaxDegreeOfParallelism = Environment.ProcessorCount }, batch =>
         {
             var tallies = Run(batch.cell, batch.first);
-            lock (results[batch.cell])
+            lock (results)
             {
                 for (var e = 0; e < tallies.Count; e++)
                 {
                     results[batch.cell][e].Add(tallies[e]);
                 }
+
+                progress.Report(++done / (double)batches.Count);
             }
         });
         return results.ToDictionary(pair => pair.Key, pair => (IReadOnlyList<Tally>)pair.Value);
