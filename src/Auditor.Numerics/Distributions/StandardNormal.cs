@@ -11,6 +11,9 @@ public static class StandardNormal
         return z > 0 ? outside : 1 - outside;
     }
 
+    /// <summary>Natural logarithm of P(Z > z), z at least 0.</summary>
+    public static double LogUpperTail(double z) => StudentT.LogTwoSided(z, double.PositiveInfinity) - Math.Log(2);
+
     /// <summary>z with P(Z &lt;= z) = p; -inf at 0, +inf at 1.</summary>
     public static double Quantile(double p) => -StudentT.UpperQuantile(p, double.PositiveInfinity);
 }

@@ -10,7 +10,10 @@ public static class PerfectFit
 
     public static bool Is(FinalFactor final, double rss)
     {
-        var noise = 8 * UnitRoundoff * Math.Sqrt(final.Factor.R.Columns) * final.LargestPiece;
+        var noise = Noise(final);
         return rss <= noise * noise;
     }
+
+    /// <summary>Length below which a vector of residuals is rounding.</summary>
+    internal static double Noise(FinalFactor final) => 8 * UnitRoundoff * Math.Sqrt(final.Factor.R.Columns) * final.LargestPiece;
 }

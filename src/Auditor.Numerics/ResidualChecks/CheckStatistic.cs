@@ -19,12 +19,22 @@ public sealed record CheckStatistic(double Statistic, double? Df, double? Df2, d
     /// <summary>p by simulation, where the approximation is not trusted; null otherwise.</summary>
     public double? SimulatedP { get; init; }
 
+    /// <summary>Samples drawn for <see cref="SimulatedP"/>, null without it.</summary>
+    public int? Draws { get; init; }
+
+    /// <summary>p is at most <see cref="P"/>: its formula ends there.</summary>
+    public bool PIsUpperBound { get; init; }
+
     /// <summary>0-based position of the row that the check is about, null when it is about all.</summary>
     public int? Position { get; init; }
 
     /// <summary>The check's auxiliary regression was too wide and rests on the fitted value and its square.</summary>
     public bool OnFittedValues { get; init; }
 }
+
+/// <summary>With what the check adds (powers, a row's own dummy) the model fits to rounding, without it it does not: the statistic has no finite value, p is 0.</summary>
+/// <param name="Position">As <see cref="CheckStatistic.Position"/>.</param>
+public sealed record UnboundedCheck(double Df, double? Df2, int? Position) : CheckOutcome;
 
 public sealed record NoCheck(CheckImpediment Why) : CheckOutcome;
 
@@ -41,20 +51,26 @@ public enum CheckImpediment
     /// <summary>The residuals are rounding, or no degrees of freedom are left.</summary>
     NoResiduals,
 
-    /// <summary>All residuals are equal.</summary>
-    ResidualsDoNotVary,
-
-    /// <summary>Without one of the rows the model fits to rounding: its residual has no finite studentised value.</summary>
-    PerfectWithoutOneRow,
-
     /// <summary>Too few observations for the check.</summary>
     TooFew,
 
     /// <summary>More observations than the check is defined for.</summary>
     TooMany,
 
-    /// <summary>The auxiliary regression has no column beside its intercept.</summary>
+    /// <summary>The auxiliary regression has no column beside its intercept, or the fitted value is constant.</summary>
     NothingToRelate,
+
+    /// <summary>The auxiliary regression has as many columns as there are observations.</summary>
+    Saturated,
+
+    /// <summary>All residuals have the same size, so there is no variance to explain.</summary>
+    EqualSquares,
+
+    /// <summary>All residuals are equal: they have no distribution to look at.</summary>
+    EqualResiduals,
+
+    /// <summary>The powers of the fitted value are combinations of the model's columns and of each other.</summary>
+    PowersAddNothing,
 
     /// <summary>Sampling weights: the check's reference distribution does not apply.</summary>
     SamplingWeights,

@@ -11,19 +11,30 @@ public static class FittedValues
         var fitted = new double[fit.Store.Residuals.Count];
         foreach (var block in fit.Design.Blocks())
         {
-            Fill(fit, block, fitted.AsSpan(block.FirstRow, block.Rows));
+            Fill(fit.Fit, block, fitted.AsSpan(block.FirstRow, block.Rows));
         }
 
         return fitted;
     }
 
     /// <summary>X b for the rows of the block, on the response's scale.</summary>
-    internal static void Fill(CheckedFit fit, RowBlock block, Span<double> fitted)
+    internal static void Fill(Fit fit, RowBlock block, Span<double> fitted)
     {
         fitted.Clear();
-        for (var k = 0; k < fit.Fit.Columns.Count; k++)
+        for (var k = 0; k < fit.Columns.Count; k++)
         {
-            BlockKernels.AddScaled(fitted, fit.Fit.Coefficients[k], block.Column(fit.Fit.Columns[k]));
+            BlockKernels.AddScaled(fitted, fit.Coefficients[k], block.Column(fit.Columns[k]));
+        }
+    }
+
+    /// <summary>The same, centred and scaled to lie between -1 and 1.</summary>
+    internal static void FillScaled(CheckedFit fit, RowBlock block, Span<double> fitted)
+    {
+        Fill(fit.Fit, block, fitted);
+        var range = fit.FittedRange;
+        foreach (ref var value in fitted)
+        {
+            value = (value - range.Centre) / range.Scale;
         }
     }
 }

@@ -18,11 +18,8 @@ public sealed class ResidualStore : IAccumulator
     /// <summary>How many equal rows each row stands for; all one without frequency weights.</summary>
     public IReadOnlyList<double> Copies => _copies;
 
-    /// <summary>Whether the residuals differ by more than rounding.</summary>
-    public bool Vary => _residuals.Count > 0 && _residuals.Max() - _residuals.Min() > 1e-12 * _residuals.Max(Math.Abs);
-
-    /// <summary>Residuals with the number of copies of each.</summary>
-    public IEnumerable<(double Residual, double Copies)> Counted => _residuals.Zip(_copies);
+    /// <summary>Greatest less least residual.</summary>
+    public double Spread => _residuals.Count > 0 ? _residuals.Max() - _residuals.Min() : 0;
 
     public void Add(ResidualBlock block)
     {

@@ -9,6 +9,7 @@ namespace Auditor.Numerics.ResidualChecks;
 /// <remarks>Royston 1995, Applied Statistics 44, algorithm AS R94. Verified against R's shapiro.test (tests/reference).</remarks>
 public static class ShapiroWilk
 {
+    private const int Fewest = 3;
     private const int Most = 5000;
 
     private static readonly double[] C1 = [0, 0.221157, -0.147981, -2.07119, 4.434685, -2.706056];
@@ -19,18 +20,8 @@ public static class ShapiroWilk
     private static readonly double[] LargeLogSd = [-0.4803, -0.082676, 0.0030302];
     private static readonly double[] SmallGamma = [-2.273, 0.459];
 
-    public static CheckOutcome Of(CheckedFit fit)
-    {
-        if (fit.Impediment is { } impediment)
-        {
-            return CheckOutcome.None(impediment);
-        }
-
-        var n = fit.Fit.N;
-        return n > Most ? CheckOutcome.None(CheckImpediment.TooMany)
-            : n < 3 ? CheckOutcome.None(CheckImpediment.TooFew)
-            : Of([.. fit.Store.Expanded().Order()]);
-    }
+    public static CheckOutcome Of(CheckedFit fit) =>
+        fit.ShapeImpediment(Fewest, Most) is { } impediment ? CheckOutcome.None(impediment) : Of(fit.Ordered);
 
     private static CheckStatistic Of(double[] ordered)
     {

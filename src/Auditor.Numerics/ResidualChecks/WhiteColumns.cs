@@ -4,68 +4,69 @@ namespace Auditor.Numerics.ResidualChecks;
 
 /// <summary>
 /// The columns of White's auxiliary regression: the final model's, and their squares and cross products without those that are known beforehand to add
-/// nothing (the square of a 0/1 column is itself; a product of two 0/1 columns that are never 1 together is zero).
+/// nothing (the square of a 0/1 column is itself; a product of two 0/1 columns that are never 1 together is zero). Numbers are moved and scaled to lie between -1 and 1
+/// before they are multiplied, which changes no span and keeps digits.
 /// </summary>
-/// <param name="Linear">Design columns.</param>
-/// <param name="Products">Pairs of design columns to be multiplied.</param>
-/// <param name="Origins">What is taken off each design column before it is multiplied, so that large values lose no digits; the space spanned stays.</param>
-internal sealed record WhiteColumns(IReadOnlyList<int> Linear, IReadOnlyList<(int A, int B)> Products, IReadOnlyDictionary<int, double> Origins)
+internal sealed class WhiteColumns
 {
+    /// <summary>The most columns, the intercept included, of the regression in full.</summary>
+    private const int Widest = 100;
+
+    private readonly ColumnShapes _shapes;
+    private readonly (int A, int B)[] _products;
+    private readonly double[] _first;
+    private readonly double[] _second;
+
+    private WhiteColumns(ColumnShapes shapes, int capacity)
+    {
+        _shapes = shapes;
+        _products = [.. shapes.Products()];
+        _first = new double[capacity];
+        _second = new double[capacity];
+    }
+
     /// <summary>All columns, the intercept included.</summary>
-    public int Count => 1 + Linear.Count + Products.Count;
+    public int Count => 1 + _shapes.Columns.Length + _products.Length;
 
-    public static WhiteColumns Of(CheckedFit fit)
+    /// <returns>Null when there would be more than 100 columns.</returns>
+    public static WhiteColumns? Of(CheckedFit fit)
     {
-        var slopes = fit.Slopes;
-        var (isBinary, meet) = Scan(fit.Design, slopes);
-        var products = new List<(int, int)>();
-        for (var a = 0; a < slopes.Length; a++)
+        if (fit.Slopes.Length >= Widest)
         {
-            for (var b = 0; b <= a; b++)
+            return null;
+        }
+
+        var shapes = new ColumnShapes(fit.Slopes);
+        var capacity = 0;
+        foreach (var block in fit.Design.Blocks())
+        {
+            capacity = Math.Max(capacity, block.Stride);
+            shapes.Add(block);
+            if (1 + shapes.Columns.Length + shapes.Products().Count() > Widest)
             {
-                if (!(isBinary[a] && isBinary[b]) || (a != b && meet[a, b]))
-                {
-                    products.Add((slopes[a], slopes[b]));
-                }
+                return null;
             }
         }
 
-        var first = fit.Design.Blocks().First();
-        return new WhiteColumns(slopes, products, Enumerable.Range(0, slopes.Length).ToDictionary(k => slopes[k], k => isBinary[k] ? 0 : first.Values[slopes[k] * first.Stride]));
+        return new WhiteColumns(shapes, capacity);
     }
 
-    /// <summary>Which columns hold only 0 and 1, and which of them are 1 in the same row.</summary>
-    private static (bool[] IsBinary, bool[,] Meet) Scan(IDesignRows design, int[] slopes)
+    /// <summary>Fills columns 1 to <see cref="Count"/> - 1 of the derived block.</summary>
+    public void Fill(RowBlock source, RowBlock derived)
     {
-        var isBinary = Enumerable.Repeat(true, slopes.Length).ToArray();
-        var meet = new bool[slopes.Length, slopes.Length];
-        var ones = new List<int>(slopes.Length);
-        foreach (var block in design.Blocks())
+        var next = 1;
+        foreach (var column in _shapes.Columns)
         {
-            for (var k = 0; k < slopes.Length; k++)
-            {
-                isBinary[k] = isBinary[k] && !block.Column(slopes[k]).ContainsAnyExcept(0, 1);
-            }
-
-            for (var i = 0; i < block.Rows; i++)
-            {
-                ones.Clear();
-                ones.AddRange(Enumerable.Range(0, slopes.Length).Where(k => isBinary[k] && block.Values[(slopes[k] * block.Stride) + i] != 0));
-                Mark(meet, ones);
-            }
+            source.Column(column).CopyTo(derived.Column(next++));
         }
 
-        return (isBinary, meet);
-    }
-
-    private static void Mark(bool[,] meet, List<int> ones)
-    {
-        foreach (var a in ones)
+        foreach (var (a, b) in _products)
         {
-            foreach (var b in ones)
-            {
-                meet[a, b] = true;
-            }
+            var first = _first.AsSpan(0, source.Rows);
+            var second = _second.AsSpan(0, source.Rows);
+            _shapes.Scale(source, a, first);
+            _shapes.Scale(source, b, second);
+            BlockKernels.Multiply(first, second, derived.Column(next++));
         }
     }
 }

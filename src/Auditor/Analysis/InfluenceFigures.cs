@@ -7,19 +7,19 @@ namespace Auditor.Analysis;
 /// <summary>The rows that bear most on the final model's fit, as the record shows them.</summary>
 internal static class InfluenceFigures
 {
-    private const int Shown = 10;
+    /// <summary>Rows shown, largest Cook's distance first.</summary>
+    public const int Shown = 10;
 
     /// <param name="label">The declared row label; null when there is none.</param>
-    public static Influence Of(IReadOnlyList<RowInfluence> rows, RowSubset subset, DataColumn? label)
+    public static Influence Of(InfluenceSummary summary, RowSubset subset, DataColumn? label)
     {
-        int Row(RowInfluence row) => subset.Rows[row.Position] + 1;
-        var largest = rows.Where(row => row.CooksDistance is not null).OrderByDescending(row => row.CooksDistance).ThenBy(row => row.Position).Take(Shown);
+        int Row(int position) => subset.Rows[position] + 1;
         return new Influence(
-            [.. rows.Where(row => row.HasLeverageOne).Select(Row)],
-            [.. largest.Select(row => new InfluentialRow(
-                Row(row), label?.Text(subset.Rows[row.Position]), row.Leverage, row.StudentisedResidual, row.CooksDistance, row.Dffits))])
+            [.. summary.LeverageOne.Select(Row)],
+            [.. summary.Largest.Select(row => new InfluentialRow(
+                Row(row.Position), label?.Text(subset.Rows[row.Position]), row.Leverage, row.StudentisedResidual, row.CooksDistance, row.Dffits))])
         {
-            Why = rows.Count == 0 ? "the final model leaves no residuals: it fits to rounding, or no degrees of freedom are left" : null,
+            Why = summary.HasResiduals ? null : "the final model leaves no residuals: it fits to rounding, or no degrees of freedom are left",
         };
     }
 }

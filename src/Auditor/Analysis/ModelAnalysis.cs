@@ -23,7 +23,7 @@ internal static class ModelAnalysis
         var sampling = model.Weights?.Kind == WeightKind.Sampling;
         var main = (common ? fits.Common : fits.Final)!;
         var fit = CheckedFits.Of(model, main, fits.Residuals, sampling);
-        var influence = RowInfluence.OfAll(fit);
+        var influence = InfluenceSummary.Of(fit, InfluenceFigures.Shown);
         var other = selection.Final.Equals(selection.Common) ? null : common ? fits.Final : fits.Common;
         return Reading<AuditResults>.Of(new AuditResults(
             declaration.Model.Id,
@@ -37,7 +37,7 @@ internal static class ModelAnalysis
             ResidualCheckFigures.Of(fit, influence, main.Rows, policy.Significance, run.Seed),
             InfluenceFigures.Of(influence, main.Rows, model.RowLabel),
             CollinearityFigures.Of(main),
-            PlotFigures.Of(fit, influence, main.Rows, model.RowLabel, weighted: model.Weights is { Kind: not WeightKind.Frequency })));
+            PlotFigures.Of(fit, [.. RowInfluence.OfAll(fit)], main.Rows, model.RowLabel, weighted: model.Weights is { Kind: not WeightKind.Frequency })));
     }
 
     private static Problem NoRows(ModelDeclaration declaration, bool common) => new(

@@ -9,9 +9,13 @@ internal static class ResidualCheckFigures
 {
     private const string NoOrder = "no time order declared";
     private const string NoSplit = "no split declared";
+    private const string OnFittedValues = "on the fitted value and its square, because the full form has more than 100 columns";
+    private const string UpperBound = "p is at most the figure given: the published formula for p ends there";
+    private const string PerfectWithPowers = "with the powers in, the model fits these rows to rounding, without them it does not: the statistic has no finite value";
+    private const string PerfectWithoutRow = "without this row the model fits to rounding, with it it does not: the studentised residual has no finite value";
 
     public static IReadOnlyList<CheckResult> Of(
-        CheckedFit fit, IReadOnlyList<RowInfluence> influence, RowSubset rows, double significance, long seed)
+        CheckedFit fit, InfluenceSummary influence, RowSubset rows, double significance, long seed)
     {
         CheckResult Figure(string name, string assumption, CheckOutcome outcome) => Shown(name, assumption, outcome, rows, significance);
         return
@@ -40,22 +44,32 @@ internal static class ResidualCheckFigures
         {
             Log10P = check.LogP is double log ? TestFigure.Log10(log) : null,
             PSimulated = check.SimulatedP,
-            Row = check.Position is int position ? rows.Rows[position] + 1 : null,
-            Variant = check.OnFittedValues ? "on the fitted value and its square, because the full form has more than 100 columns" : null,
+            Draws = check.Draws,
+            Row = Row(check.Position, rows),
+            Variant = check.OnFittedValues ? OnFittedValues : check.PIsUpperBound ? UpperBound : null,
+        },
+        UnboundedCheck unbounded => new CheckResult(
+            name, null, unbounded.Df, unbounded.Df2, 0, assumption, true, unbounded.Position is null ? PerfectWithPowers : PerfectWithoutRow)
+        {
+            Row = Row(unbounded.Position, rows),
         },
         NoCheck none => Missing(name, assumption, Words(none.Why)),
         _ => throw new ArgumentOutOfRangeException(nameof(outcome), outcome, "a check gives a statistic or a reason"),
     };
+
+    private static int? Row(int? position, RowSubset rows) => position is int place ? rows.Rows[place] + 1 : null;
 
     private static CheckResult Missing(string name, string assumption, string why) => new(name, null, null, null, null, assumption, null, why);
 
     private static string Words(CheckImpediment why) => why switch
     {
         CheckImpediment.NoResiduals => "the final model leaves no residuals to check: it fits to rounding, or no degrees of freedom are left",
-        CheckImpediment.ResidualsDoNotVary => "all residuals are equal",
-        CheckImpediment.PerfectWithoutOneRow => "without one of the rows the model fits to rounding, so that row's residual has no finite studentised value",
-        CheckImpediment.TooFew => "too few rows for this check",
+        CheckImpediment.TooFew => "too few rows, or too few degrees of freedom, for this check",
         CheckImpediment.TooMany => "more rows than this check is defined for",
+        CheckImpediment.Saturated => "the check's auxiliary regression has as many columns as there are rows",
+        CheckImpediment.EqualSquares => "all residuals have the same size: there is no difference in variance to explain",
+        CheckImpediment.EqualResiduals => "all residuals are equal: they have no distribution to look at",
+        CheckImpediment.PowersAddNothing => "the powers of the fitted value do not both add something to the final model's columns",
         CheckImpediment.NothingToRelate => "the final model has nothing but a constant to relate the residuals to",
         _ => "sampling weights: the check's reference distribution does not apply",
     };

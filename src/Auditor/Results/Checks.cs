@@ -20,11 +20,19 @@ public sealed record CheckResult(
     [JsonIgnore(Condition = JsonIgnoreCondition.WhenWritingNull)]
     public double? PSimulated { get; init; }
 
+    /// <summary>Samples drawn for <see cref="PSimulated"/>.</summary>
+    [JsonIgnore(Condition = JsonIgnoreCondition.WhenWritingNull)]
+    public int? Draws { get; init; }
+
+    /// <summary>p on which <see cref="Rejects"/> rests.</summary>
+    [JsonIgnore]
+    public double? DecisiveP => PSimulated ?? P;
+
     /// <summary>The row that the check is about, 1-based in the source.</summary>
     [JsonIgnore(Condition = JsonIgnoreCondition.WhenWritingNull)]
     public int? Row { get; init; }
 
-    /// <summary>How the check was made, where there is more than one way.</summary>
+    /// <summary>How the check was made or its p is to be read, where there is more than one way.</summary>
     [JsonIgnore(Condition = JsonIgnoreCondition.WhenWritingNull)]
     public string? Variant { get; init; }
 }

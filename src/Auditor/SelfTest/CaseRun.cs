@@ -30,6 +30,8 @@ internal sealed record CaseRun(ReferenceCase Case, string Variant, RecordView Re
         .. FitFigures.Of(this),
         .. CoefficientFigures.Of(this),
         .. GroupFigures.Of(this),
+        .. ResidualCheckFigures.Of(this),
+        .. InfluenceFigures.Of(this),
         .. IsCertified ? CertifiedFigures.Of(this) : [],
     ];
 

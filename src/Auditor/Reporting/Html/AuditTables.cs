@@ -10,14 +10,14 @@ internal static class AuditTables
         record.Checks,
         new("Assumption", "text", check => Cell.Words(CheckWords.Spaced(check.Assumption))),
         new("At this level it is", "text", check => Cell.Words(CheckWords.Conclusion(check.Rejects))),
-        new("Check", "text", check => Cell.Words(CheckWords.Title(check.Check))),
+        new("Check", "text", check => Cell.Words(CheckWords.Title(check))),
         new("Statistic", "number", check => Cell.Number(check.Statistic, check.Why)),
         new("on df", "number", check => Cell.Df(check.Df, check.Df2, check.Why ?? "Its distribution has no degrees of freedom.")),
-        new("p", "number", check => Cell.Probability(check.P, check.Log10P, level, check.Why)));
+        new("p", "number", check => Cell.Probability(check.DecisiveP, check.PSimulated is null ? check.Log10P : null, level, check.Why)));
 
     public static ReportTable Influence(Influence influence)
     {
-        const string leverageOne = "The row has leverage 1: the fit passes through it.";
+        const string leverageOne = "The row has leverage 1, or the fit without it leaves nothing to compare it with.";
         return ReportTable.Of(
             "Rows that move the fit most, by Cook’s distance",
             influence.Largest,

@@ -1,3 +1,5 @@
+using Auditor.Results;
+
 namespace Auditor.Reporting.Html;
 
 /// <summary>What residual checks and their assumptions are called.</summary>
@@ -22,6 +24,17 @@ internal static class CheckWords
     };
 
     public static string Title(string check) => Titles.GetValueOrDefault(check) ?? Spaced(check);
+
+    /// <summary>The check's name with what is particular to this run of it: the row it found, how its p was had, its variant.</summary>
+    public static string Title(CheckResult check) => string.Join(
+        ", ",
+        new[]
+        {
+            Title(check.Check),
+            check.Row is int row ? "row " + NumberText.Count(row) : null,
+            check.Draws is int draws ? $"p simulated with {NumberText.Count(draws)} draws" : null,
+            check.Variant,
+        }.OfType<string>());
 
     public static string Spaced(string name) => name.Replace('_', ' ');
 
