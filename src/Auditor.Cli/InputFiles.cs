@@ -46,6 +46,9 @@ internal static class InputFiles
             CommandLine.Version,
             request.Seed,
             Clock.Started);
-        return Reading<AuditInputs>.Of(new AuditInputs(declaration, mentions, table.Value, rules.Policy, rules.Rules, provenance, request.Threads));
+        return Reading<AuditInputs>.Of(new AuditInputs(declaration, mentions, table.Value, rules.Policy, rules.Rules, provenance, request.Threads)
+        {
+            Pictures = request.Formats.Contains("html"),
+        });
     }
 }

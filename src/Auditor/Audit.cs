@@ -28,7 +28,7 @@ public static class Audit
         }
 
         var mentioned = inputs.Mentions.Select(mention => mention.Column).ToHashSet(StringComparer.Ordinal);
-        var analysis = ModelAnalysis.Run(declaration, bound.Value.Model, mentioned, inputs.Policy, new RunSettings(inputs.Threads, inputs.Provenance.Seed));
+        var analysis = ModelAnalysis.Run(declaration, bound.Value.Model, mentioned, inputs.Policy, new RunSettings(inputs.Threads, inputs.Provenance.Seed, inputs.Pictures));
         if (analysis.Value is not { } results)
         {
             return Reading<AuditRecord>.Failed(analysis.Problems);
@@ -92,4 +92,8 @@ public sealed record AuditInputs(
     Policy Policy,
     IReadOnlyList<Rule> Rules,
     Provenance Provenance,
-    int Threads = 1);
+    int Threads = 1)
+{
+    /// <summary>Whether the points of the pictures are gathered; no figure depends on it.</summary>
+    public bool Pictures { get; init; } = true;
+}

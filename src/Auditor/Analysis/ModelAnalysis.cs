@@ -19,7 +19,7 @@ internal static class ModelAnalysis
             return Reading<AuditResults>.Failed(NoRows(declaration, common));
         }
 
-        var fits = ModelFits.Compute(model, selection, common ? selection.Common : selection.Final, run.Threads);
+        var fits = ModelFits.Compute(model, selection, common ? selection.Common : selection.Final, run.Pictures ? policy.RowSet : null, run.Threads);
         var sampling = model.Weights?.Kind == WeightKind.Sampling;
         var main = (common ? fits.Common : fits.Final)!;
         var fit = CheckedFits.Of(model, main, fits.Residuals, sampling);
@@ -37,8 +37,14 @@ internal static class ModelAnalysis
             ResidualCheckFigures.Of(fit, influence, main.Rows, policy.Significance, run.Seed),
             InfluenceFigures.Of(influence, main.Rows, model.RowLabel),
             CollinearityFigures.Of(main),
-            PlotFigures.Of(fit, [.. RowInfluence.OfAll(fit)], main.Rows, model.RowLabel, weighted: model.Weights is { Kind: not WeightKind.Frequency })));
+            run.Pictures ? Pictures(model, fits, fit, main, common) : new PlotData(null, "no pictures were asked for")));
     }
+
+    private static PlotData Pictures(BoundModel model, ModelFits fits, CheckedFit fit, RowSetFit main, bool common) =>
+        PlotFigures.Of(fit, [.. RowInfluence.OfAll(fit)], main.Rows, model.RowLabel, weighted: model.Weights is { Kind: not WeightKind.Frequency }) with
+        {
+            Groups = [.. Enumerable.Range(0, model.Groups.Count).Select(group => (common ? fits.Common : fits.Own(group))?[group].Plots)],
+        };
 
     private static Problem NoRows(ModelDeclaration declaration, bool common) => new(
         declaration.File,
@@ -59,4 +65,5 @@ internal static class ModelAnalysis
 /// <summary>How an audit is to be run; no result but those drawn at random depends on it.</summary>
 /// <param name="Threads">Most row sets to work on at once.</param>
 /// <param name="Seed">Seed of everything drawn at random.</param>
-internal sealed record RunSettings(int Threads, long Seed);
+/// <param name="Pictures">Whether the points of the pictures are wanted.</param>
+internal sealed record RunSettings(int Threads, long Seed, bool Pictures);

@@ -1,3 +1,4 @@
+using Auditor.Numerics.Pictures;
 using Auditor.Results;
 
 namespace Auditor.Analysis;
@@ -19,6 +20,14 @@ internal static class PointClouds
             ? new PointCloud(points, points.Count, false, line)
             : new PointCloud(Binned(points), points.Count, true, line);
     }
+
+    /// <summary>A cloud that was made small while the rows were read.</summary>
+    public static PointCloud Of(PointGrid grid, bool trend)
+    {
+        return new PointCloud([.. grid.Points.Select(Point)], (int)grid.Count, grid.Binned, trend && grid.Count >= FewestForTrend ? Trend([.. grid.Columns.Select(Point)]) : []);
+    }
+
+    private static PlotPoint Point(GridPoint point) => new(point.X, point.Y, point.Count);
 
     private static List<PlotPoint> Binned(IReadOnlyList<PlotPoint> points)
     {
@@ -45,8 +54,30 @@ internal static class PointClouds
             return [];
         }
 
-        var runs = Math.Min(LongestTrend, ordered.Length / (FewestForTrend / 4));
-        return [.. ordered.Chunk((ordered.Length + runs - 1) / runs).Select(Mean)];
+        var count = ordered.Sum(point => point.Count);
+        var runs = Math.Min(LongestTrend, Math.Ceiling(count / (FewestForTrend / 4)));
+        return [.. Runs(ordered, count / runs).Select(Mean)];
+    }
+
+    /// <summary>Neighbours that stand for about that many rows; equal places stay together.</summary>
+    private static IEnumerable<List<PlotPoint>> Runs(PlotPoint[] ordered, double size)
+    {
+        var (run, count) = (new List<PlotPoint>(), 0.0);
+        foreach (var place in ordered.GroupBy(point => point.X))
+        {
+            run.AddRange(place);
+            count += place.Sum(point => point.Count);
+            if (count >= size)
+            {
+                yield return run;
+                (run, count) = ([], 0);
+            }
+        }
+
+        if (run.Count > 0)
+        {
+            yield return run;
+        }
     }
 
     private static PlotPoint Mean(IEnumerable<PlotPoint> points)

@@ -4,6 +4,7 @@ using Auditor.Numerics;
 using Auditor.Numerics.Factor;
 using Auditor.Numerics.ResidualChecks;
 using Auditor.Numerics.SecondPass;
+using Auditor.Results;
 
 namespace Auditor.Analysis;
 
@@ -36,19 +37,23 @@ internal sealed class RowSetFit
     /// <param name="groups">Positions of the groups to be tested on these rows.</param>
     /// <param name="jointly">Whether all of them together, and each last, are wanted too.</param>
     /// <param name="residuals">Keeps every row's residual and leverage; null when they are not wanted.</param>
-    public static RowSetFit Compute(BoundModel model, RowSubset rows, IReadOnlyList<int> groups, bool jointly, ResidualStore? residuals)
+    /// <param name="pictured">Groups whose pictures show these rows.</param>
+    public static RowSetFit Compute(
+        BoundModel model, RowSubset rows, IReadOnlyList<int> groups, bool jointly, ResidualStore? residuals, IReadOnlySet<int> pictured)
     {
         var plan = new DesignPlan(model, groups);
         var design = new DesignRows(model, plan, rows);
         var final = FinalFactor.Of(FactorBuilder.Build(design));
         var added = plan.Layout.Groups.Select(range => AddedGroup.Of(final, [.. range.Indices])).ToList();
         var joint = jointly && groups.Count > 0 ? AddedGroup.Of(final, Columns(plan, [.. Enumerable.Range(0, groups.Count)])) : null;
-        var pass = RowPass.Run(design, final, joint is null ? added : [.. added, joint], residuals is null ? [] : [residuals]);
+        var pictures = groups.Select((group, g) => pictured.Contains(group) ? GroupPictures.Of(added[g], plan, model.Groups.Count) : null).ToList();
+        IAccumulator[] others = [.. residuals is null ? [] : new[] { residuals }, .. pictures.SelectMany(picture => picture?.Accumulators ?? [])];
+        var pass = RowPass.Run(design, final, joint is null ? added : [.. added, joint], others);
         var result = new RowSetFit(rows, plan, final, new Fit(final, pass));
         for (var g = 0; g < groups.Count; g++)
         {
             var last = joint is null ? null : AddedGroup.After(final, Others(plan, g), added[g].Columns);
-            result._groups[groups[g]] = new GroupFit(added[g], pass.Groups[g], last, joint);
+            result._groups[groups[g]] = new GroupFit(added[g], pass.Groups[g], last, joint) { Plots = pictures[g]?.Plots() };
         }
 
         result.Joint = joint is null ? null : new GroupFit(joint, pass.Groups[^1], null, null);
@@ -65,4 +70,8 @@ internal sealed class RowSetFit
 /// <summary>One group (or union) on one row set.</summary>
 /// <param name="LastIn">The group added after all others; null when the others are not on these rows.</param>
 /// <param name="Largest">All groups added at once; null likewise.</param>
-internal sealed record GroupFit(AddedGroup Added, GroupSums Sums, AddedGroup? LastIn, AddedGroup? Largest);
+internal sealed record GroupFit(AddedGroup Added, GroupSums Sums, AddedGroup? LastIn, AddedGroup? Largest)
+{
+    /// <summary>Null when they were not asked for on these rows or cannot be drawn.</summary>
+    public GroupPlots? Plots { get; init; }
+}

@@ -38,6 +38,10 @@ public sealed record Exclusion(
     /// <summary>The author's reason as declared; null when none was given.</summary>
     public string? Because { get; init; }
 
+    /// <summary>Power of the basis test against the size of the effect; only where the verdict is inconclusive.</summary>
+    [JsonIgnore]
+    public IReadOnlyList<PowerPoint> PowerCurve { get; init; } = [];
+
     /// <summary>Line of the declaration where the group stands.</summary>
     [JsonIgnore]
     public int? Line { get; init; }

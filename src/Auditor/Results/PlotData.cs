@@ -2,7 +2,27 @@ namespace Auditor.Results;
 
 /// <summary>What the pictures of the final model's residuals show: already few enough points to draw. No part of the JSON record.</summary>
 /// <param name="Why">Why there is nothing to draw; null when there is.</param>
-public sealed record PlotData(ResidualPlots? Plots, string? Why);
+public sealed record PlotData(ResidualPlots? Plots, string? Why)
+{
+    /// <summary>Pictures of each left-out group, in the groups' order; null where a group has none.</summary>
+    public IReadOnlyList<GroupPlots?> Groups { get; init; } = [];
+}
+
+/// <summary>The pictures of one left-out group on the rows of its test. Residuals are those of the final model, times sqrt(w) in a weighted fit.</summary>
+/// <param name="Added">Residual against what the group adds.</param>
+/// <param name="Columns">Residual against left-out columns as declared.</param>
+/// <param name="ColumnsNotDrawn">Further columns of the group.</param>
+public sealed record GroupPlots(AddedVariablePlot Added, IReadOnlyList<ColumnPlot> Columns, int ColumnsNotDrawn);
+
+/// <param name="Slope">Slope of the least-squares line through the origin.</param>
+/// <param name="Column">The one column that adds a direction, drawn as its part orthogonal to the final model; null: the fitted part of several.</param>
+public sealed record AddedVariablePlot(PointCloud Cloud, double Slope, string? Column);
+
+public sealed record ColumnPlot(string Column, PointCloud Cloud);
+
+/// <param name="PartialRSquared">An effect.</param>
+/// <param name="Power">Chance that the basis test rejects it at the policy's significance, not adjusted.</param>
+public sealed record PowerPoint(double PartialRSquared, double Power);
 
 /// <param name="Fitted">Residual against fitted value, both in the response's units (the residual times sqrt(w) in a weighted fit).</param>
 /// <param name="Normal">Standardised residual, e / (s sqrt(1 - h)), against the normal quantile of its place in the order.</param>

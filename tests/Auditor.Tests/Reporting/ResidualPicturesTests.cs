@@ -88,8 +88,8 @@ public sealed partial class ResidualPicturesTests
             Assert.Distinct(dots.Select(path => path.Kind));
             var places = dots.SelectMany(path => Place().Matches(path.D)).ToList();
             Assert.True(places.Count > 40);
-            Assert.All(places, place => Assert.InRange(Number(place.Groups[1]), ResidualPicture.Left, ResidualPicture.Right));
-            Assert.All(places, place => Assert.InRange(Number(place.Groups[2]), ResidualPicture.Top, ResidualPicture.Bottom));
+            Assert.All(places, place => Assert.InRange(Number(place.Groups[1]), Picture.Left, Picture.Right));
+            Assert.All(places, place => Assert.InRange(Number(place.Groups[2]), Picture.Top, Picture.Bottom));
         }
 
         Assert.Equal(["dot most", "dot one"], Pictures(SampleRecords.Full)[2].Paths.Select(path => path.Kind));
@@ -108,7 +108,7 @@ public sealed partial class ResidualPicturesTests
     public void The_record_does_not_carry_the_points() =>
         Assert.Equal(JsonRecord.Write(SampleRecords.Full with { Plots = null }), JsonRecord.Write(SampleRecords.Full));
 
-    private static IReadOnlyList<ResidualPicture> Pictures(AuditRecord record) => ResidualPictures.Of(record, Level);
+    private static IReadOnlyList<Picture> Pictures(AuditRecord record) => ResidualPictures.Of(record, Level);
 
     private static double Number(Group group) => double.Parse(group.Value, CultureInfo.InvariantCulture);
 

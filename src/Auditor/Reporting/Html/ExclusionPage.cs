@@ -10,6 +10,9 @@ internal sealed record ExclusionPage(
     Exclusion Exclusion, string Anchor, VerdictWords Verdict, ReportTable Tests, IReadOnlyList<Fact> NotComputed, FactList Decision, FactList Size,
     FactList? OtherRows)
 {
+    /// <summary>What the group adds, what is left over against its columns, what the rows could show.</summary>
+    public IReadOnlyList<Picture> Pictures { get; init; } = [];
+
     public static ExclusionPage Numbered(Exclusion exclusion, int index, double level) =>
         Of(exclusion, "exclusion-" + (index + 1).ToString(CultureInfo.InvariantCulture), level);
 

@@ -47,7 +47,7 @@ internal sealed record IntervalPicture(int Height, IReadOnlyList<PictureRow> Row
         EffectFigures effect = exclusion.PartialRSquared;
         int baseline = Top + (index * RowHeight);
         return new(
-            Shortened(exclusion.Group), exclusion.Group, VerdictWords.Of(exclusion), baseline + 14, baseline + 30,
+            ShortName.Of(exclusion.Group, LongestName), exclusion.Group, VerdictWords.Of(exclusion), baseline + 14, baseline + 30,
             Across(effect.Estimate!.Value, end), Span(effect.Lower, effect.Upper, end), Span(effect.BasisLower, effect.BasisUpper, end),
             Against(effect, exclusion.Negligible.Bound));
     }
@@ -76,12 +76,6 @@ internal sealed record IntervalPicture(int Height, IReadOnlyList<PictureRow> Row
 
     private static string Across(double value, double end) =>
         (Left + ((Right - Left) * Math.Sqrt(Math.Clamp(value / end, 0, 1)))).ToString("0.##", CultureInfo.InvariantCulture) + "%";
-
-    private static string Shortened(string name)
-    {
-        var text = new StringInfo(name);
-        return text.LengthInTextElements <= LongestName ? name : text.SubstringByTextElements(0, LongestName - 1).TrimEnd() + "…";
-    }
 }
 
 /// <param name="NameAt">Baseline of the name, in pixels from the top.</param>

@@ -16,7 +16,7 @@ internal static class PictureLabels
         var labels = new List<PictureLabel>();
         foreach (var point in named)
         {
-            bool leftOf = x.At(point.X) > (ResidualPicture.Left + ResidualPicture.Right) / 2.0;
+            bool leftOf = x.At(point.X) > (Picture.Left + Picture.Right) / 2.0;
             double height = Free(y.At(point.Y) + 4, heights);
             heights.Add(height);
             labels.Add(new(PicturePath.Place(x.At(point.X) + (leftOf ? -Gap : Gap)), PicturePath.Place(height), leftOf ? "end" : "start", Text(point), "row"));
@@ -26,15 +26,11 @@ internal static class PictureLabels
     }
 
     /// <summary>The row's label, or its number in the source.</summary>
-    public static string Text(NamedPoint point)
-    {
-        var text = new StringInfo(point.Label ?? "row " + point.Row.ToString(CultureInfo.InvariantCulture));
-        return text.LengthInTextElements <= Longest ? text.String : text.SubstringByTextElements(0, Longest - 1) + "…";
-    }
+    public static string Text(NamedPoint point) => ShortName.Of(point.Label ?? "row " + point.Row.ToString(CultureInfo.InvariantCulture), Longest);
 
     /// <summary>The nearest height to the wished one that is a line away from all taken ones, within the ruled part.</summary>
     private static double Free(double wish, List<double> taken) => Enumerable.Range(0, 2 * (taken.Count + 1))
         .SelectMany(step => new[] { wish + (step * LineHeight), wish - (step * LineHeight) })
-        .Where(height => height is >= ResidualPicture.Top + 8 and <= ResidualPicture.Bottom)
+        .Where(height => height is >= Picture.Top + 8 and <= Picture.Bottom)
         .FirstOrDefault(height => taken.All(other => Math.Abs(other - height) >= LineHeight - 0.01), wish);
 }

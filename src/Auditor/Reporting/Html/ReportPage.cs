@@ -1,4 +1,5 @@
 using System.Globalization;
+using Auditor.Results;
 
 namespace Auditor.Reporting.Html;
 
@@ -6,10 +7,13 @@ namespace Auditor.Reporting.Html;
 internal sealed record ReportPage(AuditRecord Record)
 {
     private const double UsualSignificance = 0.05;
+    private const double UsualPower = 0.8;
 
     public double Level { get; } = Record.Policy.TryGetValue("significance", out object? value)
         ? Convert.ToDouble(value, CultureInfo.InvariantCulture)
         : UsualSignificance;
+
+    private double Power => Record.Policy.TryGetValue("power", out object? value) ? Convert.ToDouble(value, CultureInfo.InvariantCulture) : UsualPower;
 
     public string Title => Record.Model.Title ?? Record.Model.Id;
 
@@ -21,7 +25,7 @@ internal sealed record ReportPage(AuditRecord Record)
 
     public string Interval => NumberText.Percent(1 - (2 * Level));
 
-    public IReadOnlyList<ExclusionPage> Exclusions => [.. Record.Exclusions.Select((exclusion, index) => ExclusionPage.Numbered(exclusion, index, Level))];
+    public IReadOnlyList<ExclusionPage> Exclusions => [.. Record.Exclusions.Select(Page)];
 
     public IntervalPicture? Picture => IntervalPicture.Of(Record.Exclusions);
 
@@ -37,7 +41,7 @@ internal sealed record ReportPage(AuditRecord Record)
 
     public IReadOnlyList<CheckConsequence> Consequences => CheckConsequence.Of(Record);
 
-    public IReadOnlyList<ResidualPicture> ResidualPictures => Html.ResidualPictures.Of(Record, Level);
+    public IReadOnlyList<Picture> ResidualPictures => Html.ResidualPictures.Of(Record, Level);
 
     public ReportTable Influence => AuditTables.Influence(Record.Influence);
 
@@ -61,6 +65,15 @@ internal sealed record ReportPage(AuditRecord Record)
 
     /// <summary>The words that make this page again, quoted for a shell.</summary>
     public string Command => string.Create(CultureInfo.InvariantCulture, $"./run-audit.sh {Quoted(Record.Provenance.Declaration)} --seed {Record.Provenance.Seed}");
+
+    private ExclusionPage Page(Exclusion exclusion, int index)
+    {
+        var page = ExclusionPage.Numbered(exclusion, index, Level);
+        return page with
+        {
+            Pictures = ExclusionPictures.Of(exclusion, Record.Plots?.Groups.ElementAtOrDefault(index), page.Anchor, Power, Record.Plots?.Plots?.Weighted ?? false),
+        };
+    }
 
     private string? ShippedNote(string name) =>
         Record.PolicyOverridden.TryGetValue(name, out object? shipped) ? "shipped: " + PolicyCell(shipped).Text : null;

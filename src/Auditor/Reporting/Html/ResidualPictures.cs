@@ -5,9 +5,7 @@ namespace Auditor.Reporting.Html;
 /// <summary>The four pictures of the final model's residuals.</summary>
 internal static class ResidualPictures
 {
-    private const string Units = ", in units of the response";
-
-    public static IReadOnlyList<ResidualPicture> Of(AuditRecord record, double level)
+    public static IReadOnlyList<Picture> Of(AuditRecord record, double level)
     {
         if (record.Plots?.Plots is not { } plots)
         {
@@ -18,22 +16,21 @@ internal static class ResidualPictures
         return [Fitted(plots, findings), Normal(plots.Normal, findings), Scale(plots, findings), Leverage(plots, findings)];
     }
 
-    private static ResidualPicture Fitted(ResidualPlots plots, CheckFindings findings)
+    private static Picture Fitted(ResidualPlots plots, CheckFindings findings)
     {
         var (cloud, zero) = (plots.Fitted, 0.0);
-        var x = ResidualPicture.Horizontal(cloud.Points.Select(point => point.X));
-        var y = ResidualPicture.Vertical(cloud.Points.Select(point => point.Y).Append(zero));
-        string residual = plots.Weighted ? "Residual times the root of its weight" : "Residual";
+        var x = Picture.Horizontal(cloud.Points.Select(point => point.X));
+        var y = Picture.Vertical(cloud.Points.Select(point => point.Y).Append(zero));
         return new(
             "residuals-fitted", "Residuals against fitted values", findings.Title(CheckFindings.Form), findings.Evidence(CheckFindings.Form),
-            (Dots(cloud) + Trend(cloud, "mean residual")).Trim(), "Fitted value" + Units, residual + Units,
-            x, y, [Level(zero, x, y), .. Cloud(cloud, x, y)], []);
+            (PictureParts.Dots(cloud) + Trend(cloud, "mean residual")).Trim(), "Fitted value" + PictureParts.Units, PictureParts.Residual(plots.Weighted),
+            x, y, [PictureParts.Level(zero, x, y), .. PictureParts.Cloud(cloud, x, y)], []);
     }
 
-    private static ResidualPicture Normal(NormalPlot plot, CheckFindings findings)
+    private static Picture Normal(NormalPlot plot, CheckFindings findings)
     {
-        var x = ResidualPicture.Horizontal(plot.Points.Select(point => point.Z));
-        var y = ResidualPicture.Vertical(plot.Points.SelectMany(point => new[] { point.Residual, point.Lower, point.Upper }));
+        var x = Picture.Horizontal(plot.Points.Select(point => point.Z));
+        var y = Picture.Vertical(plot.Points.SelectMany(point => new[] { point.Residual, point.Lower, point.Upper }));
         var dots = plot.Points.Select(point => new PlotPoint(point.Z, point.Residual, 1));
         string shown = plot.Points.Count < plot.N ? $"{NumberText.Count(plot.Points.Count)} of the {NumberText.Count(plot.N)} residuals in order, both ends whole. " : "";
         return new(
@@ -51,31 +48,31 @@ internal static class ResidualPictures
             []);
     }
 
-    private static ResidualPicture Scale(ResidualPlots plots, CheckFindings findings)
+    private static Picture Scale(ResidualPlots plots, CheckFindings findings)
     {
         var cloud = plots.Scale;
-        var x = ResidualPicture.Horizontal(cloud.Points.Select(point => point.X));
-        var y = ResidualPicture.Vertical(cloud.Points.Select(point => point.Y).Append(0));
+        var x = Picture.Horizontal(cloud.Points.Select(point => point.X));
+        var y = Picture.Vertical(cloud.Points.Select(point => point.Y).Append(0));
         return new(
             "residuals-scale", "Scale against fitted values", findings.Title(CheckFindings.EqualVariance), findings.Evidence(CheckFindings.EqualVariance),
-            (Dots(cloud) + Trend(cloud, "mean height; level when the spread is equal")).Trim(), "Fitted value" + Units, "Root of the absolute studentised residual",
-            x, y, Cloud(cloud, x, y), []);
+            (PictureParts.Dots(cloud) + Trend(cloud, "mean height; level when the spread is equal")).Trim(), "Fitted value" + PictureParts.Units, "Root of the absolute studentised residual",
+            x, y, PictureParts.Cloud(cloud, x, y), []);
     }
 
-    private static ResidualPicture Leverage(ResidualPlots plots, CheckFindings findings)
+    private static Picture Leverage(ResidualPlots plots, CheckFindings findings)
     {
         var cloud = plots.Leverage;
         // A named row may have gone into a cell of the grid: it is drawn again, at its own place.
         var named = plots.Named.Select(point => (point.X, point.Y)).ToList();
-        var x = ResidualPicture.Horizontal(cloud.Points.Select(point => point.X).Concat(named.Select(point => point.X)).Append(0).Append(plots.HighLeverage));
-        var y = ResidualPicture.Vertical(cloud.Points.Select(point => point.Y).Concat(named.Select(point => point.Y)).Append(0));
+        var x = Picture.Horizontal(cloud.Points.Select(point => point.X).Concat(named.Select(point => point.X)).Append(0).Append(plots.HighLeverage));
+        var y = Picture.Vertical(cloud.Points.Select(point => point.Y).Concat(named.Select(point => point.Y)).Append(0));
         var high = PicturePath.Line("bound", [(plots.HighLeverage, y.Low), (plots.HighLeverage, y.High)], x, y);
         return new(
             "residuals-leverage", "Leverage against studentised residuals", LeverageTitle(plots),
             (LargestByCook(plots.Named) + " " + findings.Evidence(CheckFindings.Outlier) + LeverageOne(plots.LeverageOne)).Trim(),
-            Dots(cloud) + $"Dashed: leverage {NumberText.Share(plots.HighLeverage)}, twice the mean (common practice). Named: the largest Cook’s distances.",
+            PictureParts.Dots(cloud) + $"Dashed: leverage {NumberText.Share(plots.HighLeverage)}, twice the mean (common practice). Named: the largest Cook’s distances.",
             "Leverage", "Studentised residual",
-            x, y, [Level(0, x, y), high, .. Cloud(cloud, x, y), PicturePath.Marks("dot named", named, x, y)], PictureLabels.Of(plots.Named, x, y));
+            x, y, [PictureParts.Level(0, x, y), high, .. PictureParts.Cloud(cloud, x, y), PicturePath.Marks("dot named", named, x, y)], PictureLabels.Of(plots.Named, x, y));
     }
 
     private static string LeverageTitle(ResidualPlots plots) => plots.AboveHighLeverage switch
@@ -97,17 +94,5 @@ internal static class ResidualPictures
         _ => $" {NumberText.Count(rows)} rows through which the fit passes have no studentised residual and are not drawn.",
     };
 
-    private static string Dots(PointCloud cloud) => cloud.Binned
-        ? $"{NumberText.Count(cloud.Rows)} rows: a larger dot stands for up to 10, up to 100 or more of them; the outermost stand alone. "
-        : "";
-
     private static string Trend(PointCloud cloud, string what) => cloud.Trend.Count > 0 ? $"Line: {what} over runs of rows with like fitted values." : "";
-
-    private static PicturePath Level(double value, PictureAxis x, PictureAxis y) => PicturePath.Line("level", [(x.Low, value), (x.High, value)], x, y);
-
-    private static IReadOnlyList<PicturePath> Cloud(PointCloud cloud, PictureAxis x, PictureAxis y)
-    {
-        var dots = PicturePath.Dots(cloud.Points, x, y);
-        return cloud.Trend.Count > 0 ? [.. dots, PicturePath.Line("trend", cloud.Trend.Select(point => (point.X, point.Y)), x, y)] : dots;
-    }
 }

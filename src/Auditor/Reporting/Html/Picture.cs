@@ -1,11 +1,11 @@
 namespace Auditor.Reporting.Html;
 
-/// <summary>One picture of the residuals, laid out; the page scales it to the room there is.</summary>
+/// <summary>One picture with two axes, laid out; the page scales it to the room there is.</summary>
 /// <param name="Title">What it shows here.</param>
 /// <param name="Finding">The numbers behind the title.</param>
 /// <param name="Reading">How to read the picture.</param>
 /// <param name="Paths">From back to front.</param>
-internal sealed record ResidualPicture(
+internal sealed record Picture(
     string Anchor, string Name, string Title, string Finding, string Reading, string Across, string Up,
     PictureAxis X, PictureAxis Y, IReadOnlyList<PicturePath> Paths, IReadOnlyList<PictureLabel> Labels)
 {
