@@ -61,6 +61,7 @@ public static class Audit
     {
         PolicyOverridden = inputs.Policy.Overridden,
         Plots = results.Plots,
+        WhatIf = results.WhatIf,
     };
 
     private static ModelInfo Model(ModelDeclaration declaration) => new(

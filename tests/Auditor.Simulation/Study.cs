@@ -64,8 +64,8 @@ internal sealed class Study(Policies policies, ulong seed, int draws, IProgress<
 
     private IEnumerable<Event> Events(GroupFit fit, double effect)
     {
-        var robust = new GroupEvidence(fit, policies.Hc3, sampling: false);
-        TestResult[] tests = [robust.Classical, .. robust.Hc, robust.Score];
+        var robust = Evidence(fit, policies.Hc3);
+        TestResult[] tests = [robust.Tests.Classical, .. robust.Tests.Hc, robust.Tests.Score];
         for (var t = 0; t < tests.Length; t++)
         {
             if (tests[t].P <= policies.Hc3.Significance)
@@ -79,7 +79,7 @@ internal sealed class Study(Policies policies, ulong seed, int draws, IProgress<
             yield return Event.SupportedOnHc3;
         }
 
-        if (IsSupported(new GroupEvidence(fit, policies.Classical, sampling: false), policies.Classical))
+        if (IsSupported(Evidence(fit, policies.Classical), policies.Classical))
         {
             yield return Event.SupportedOnClassical;
         }
@@ -94,6 +94,8 @@ internal sealed class Study(Policies policies, ulong seed, int draws, IProgress<
             yield return Event.ClassicalIntervalCovers;
         }
     }
+
+    private static GroupEvidence Evidence(GroupFit fit, Policy policy) => new(new GroupResults(fit, policy.BasisWithoutStructure, sampling: false), policy);
 
     private static bool IsSupported(GroupEvidence evidence, Policy policy) =>
         Judgement.OfFamily([new JudgedGroup(evidence, null)], policy)[0].Verdict == Verdicts.Supported;

@@ -16,7 +16,7 @@ internal static class AllLeftOut
             return null;
         }
 
-        var evidence = common?.Joint is { } joint ? new GroupEvidence(joint, policy, sampling) : null;
+        var evidence = common?.Joint is { } joint ? new GroupEvidence(new GroupResults(joint, policy.BasisWithoutStructure, sampling), policy) : null;
         var judgement = Judgement.OfFamily([new JudgedGroup(evidence, ProductsElsewhere.OfAll(model) is [var product, ..] ? product : null)], policy)[0];
         var terms = model.Groups.SelectMany(group => group.Terms).Select(term => term.Term.Label);
         var identity = new GroupIdentity(Name, [.. terms], null, null);

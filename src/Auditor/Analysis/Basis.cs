@@ -13,6 +13,9 @@ namespace Auditor.Analysis;
 /// <param name="EffectiveRows">Null when the test has no value.</param>
 internal sealed record Basis(string Name, string Reason, TestResult Test, EffectiveRows? EffectiveRows)
 {
+    /// <summary>The F of the same covariance without the null imposed: intervals, power and the negligible-effect test rest on it. Null when there is none.</summary>
+    public FTest? Wald => Test as FTest;
+
     public const string Classical = "classical";
     public const string Hc3 = "hc3";
 

@@ -84,12 +84,12 @@ internal static class ExclusionFigures
     {
         TestFigures? Figure(string name, TestResult? result) => TestFigure.Of(result ?? TestResult.None(Impediment.NoRows), name, notComputed);
         return new GroupTests(
-            Figure("classical", evidence?.Classical),
-            Figure("hc0", evidence?.Hc[0]),
-            Figure("hc1", evidence?.Hc[1]),
-            Figure("hc2", evidence?.Hc[2]),
-            Figure("hc3", evidence?.Hc[3]),
-            Figure("score", evidence?.Score) is { } score ? score with { CeilingP = evidence!.Ceiling.P } : null,
+            Figure("classical", evidence?.Tests.Classical),
+            Figure("hc0", evidence?.Tests.Hc[0]),
+            Figure("hc1", evidence?.Tests.Hc[1]),
+            Figure("hc2", evidence?.Tests.Hc[2]),
+            Figure("hc3", evidence?.Tests.Hc[3]),
+            Figure("score", evidence?.Tests.Score) is { } score ? score with { CeilingP = evidence!.Tests.Ceiling.P } : null,
             null,
             null,
             null,
@@ -128,7 +128,7 @@ internal static class ExclusionFigures
         model is null ? null : sampling ? TestResult.None(Impediment.SamplingWeights) : test(model);
 
     private static EffectFigures Effect(GroupEvidence? evidence, Dictionary<string, string> why) => new(
-        evidence?.PartialRSquared,
+        evidence?.Tests.PartialRSquared,
         evidence?.ClassicalInterval?.Lower,
         evidence?.ClassicalInterval?.Upper,
         evidence?.BasisInterval?.Lower,

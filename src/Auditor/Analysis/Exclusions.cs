@@ -10,13 +10,14 @@ namespace Auditor.Analysis;
 /// </summary>
 internal static class Exclusions
 {
-    public static IReadOnlyList<Exclusion> Of(BoundModel model, ModelFits fits, Policy policy, bool sampling)
+    /// <param name="whatIf">Whether verdicts at other levels and bounds are wanted.</param>
+    public static JudgedExclusions Of(BoundModel model, ModelFits fits, Policy policy, bool sampling, bool whatIf)
     {
         var groups = Enumerable.Range(0, model.Groups.Count).ToArray();
         var own = OnRows(model, groups, fits.Own, policy, sampling);
         var common = OnRows(model, groups, _ => fits.Common, policy, sampling);
         var (main, other) = policy.RowSet == RowSet.Own ? (own, common) : (common, own);
-        return [.. groups.Select(group =>
+        IReadOnlyList<Exclusion> exclusions = [.. groups.Select(group =>
         {
             var sameRows = fits.Selection.Own[group].Equals(fits.Selection.Common);
             return ExclusionFigures.Of(
@@ -28,13 +29,14 @@ internal static class Exclusions
                 policy,
                 sampling);
         })];
+        return new JudgedExclusions(exclusions, whatIf ? OtherThresholds.Of([.. main.Select(group => group.Judgement.Group)], policy) : null);
     }
 
     private static List<(Judgement Judgement, RowSetFit? Rows)> OnRows(
         BoundModel model, int[] groups, Func<int, RowSetFit?> rows, Policy policy, bool sampling)
     {
         var judged = groups.Select(group => new JudgedGroup(
-            rows(group) is { } fit ? new GroupEvidence(fit[group], policy, sampling) : null,
+            rows(group) is { } fit ? new GroupEvidence(new GroupResults(fit[group], policy.BasisWithoutStructure, sampling), policy) : null,
             ProductsElsewhere.Of(model, group) is [var product, ..] ? product : null)).ToList();
         return [.. Judgement.OfFamily(judged, policy).Select((judgement, group) => (judgement, rows(group)))];
     }
@@ -42,3 +44,6 @@ internal static class Exclusions
     private static GroupIdentity Identity(BoundGroup group) => new(
         group.Declared.Name, [.. group.Terms.Select(term => term.Term.Label)], group.Declared.Because, group.Declared.Line);
 }
+
+/// <param name="WhatIf">Null when it was not asked for.</param>
+internal sealed record JudgedExclusions(IReadOnlyList<Exclusion> All, WhatIf? WhatIf);

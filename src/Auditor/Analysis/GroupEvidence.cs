@@ -4,56 +4,43 @@ using Auditor.Policies;
 
 namespace Auditor.Analysis;
 
-/// <summary>All tests and effect figures of one group on one row set, before adjustment and verdict.</summary>
+/// <summary>What the tests of one group on one row set say under one policy's level, bound and power, before adjustment and verdict.</summary>
 internal sealed class GroupEvidence
 {
-    public GroupEvidence(GroupFit fit, Policy policy, bool sampling)
+    private readonly Policy _policy;
+    private readonly Lazy<EffectInterval?> _basisInterval;
+    private readonly Lazy<double?> _negligibleP;
+    private readonly Lazy<PowerEstimate?> _power;
+
+    public GroupEvidence(GroupResults tests, Policy policy)
     {
-        Fit = fit;
-        var partial = PartialF.Of(fit.Added);
-        Classical = sampling && partial is not NotComputable ? TestResult.None(Impediment.SamplingWeights) : partial;
-        Hc = [.. Enum.GetValues<Heteroskedastic>().Select(estimator => WaldF.Of(fit.Added, fit.Sums, estimator))];
-        Score = ScoreF.Of(fit.Added, fit.Sums);
-        Ceiling = ScoreF.Ceiling(fit.Added, fit.Sums);
-        Basis = Basis.Of(fit, Classical, Hc[(int)Heteroskedastic.Hc3], policy.BasisWithoutStructure, sampling);
-        ClassicalInterval = Classical is FTest f
-            ? EffectInterval.Of(f, EffectiveRows.Classical(f.Df1, f.Df2), policy.Significance)
-            : null;
-        if (Basis is { Test: FTest wald, EffectiveRows: { } rows })
-        {
-            BasisInterval = EffectInterval.Of(wald, rows, policy.Significance);
-            NegligibleP = NegligibleEffect.P(wald, rows, policy.NegligiblePartialRSquared);
-            Power = PowerEstimate.Of(fit, wald, rows, policy);
-        }
+        Tests = tests;
+        _policy = policy;
+        var (wald, rows) = (tests.Basis.Wald, tests.Basis.EffectiveRows);
+        _basisInterval = new(() => wald is null || rows is null ? null : EffectInterval.Of(wald, rows, policy.Significance));
+        _negligibleP = new(() => wald is null || rows is null ? null : NegligibleEffect.P(wald, rows, policy.NegligiblePartialRSquared));
+        _power = new(() => wald is null || rows is null ? null : PowerEstimate.Of(Fit, wald, rows, policy));
     }
 
-    public GroupFit Fit { get; }
+    public GroupResults Tests { get; }
 
-    public TestResult Classical { get; }
+    public GroupFit Fit => Tests.Fit;
 
-    /// <summary>HC0 to HC3, in that order.</summary>
-    public IReadOnlyList<TestResult> Hc { get; }
+    public Basis Basis => Tests.Basis;
 
-    public TestResult Score { get; }
+    public EffectInterval? ClassicalInterval => Tests.Classical is FTest f
+        ? EffectInterval.Of(f, EffectiveRows.Classical(f.Df1, f.Df2), _policy.Significance)
+        : null;
 
-    public TestResult Ceiling { get; }
-
-    public Basis Basis { get; }
-
-    public EffectInterval? ClassicalInterval { get; }
-
-    public EffectInterval? BasisInterval { get; }
+    public EffectInterval? BasisInterval => _basisInterval.Value;
 
     /// <summary>p of the null that the partial R² is at least the policy's bound.</summary>
-    public double? NegligibleP { get; }
+    public double? NegligibleP => _negligibleP.Value;
 
-    public PowerEstimate? Power { get; }
+    public PowerEstimate? Power => _power.Value;
 
-    /// <summary>Share of the residual sum of squares that the group takes out; null when nothing is left to take.</summary>
-    public double? PartialRSquared =>
-        Classical is NotComputable { Why: not Impediment.SamplingWeights } || Fit.Added.RssWithout <= 0
-            ? null
-            : Fit.Added.SumOfSquares / Fit.Added.RssWithout;
+    /// <summary>The same tests under another level, bound or power.</summary>
+    public GroupEvidence Under(Policy policy) => new(Tests, policy);
 }
 
 /// <summary>Power at the policy's bound, the f² that the policy's power finds, the rows needed to find the bound.</summary>

@@ -9,8 +9,13 @@ namespace Auditor.Analysis;
 /// <param name="Adjusted">Adjusted p of the basis test; null when there is no p.</param>
 /// <param name="NegligiblePAdjusted">Adjusted p of the negligible-effect test, which has a family of its own.</param>
 internal sealed record Judgement(
-    GroupEvidence? Evidence, PValue? Adjusted, double? NegligiblePAdjusted, string Verdict, string Materiality, string Reason)
+    JudgedGroup Group, PValue? Adjusted, double? NegligiblePAdjusted, string Verdict, string Materiality, Policy Policy)
 {
+    public GroupEvidence? Evidence => Group.Evidence;
+
+    /// <summary>What the verdict rests on, in a sentence.</summary>
+    public string Reason => VerdictReason.Of(this, Group.ProductElsewhere, Policy);
+
     /// <summary>The only test of its family: adjustment changes nothing.</summary>
     public bool Alone { get; init; }
 
@@ -37,8 +42,7 @@ internal sealed record Judgement(
             _ => Verdicts.Inconclusive,
         };
         var materiality = MaterialityOf(group.Evidence?.BasisInterval, policy.NegligiblePartialRSquared);
-        var judgement = new Judgement(group.Evidence, adjusted, negligible?.P, verdict, materiality, "") { Alone = alone };
-        return judgement with { Reason = VerdictReason.Of(judgement, group.ProductElsewhere, policy) };
+        return new Judgement(group, adjusted, negligible?.P, verdict, materiality, policy) { Alone = alone };
     }
 
     private static string MaterialityOf(EffectInterval? interval, double bound) => interval switch
@@ -50,4 +54,7 @@ internal sealed record Judgement(
 }
 
 /// <param name="ProductElsewhere">A product outside the group that holds one of its terms; null when there is none.</param>
-internal sealed record JudgedGroup(GroupEvidence? Evidence, string? ProductElsewhere);
+internal sealed record JudgedGroup(GroupEvidence? Evidence, string? ProductElsewhere)
+{
+    public JudgedGroup Under(Policy policy) => this with { Evidence = Evidence?.Under(policy) };
+}

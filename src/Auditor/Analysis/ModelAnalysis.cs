@@ -25,19 +25,23 @@ internal static class ModelAnalysis
         var fit = CheckedFits.Of(model, main, fits.Residuals, sampling);
         var influence = InfluenceSummary.Of(fit, InfluenceFigures.Shown);
         var other = selection.Final.Equals(selection.Common) ? null : common ? fits.Final : fits.Common;
+        var exclusions = Exclusions.Of(model, fits, policy, sampling, whatIf: run.Pictures);
         return Reading<AuditResults>.Of(new AuditResults(
             declaration.Model.Id,
             selection.Account(common, mentioned),
             FitFigures.Of(main, policy.Significance, sampling),
             other is null ? null : FitFigures.Of(other, policy.Significance, sampling),
             main.Fit.Perfect,
-            Exclusions.Of(model, fits, policy, sampling),
+            exclusions.All,
             [.. Enumerable.Range(0, model.Groups.Count).Select(group => Inputs(model, fits, group, common))],
             AllLeftOut.Of(model, fits.Common, policy, sampling),
             ResidualCheckFigures.Of(fit, influence, main.Rows, policy.Significance, run.Seed),
             InfluenceFigures.Of(influence, main.Rows, model.RowLabel),
             CollinearityFigures.Of(main),
-            run.Pictures ? Pictures(model, fits, fit, main, common) : new PlotData(null, "no pictures were asked for")));
+            run.Pictures ? Pictures(model, fits, fit, main, common) : new PlotData(null, "no pictures were asked for"))
+        {
+            WhatIf = exclusions.WhatIf,
+        });
     }
 
     private static PlotData Pictures(BoundModel model, ModelFits fits, CheckedFit fit, RowSetFit main, bool common) =>

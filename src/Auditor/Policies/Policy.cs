@@ -73,6 +73,23 @@ public sealed record Policy
     /// <summary>Every name in the order of the file.</summary>
     public IReadOnlyList<string> Names => [.. _values.Keys];
 
+    /// <summary>The same with another level and bound, to see what would follow from them.</summary>
+    internal Policy With(double significance, double bound)
+    {
+        var values = new OrderedDictionary<string, PolicyValue>(_values.Count, StringComparer.Ordinal);
+        foreach (var (name, value) in _values)
+        {
+            values.Add(name, name switch
+            {
+                PolicyNames.Significance => value with { Number = significance },
+                PolicyNames.NegligiblePartialRSquared => value with { Number = bound },
+                _ => value,
+            });
+        }
+
+        return new Policy(values);
+    }
+
     public bool TryGet(string name, [NotNullWhen(true)] out PolicyValue? value) => _values.TryGetValue(name, out value);
 
     private double Number(string name) => _values[name].Number!.Value;

@@ -31,6 +31,10 @@ public sealed record AuditRecord(
     /// <summary>Points of the pictures: a way of showing the residuals, not a figure, and so not in the JSON record. Null in a record that was made without them.</summary>
     [JsonIgnore]
     public PlotData? Plots { get; init; }
+
+    /// <summary>Verdicts at other levels and bounds: for readers of the page. Null in a record that was made without them.</summary>
+    [JsonIgnore]
+    public WhatIf? WhatIf { get; init; }
 }
 
 /// <param name="Response">The response's label.</param>

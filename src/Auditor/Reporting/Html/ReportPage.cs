@@ -4,7 +4,7 @@ using Auditor.Results;
 namespace Auditor.Reporting.Html;
 
 /// <summary>All that the templates see: the record, and beside it what is made of it for readers.</summary>
-internal sealed record ReportPage(AuditRecord Record)
+internal sealed record ReportPage(AuditRecord Record, PageScript Script)
 {
     private const double UsualSignificance = 0.05;
     private const double UsualPower = 0.8;
@@ -28,6 +28,9 @@ internal sealed record ReportPage(AuditRecord Record)
     public IReadOnlyList<ExclusionPage> Exclusions => [.. Record.Exclusions.Select(Page)];
 
     public IntervalPicture? Picture => IntervalPicture.Of(Record.Exclusions);
+
+    /// <summary>Verdicts at other levels and bounds, as JSON; null when there are none to try.</summary>
+    public Markup? WhatIf => WhatIfValues.Of(Record);
 
     public ExclusionPage? Jointly => Record.AllLeftOut is { } all ? ExclusionPage.Of(all, "all-left-out", Level) : null;
 

@@ -5,9 +5,11 @@ namespace Auditor.Reporting.Html;
 /// <summary>A verdict in a word and by the id of its shape: never by colour alone.</summary>
 internal sealed record VerdictWords(string Word, string Shape)
 {
-    public static VerdictWords Of(Exclusion exclusion) => RejectedButNegligible(exclusion)
+    public static VerdictWords Of(Exclusion exclusion) => Of(exclusion.Verdict, exclusion.Materiality);
+
+    public static VerdictWords Of(string verdict, string materiality) => RejectedButNegligible(verdict, materiality)
         ? new("Rejected, but negligible", "rejected-negligible")
-        : new(WordOf(exclusion.Verdict), exclusion.Verdict.Replace('_', '-'));
+        : new(WordOf(verdict), verdict.Replace('_', '-'));
 
     public static string WordOf(string verdict) => verdict switch
     {
@@ -18,8 +20,7 @@ internal sealed record VerdictWords(string Word, string Shape)
         _ => throw new ArgumentOutOfRangeException(nameof(verdict), verdict, "not a verdict"),
     };
 
-    public static bool RejectedButNegligible(Exclusion exclusion) =>
-        exclusion is { Verdict: Verdicts.NotSupported, Materiality: Materialities.ShownNegligible };
+    public static bool RejectedButNegligible(Exclusion exclusion) => RejectedButNegligible(exclusion.Verdict, exclusion.Materiality);
 
     public static bool Contradicted(Exclusion exclusion) =>
         exclusion.Verdict == Verdicts.NotSupported && !RejectedButNegligible(exclusion);
@@ -31,4 +32,7 @@ internal sealed record VerdictWords(string Word, string Shape)
         Materialities.NotShown => "Size not settled",
         _ => throw new ArgumentOutOfRangeException(nameof(materiality), materiality, "not a materiality"),
     };
+
+    private static bool RejectedButNegligible(string verdict, string materiality) =>
+        verdict == Verdicts.NotSupported && materiality == Materialities.ShownNegligible;
 }
