@@ -65,6 +65,7 @@ internal static class ExclusionFigures
             rows is null || added is null ? [] : [.. added.NearlyAliased.Select(near => new NearlyAliasedColumn(rows.Plan.Labels[near.Column], near.DigitsLost))])
         {
             PowerCurve = judgement.Verdict == Verdicts.Inconclusive ? PowerCurves.Of(evidence, policy) : [],
+            InShort = judgement.InShort,
             Because = identity.Because,
             Line = identity.Line,
             Why = evidence?.Basis.Test is FTest && evidence.Basis.EffectiveRows is not null ? new Dictionary<string, string>() : why,

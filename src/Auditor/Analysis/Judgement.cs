@@ -16,6 +16,9 @@ internal sealed record Judgement(
     /// <summary>What the verdict rests on, in a sentence.</summary>
     public string Reason => VerdictReason.Of(this, Group.ProductElsewhere, Policy);
 
+    /// <summary>The same for who reads nothing else.</summary>
+    public string InShort => VerdictInShort.Of(this);
+
     /// <summary>The only test of its family: adjustment changes nothing.</summary>
     public bool Alone { get; init; }
 

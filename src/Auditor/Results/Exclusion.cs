@@ -35,6 +35,9 @@ public sealed record Exclusion(
     IReadOnlyList<AliasedColumn> Aliased,
     IReadOnlyList<NearlyAliasedColumn> NearlyAliased)
 {
+    /// <summary>The verdict's reason for who reads nothing else: a short sentence.</summary>
+    public string InShort { get; init; } = "";
+
     /// <summary>The author's reason as declared; null when none was given.</summary>
     public string? Because { get; init; }
 

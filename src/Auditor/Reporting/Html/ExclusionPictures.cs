@@ -31,7 +31,7 @@ internal static class ExclusionPictures
     {
         var x = Picture.Horizontal(plot.Cloud.Points.Select(point => point.X).Append(0));
         var y = Picture.Vertical(plot.Cloud.Points.Select(point => point.Y).Append(0));
-        string share = exclusion.PartialRSquared.Estimate is double estimate ? NumberText.Share(estimate) : "an unknown share";
+        string share = exclusion.PartialRSquared.Estimate is double estimate ? NumberText.Share(100 * estimate) + "\u00A0%" : "an unknown share";
         string across = plot.Column is { } column
             ? $"{ShortName.Of(column, LongestName)}, less what the final model explains of it"
             : "What the group’s columns add to the fit" + PictureParts.Units;
@@ -40,7 +40,7 @@ internal static class ExclusionPictures
             : $"The line’s slope, {NumberText.Number(plot.Slope)}, is the coefficient that the column would get.";
         return new(
             anchor + "-added", "What the group adds", $"It takes up {share} of the variation that is left over",
-            $"Partial R² {share} on {NumberText.Count(plot.Cloud.Rows)} rows.",
+            $"That share is the partial R², on {NumberText.Count(plot.Cloud.Rows)} rows.",
             PictureParts.Dots(plot.Cloud) + slope + " Dots far to the side weigh most.",
             across, PictureParts.Residual(weighted), x, y,
             [PictureParts.Level(0, x, y), .. PictureParts.Cloud(plot.Cloud, x, y), PictureParts.Through(plot.Slope, x, y)], []);

@@ -4,23 +4,17 @@ using Auditor.Results;
 namespace Auditor.Reporting.Html;
 
 /// <summary>
-/// Where everything lies in the picture of partial R². Across, positions are shares of the width, so that the picture fits any width with its letters at their own
-/// size; down, they are pixels. The axis is a square-root one: 0.01 and 0.3 are then both readable, and zero has a place.
+/// Where everything lies in the picture of partial R², a strip beside each exclusion's line and one axis below. Positions are shares of the width, so that the
+/// picture fits any width with its letters at their own size. The axis is a square-root one: 0.01 and 0.3 are then both readable, and zero has a place.
 /// </summary>
-internal sealed record IntervalPicture(int Height, IReadOnlyList<PictureRow> Rows, IReadOnlyList<PictureTick> Ticks, string Bound, Cell BoundText, bool Classical)
+/// <param name="Rows">One for each exclusion; null where there is no effect to draw.</param>
+/// <param name="Classical">Some row shows a classical interval.</param>
+internal sealed record IntervalPicture(IReadOnlyList<PictureRow?> Rows, IReadOnlyList<PictureTick> Ticks, string Bound, Cell BoundText, bool Classical)
 {
-    public const int RowHeight = 46;
-    private const int Top = 40;
-    private const int Bottom = 30;
-    private const int LongestName = 38;
     private const double Left = 2;
     private const double Right = 98;
-    private static readonly double[] Candidates = [0, 0.001, 0.01, 0.03, 0.1, 0.2, 0.3, 0.5, 0.7, 1];
-
-    /// <summary>Bottom of the ruled part.</summary>
-    public int Floor => Height - Bottom;
-
-    public int TickText => Height - 10;
+    private const double LeastApart = 0.13;
+    private static readonly double[] Candidates = [0, 0.1, 0.3, 1, 0.03, 0.001, 0.01, 0.5, 0.2, 0.7];
 
     /// <summary>Null when no group has an effect to draw.</summary>
     public static IntervalPicture? Of(IReadOnlyList<Exclusion> exclusions)
@@ -34,28 +28,40 @@ internal sealed record IntervalPicture(int Height, IReadOnlyList<PictureRow> Row
         double bound = drawn[0].Negligible.Bound;
         double end = Math.Min(1, 1.06 * drawn.SelectMany(Ends).Append(bound * 2).Max());
         return new(
-            Top + (drawn.Length * RowHeight) + Bottom,
-            [.. drawn.Select((exclusion, index) => Row(exclusion, index, end))],
-            [.. Candidates.Where(value => value <= end && value != bound).Select(value => new PictureTick(Across(value, end), NumberText.Plain(value)))],
+            [.. exclusions.Select(exclusion => exclusion.PartialRSquared.Estimate is double estimate ? Row(exclusion, estimate, end) : null)],
+            TicksOf(bound, end),
             Across(bound, end),
             Cell.Number(bound) with { Text = NumberText.Plain(bound) },
             drawn.Any(exclusion => exclusion.PartialRSquared.Lower is not null));
     }
 
-    private static PictureRow Row(Exclusion exclusion, int index, double end)
+    /// <summary>Round values with room between them and the bound.</summary>
+    private static IReadOnlyList<PictureTick> TicksOf(double bound, double end)
+    {
+        var taken = new List<double> { bound };
+        foreach (double value in Candidates.Where(value => value <= end))
+        {
+            if (taken.All(other => Math.Abs(Math.Sqrt(value / end) - Math.Sqrt(other / end)) >= LeastApart))
+            {
+                taken.Add(value);
+            }
+        }
+
+        return [.. taken.Where(value => value != bound).Order().Select(value => new PictureTick(Across(value, end), NumberText.Plain(value)))];
+    }
+
+    private static PictureRow Row(Exclusion exclusion, double estimate, double end)
     {
         EffectFigures effect = exclusion.PartialRSquared;
-        int baseline = Top + (index * RowHeight);
         return new(
-            ShortName.Of(exclusion.Group, LongestName), exclusion.Group, VerdictWords.Of(exclusion), baseline + 14, baseline + 30,
-            Across(effect.Estimate!.Value, end), Span(effect.Lower, effect.Upper, end), Span(effect.BasisLower, effect.BasisUpper, end),
-            Against(effect, exclusion.Negligible.Bound));
+            exclusion.Group, VerdictWords.Of(exclusion), Across(estimate, end), Span(effect.Lower, effect.Upper, end), Span(effect.BasisLower, effect.BasisUpper, end),
+            Against(effect, estimate, exclusion.Negligible.Bound));
     }
 
     /// <summary>The finding of one row in words, for who cannot see the picture.</summary>
-    private static string Against(EffectFigures effect, double bound)
+    private static string Against(EffectFigures effect, double value, double bound)
     {
-        string estimate = NumberText.Share(effect.Estimate!.Value);
+        string estimate = "partial R² " + NumberText.Share(value);
         if ((effect.BasisLower ?? effect.Lower) is not double lower || (effect.BasisUpper ?? effect.Upper) is not double upper)
         {
             return $"{estimate}, without an interval";
@@ -78,10 +84,7 @@ internal sealed record IntervalPicture(int Height, IReadOnlyList<PictureRow> Row
         (Left + ((Right - Left) * Math.Sqrt(Math.Clamp(value / end, 0, 1)))).ToString("0.##", CultureInfo.InvariantCulture) + "%";
 }
 
-/// <param name="NameAt">Baseline of the name, in pixels from the top.</param>
-/// <param name="LineAt">Height of the interval, in pixels from the top.</param>
-internal sealed record PictureRow(
-    string Name, string WholeName, VerdictWords Verdict, int NameAt, int LineAt, string Estimate, PictureSpan? Classical, PictureSpan? Basis, string Finding);
+internal sealed record PictureRow(string Name, VerdictWords Verdict, string Estimate, PictureSpan? Classical, PictureSpan? Basis, string Finding);
 
 internal sealed record PictureSpan(string From, string To);
 

@@ -23,18 +23,28 @@ internal static class OutcomeSentence
         };
     }
 
-    /// <summary>Groups that the first sentence does not count, named apart.</summary>
+    /// <summary>What the first sentence does not count: how many, and the negligible rejections by name.</summary>
     public static IReadOnlyList<string> Beside(AuditRecord record)
     {
         var sentences = new List<string>();
-        if (record.Exclusions.Any(VerdictWords.Contradicted) || Unsettled(record) > 0)
+        string[] others =
+        [
+            .. new[] { (Verdicts.Supported, "supported"), (Verdicts.Inconclusive, "inconclusive"), (Verdicts.Untestable, "untestable") }
+                .Select(pair => (Count: record.Exclusions.Count(exclusion => exclusion.Verdict == pair.Item1), Word: pair.Item2))
+                .Where(pair => pair.Count > 0)
+                .Select(pair => $"{NumberText.Count(pair.Count)} {pair.Word}"),
+        ];
+        if (others.Length > 0 && (record.Exclusions.Any(VerdictWords.Contradicted) || Unsettled(record) > 0))
         {
-            Add("Supported", record.Exclusions.Where(exclusion => exclusion.Verdict == Verdicts.Supported));
+            sentences.Add((record.Exclusions.Any(VerdictWords.Contradicted) ? "Of the others: " : "") + string.Join(", ", others) + ".");
         }
 
-        Add("Rejected, but shown to be negligible and so not counted", record.Exclusions.Where(VerdictWords.RejectedButNegligible));
-        Add("The data cannot say", record.Exclusions.Where(exclusion => exclusion.Verdict == Verdicts.Inconclusive));
-        Add("Cannot be tested", record.Exclusions.Where(exclusion => exclusion.Verdict == Verdicts.Untestable));
+        string[] negligible = [.. record.Exclusions.Where(VerdictWords.RejectedButNegligible).Select(exclusion => exclusion.Group)];
+        if (negligible.Length > 0)
+        {
+            sentences.Add($"Rejected, but shown to be negligible and so not counted: {Listed(negligible)}.");
+        }
+
         if (record.Exclusions.Count == 0)
         {
             sentences.Add("The outcome rests on the checks and on the report's own figures alone.");
@@ -47,15 +57,6 @@ internal static class OutcomeSentence
         }
 
         return sentences;
-
-        void Add(string lead, IEnumerable<Exclusion> groups)
-        {
-            string[] names = [.. groups.Select(exclusion => exclusion.Group)];
-            if (names.Length > 0)
-            {
-                sentences.Add($"{lead}: {Listed(names)}.");
-            }
-        }
     }
 
     private static string PolicyValue(object value) => value is double number ? NumberText.Plain(number) : Convert.ToString(value, System.Globalization.CultureInfo.InvariantCulture) ?? "";
