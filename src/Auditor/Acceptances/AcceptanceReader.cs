@@ -28,7 +28,7 @@ public static class AcceptanceReader
             : Reading<IReadOnlyList<AcceptanceEntry>>.Of(entries);
     }
 
-    private static IReadOnlyList<AcceptanceEntry>? Entries(Place root, IReadOnlyList<Rule> rules)
+    private static List<AcceptanceEntry>? Entries(Place root, IReadOnlyList<Rule> rules)
     {
         if (Keys.Of(root, "acceptances", "accept") is not { } keys)
         {

@@ -1,3 +1,4 @@
+using System.Globalization;
 using Auditor.Acceptances;
 using Auditor.Facts;
 using Auditor.Findings;
@@ -24,7 +25,7 @@ public sealed class LapseTests
     [InlineData("2027-01-01", false)]
     [InlineData("2026-03-01", true)]
     [InlineData("2026-02-28", false)]
-    public void It_holds_from_the_day_of_approval_to_the_last_day(string asOf, bool holds) => Assert.Equal(holds, Holds(Entry, asOf: DateOnly.Parse(asOf, null)));
+    public void It_holds_from_the_day_of_approval_to_the_last_day(string asOf, bool holds) => Assert.Equal(holds, Holds(Entry, asOf: DateOnly.Parse(asOf, CultureInfo.InvariantCulture)));
 
     [Theory]
     [InlineData("2026.2", true)]
