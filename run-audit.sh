@@ -35,7 +35,7 @@ build_once() {
     local name started="$build/started" log="$build/build.log"
     name="app-$(date +%s)-$$"
     echo "$name" >"$started"
-    # Compiled ahead of time it starts in half the time; the compiler is a package, which a machine without a network may not have.
+    # Compiled ahead of time it starts sooner; the compiler is a package, which a machine without a network may not have.
     if ! publish "$name" --use-current-runtime --self-contained false -p:PublishReadyToRun=true >"$log" 2>&1; then
         rm -rf "${build:?}/$name"
         if publish "$name" >"$log.plain" 2>&1; then
