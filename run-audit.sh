@@ -32,7 +32,7 @@ build_once() {
         exit 2
     fi
     echo "Building once; later starts are immediate." >&2
-    local name started="$build/started" log="$build/build.log"
+    local name built=yes started="$build/started" log="$build/build.log"
     name="app-$(date +%s)-$$"
     echo "$name" >"$started"
     # Compiled ahead of time it starts sooner; the compiler is a package, which a machine without a network may not have.
@@ -40,11 +40,12 @@ build_once() {
         rm -rf "${build:?}/$name"
         if publish "$name" >"$log.plain" 2>&1; then
             echo "Built without compiling ahead of time, so starts take longer: $(grep -m 1 -o 'error [A-Z0-9]*: .*' "$log" || echo "see $log")" >&2
+        else
+            built=no
         fi
-        [ -d "$build/$name" ] || mv "$log.plain" "$log"
     fi
-    if ! [ -f "$build/$name/Auditor.Cli.dll" ]; then
-        cat "$log" >&2
+    if [ "$built" = no ]; then
+        cat "$log.plain" >&2
         rm -rf "${build:?}/$name"
         echo "error: the program could not be built; the messages above say why" >&2
         exit 3
