@@ -20,17 +20,32 @@ is_current() {
             \( -name bin -o -name obj \) -prune -o -newer "$stamp" -type f -print -quit)" ]
 }
 
+publish() { # FOLDER [options]
+    local name=$1
+    shift
+    (cd "$here" && dotnet publish src/Auditor.Cli/Auditor.Cli.csproj -c Release -o "$build/$name" -v quiet "$@")
+}
+
 build_once() {
     if ! (cd "$here" && dotnet --version >/dev/null 2>&1); then
         echo "error: the .NET 10 SDK is needed; found: $(cd / && dotnet --list-sdks 2>/dev/null | tr '\n' ';' || true)" >&2
         exit 2
     fi
     echo "Building once; later starts are immediate." >&2
-    local name started="$build/started" log="$build/build.log"
+    local name built=yes started="$build/started" log="$build/build.log"
     name="app-$(date +%s)-$$"
     echo "$name" >"$started"
-    if ! (cd "$here" && dotnet publish src/Auditor.Cli/Auditor.Cli.csproj -c Release -o "$build/$name" -v quiet) >"$log" 2>&1; then
-        cat "$log" >&2
+    # Compiled ahead of time it starts sooner; the compiler is a package, which a machine without a network may not have.
+    if ! publish "$name" --use-current-runtime --self-contained false -p:PublishReadyToRun=true >"$log" 2>&1; then
+        rm -rf "${build:?}/$name"
+        if publish "$name" >"$log.plain" 2>&1; then
+            echo "Built without compiling ahead of time, so starts take longer: $(grep -m 1 -o 'error [A-Z0-9]*: .*' "$log" || echo "see $log")" >&2
+        else
+            built=no
+        fi
+    fi
+    if [ "$built" = no ]; then
+        cat "$log.plain" >&2
         rm -rf "${build:?}/$name"
         echo "error: the program could not be built; the messages above say why" >&2
         exit 3

@@ -89,7 +89,7 @@ internal sealed class CommandLine
 
         if (command == _selfTest)
         {
-            return SelfTestCommand.Run(BundledFiles.SelfTestCases, parsed.GetValue(_selfTestOut) ?? DefaultOut);
+            return SelfTest(parsed.GetValue(_selfTestOut) ?? DefaultOut);
         }
 
         if (command == _new)
@@ -105,6 +105,13 @@ internal sealed class CommandLine
 
         var folder = Path.GetDirectoryName(Path.GetFullPath(declaration)) ?? Environment.CurrentDirectory;
         return AuditOne(parsed, _rootOptions, declaration, Path.Combine(folder, "audit-out"));
+    }
+
+    private static int SelfTest(string output)
+    {
+        var problems = new List<string>();
+        var moment = Clock.Now(problems);
+        return problems.Count > 0 ? Unusable(problems) : SelfTestCommand.Run(BundledFiles.SelfTestCases, output, moment);
     }
 
     private static string DefaultOut => Path.Combine(Environment.CurrentDirectory, "audit-out");

@@ -1,5 +1,8 @@
+using System.Globalization;
+using Auditor.Acceptances;
 using Auditor.Declaration;
 using Auditor.Reporting;
+using Serilog;
 
 namespace Auditor.Cli;
 
@@ -10,9 +13,10 @@ internal static class InputFiles
     {
         var file = FileText.Read(request.Declaration);
         var rules = RuleFiles.Read(request.RulesFolder, request.PolicyFile);
+        var acceptances = AcceptanceFile.Read(request.Acceptances.File, rules.Value);
         if (file.Value is not { } text)
         {
-            return Reading<AuditInputs>.Failed([.. file.Problems, .. rules.Problems]);
+            return Reading<AuditInputs>.Failed([.. file.Problems, .. rules.Problems, .. acceptances.Problems]);
         }
 
         var reading = DeclarationReader.Read(text.Text, request.Declaration);
@@ -22,21 +26,24 @@ internal static class InputFiles
             .Concat(data.Problems)
             .OrderBy(problem => problem.Line ?? 0)
             .Concat(rules.Problems)
+            .Concat(acceptances.Problems)
             .ToList();
-        return problems.Count > 0 || reading.Declaration is not { } declaration
+        return problems.Count > 0 || reading.Declaration is null
             ? Reading<AuditInputs>.Failed(problems)
-            : Read(request, declaration, reading.Mentions, text, data.Value!, rules.Value!);
+            : Read(request, reading, text, data.Value!, rules.Value!, acceptances.Value!);
     }
 
     private static Reading<AuditInputs> Read(
-        AuditRequest request, ModelDeclaration declaration, IReadOnlyList<ColumnMention> mentions, FileText text, DataFile data, RuleFiles rules)
+        AuditRequest request, DeclarationReading reading, FileText text, DataFile data, RuleFiles rules, AcceptanceFile acceptances)
     {
-        var table = data.Source.Read(ColumnCheck.Requests(declaration, mentions), declaration.Data.Missing);
+        var declaration = reading.Declaration!;
+        var table = data.Source.Read(ColumnCheck.Requests(declaration, reading.Mentions), declaration.Data.Missing);
         if (table.Value is null)
         {
             return Reading<AuditInputs>.Failed(table.Problems);
         }
 
+        var asOf = request.Acceptances.AsOf ?? Clock.Day(request.Moment);
         var provenance = new Provenance(
             data.Sha256,
             declaration.Data.Sources[0],
@@ -45,10 +52,24 @@ internal static class InputFiles
             rules.Sha256,
             CommandLine.Version,
             request.Seed,
+<<<<<<< HEAD
             Clock.Started);
         return Reading<AuditInputs>.Of(new AuditInputs(declaration, mentions, table.Value, rules.Policy, rules.Rules, provenance, request.Threads)
         {
             Pictures = request.Formats.Contains("html"),
+=======
+            Clock.Text(request.Moment))
+        {
+            Acceptances = acceptances.Name,
+            AcceptancesSha256 = acceptances.Sha256,
+            AsOf = acceptances.Name is null && request.Acceptances.AsOf is null ? null : asOf.ToString("yyyy-MM-dd", CultureInfo.InvariantCulture),
+        };
+        Log.Debug(
+            "{Count} acceptances, {Others} of them for other models", acceptances.Entries.Count, acceptances.Entries.Count(entry => entry.Model != declaration.Model.Id));
+        return Reading<AuditInputs>.Of(new AuditInputs(declaration, reading.Mentions, table.Value, rules.Policy, rules.Rules, provenance, request.Threads)
+        {
+            Acceptances = new AcceptancesOfRun(acceptances.Entries, asOf),
+>>>>>>> accept/main
         });
     }
 }

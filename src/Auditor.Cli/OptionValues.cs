@@ -73,11 +73,19 @@ internal static class OptionValues
         return null;
     }
 
-    public static void Date(string option, string? text, ICollection<string> problems)
+    public static DateOnly? Date(string option, string? text, ICollection<string> problems)
     {
-        if (text is not null && !DateOnly.TryParseExact(text, "yyyy-MM-dd", CultureInfo.InvariantCulture, DateTimeStyles.None, out _))
+        if (text is null)
         {
-            problems.Add($"{option}: '{text}' is not a date as YYYY-MM-DD");
+            return null;
         }
+
+        if (DateOnly.TryParseExact(text, "yyyy-MM-dd", CultureInfo.InvariantCulture, DateTimeStyles.None, out var date))
+        {
+            return date;
+        }
+
+        problems.Add($"{option}: '{text}' is not a date as YYYY-MM-DD");
+        return null;
     }
 }

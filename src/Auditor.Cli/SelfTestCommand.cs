@@ -12,7 +12,8 @@ internal static class SelfTestCommand
 {
     /// <param name="cases">Folder of the shipped cases.</param>
     /// <param name="output">Folder for self-test.json and self-test.html.</param>
-    public static int Run(string cases, string output)
+    /// <param name="moment">When the run started.</param>
+    public static int Run(string cases, string output, DateTimeOffset moment)
     {
         var rules = RuleFiles.Read(null, Path.Combine(cases, "policy-reference.yaml"));
         if (rules.Value is null)
@@ -21,7 +22,7 @@ internal static class SelfTestCommand
             return ExitStatus.Fault;
         }
 
-        var record = new SelfTestRun(name => File.OpenRead(Path.Combine(cases, name)), rules.Value.Policy).Run(ThisInstallation());
+        var record = new SelfTestRun(name => File.OpenRead(Path.Combine(cases, name)), rules.Value.Policy).Run(ThisInstallation(moment));
         var files = Files(output, record);
         if (FilesTogether.Put(output, files) is { } fault)
         {
@@ -43,11 +44,11 @@ internal static class SelfTestCommand
         (Path.Combine(output, "self-test.json"), SelfTestReport.Json(record)),
     ];
 
-    private static Installation ThisInstallation() => new(
+    private static Installation ThisInstallation(DateTimeOffset moment) => new(
         CommandLine.Version,
         RuntimeInformation.FrameworkDescription,
         RuntimeInformation.OSDescription,
         RuntimeInformation.ProcessArchitecture.ToString(),
         Vector512.IsHardwareAccelerated ? 512 : Vector256.IsHardwareAccelerated ? 256 : Vector128.IsHardwareAccelerated ? 128 : 64,
-        Clock.Started);
+        Clock.Text(moment));
 }

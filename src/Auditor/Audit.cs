@@ -1,3 +1,4 @@
+using Auditor.Acceptances;
 using Auditor.Analysis;
 using Auditor.Data;
 using Auditor.Declaration;
@@ -12,7 +13,7 @@ using Auditor.Rules;
 namespace Auditor;
 
 /// <summary>
-/// The audit, values in and values out: declaration and data, bound terms and row sets, fits and tests, facts, rules, findings, record. No step reads
+/// The audit, values in and values out: declaration and data, bound terms and row sets, fits and tests, facts, rules, findings, acceptances, record. No step reads
 /// or writes a file.
 /// </summary>
 public static class Audit
@@ -35,8 +36,17 @@ public static class Audit
         }
 
         var facts = AuditFacts.Of(results, bound.Value, inputs.Mentions, inputs.Policy);
-        var outcome = RuleEngine.Evaluate(inputs.Rules, inputs.Policy, facts);
-        return Reading<AuditRecord>.Of(Record(inputs, results, outcome));
+        var found = RuleEngine.Evaluate(inputs.Rules, inputs.Policy, facts);
+        return Reading<AuditRecord>.Of(Record(inputs, results, Accepted(inputs, found, facts)));
+    }
+
+    /// <summary>What is said of acceptances is said last, of findings that stand: no acceptance can reach it.</summary>
+    private static RuleOutcome Accepted(AuditInputs inputs, RuleOutcome found, IReadOnlyList<FactSet> facts)
+    {
+        var model = inputs.Declaration.Model;
+        var matched = AcceptanceMatching.Of(inputs.Acceptances, model.Id, model.Version, found.Findings, facts, inputs.Rules);
+        var said = RuleEngine.Evaluate(inputs.Rules, inputs.Policy, [.. matched.Standings.Select(AcceptanceFacts.From)]);
+        return (found with { Findings = matched.Findings }).Then(said);
     }
 
     private static AuditRecord Record(AuditInputs inputs, AuditResults results, RuleOutcome rules) => new(
@@ -95,6 +105,11 @@ public sealed record AuditInputs(
     Provenance Provenance,
     int Threads = 1)
 {
+<<<<<<< HEAD
     /// <summary>Whether the points of the pictures are gathered; no figure depends on it.</summary>
     public bool Pictures { get; init; } = true;
+=======
+    /// <summary>Findings that a named approver has accepted.</summary>
+    public AcceptancesOfRun Acceptances { get; init; } = AcceptancesOfRun.None;
+>>>>>>> accept/main
 }

@@ -7,7 +7,7 @@ internal static class ErrorCases
 {
     private const string Leases3 = "lease_no,loss,price,region,engine_hours,age\n";
 
-    public static IReadOnlyList<ErrorCase> All { get; } = [.. CommandLines(), .. Declarations(), .. Data(), .. Places(), .. PolicyAndRules()];
+    public static IReadOnlyList<ErrorCase> All { get; } = [.. CommandLines(), .. Declarations(), .. Data(), .. Places(), .. PolicyAndRules(), .. Acceptances()];
 
     private static IEnumerable<ErrorCase> CommandLines() =>
     [
@@ -24,7 +24,6 @@ internal static class ErrorCases
         ErrorCase.Of("an option given twice", "lease.yaml", "--seed", "1", "--seed", "2"),
         ErrorCase.Of(
             "several values that cannot be", "lease.yaml", "--formats", "pdf,sarif", "--fail-on", "hihg", "--threads", "0", "--memory", "4X", "--seed", "-1", "--as-of", "31.12.2026"),
-        ErrorCase.Of("acceptances", "lease.yaml", "--acceptances", "accepted.yaml"),
         ErrorCase.Of("an @ does not name a file of options", "@options"),
         ErrorCase.Of("an unknown rule", "rules", "exclusion-not-suported"),
         ErrorCase.Of("two rules", "rules", "a", "b"),
@@ -127,4 +126,41 @@ internal static class ErrorCases
             "rules", "--rules", "house"),
         ErrorCase.File("a wrong policy beside a wrong declaration", "firm.yaml", "significence: 0.01\n", "leese.yaml", "--policy", "firm.yaml"),
     ];
+
+    private static IEnumerable<ErrorCase> Acceptances() =>
+    [
+        ErrorCase.Of("no such acceptances", "lease.yaml", "--acceptances", "leases.yaml"),
+        new("a folder as acceptances", ["lease.yaml", "--acceptances", "accepted"], folder => folder.WithFolder("accepted")),
+        Accepted("empty acceptances", ""),
+        Accepted("acceptances of another format", "acceptances: 2\naccept: []\n"),
+        Accepted("a declaration as acceptances", Leases.Declaration),
+        ErrorCase.Declared("acceptances named by the author", "response: loss", "response: loss\nacceptances: accepted.yaml"),
+        Accepted(
+            "every problem of acceptances at once",
+            """
+            acceptances: 1
+            accept:
+              - {rule: exclusion-inconlusive, subject: engine condition, model: lease-loss, version: 1, severity: medum, approved_by: R. Okafor,
+                 approved_on: 2026-01-01, expires: 2026-12-31, because: Known.}
+              - rule: acceptance-lapsed
+                subject: "exclusion-inconclusive: engine condition"
+                model: lease-loss
+                version: 1
+                severity: medium
+                approved_by: "  "
+                approved_on: 2026-02-30
+                expries: 2026-12-31
+                because:
+              - {rule: rows-zero-weight, subject: lease-loss, model: lease-loss, version: 1, severity: note, worst: {p: 0.01, partial_r_squared: 2},
+                 approved_by: R. Okafor, approved_on: 2026-06-01, expires: 2026-05-31, because: Known.}
+              - {rule: exclusion-inconclusive, subject: age, model: lease-loss, version: 1, severity: medium, worst: {}, approved_by: R. Okafor,
+                 approved_on: 2026-01-01, expires: 2026-12-31, because: Known.}
+              - {rule: exclusion-inconclusive, subject: age, model: lease-loss, version: 1, severity: high, approved_by: R. Okafor,
+                 approved_on: 2026-01-01, expires: 2026-12-31, because: Known twice.}
+              - engine condition
+            """),
+        new("acceptances beside other problems", ["leese.yaml", "--policy", "firm.yaml", "--acceptances", "accepted.yaml"], _ => { }),
+    ];
+
+    private static ErrorCase Accepted(string title, string text) => ErrorCase.File(title, "accepted.yaml", text, "lease.yaml", "--acceptances", "accepted.yaml");
 }

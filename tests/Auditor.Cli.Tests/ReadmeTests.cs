@@ -15,12 +15,27 @@ public sealed class ReadmeTests
         }
 
         var run = Readme.Commands.Where(command => ReadmeFile.Arguments(command) is not null).ToList();
-        Assert.Equal(["leases.csv", "leases.yaml"], folder.Files());
+        Assert.Equal(["accepted.yaml", "leases.csv", "leases.yaml"], folder.Files());
         Assert.Contains("./run-audit.sh demo", run);
         Assert.Contains("./run-audit.sh leases.yaml", run);
+        Assert.Contains("./run-audit.sh leases.yaml --acceptances accepted.yaml --as-of 2026-06-30", run);
         Assert.All(run, command => ProgramRun.In(folder, ReadmeFile.Arguments(command)!).Ends(Status(command)));
         Assert.Contains(Path.Combine("audit-out", "lease-loss.html"), folder.Files());
         Assert.Contains(Path.Combine("audit-out", "tractor-resale-shortfall.json"), folder.Files());
+    }
+
+    [Fact]
+    public void Its_acceptance_holds()
+    {
+        using var folder = new TemporaryFolder();
+        foreach (var (name, text) in Readme.Files)
+        {
+            folder.With(name, text);
+        }
+
+        var accepted = ProgramRun.In(folder, "leases.yaml", "--acceptances", "accepted.yaml", "--as-of", "2026-06-30").Ends(0);
+        Assert.Contains("; 1 finding accepted.", accepted.Output, StringComparison.Ordinal);
+        Assert.DoesNotContain("acceptance-", folder.Text(Path.Combine("audit-out", "lease-loss.json")), StringComparison.Ordinal);
     }
 
     [Fact]

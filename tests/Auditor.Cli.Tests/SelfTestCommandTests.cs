@@ -30,7 +30,7 @@ public sealed class SelfTestCommandTests : IDisposable
         Assert.Contains("\"-3482258.63459582\"", text, StringComparison.Ordinal);
         File.WriteAllText(file, text.Replace("\"-3482258.63459582\"", "\"-3482258.63559582\"", StringComparison.Ordinal));
 
-        Assert.Equal(ExitStatus.Fault, SelfTestCommand.Run(cases, At("out")));
+        Assert.Equal(ExitStatus.Fault, SelfTestCommand.Run(cases, At("out"), DateTimeOffset.UnixEpoch));
 
         using JsonDocument json = Evidence(At("out"));
         var failed = json.RootElement.GetProperty("cases").EnumerateArray().Where(one => !one.GetProperty("passed").GetBoolean());
@@ -40,7 +40,7 @@ public sealed class SelfTestCommandTests : IDisposable
     [Fact]
     public void Without_its_cases_an_installation_is_at_fault()
     {
-        Assert.Equal(ExitStatus.Fault, SelfTestCommand.Run(At("nowhere"), At("out")));
+        Assert.Equal(ExitStatus.Fault, SelfTestCommand.Run(At("nowhere"), At("out"), DateTimeOffset.UnixEpoch));
         Assert.False(Directory.Exists(At("out")));
     }
 

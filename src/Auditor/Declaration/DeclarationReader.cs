@@ -16,7 +16,7 @@ public static class DeclarationReader
         var columns = new ColumnNames();
         var data = new DataReader(columns);
         var root = YamlFile.Read(yaml, problems);
-        var declaration = root is null ? null : Declaration(new Place(root, Keys.DocumentPath, problems), columns, data, file);
+        var declaration = root is null ? null : Declaration(Place.Document(root, "declaration", problems), columns, data, file);
         return new DeclarationReading(problems.Any ? null : declaration, problems.InOrder, columns.InOrder, data.Sources);
     }
 

@@ -49,7 +49,17 @@ public sealed record Provenance(
     string RulesSha256,
     string ToolVersion,
     long Seed,
-    string Started);
+    string Started)
+{
+    /// <summary>Name of the acceptances file; null when none was given.</summary>
+    public string? Acceptances { get; init; }
+
+    /// <summary>Of that file.</summary>
+    public string? AcceptancesSha256 { get; init; }
+
+    /// <summary>The day on which acceptances must hold, YYYY-MM-DD; null when none were given and no day was asked for.</summary>
+    public string? AsOf { get; init; }
+}
 
 /// <summary>The audit's overall outcome, as the record writes it.</summary>
 public static class Outcomes

@@ -21,7 +21,7 @@ public static class ConsoleSummary
                 .Append(VerdictWords.Of(exclusion).Word).Append(". ").Append(exclusion.Reason).Append('\n');
         }
 
-        text.Append("Findings: ").Append(OutcomeSentence.Findings(record)).Append(".\n");
+        text.Append("Findings: ").Append(OutcomeSentence.Findings(record)).Append(OutcomeSentence.Accepted(record) is { } accepted ? $"; {accepted}.\n" : ".\n");
         text.Append("Statistical evidence, not approval: the firm's policy, local rules and qualified people decide.\n");
         return text.ToString();
     }

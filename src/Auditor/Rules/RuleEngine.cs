@@ -7,7 +7,12 @@ namespace Auditor.Rules;
 /// <summary>What the rules found, and what they could not decide.</summary>
 /// <param name="Findings">By severity, the gravest first; within one severity in the order of the rules, within a rule in the order of the subjects.</param>
 /// <param name="Undecided">In the order of the rules, within a rule of the subjects.</param>
-public sealed record RuleOutcome(IReadOnlyList<Finding> Findings, IReadOnlyList<Undecided> Undecided);
+public sealed record RuleOutcome(IReadOnlyList<Finding> Findings, IReadOnlyList<Undecided> Undecided)
+{
+    /// <summary>This and what was found later, which comes last within its severity.</summary>
+    public RuleOutcome Then(RuleOutcome later) =>
+        new([.. Findings.Concat(later.Findings).OrderByDescending(finding => finding.Severity)], [.. Undecided, .. later.Undecided]);
+}
 
 /// <summary>Asks every rule about every subject of its kind. A rule speaks once for each subject it holds for.</summary>
 public static class RuleEngine

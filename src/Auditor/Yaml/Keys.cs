@@ -64,14 +64,11 @@ internal sealed class Keys
 
     private Place At(MapEntry entry)
     {
-        var path = _place.Path is DocumentPath ? entry.Key : _place.Path + "." + entry.Key;
+        var path = _place.IsDocument ? entry.Key : _place.Path + "." + entry.Key;
         // A key with nothing after it is reported where the key stands, not where the parser noticed.
         var node = entry.Value is TextValue { IsPlain: true, Text: "" } nothing ? nothing with { Line = entry.Line } : entry.Value;
         return new Place(node, path, _place.Problems);
     }
-
-    /// <summary>The path of a whole file, left out before its keys.</summary>
-    public const string DocumentPath = "declaration";
 
     private static string Known(IReadOnlyList<string> known) =>
         known.Count == 1 ? "; the only key is " + known[0] : "; the keys are " + string.Join(", ", known);

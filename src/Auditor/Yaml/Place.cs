@@ -9,7 +9,13 @@ internal sealed record Place(YamlValue Node, string Path, ProblemList Problems)
 {
     private const NumberStyles NumberStyle = NumberStyles.AllowLeadingSign | NumberStyles.AllowDecimalPoint | NumberStyles.AllowExponent;
 
+    /// <summary>The whole file, whose name is left out before its keys.</summary>
+    public bool IsDocument { get; private init; }
+
     public int Line => Node.Line;
+
+    /// <param name="name">What the file is, for messages about the whole of it.</param>
+    public static Place Document(YamlValue root, string name, ProblemList problems) => new(root, name, problems) { IsDocument = true };
 
     /// <summary>A key with nothing after it.</summary>
     public bool IsNothing => Node is TextValue { IsPlain: true, Text: "" };

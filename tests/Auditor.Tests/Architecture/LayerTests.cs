@@ -18,8 +18,9 @@ public sealed partial class LayerTests(ITestOutputHelper output)
         ["Design"] = ["Data", "Declaration", "Numerics", "Yaml"],
         ["Rows"] = ["Data", "Design", "Numerics", "Results"],
         ["Analysis"] = ["Data", "Declaration", "Design", "Numerics", "Policies", "Results", "Rows"],
-        ["Facts"] = ["Data", "Declaration", "Design", "Policies", "Results"],
+        ["Facts"] = ["Data", "Declaration", "Design", "Findings", "Policies", "Results"],
         ["Rules"] = ["Facts", "Findings", "Policies", "Yaml"],
+        ["Acceptances"] = ["Facts", "Findings", "Rules", "Yaml"],
         ["Reporting"] = ["Findings", "Results"],
     };
 

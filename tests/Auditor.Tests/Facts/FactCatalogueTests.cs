@@ -35,6 +35,7 @@ public sealed class FactCatalogueTests
             ColumnFacts.From(ColumnInputs.NobodyMentions("memo")),
             CheckFacts.From(new CheckResult("reset", 2, 2, 400, 0.1, "form", false, null)),
             CoefficientFacts.From(new CoefficientFigures("price", 1, 1, 1, 0.3, null, -1, 3, null)),
+            AcceptanceFacts.From(Samples.Standing),
         ];
 
         Assert.Equal(FactCatalogue.All.Count, sets.Sum(set => set.Values.Count));

@@ -1,3 +1,4 @@
+using Auditor.Findings;
 using Auditor.Policies;
 using Auditor.Results;
 
@@ -41,6 +42,13 @@ internal static class Samples
 
     public static readonly RowAccount Rows = new(
         520, 20, 10, 7, 3, 480, new Dictionary<string, int> { ["age"] = 2, ["price"] = 1500, ["grade"] = 0 }, new Dictionary<string, int> { ["log(price)"] = 3 }, []);
+
+    public static readonly AcceptanceEntry Acceptance = new(
+        "exclusion-inconclusive", "engine condition", "tractor-lease-loss", "2026.2", Severity.Medium, new WorstAccepted(0.05, 0.04), "R. Okafor",
+        new DateOnly(2026, 3, 1), new DateOnly(2026, 12, 31), "More leases run out in autumn.", 4);
+
+    public static readonly AcceptanceStanding Standing =
+        new(Acceptance, "2026.2", new DateOnly(2026, 12, 1), Severity.Medium, 0.06, 0.032, [], "");
 
     public static Policy Policy(string firm = "significance: 0.05") =>
         PolicyReader.Read("significance: 0.05", "policy.yaml", firm, "firm.yaml").Value!;

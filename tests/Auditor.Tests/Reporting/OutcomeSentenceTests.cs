@@ -1,3 +1,4 @@
+using Auditor.Findings;
 using Auditor.Reporting;
 using Auditor.Reporting.Html;
 using Auditor.Results;
@@ -29,7 +30,35 @@ public sealed class OutcomeSentenceTests
     }
 
     [Fact]
-    public void Accepted_findings_are_not_open() => Assert.Equal("1 high, 2 medium, 1 low, 1 note", OutcomeSentence.Findings(SampleRecords.Full));
+    public void Accepted_findings_are_not_open_and_are_counted_apart()
+    {
+        Assert.Equal("1 high, 2 medium, 1 low, 1 note", OutcomeSentence.Findings(SampleRecords.Full));
+        Assert.Equal("1 finding accepted", OutcomeSentence.Accepted(SampleRecords.Full));
+        Assert.Contains("Findings: 1 high, 2 medium, 1 low, 1 note; 1 finding accepted.\n", ConsoleSummary.Of(SampleRecords.Full), StringComparison.Ordinal);
+        Assert.Equal("6 findings accepted", OutcomeSentence.Accepted(AllAccepted));
+        Assert.Equal("none open", OutcomeSentence.Findings(AllAccepted));
+        Assert.Null(OutcomeSentence.Accepted(SampleRecords.WithoutFindings));
+    }
+
+    [Fact]
+    public void Acceptance_changes_no_verdict_and_no_count_of_exclusions()
+    {
+        Assert.Equal(OutcomeSentence.Of(SampleRecords.Full), OutcomeSentence.Of(AllAccepted));
+        Assert.Equal(
+            "No exclusion is contradicted by the data beyond the negligible, but there are findings, all of them accepted.",
+            OutcomeSentence.Of(AllAccepted with { Outcome = Outcomes.Findings, Exclusions = [SampleExclusions.All[2], SampleExclusions.All[3]] }));
+    }
+
+    private static AuditRecord AllAccepted { get; } = SampleRecords.Full with
+    {
+        Findings =
+        [
+            .. SampleRecords.Full.Findings.Select(finding => finding with
+            {
+                Accepted = new Acceptance("R. Okafor", new DateOnly(2026, 2, 10), new DateOnly(2026, 12, 31), "Known."),
+            }),
+        ],
+    };
 
     [Fact]
     public void Without_exclusions_the_page_says_on_what_the_outcome_rests() =>

@@ -34,7 +34,12 @@ internal static class SampleRecords
         SampleFindings.All,
         [new("influential-row", "warranty extension", "Cook's distance was not computed on this group's rows.")],
         Policy,
-        new(Sha, "leases.csv", Sha.Replace('3', 'a'), "tractor lease/audit.yaml", Sha.Replace('f', '0'), "0.1.0", 1, "2026-03-01T06:30:00Z"))
+        new(Sha, "leases.csv", Sha.Replace('3', 'a'), "tractor lease/audit.yaml", Sha.Replace('f', '0'), "0.1.0", 1, "2026-03-01T06:30:00Z")
+        {
+            Acceptances = "accepted.yaml",
+            AcceptancesSha256 = Sha.Replace('5', 'b'),
+            AsOf = "2026-03-01",
+        })
     {
         Plots = SamplePlots.Some,
     };

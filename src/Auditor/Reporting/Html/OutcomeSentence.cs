@@ -12,12 +12,13 @@ internal static class OutcomeSentence
         int contradicted = record.Exclusions.Count(VerdictWords.Contradicted);
         return (all, contradicted, record.Outcome) switch
         {
-            (0, _, Outcomes.Findings) => "No group is declared as left out; other findings need attention.",
+            (0, _, Outcomes.Findings) => "No group is declared as left out; other findings " + (AllAccepted(record) ? "have been accepted." : "need attention."),
             (0, _, _) => "No group is declared as left out, and no rule found anything to raise.",
             (1, 1, _) => "The only exclusion is not supported by the data.",
             (_, > 0, _) => $"{NumberText.Count(contradicted)} of {NumberText.Count(all)} exclusions {(contradicted == 1 ? "is" : "are")} not supported by the data.",
             _ when Unsettled(record) is > 0 and var unsettled => $"No exclusion is contradicted by the data, but they do not support {NumberText.Count(unsettled)} of {NumberText.Count(all)} either.",
-            (_, _, Outcomes.Findings) => "No exclusion is contradicted by the data beyond the negligible, but there are findings to look at.",
+            (_, _, Outcomes.Findings) => "No exclusion is contradicted by the data beyond the negligible, but there are findings"
+                + (AllAccepted(record) ? ", all of them accepted." : " to look at."),
             (1, _, _) => "The only exclusion is supported by the data, and no rule found anything to raise.",
             _ => $"All {NumberText.Count(all)} exclusions are supported by the data, and no rule found anything to raise.",
         };
@@ -85,6 +86,18 @@ internal static class OutcomeSentence
         Severity.Low => "low",
         _ => "note",
     };
+
+    /// <summary>"2 findings accepted"; null when there is none.</summary>
+    public static string? Accepted(AuditRecord record) => record.Findings.Count(finding => finding.Accepted is not null) switch
+    {
+        0 => null,
+        1 => "1 finding accepted",
+        var count => $"{NumberText.Count(count)} findings accepted",
+    };
+
+    /// <summary>Nothing that the outcome counts is open.</summary>
+    private static bool AllAccepted(AuditRecord record) =>
+        !record.Findings.Any(finding => finding.Accepted is null && finding.Severity >= Severity.Low);
 
     private static string Listed(string[] names)
     {

@@ -23,6 +23,8 @@ internal sealed record ReportPage(AuditRecord Record, PageScript Script)
 
     public string OpenFindings => OutcomeSentence.Findings(Record);
 
+    public string? FindingsAccepted => OutcomeSentence.Accepted(Record);
+
     public string Interval => NumberText.Percent(1 - (2 * Level));
 
     public IReadOnlyList<ExclusionPage> Exclusions => [.. Record.Exclusions.Select(Page)];
@@ -62,12 +64,17 @@ internal sealed record ReportPage(AuditRecord Record, PageScript Script)
 
     public ReportTable Undefined => RowTables.Undefined(Record.Rows);
 
-    public IReadOnlyList<FindingPage> Findings => FindingPage.Of(Record);
+    public IReadOnlyList<FindingPage> Findings => [.. FindingPage.Of(Record).Where(finding => finding.Accepted is null)];
+
+    public IReadOnlyList<FindingPage> AcceptedFindings => [.. FindingPage.Of(Record).Where(finding => finding.Accepted is not null)];
 
     public FactList Policy => FactList.Of([.. Record.Policy.Select(pair => new Fact(CheckWords.Spaced(pair.Key), PolicyCell(pair.Value), ShippedNote(pair.Key)))]);
 
     /// <summary>The words that make this page again, quoted for a shell.</summary>
-    public string Command => string.Create(CultureInfo.InvariantCulture, $"./run-audit.sh {Quoted(Record.Provenance.Declaration)} --seed {Record.Provenance.Seed}");
+    public string Command => string.Create(CultureInfo.InvariantCulture, $"./run-audit.sh {Quoted(Record.Provenance.Declaration)} --seed {Record.Provenance.Seed}{Acceptances}");
+
+    private string Acceptances =>
+        (Record.Provenance.Acceptances is { } file ? " --acceptances " + Quoted(file) : "") + (Record.Provenance.AsOf is { } day ? " --as-of " + day : "");
 
     private ExclusionPage Page(Exclusion exclusion, int index)
     {
