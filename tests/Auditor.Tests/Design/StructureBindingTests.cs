@@ -1,8 +1,6 @@
 using System.Text;
 using Auditor.Data;
-using Auditor.Declaration;
 using Auditor.Design;
-using static Auditor.Tests.Design.Binding;
 
 namespace Auditor.Tests.Design;
 
