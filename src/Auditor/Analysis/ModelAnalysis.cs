@@ -29,6 +29,7 @@ internal static class ModelAnalysis
         return Reading<AuditResults>.Of(new AuditResults(
             declaration.Model.Id,
             selection.Account(common, mentioned),
+            StructureFigures.Of(model, main.Rows),
             FitFigures.Of(main, policy.Significance, sampling),
             other is null ? null : FitFigures.Of(other, policy.Significance, sampling),
             main.Fit.Perfect,

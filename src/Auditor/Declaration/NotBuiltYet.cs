@@ -17,9 +17,6 @@ public static class NotBuiltYet
         new("data.split", declaration => [declaration.Data.Structure.Split?.Line]),
         new("data.cluster", declaration => [declaration.Data.Structure.Cluster?.Line]),
         new("data.segments", declaration => [declaration.Data.Structure.Segments is [var first, ..] ? first.Line : null]),
-        new("lag terms", declaration => InTimeOrder(declaration, TimeOrderOperation.Lag)),
-        new("change terms", declaration => InTimeOrder(declaration, TimeOrderOperation.Change)),
-        new("moving_average terms", declaration => InTimeOrder(declaration, TimeOrderOperation.MovingAverage)),
     ];
 
     /// <summary>One problem for each subject and line, by line.</summary>
@@ -32,10 +29,4 @@ public static class NotBuiltYet
                     select new Problem(declaration.File, line, "not built yet: " + entry.Subject);
         return [.. found];
     }
-
-    private static IEnumerable<int?> InTimeOrder(ModelDeclaration declaration, TimeOrderOperation operation) =>
-        TermWalk.All(declaration.Response, declaration.FinalModel, declaration.LeftOut)
-            .OfType<TimeOrderTerm>()
-            .Where(term => term.Operation == operation)
-            .Select(term => (int?)term.Line);
 }

@@ -5,7 +5,7 @@ namespace Auditor.Design;
 
 /// <summary>What terms are bound to, and what was found while binding.</summary>
 internal sealed class BindingScope(
-    DataTable table, int[] keptRows, IReadOnlyDictionary<string, ColumnDeclaration> declared, Period? period, string file)
+    DataTable table, int[] keptRows, IReadOnlyDictionary<string, ColumnDeclaration> declared, Period? period, TimeOrder? order, string file)
 {
     private readonly Dictionary<string, LevelCoding> _codings = new(StringComparer.Ordinal);
     private readonly HashSet<BindingNote> _noted = [];
@@ -14,6 +14,8 @@ internal sealed class BindingScope(
     public int[] KeptRows { get; } = keptRows;
 
     public Period? Period { get; } = period;
+
+    public int TableRows => table.RowCount;
 
     /// <summary>In the order they were met, none twice.</summary>
     public IReadOnlyList<BindingNote> Notes => _notes;
@@ -36,6 +38,23 @@ internal sealed class BindingScope(
     {
         Add(new Problem(file, term.Line > 0 ? term.Line : null, message));
         return null;
+    }
+
+    /// <summary>The rows by unit and period; null when there is no such order, which is said once, at the declared time, unless it is the term that cannot have it.</summary>
+    public TimeSteps? Steps(TimeOrderTerm term)
+    {
+        if (order is null)
+        {
+            Refuse(term, $"{term.Label}: no order of the rows is declared (data.time)");
+            return null;
+        }
+
+        foreach (var message in order.Problems)
+        {
+            Add(new Problem(file, order.Line, message));
+        }
+
+        return order.Steps;
     }
 
     /// <summary>The coding of a levels column, made once; null when it has problems, which are those of the column and not of one term.</summary>

@@ -14,6 +14,9 @@ public sealed record BoundModel(
     IReadOnlyList<BoundGroup> Groups,
     BoundWeights? Weights)
 {
+    /// <summary>What the author says about dependence between rows.</summary>
+    public BoundStructure Structure { get; init; } = BoundStructure.None;
+
     /// <summary>The declared column that names rows for readers.</summary>
     public DataColumn? RowLabel { get; init; }
 }

@@ -3,7 +3,7 @@ using Auditor.Declaration;
 
 namespace Auditor.Design;
 
-/// <summary>Binds a checked declaration to its table: filter, weights, then every term; all problems at once.</summary>
+/// <summary>Binds a checked declaration to its table: filter, structure, weights, then every term; all problems at once.</summary>
 public static class ModelBinder
 {
     private const int MostColumns = 5_000;
@@ -16,8 +16,10 @@ public static class ModelBinder
             return Reading<BoundDeclaration>.Failed(kept.Problems);
         }
 
-        var binder = new TermBinder(table, rows.Rows, declaration.Data.Columns, declaration.Data.Structure.Period, declaration.File);
-        var problems = new List<Problem>();
+        var structureBinder = new StructureBinder(declaration, table, rows.Rows);
+        var structure = structureBinder.Bind();
+        var problems = structureBinder.Problems.ToList();
+        var binder = new TermBinder(table, rows.Rows, declaration.Data.Columns, declaration.Data.Structure.Period, declaration.File, structureBinder.Order(structure));
         var response = Bound(binder.Bind(declaration.Response), problems);
         var final = All(binder, declaration.FinalModel.Terms, problems);
         var groups = declaration.LeftOut.Select(group => new BoundGroup(group, All(binder, group.Terms, problems))).ToList();
@@ -25,10 +27,11 @@ public static class ModelBinder
         CheckResponse(declaration, response, problems);
         CheckWidth(declaration, [.. final, .. groups.SelectMany(group => group.Terms)], problems);
         return problems.Count > 0
-            ? Reading<BoundDeclaration>.Failed([.. problems.OrderBy(problem => problem.Line)])
+            ? Reading<BoundDeclaration>.Failed([.. problems.Distinct().OrderBy(problem => problem.Line)])
             : Reading<BoundDeclaration>.Of(new BoundDeclaration(
                 new BoundModel(table, rows.Rows, declaration.FinalModel.Intercept, response!, final, groups, weights)
                 {
+                    Structure = structure,
                     RowLabel = declaration.Data.RowLabel is { } label ? table[label.Column] : null,
                 },
                 [.. rows.Notes, .. binder.Notes]));

@@ -11,11 +11,12 @@ namespace Auditor.Design;
 /// <param name="columns">The column declarations (reference, levels).</param>
 /// <param name="period">The unit of a trend over dates; days when not declared.</param>
 /// <param name="file">The declaration, for messages.</param>
+/// <param name="order">The declared order of all rows of the table; null when there is none.</param>
 /// <remarks>Not thread-safe: notes gather. The bound terms are immutable and may be used from several threads.</remarks>
 public sealed class TermBinder(
-    DataTable table, int[] keptRows, IReadOnlyDictionary<string, ColumnDeclaration> columns, Period? period, string file)
+    DataTable table, int[] keptRows, IReadOnlyDictionary<string, ColumnDeclaration> columns, Period? period, string file, TimeOrder? order = null)
 {
-    private readonly BindingScope _scope = new(table, keptRows, columns, period, file);
+    private readonly BindingScope _scope = new(table, keptRows, columns, period, order, file);
 
     /// <summary>What was noted while binding, in the order it was met, nothing twice.</summary>
     public IReadOnlyList<BindingNote> Notes => _scope.Notes;
@@ -38,7 +39,7 @@ public sealed class TermBinder(
         TrendTerm trend => TimeBinding.Trend(_scope, trend),
         RatioTerm or MinusTerm => Pair(term),
         ProductTerm product => Product(product),
-        TimeOrderTerm => _scope.Refuse(term, $"{term.Label}: not built yet"),
+        TimeOrderTerm shifted => OneColumn(shifted.Of, term) is { } of ? TimeOrderBinding.Of(_scope, shifted, of) : null,
         _ => OfOne(term),
     };
 

@@ -3,7 +3,7 @@ using Auditor.Results;
 
 namespace Auditor.Facts;
 
-/// <summary>The facts of where every row of the source went.</summary>
+/// <summary>The facts of where every row of the source went, and of the declared structure of those used.</summary>
 public static class RowFacts
 {
     private static readonly FactFamily<RowAccount> Family = new FactFamily<RowAccount>(About.Rows)
@@ -22,9 +22,13 @@ public static class RowFacts
         .Count("used", FactUnits.Rows, "Rows of the final model's fit.", rows => rows.Used)
         .Flag("nothing_lost", "Every row read is used.", rows => rows.Used == rows.Read);
 
-    public static IReadOnlyList<FactDefinition> Definitions => Family.Definitions;
+    public static IReadOnlyList<FactDefinition> Definitions => [.. Family.Definitions, .. StructureFacts.Definitions];
 
-    public static FactSet From(string modelId, RowAccount rows) => Family.From(rows, modelId, null);
+    public static FactSet From(string modelId, RowAccount rows, StructureCounts structure)
+    {
+        var account = Family.From(rows, modelId, null);
+        return account with { Values = new OrderedDictionary<string, FactValue>(account.Values.Concat(StructureFacts.Values(structure)), StringComparer.Ordinal) };
+    }
 
     private static int Kept(RowAccount rows) => rows.Read - rows.FilteredOut - rows.ZeroWeight;
 

@@ -4,6 +4,7 @@ namespace Auditor.Results;
 internal sealed record AuditResults(
     string ModelId,
     RowAccount Rows,
+    StructureCounts Structure,
     FitSummary FinalFit,
     FitSummary? OtherFit,
     bool Perfect,

@@ -6,7 +6,8 @@ namespace Auditor.Rows;
 
 /// <summary>
 /// Which rows each fit uses and where the others went. A comparison of two fits means something only on the same rows: a group's own rows are
-/// complete for the final model and the group, the common rows for the final model and every group.
+/// complete for the final model and the group, the common rows for the final model and every group. A row without a declared time, unit or cluster is
+/// complete for nothing.
 /// </summary>
 public sealed class RowSelection
 {
@@ -20,9 +21,9 @@ public sealed class RowSelection
         _model = model;
         var weights = model.Weights?.Column.Values;
         _weighted = new RowSubset(weights is null ? model.KeptRows : [.. model.KeptRows.Where(row => weights[row] != 0)]);
-        _finalGaps = TermGaps.Find([model.Response, .. model.FinalTerms], _weighted);
+        _finalGaps = TermGaps.Find([model.Response, .. model.FinalTerms], _weighted, model.Structure.Required);
         Final = _weighted.Without(_finalGaps.Both);
-        _groupGaps = [.. model.Groups.Select(group => TermGaps.Find(group.Terms, Final))];
+        _groupGaps = [.. model.Groups.Select(group => TermGaps.Find(group.Terms, Final, []))];
         Own = [.. _groupGaps.Select(gaps => Final.Without(gaps.Both))];
         Common = Final.Without([.. _groupGaps.SelectMany(gaps => gaps.Both).Distinct()]);
     }
@@ -69,7 +70,7 @@ public sealed class RowSelection
     {
         var counts = new OrderedDictionary<string, int>(StringComparer.Ordinal);
         var terms = _model.Groups.SelectMany(group => group.Terms).Prepend(_model.Response).Concat(_model.FinalTerms);
-        foreach (var column in terms.SelectMany(term => term.Sources).Distinct().OrderBy(Position))
+        foreach (var column in terms.SelectMany(term => term.Sources).Concat(_model.Structure.Required).Distinct().OrderBy(Position))
         {
             counts[column.Name] = _weighted.Rows.Count(column.IsMissing);
         }
@@ -77,7 +78,9 @@ public sealed class RowSelection
         return counts;
     }
 
-    private int Position(DataColumn column) => _model.Table.SourceColumns.ToList().IndexOf(column.Name);
+    /// <summary>The columns of the source in its order, then what terms built from other rows.</summary>
+    private int Position(DataColumn column) =>
+        _model.Table.Columns.Contains(column) ? _model.Table.SourceColumns.ToList().IndexOf(column.Name) : int.MaxValue;
 
     private OrderedDictionary<string, int> UndefinedByTerm()
     {

@@ -21,10 +21,11 @@ internal sealed class TermGaps
 
     public IReadOnlyCollection<int> Both => Undefined.Count == 0 ? Incomplete : [.. Incomplete, .. Undefined];
 
-    public static TermGaps Find(IReadOnlyList<BoundTerm> terms, RowSubset rows)
+    /// <param name="required">Columns that must have a value beside those of the terms.</param>
+    public static TermGaps Find(IReadOnlyList<BoundTerm> terms, RowSubset rows, IReadOnlyList<DataColumn> required)
     {
         var gaps = new TermGaps();
-        var sources = terms.SelectMany(term => term.Sources).Distinct().ToArray();
+        var sources = terms.SelectMany(term => term.Sources).Concat(required).Distinct().ToArray();
         var complete = new List<int>(rows.Count);
         foreach (var row in rows.Rows)
         {

@@ -22,6 +22,8 @@ public sealed class BoundTermContractTests
         new BinsTerm(Age, [5, 33]), new IndicatorTerm(Region, "s"), new StepTerm(Opened, "2020-05-01"), new PulseTerm(Opened, "2020-02-01", "2020-05-01"),
         new SeasonTerm(Opened, Period.Quarter), new SeasonTerm(Opened, Period.Month), new TrendTerm(Opened), new TrendTerm(Age),
         new ProductTerm([Region, new PolynomialTerm(Age, 2), new SeasonTerm(Opened, Period.Quarter)]),
+        new TimeOrderTerm(TimeOrderOperation.Lag, Age, 1), new TimeOrderTerm(TimeOrderOperation.Change, Age, 2), new TimeOrderTerm(TimeOrderOperation.MovingAverage, Age, 2),
+        new ProductTerm([new TimeOrderTerm(TimeOrderOperation.Lag, Age, 1), Region]),
     ];
 
     public static TheoryData<int> Indices => [.. Enumerable.Range(0, _terms.Length)];

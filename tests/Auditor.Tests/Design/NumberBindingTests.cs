@@ -120,9 +120,5 @@ public sealed class NumberBindingTests
             Refused(_table, new ProductTerm([new TransformTerm(NumberTransform.Log, Region), Opened])));
     }
 
-    [Fact]
-    public void Terms_in_time_order_are_said_to_be_missing() =>
-        Assert.Equal(["model.yaml: lag(price, 1): not built yet"], Refused(_table, new TimeOrderTerm(TimeOrderOperation.Lag, Price, 1)));
-
     private static double[] Rounded(double[] values) => [.. values.Select(value => Math.Round(value, 12))];
 }

@@ -31,7 +31,7 @@ public sealed class FactCatalogueTests
             ExclusionFacts.From(Samples.Tested with { OtherRowSet = new OtherRowSetFigures(1, 1, 1, 1, 1, "supported") }, new ExclusionInputs([], []), Samples.Policy()),
             AllLeftOutFacts.From(Samples.Tested, [], 480, Samples.Policy()),
             FitFacts.From("m", Samples.Fit, new FitInputs(false, 1, Samples.Influence, Samples.Collinearity)),
-            RowFacts.From("m", Samples.Rows),
+            RowFacts.From("m", Samples.Rows, Samples.Structure),
             ColumnFacts.From(ColumnInputs.NobodyMentions("memo")),
             CheckFacts.From(new CheckResult("reset", 2, 2, 400, 0.1, "form", false, null)),
             CoefficientFacts.From(new CoefficientFigures("price", 1, 1, 1, 0.3, null, -1, 3, null)),

@@ -51,7 +51,7 @@ public sealed class ModelFactsTests
     [Fact]
     public void Shares_of_rows_have_the_rows_before_them_as_their_whole()
     {
-        var facts = RowFacts.From("m", Samples.Rows);
+        var facts = RowFacts.From("m", Samples.Rows, Samples.Structure);
 
         Assert.Equal(new FactValue.Number(20.0 / 520), facts["filtered_out_share"]);
         Assert.Equal(new FactValue.Count(490), facts["kept"]);
@@ -63,9 +63,28 @@ public sealed class ModelFactsTests
     [Fact]
     public void No_row_has_no_share()
     {
-        var facts = RowFacts.From("m", new RowAccount(0, 0, 0, 0, 0, 0, new Dictionary<string, int>(), new Dictionary<string, int>(), []));
+        var facts = RowFacts.From("m", new RowAccount(0, 0, 0, 0, 0, 0, new Dictionary<string, int>(), new Dictionary<string, int>(), []), new StructureCounts(0, null, null, null, null, null, null, null));
 
         Assert.Equal(new FactValue.NotComputable("there is no row to take a share of"), facts["incomplete_share"]);
+    }
+
+    [Fact]
+    public void The_declared_structure_is_counted_and_what_is_not_declared_says_so()
+    {
+        var declared = RowFacts.From("m", Samples.Rows, Samples.Structure);
+        Assert.Equal(new FactValue.Count(12), declared["n_clusters"]);
+        Assert.Equal(new FactValue.Number(0.125), declared["largest_cluster_share"]);
+        Assert.Equal(new FactValue.Flag(false), declared["every_cluster_has_one_row"]);
+        Assert.Equal(new FactValue.Flag(true), declared["has_missing_periods"]);
+        Assert.Equal(new FactValue.Flag(true), RowFacts.From("m", Samples.Rows, Samples.Structure with { OneRowClusters = 12 })["every_cluster_has_one_row"]);
+        Assert.Equal(
+            new FactValue.NotComputable("periods cannot be counted: dates without a declared period, or numbers that are not whole"),
+            RowFacts.From("m", Samples.Rows, Samples.Structure with { MissingPeriods = null })["has_missing_periods"]);
+
+        var none = RowFacts.From("m", Samples.Rows, new StructureCounts(480, null, null, null, null, null, null, null));
+        Assert.Equal(new FactValue.Flag(false), none["clusters_declared"]);
+        Assert.Equal(new FactValue.NotComputable("no cluster declared"), none["n_clusters"]);
+        Assert.Equal(new FactValue.NotComputable("no time order declared"), none["missing_periods"]);
     }
 
     [Fact]

@@ -40,6 +40,8 @@ internal static class Samples
     public static readonly FitSummary Fit = new(
         480, 6, 474, 12.5, 0.16, 0.4, 0.39, 63, 5, 474, 1e-30, null, 100, -190, -160, 12, 13, [], [], [], null);
 
+    public static readonly StructureCounts Structure = new(480, 12, 60, 0, 40, 24, 3, 7);
+
     public static readonly RowAccount Rows = new(
         520, 20, 10, 7, 3, 480, new Dictionary<string, int> { ["age"] = 2, ["price"] = 1500, ["grade"] = 0 }, new Dictionary<string, int> { ["log(price)"] = 3 }, []);
 
