@@ -34,7 +34,7 @@ internal static class ModelAnalysis
             Exclusions.Of(model, fits, policy, sampling),
             [.. Enumerable.Range(0, model.Groups.Count).Select(group => Inputs(model, fits, group, common))],
             AllLeftOut.Of(model, fits.Common, policy, sampling),
-            ResidualCheckFigures.Of(fit, influence, main.Rows, policy.Significance, run.Seed),
+            ResidualCheckFigures.Of(fit, influence, SerialInputs.NothingDeclared, main.Rows, policy.Significance, run.Seed),
             InfluenceFigures.Of(influence, main.Rows, model.RowLabel),
             CollinearityFigures.Of(main),
             PlotFigures.Of(fit, [.. RowInfluence.OfAll(fit)], main.Rows, model.RowLabel, weighted: model.Weights is { Kind: not WeightKind.Frequency })));
