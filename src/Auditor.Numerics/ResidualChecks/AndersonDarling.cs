@@ -33,7 +33,11 @@ public static class AndersonDarling
 
         var statistic = -n - sum;
         var adjusted = statistic * (1 + (0.75 / n) + (2.25 / ((double)n * n)));
-        return new CheckStatistic(statistic, null, null, P(adjusted)) { PIsUpperBound = adjusted >= LargestForP };
+        return new CheckStatistic(statistic, null, null, P(adjusted))
+        {
+            PIsUpperBound = adjusted >= LargestForP,
+            Sizes = [new(SizeMeasure.DistanceFromNormal, statistic / n)],
+        };
     }
 
     /// <summary>log Phi(z) and log(1 - Phi(z)).</summary>

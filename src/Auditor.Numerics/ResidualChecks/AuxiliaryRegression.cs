@@ -36,7 +36,7 @@ internal sealed record AuxiliaryRegression(double N, int Df, double Explained, d
 
     /// <summary>A check of that value, chi-square on r - 1.</summary>
     public CheckOutcome Check(double statistic) =>
-        Impediment is { } impediment ? CheckOutcome.None(impediment) : ChiSquaredCheck.Of(statistic, Df);
+        Impediment is { } impediment ? CheckOutcome.None(impediment) : ChiSquaredCheck.Of(statistic, Df, new CheckSize(SizeMeasure.AuxiliaryRSquared, RSquared));
 
     /// <remarks>
     /// Residuals carry rounding of a length of at most the noise, so squares of equal residuals, in units of the variance, one of at most twice noise / (RSS/n)^½.

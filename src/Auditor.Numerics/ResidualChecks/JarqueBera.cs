@@ -32,15 +32,20 @@ public static class JarqueBera
         }
 
         var n = fit.Fit.N;
-        var check = ChiSquaredCheck.Of(Statistic([.. fit.Store.Residuals], [.. fit.Store.Copies], n), 2);
+        var (skewness, excess) = Shape([.. fit.Store.Residuals], [.. fit.Store.Copies], n);
+        var check = ChiSquaredCheck.Of(
+            Statistic(skewness, excess, n), 2, new CheckSize(SizeMeasure.Skewness, skewness), new CheckSize(SizeMeasure.ExcessKurtosis, excess));
         return n < SimulatedBelow
             ? check with { SimulatedP = Simulate(check.Statistic, ResidualMaker.Of(fit.Design), seed), Draws = Draws }
             : check;
     }
 
+    private static double Statistic(double skewness, double excess, double n) => n / 6 * ((skewness * skewness) + (excess * excess / 4));
+
+    /// <summary>Moment skewness and excess kurtosis about the mean.</summary>
     /// <param name="copies">How many observations each value stands for.</param>
     /// <param name="n">Their sum.</param>
-    private static double Statistic(ReadOnlySpan<double> values, ReadOnlySpan<double> copies, double n)
+    private static (double Skewness, double Excess) Shape(ReadOnlySpan<double> values, ReadOnlySpan<double> copies, double n)
     {
         var mean = BlockKernels.Dot(values, copies) / n;
         var (second, third, fourth) = (0.0, 0.0, 0.0);
@@ -52,8 +57,7 @@ public static class JarqueBera
             fourth += copies[i] * d * d * d * d / n;
         }
 
-        var (skewness, excess) = (third / Math.Pow(second, 1.5), (fourth / (second * second)) - 3);
-        return n / 6 * ((skewness * skewness) + (excess * excess / 4));
+        return (third / Math.Pow(second, 1.5), (fourth / (second * second)) - 3);
     }
 
     private static double Simulate(double observed, ResidualMaker residuals, ulong seed)
@@ -68,7 +72,8 @@ public static class JarqueBera
             }
 
             residuals.Take(sample);
-            larger += Statistic(sample, ones, residuals.N) >= observed * (1 - Tie) ? 1 : 0;
+            var (skewness, excess) = Shape(sample, ones, residuals.N);
+            larger += Statistic(skewness, excess, residuals.N) >= observed * (1 - Tie) ? 1 : 0;
         }
 
         return (larger + 1.0) / (Draws + 1);

@@ -24,6 +24,7 @@ public static class LargestResidual
             {
                 Position = row.Position,
                 LogP = Math.Min(0, Math.Log(influence.Observations) + StudentT.LogTwoSided(t, df)),
+                Sizes = [new(SizeMeasure.PartialRSquared, t * t / ((t * t) + df))],
             },
             _ => CheckOutcome.None(CheckImpediment.TooFew),
         };

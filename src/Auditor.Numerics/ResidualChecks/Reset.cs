@@ -1,5 +1,4 @@
 using Auditor.Numerics.Factor;
-using Auditor.Numerics.GroupTests;
 
 namespace Auditor.Numerics.ResidualChecks;
 
@@ -26,12 +25,7 @@ public static class Reset
         }
 
         var group = Group(fit);
-        return group.Rank < Powers ? CheckOutcome.None(CheckImpediment.PowersAddNothing) : PartialF.Of(group) switch
-        {
-            FTest f => new CheckStatistic(f.Statistic, f.Df1, f.Df2, f.Probability) { LogP = f.LogP },
-            PerfectWithGroup perfect => new UnboundedCheck(perfect.Df1, perfect.Df2, null),
-            _ => CheckOutcome.None(CheckImpediment.TooFew),
-        };
+        return group.Rank < Powers ? CheckOutcome.None(CheckImpediment.PowersAddNothing) : PartialFCheck.Of(group);
     }
 
     private static AddedGroup Group(CheckedFit fit)

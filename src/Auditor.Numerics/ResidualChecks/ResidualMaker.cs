@@ -19,6 +19,21 @@ internal sealed class ResidualMaker
 
     public int N => _q.Rows;
 
+    /// <summary>Rows of Q in the given order.</summary>
+    public ColumnMatrix Arranged(IReadOnlyList<int> rows)
+    {
+        var arranged = new ColumnMatrix(rows.Count, _q.Columns);
+        for (var k = 0; k < _q.Columns; k++)
+        {
+            for (var i = 0; i < rows.Count; i++)
+            {
+                arranged[i, k] = _q[rows[i], k];
+            }
+        }
+
+        return arranged;
+    }
+
     /// <param name="design">A row that stands for several gives as many.</param>
     public static ResidualMaker Of(IDesignRows design)
     {

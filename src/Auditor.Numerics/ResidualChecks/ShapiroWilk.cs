@@ -34,7 +34,7 @@ public static class ShapiroWilk
         }
 
         var w = Math.Min(1, sum * sum / ordered.Sum(value => (value - mean) * (value - mean)));
-        return new CheckStatistic(w, null, null, P(w, ordered.Length));
+        return new CheckStatistic(w, null, null, P(w, ordered.Length)) { Sizes = [new(SizeMeasure.NormalPlotRSquared, w)] };
     }
 
     /// <summary>The upper half of the coefficients a, largest first.</summary>

@@ -36,7 +36,7 @@ internal static class ModelAnalysis
             exclusions.All,
             [.. Enumerable.Range(0, model.Groups.Count).Select(group => Inputs(model, fits, group, common))],
             AllLeftOut.Of(model, fits.Common, policy, sampling),
-            ResidualCheckFigures.Of(fit, influence, main.Rows, policy.Significance, run.Seed),
+            ResidualCheckFigures.Of(fit, influence, SerialInputs.NothingDeclared, main.Rows, policy.Significance, run.Seed),
             InfluenceFigures.Of(influence, main.Rows, model.RowLabel),
             CollinearityFigures.Of(main),
             run.Pictures ? Pictures(model, fits, fit, main, common) : new PlotData(null, "no pictures were asked for"))

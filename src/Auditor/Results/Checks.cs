@@ -24,6 +24,14 @@ public sealed record CheckResult(
     [JsonIgnore(Condition = JsonIgnoreCondition.WhenWritingNull)]
     public int? Draws { get; init; }
 
+    /// <summary>How large what the check looks for is, by measure, whatever the number of rows.</summary>
+    [JsonIgnore(Condition = JsonIgnoreCondition.WhenWritingNull)]
+    public IReadOnlyDictionary<string, double>? Size { get; init; }
+
+    /// <summary>Whether the check speaks against its assumption. A unit root is a null that one wants to see rejected.</summary>
+    [JsonIgnore]
+    public bool? Contradicts => Check == "unit_root_residual" ? !Rejects : Rejects;
+
     /// <summary>p on which <see cref="Rejects"/> rests.</summary>
     [JsonIgnore]
     public double? DecisiveP => PSimulated ?? P;

@@ -9,10 +9,10 @@ internal static class SampleChecks
 
     public static IReadOnlyList<CheckResult> All { get; } =
     [
-        new("breusch_pagan", 41.3, 9, null, 4.410648e-06, "equal_variance", true, null),
+        new("breusch_pagan", 41.3, 9, null, 4.410648e-06, "equal_variance", true, null) { Size = new Dictionary<string, double> { ["auxiliary_r_squared"] = 0.01701 } },
         new("breusch_pagan_original", 63.8, 9, null, 2.468046e-10, "equal_variance", true, null),
         new("white", 88.1, 48, null, 0.0003710747, "equal_variance", true, null),
-        new("jarque_bera", 5.11, 2, null, 0.07769223, "normality", false, null),
+        new("jarque_bera", 5.11, 2, null, 0.07769223, "normality", false, null) { Size = new Dictionary<string, double> { ["skewness"] = 0.0412, ["excess_kurtosis"] = 0.211 } },
         new("shapiro_wilk", 0.9986, null, null, 0.0412, "normality", true, null),
         new("anderson_darling", 0.61, null, null, 0.1121, "normality", false, null),
         new("durbin_watson", null, null, null, null, "no_serial_correlation", null, NoOrder),

@@ -9,11 +9,12 @@ internal static class AuditTables
         "Checks of the final model’s residuals",
         record.Checks,
         new("Assumption", "text", check => Cell.Words(CheckWords.Spaced(check.Assumption))),
-        new("At this level it is", "text", check => Cell.Words(CheckWords.Conclusion(check.Rejects))),
+        new("At this level it is", "text", check => Cell.Words(CheckWords.Conclusion(check.Contradicts))),
         new("Check", "text", check => Cell.Words(CheckWords.Title(check))),
         new("Statistic", "number", check => Cell.Number(check.Statistic, check.Why)),
         new("on df", "number", check => Cell.Df(check.Df, check.Df2, check.Why ?? "Its distribution has no degrees of freedom.")),
-        new("p", "number", check => Cell.Probability(check.DecisiveP, check.PSimulated is null ? check.Log10P : null, level, check.Why)));
+        new("p", "number", check => Cell.Probability(check.DecisiveP, check.PSimulated is null ? check.Log10P : null, level, check.Why)),
+        new("How large", "text", check => CheckWords.Size(check) is { } size ? Cell.Words(size) : Cell.Missing(check.Why)));
 
     public static ReportTable Influence(Influence influence)
     {

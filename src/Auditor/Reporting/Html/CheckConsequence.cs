@@ -8,7 +8,7 @@ internal sealed record CheckConsequence(string Assumption, string Checks, string
     /// <summary>One for each contradicted assumption, in the order of the checks.</summary>
     public static IReadOnlyList<CheckConsequence> Of(AuditRecord record) =>
     [
-        .. record.Checks.Where(check => check.Rejects == true).GroupBy(check => check.Assumption).Select(group => new CheckConsequence(
+        .. record.Checks.Where(check => check.Contradicts == true).GroupBy(check => check.Assumption).Select(group => new CheckConsequence(
             CheckWords.Spaced(group.Key), string.Join("; ", group.Select(check => CheckWords.Title(check.Check))), FollowsFrom(group.Key, [.. group], record))),
     ];
 

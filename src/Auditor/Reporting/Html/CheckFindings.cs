@@ -24,7 +24,7 @@ internal sealed class CheckFindings(IReadOnlyList<CheckResult> checks, double le
     {
         CheckResult[] made = [.. Made(assumption).Where(check => check.Check != NeedsNormality)];
         var (contradicted, not, unknown) = Titles[assumption];
-        return made.Length == 0 ? unknown : made.Any(check => check.Rejects == true) ? contradicted : not;
+        return made.Length == 0 ? unknown : made.Any(check => check.Contradicts == true) ? contradicted : not;
     }
 
     /// <summary>Every check of the assumption with its p; the reason when there is none.</summary>

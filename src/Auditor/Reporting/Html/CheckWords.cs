@@ -23,6 +23,20 @@ internal static class CheckWords
         ["chow"] = "Chow, at the declared split",
     };
 
+    private static readonly Dictionary<string, string> Measures = new()
+    {
+        ["auxiliary_r_squared"] = "R² of its regression",
+        ["partial_r_squared"] = "partial R²",
+        ["normal_plot_r_squared"] = "R² of the normal plot",
+        ["first_autocorrelation"] = "autocorrelation of neighbours",
+        ["persistence"] = "share left after one period",
+    };
+
+    /// <summary>Each measure with its value.</summary>
+    public static string? Size(CheckResult check) => check.Size is { Count: > 0 } sizes
+        ? string.Join("; ", sizes.Select(size => (Measures.GetValueOrDefault(size.Key) ?? Spaced(size.Key)) + "\u00A0" + NumberText.Number(size.Value)))
+        : null;
+
     public static string Title(string check) => Titles.GetValueOrDefault(check) ?? Spaced(check);
 
     /// <summary>The check's name with what is particular to this run of it: the row it found, how its p was had, its variant.</summary>
@@ -38,7 +52,7 @@ internal static class CheckWords
 
     public static string Spaced(string name) => name.Replace('_', ' ');
 
-    public static string Conclusion(bool? rejects) => rejects switch
+    public static string Conclusion(bool? contradicts) => contradicts switch
     {
         true => "contradicted",
         false => "not contradicted",
