@@ -52,12 +52,6 @@ internal static class InputFiles
             rules.Sha256,
             CommandLine.Version,
             request.Seed,
-<<<<<<< HEAD
-            Clock.Started);
-        return Reading<AuditInputs>.Of(new AuditInputs(declaration, mentions, table.Value, rules.Policy, rules.Rules, provenance, request.Threads)
-        {
-            Pictures = request.Formats.Contains("html"),
-=======
             Clock.Text(request.Moment))
         {
             Acceptances = acceptances.Name,
@@ -69,7 +63,7 @@ internal static class InputFiles
         return Reading<AuditInputs>.Of(new AuditInputs(declaration, reading.Mentions, table.Value, rules.Policy, rules.Rules, provenance, request.Threads)
         {
             Acceptances = new AcceptancesOfRun(acceptances.Entries, asOf),
->>>>>>> accept/main
+            Pictures = request.Formats.Contains("html"),
         });
     }
 }

@@ -105,11 +105,9 @@ public sealed record AuditInputs(
     Provenance Provenance,
     int Threads = 1)
 {
-<<<<<<< HEAD
     /// <summary>Whether the points of the pictures are gathered; no figure depends on it.</summary>
     public bool Pictures { get; init; } = true;
-=======
+
     /// <summary>Findings that a named approver has accepted.</summary>
     public AcceptancesOfRun Acceptances { get; init; } = AcceptancesOfRun.None;
->>>>>>> accept/main
 }
