@@ -27,8 +27,9 @@ internal sealed class ModelFits
     public RowSetFit? Common => On(Selection.Common);
 
     /// <param name="main">The rows of the fit that is shown and checked: their residuals are kept.</param>
+    /// <param name="scored">Whether robust covariances of the final model's own coefficients are wanted.</param>
     /// <param name="threads">Most row sets to work on at once; each is computed by itself, so no result depends on it.</param>
-    public static ModelFits Compute(BoundModel model, RowSelection selection, RowSubset main, int threads)
+    public static ModelFits Compute(BoundModel model, RowSelection selection, RowSubset main, bool scored, int threads)
     {
         var wanted = Wanted(model, selection).Where(entry => entry.Key.Count > 0).ToArray();
         var residuals = new ResidualStore();
@@ -37,7 +38,13 @@ internal sealed class ModelFits
             0,
             wanted.Length,
             new ParallelOptions { MaxDegreeOfParallelism = threads },
-            at => computed[at] = RowSetFit.Compute(model, wanted[at].Key, [.. wanted[at].Value], wanted[at].Key.Equals(selection.Common), wanted[at].Key.Equals(main) ? residuals : null));
+            at => computed[at] = RowSetFit.Compute(
+                model,
+                wanted[at].Key,
+                [.. wanted[at].Value],
+                wanted[at].Key.Equals(selection.Common),
+                wanted[at].Key.Equals(main) ? residuals : null,
+                scored && (wanted[at].Key.Equals(selection.Final) || wanted[at].Key.Equals(selection.Common))));
         var fits = new ModelFits(selection) { Residuals = residuals };
         foreach (var fit in computed)
         {

@@ -31,20 +31,25 @@ internal sealed class RowSetFit
     /// <summary>All groups of the plan added at once; null when they were not asked for jointly.</summary>
     public GroupFit? Joint { get; private set; }
 
+    /// <summary>Sums for robust covariances of the final model's own coefficients; null when they were not asked for.</summary>
+    public CoefficientScores? Scores { get; private set; }
+
     public GroupFit this[int group] => _groups[group];
 
     /// <param name="groups">Positions of the groups to be tested on these rows.</param>
     /// <param name="jointly">Whether all of them together, and each last, are wanted too.</param>
     /// <param name="residuals">Keeps every row's residual and leverage; null when they are not wanted.</param>
-    public static RowSetFit Compute(BoundModel model, RowSubset rows, IReadOnlyList<int> groups, bool jointly, ResidualStore? residuals)
+    /// <param name="scored">Whether robust covariances of the coefficients are wanted.</param>
+    public static RowSetFit Compute(BoundModel model, RowSubset rows, IReadOnlyList<int> groups, bool jointly, ResidualStore? residuals, bool scored)
     {
         var plan = new DesignPlan(model, groups);
         var design = new DesignRows(model, plan, rows);
         var final = FinalFactor.Of(FactorBuilder.Build(design));
         var added = plan.Layout.Groups.Select(range => AddedGroup.Of(final, [.. range.Indices])).ToList();
         var joint = jointly && groups.Count > 0 ? AddedGroup.Of(final, Columns(plan, [.. Enumerable.Range(0, groups.Count)])) : null;
-        var pass = RowPass.Run(design, final, joint is null ? added : [.. added, joint], residuals is null ? [] : [residuals]);
-        var result = new RowSetFit(rows, plan, final, new Fit(final, pass));
+        var scores = scored ? new CoefficientScores(final) : null;
+        var pass = RowPass.Run(design, final, joint is null ? added : [.. added, joint], [.. new IAccumulator?[] { residuals, scores }.OfType<IAccumulator>()]);
+        var result = new RowSetFit(rows, plan, final, new Fit(final, pass)) { Scores = scores };
         for (var g = 0; g < groups.Count; g++)
         {
             var last = joint is null ? null : AddedGroup.After(final, Others(plan, g), added[g].Columns);

@@ -13,4 +13,8 @@ internal sealed record AuditResults(
     IReadOnlyList<CheckResult> Checks,
     Influence Influence,
     Collinearity Collinearity,
-    PlotData Plots);
+    PlotData Plots)
+{
+    /// <summary>The author's reported figures, compared.</summary>
+    public required ClaimsAudit Claims { get; init; }
+}
