@@ -26,7 +26,7 @@ internal static class PossibleValues
         };
         if (!possible.Meets(claimed))
         {
-            yield return new ClaimRelation([figure.Path], $"{figure.What} is {possible}, whatever the data", false, $"{figure.Figure.Text} was printed");
+            yield return new ClaimRelation([figure.Path], $"{figure.What} is {possible}, whatever the data", false, $"{figure.Figure.Text} is printed");
         }
     }
 }

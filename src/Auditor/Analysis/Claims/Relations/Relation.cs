@@ -16,11 +16,16 @@ internal static class Relation
             [follows.Path, .. others.Select(figure => figure.Path)],
             relation,
             consistent,
-            consistent ? null : $"{Figures(others)} give {expected}; {follows.Figure.Text} was printed");
+            consistent ? null : $"{Figures(others)} give {expected}, and {follows.Figure.Text} is printed");
     }
 
-    private static string Figures(IReadOnlyList<ClaimedFigure> figures) =>
-        string.Join(", ", figures.Select(figure => $"{Lowered(figure.What)} {figure.Figure.Text}"));
+    private static string Figures(IReadOnlyList<ClaimedFigure> figures) => string.Join(", ", figures.Select(figure => $"{Name(figure)} {figure.Figure.Text}"));
 
-    private static string Lowered(string what) => what is ['R', '²', ..] or ['F', ' ', ..] ? what : char.ToLowerInvariant(what[0]) + what[1..];
+    /// <summary>The figure's name where it is clear what it is of.</summary>
+    private static string Name(ClaimedFigure figure) => figure.Kind switch
+    {
+        ClaimKinds.F => "F",
+        ClaimKinds.RSquared => figure.Path == DeclaredClaims.AdjustedPath ? "adjusted R²" : "R²",
+        _ => figure.Kind.Replace('_', ' '),
+    };
 }
