@@ -35,10 +35,15 @@ internal sealed class ClaimJudgement(double significance)
     private static ClaimResult Result(ClaimedFigure claim, Reproduction? used, string outcome, string? printed) =>
         new(claim.Path, claim.What, claim.Figure.Text, used?.Value, outcome) { Kind = claim.Kind, Line = claim.Figure.Line, RecomputedAsPrinted = printed };
 
-    /// <summary>Half-way between two figures both are right: then one digit more shows why.</summary>
+    /// <summary>A p is never shown as 0. Half-way between two figures both are right: then one digit more shows why.</summary>
     private static string AsPrintedFor(ClaimedFigure claim, Reproduction used, string outcome)
     {
         var text = AsPrinted.Of(claim.Printed, used.Value);
+        if (claim.Kind == ClaimKinds.P && !text.Any(sign => sign is >= '1' and <= '9'))
+        {
+            return PlainNumber.P(used.Value);
+        }
+
         var same = claim.Printed.Relation != PrintedRelation.Rounded || (PrintedNumber.Read(text) is { } read && read.Value == claim.Printed.Value);
         return same == (outcome == ClaimOutcomes.Agrees) ? text : PlainNumber.Digits(used.Value, claim.Printed.Digits.ToString(System.Globalization.CultureInfo.InvariantCulture).Length + 2);
     }

@@ -1,7 +1,6 @@
 using System.Globalization;
 using System.Text.Json;
 using Auditor.Results;
-using Auditor.SelfTest;
 using Auditor.Tests.Reference;
 
 namespace Auditor.Tests.Analysis.Claims;
