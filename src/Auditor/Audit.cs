@@ -62,13 +62,15 @@ public static class Audit
         results.Checks,
         results.Influence,
         results.Collinearity,
-        NotYet.Claims(inputs.Declaration),
+        results.Claims.Figures,
         NotYet.Elimination(inputs.Declaration),
         rules.Findings,
         rules.Undecided,
         inputs.Policy.Effective,
         inputs.Provenance)
     {
+        StandardErrorsReproducedBy = results.Claims.StandardErrors,
+        ClaimsAgainstEachOther = results.Claims.AgainstEachOther,
         PolicyOverridden = inputs.Policy.Overridden,
         Plots = results.Plots,
         WhatIf = results.WhatIf,

@@ -1,3 +1,4 @@
+using Auditor.Analysis.Claims;
 using Auditor.Declaration;
 using Auditor.Design;
 using Auditor.Numerics.ResidualChecks;
@@ -19,19 +20,22 @@ internal static class ModelAnalysis
             return Reading<AuditResults>.Failed(NoRows(declaration, common));
         }
 
-        var fits = ModelFits.Compute(model, selection, common ? selection.Common : selection.Final, run.Pictures ? policy.RowSet : null, run.Threads);
+        var fits = ModelFits.Compute(
+            model, selection, common ? selection.Common : selection.Final, run.Pictures ? policy.RowSet : null, DeclaredClaims.NeedCovariances(declaration), run.Threads);
         var sampling = model.Weights?.Kind == WeightKind.Sampling;
         var main = (common ? fits.Common : fits.Final)!;
         var fit = CheckedFits.Of(model, main, fits.Residuals, sampling);
         var influence = InfluenceSummary.Of(fit, InfluenceFigures.Shown);
         var other = selection.Final.Equals(selection.Common) ? null : common ? fits.Final : fits.Common;
+        var shown = new ClaimedRows(main, FitFigures.Of(main, policy.Significance, sampling), sampling, false);
+        var beside = other is null ? null : new ClaimedRows(other, FitFigures.Of(other, policy.Significance, sampling), sampling, true);
         var exclusions = Exclusions.Of(model, fits, policy, sampling, whatIf: run.Pictures);
         return Reading<AuditResults>.Of(new AuditResults(
             declaration.Model.Id,
             selection.Account(common, mentioned),
             StructureFigures.Of(model, main.Rows),
-            FitFigures.Of(main, policy.Significance, sampling),
-            other is null ? null : FitFigures.Of(other, policy.Significance, sampling),
+            shown.Summary,
+            beside?.Summary,
             main.Fit.Perfect,
             exclusions.All,
             [.. Enumerable.Range(0, model.Groups.Count).Select(group => Inputs(model, fits, group, common))],
@@ -42,6 +46,13 @@ internal static class ModelAnalysis
             run.Pictures ? Pictures(model, fits, fit, main, common) : new PlotData(null, "no pictures were asked for"))
         {
             WhatIf = exclusions.WhatIf,
+            Claims = ClaimComparison.Of(
+                declaration,
+                beside is null ? [shown] : [shown, beside],
+                exclusions.All,
+                [.. Enumerable.Range(0, model.Groups.Count).Select(group => OnOtherRows(fits, group, common))],
+                NotYet.Elimination(declaration),
+                policy.Significance),
         });
     }
 
@@ -50,6 +61,10 @@ internal static class ModelAnalysis
         {
             Groups = [.. Enumerable.Range(0, model.Groups.Count).Select(group => (common ? fits.Common : fits.Own(group))?[group].Plots)],
         };
+
+    /// <summary>A group on the row set that its exclusion does not rest on; null when they are the same.</summary>
+    private static GroupFit? OnOtherRows(ModelFits fits, int group, bool common) =>
+        fits.Selection.Own[group].Equals(fits.Selection.Common) ? null : (common ? fits.Own(group) : fits.Common)?[group];
 
     private static Problem NoRows(ModelDeclaration declaration, bool common) => new(
         declaration.File,

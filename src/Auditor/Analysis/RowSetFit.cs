@@ -32,24 +32,25 @@ internal sealed class RowSetFit
     /// <summary>All groups of the plan added at once; null when they were not asked for jointly.</summary>
     public GroupFit? Joint { get; private set; }
 
+    /// <summary>Sums for robust covariances of the final model's own coefficients; null when they were not asked for.</summary>
+    public CoefficientScores? Scores { get; private set; }
+
     public GroupFit this[int group] => _groups[group];
 
     /// <param name="groups">Positions of the groups to be tested on these rows.</param>
-    /// <param name="jointly">Whether all of them together, and each last, are wanted too.</param>
-    /// <param name="residuals">Keeps every row's residual and leverage; null when they are not wanted.</param>
-    /// <param name="pictured">Groups whose pictures show these rows.</param>
-    public static RowSetFit Compute(
-        BoundModel model, RowSubset rows, IReadOnlyList<int> groups, bool jointly, ResidualStore? residuals, IReadOnlySet<int> pictured)
+    /// <param name="wishes">What is wanted beside the fit and the groups' own tests.</param>
+    public static RowSetFit Compute(BoundModel model, RowSubset rows, IReadOnlyList<int> groups, FitWishes wishes)
     {
         var plan = new DesignPlan(model, groups);
         var design = new DesignRows(model, plan, rows);
         var final = FinalFactor.Of(FactorBuilder.Build(design));
         var added = plan.Layout.Groups.Select(range => AddedGroup.Of(final, [.. range.Indices])).ToList();
-        var joint = jointly && groups.Count > 0 ? AddedGroup.Of(final, Columns(plan, [.. Enumerable.Range(0, groups.Count)])) : null;
-        var pictures = groups.Select((group, g) => pictured.Contains(group) ? GroupPictures.Of(added[g], plan, model.Groups.Count) : null).ToList();
-        IAccumulator[] others = [.. residuals is null ? [] : new[] { residuals }, .. pictures.SelectMany(picture => picture?.Accumulators ?? [])];
-        var pass = RowPass.Run(design, final, joint is null ? added : [.. added, joint], others);
-        var result = new RowSetFit(rows, plan, final, new Fit(final, pass));
+        var joint = wishes.Jointly && groups.Count > 0 ? AddedGroup.Of(final, Columns(plan, [.. Enumerable.Range(0, groups.Count)])) : null;
+        var pictures = groups.Select((group, g) => wishes.Pictured.Contains(group) ? GroupPictures.Of(added[g], plan, model.Groups.Count) : null).ToList();
+        var scores = wishes.Scored ? new CoefficientScores(final) : null;
+        IAccumulator?[] others = [wishes.Residuals, scores, .. pictures.SelectMany(picture => picture?.Accumulators ?? [])];
+        var pass = RowPass.Run(design, final, joint is null ? added : [.. added, joint], [.. others.OfType<IAccumulator>()]);
+        var result = new RowSetFit(rows, plan, final, new Fit(final, pass)) { Scores = scores };
         for (var g = 0; g < groups.Count; g++)
         {
             var last = joint is null ? null : AddedGroup.After(final, Others(plan, g), added[g].Columns);
@@ -75,3 +76,10 @@ internal sealed record GroupFit(AddedGroup Added, GroupSums Sums, AddedGroup? La
     /// <summary>Null when they were not asked for on these rows or cannot be drawn.</summary>
     public GroupPlots? Plots { get; init; }
 }
+
+/// <summary>What is wanted of a row set beside the fit and the groups' own tests.</summary>
+/// <param name="Jointly">All groups together, and each last.</param>
+/// <param name="Residuals">Keeps every row's residual and leverage; null when they are not wanted.</param>
+/// <param name="Pictured">Groups whose pictures show these rows.</param>
+/// <param name="Scored">Robust covariances of the coefficients.</param>
+internal sealed record FitWishes(bool Jointly, ResidualStore? Residuals, IReadOnlySet<int> Pictured, bool Scored);

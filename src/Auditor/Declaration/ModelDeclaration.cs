@@ -26,7 +26,11 @@ public sealed record FinalModelDeclaration(bool Intercept, IReadOnlyList<Term> T
 public sealed record LeftOutGroup(string Name, IReadOnlyList<Term> Terms, string? Because, ReportedTest? Reported, int Line);
 
 /// <summary>A figure as the report printed it: its digits are part of the claim.</summary>
-public sealed record ReportedFigure(string Text, int Line);
+public sealed record ReportedFigure(string Text, int Line)
+{
+    /// <summary>What the digits say; the reader takes no text without it.</summary>
+    public PrintedNumber Number => PrintedNumber.Read(Text) ?? throw new InvalidOperationException($"'{Text}' is no printed number");
+}
 
 /// <summary>The figures printed for one test; df holds one or two numbers.</summary>
 public sealed record ReportedTest(ReportedFigure? F, IReadOnlyList<ReportedFigure> Df, ReportedFigure? P);

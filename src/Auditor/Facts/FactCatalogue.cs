@@ -13,6 +13,7 @@ public static class FactCatalogue
         .. ColumnFacts.Definitions,
         .. CoefficientFacts.Definitions,
         .. AcceptanceFacts.Definitions,
+        .. ClaimFacts.Definitions,
     ];
 
     private static readonly ILookup<About, FactDefinition> ByAbout = All.ToLookup(fact => fact.About);

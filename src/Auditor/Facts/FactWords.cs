@@ -13,6 +13,8 @@ internal static class FactWords
 
     public static readonly IReadOnlyList<string> Kinds = ["number", "levels", "date", "text"];
 
+    public static readonly IReadOnlyList<string> ClaimParts = ["final_model", "coefficient", "left_out", "step"];
+
     /// <summary>A new check is added here, so that rules can name it.</summary>
     public static readonly IReadOnlyList<string> Checks =
     [

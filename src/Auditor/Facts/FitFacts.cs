@@ -7,7 +7,11 @@ namespace Auditor.Facts;
 /// <param name="LeftOutGroups">Groups of terms declared as left out.</param>
 /// <param name="Influence">How single rows bear on the fit.</param>
 /// <param name="Collinearity">How the fit's terms depend on each other.</param>
-public sealed record FitInputs(bool Perfect, int LeftOutGroups, Influence Influence, Collinearity Collinearity);
+public sealed record FitInputs(bool Perfect, int LeftOutGroups, Influence Influence, Collinearity Collinearity)
+{
+    /// <summary>The report's own figures, compared.</summary>
+    internal ClaimsAudit Claims { get; init; } = new([], null, []);
+}
 
 /// <summary>The facts of the final model's fit on its own rows.</summary>
 public static class FitFacts
@@ -34,6 +38,12 @@ public static class FitFacts
         .Text("nearly_aliased", "Those columns.", view => ColumnLists.Names(view.Fit.NearlyAliased))
         .Number("digits_lost", FactUnits.Digits, "Most digits lost by one of them.", view => ColumnLists.MostDigitsLost(view.Fit.NearlyAliased), ColumnLists.NoneNearlyAliased)
         .Count("left_out_groups", "groups", "Groups of terms declared as left out.", view => view.Inputs.LeftOutGroups)
+        .Count("standard_errors_reported", "standard errors", "Standard errors that the report prints.", view => view.Inputs.Claims.StandardErrors?.Of ?? 0)
+        .Count("standard_errors_reproduced", "standard errors", "Of those, how many the covariance reproduces that reproduces most.", view => view.Inputs.Claims.StandardErrors?.Reproduced ?? 0)
+        .Text("standard_errors_reproduced_by", "That covariance.", view => view.Inputs.Claims.StandardErrors?.Covariance, _ => "no covariance reproduces a reported standard error")
+        .Flag("robust_standard_errors_reported", "That covariance is not the classical one.", view => view.Inputs.Claims.StandardErrors?.Covariance is not (null or "classical"))
+        .Flag("reported_on_other_rows", "Figures of the final model are reproduced on the other row set, not on the fit shown.",
+            view => view.Inputs.Claims.Figures.Any(claim => claim.Rows is not null && claim.Claim.StartsWith("reported.", StringComparison.Ordinal)))
         .Flag("has_leverage_one_rows", "At least one row has leverage 1: the model fits it whatever its response.", view => view.Inputs.Influence.LeverageOne.Count > 0)
         .Text("leverage_one_rows", "Those rows, by number.", view => ColumnLists.Numbers(view.Inputs.Influence.LeverageOne))
         .Number("largest_cooks_distance", FactUnits.None, "Largest Cook's distance of a row.", view => MostInfluential(view)?.CooksDistance, NoInfluence)

@@ -25,6 +25,12 @@ public sealed record AuditRecord(
     IReadOnlyDictionary<string, object> Policy,
     Provenance Provenance)
 {
+    /// <summary>Which covariance reproduces the reported standard errors; null when none is reported.</summary>
+    public StandardErrorsReproduced? StandardErrorsReproducedBy { get; init; }
+
+    /// <summary>Reported figures that must fit together whatever the data are.</summary>
+    public IReadOnlyList<ClaimRelation> ClaimsAgainstEachOther { get; init; } = [];
+
     /// <summary>Policy values that are not the shipped ones, with the shipped value.</summary>
     public IReadOnlyDictionary<string, object> PolicyOverridden { get; init; } = new Dictionary<string, object>();
 

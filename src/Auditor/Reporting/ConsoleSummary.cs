@@ -21,6 +21,11 @@ public static class ConsoleSummary
                 .Append(VerdictWords.Of(exclusion).Word).Append(". ").Append(exclusion.Reason).Append('\n');
         }
 
+        if (ClaimWords.Failing(record) is { } figures)
+        {
+            text.Append(figures).Append('\n');
+        }
+
         text.Append("Findings: ").Append(OutcomeSentence.Findings(record)).Append(OutcomeSentence.Accepted(record) is { } accepted ? $"; {accepted}.\n" : ".\n");
         text.Append("Statistical evidence, not approval: the firm's policy, local rules and qualified people decide.\n");
         return text.ToString();

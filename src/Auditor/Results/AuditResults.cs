@@ -18,4 +18,7 @@ internal sealed record AuditResults(
 {
     /// <summary>Null when it was not asked for.</summary>
     public WhatIf? WhatIf { get; init; }
+
+    /// <summary>The author's reported figures, compared.</summary>
+    public required ClaimsAudit Claims { get; init; }
 }

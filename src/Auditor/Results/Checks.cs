@@ -66,8 +66,6 @@ public sealed record TermCollinearity(string Term, int Df, double? Gvif, double?
 
 public sealed record VarianceProportions(double ConditionIndex, IReadOnlyDictionary<string, double> Proportions);
 
-public sealed record ClaimResult(string Claim, string Reported, double? Recomputed, string Outcome);
-
 public sealed record StepResult(
     int Step,
     string Drop,

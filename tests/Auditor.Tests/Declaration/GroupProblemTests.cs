@@ -42,9 +42,9 @@ public sealed class GroupProblemTests
             ["left_out: [{group: a, terms: [b], reported: {}}, {group: c, terms: [d], reported: {f: x, df: [1, 2, 3], p: 0.4.1}}, {group: e, terms: [f], reported: {df: 3, q: 1}}]"],
             [
                 "6: left_out \"a\".reported: expected at least one of f, df, p",
-                "6: left_out \"c\".reported.f: expected a figure such as 0.310, 1e-05 or \"< 0.001\", found 'x'",
+                "6: left_out \"c\".reported.f: expected a figure such as 2.13, 1e-05 or \"> 100\", without thousands marks or a per cent sign, found 'x'",
                 "6: left_out \"c\".reported.df: expected a list of one or two figures, found 3",
-                "6: left_out \"c\".reported.p: expected a figure such as 0.310, 1e-05 or \"< 0.001\", found '0.4.1'",
+                "6: left_out \"c\".reported.p: expected a figure such as 0.310, 41.3 %, 1e-05 or \"< 0.001\", without thousands marks, found '0.4.1'",
                 "6: left_out \"e\".reported: unknown key 'q'; the keys are f, df, p",
                 "6: left_out \"e\".reported.df: expected a list of one or two figures, found '3'",
             ]
@@ -120,17 +120,17 @@ public sealed class GroupProblemTests
         {
             ["reported: {rows_used: many, coefficients: [a]}"],
             [
-                "6: reported.rows_used: expected a figure such as 0.310, 1e-05 or \"< 0.001\", found 'many'",
+                "6: reported.rows_used: expected a whole number such as 54000, without thousands marks, found 'many'",
                 "6: reported.coefficients: expected a map from coefficient labels to figures, found a list",
             ]
         },
         {
-            ["reported: {coefficients: {a: {}, b: {estimat: 1}, c: 3, d: {estimate: \"1,000\", p: \"<0.001\"}}}"],
+            ["reported: {coefficients: {a: {}, b: {estimat: 1}, c: 3, d: {estimate: \"1,000.5\", p: \"<0.001\"}}}"],
             [
                 "6: reported.coefficients[a]: expected at least one of estimate, standard_error, p",
                 "6: reported.coefficients[b]: unknown key 'estimat'; did you mean 'estimate'?",
                 "6: reported.coefficients[c]: expected a map with the keys estimate, standard_error, p, found '3'",
-                "6: reported.coefficients[d].estimate: expected a figure such as 0.310, 1e-05 or \"< 0.001\", found '1,000'",
+                "6: reported.coefficients[d].estimate: expected a figure such as 0.310, 41.3 %, 1e-05 or \"< 0.001\", without thousands marks, found '1,000.5'",
             ]
         },
     };

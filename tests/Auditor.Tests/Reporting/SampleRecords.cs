@@ -23,9 +23,9 @@ internal static class SampleRecords
         [new("suppressors", ["engine condition", "previous owners"], 3, 2384, 17.2, 4.7e-11, 9.4e-11)],
         SampleChecks.All, SampleChecks.Influence, SampleChecks.Collinearity,
         [
-            new("reported.r_squared", "0.386", 0.3863, "agrees"),
-            new("reported.coefficients[advance_rate].standard_error", "0.014", 0.0412, "differs"),
-            new("left_out[engine condition].reported.p", "0.49", 3.77848107e-17, "differs"),
+            new("reported.r_squared", "R²", "0.386", 0.3863, "agrees") { RecomputedAsPrinted = "0.386" },
+            new("reported.coefficients[advance_rate].standard_error", "Standard error of advance_rate", "0.014", 0.0412, "differs") { RecomputedAsPrinted = "0.041" },
+            new("left_out[engine condition].reported.p", "p of the left-out group engine condition", "0.49", 3.77848107e-17, "differs") { RecomputedAsPrinted = "3.78e-17" },
         ],
         [
             new(1, "engine condition", 38.4203138, 2, 2386, 3.77848107e-17, true, null),

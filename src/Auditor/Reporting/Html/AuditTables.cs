@@ -58,14 +58,6 @@ internal static class AuditTables
             new("p, adjusted", "number", set => Cell.Probability(set.PAdjusted, null, level, why)));
     }
 
-    public static ReportTable Claims(AuditRecord record) => ReportTable.Of(
-        "Figures of the report, recomputed",
-        record.Claims,
-        new("Figure", "name", claim => Cell.Name(claim.Claim)),
-        new("Outcome", "text", claim => Cell.Words(CheckWords.Spaced(claim.Outcome))),
-        new("As reported", "number", claim => new Cell(claim.Reported, null, "number", null)),
-        new("Recomputed", "number", claim => Cell.Number(claim.Recomputed, "not compared yet")));
-
     public static ReportTable Elimination(AuditRecord record, double level) => ReportTable.Of(
         "The author’s path, each step tested in that step’s model",
         record.Elimination,

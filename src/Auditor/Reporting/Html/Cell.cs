@@ -11,6 +11,9 @@ internal sealed record Cell(string Text, string? Full, string Kind, string? Why)
     /// <summary>Letter of the note below the table that holds the reason.</summary>
     public string? Note { get; init; }
 
+    /// <summary>Anchor on the page that says more.</summary>
+    public string? Link { get; init; }
+
     public static Cell Words(string text) => new(text, null, "text", null);
 
     public static Cell Name(string? text, string? why = null) => text is null ? Missing(why) : new(text, null, "name", null);

@@ -8,9 +8,12 @@ namespace Auditor.Reporting.Html;
 /// <param name="Because">The approver's reason.</param>
 internal sealed record FindingPage(Finding Finding, string Severity, string Subject, string? Accepted, string? Because)
 {
+    /// <summary>Id of the finding on the page.</summary>
+    public string Anchor { get; init; } = "";
+
     /// <summary>The gravest first, otherwise in the record's order.</summary>
     public static IReadOnlyList<FindingPage> Of(AuditRecord record) =>
-        [.. record.Findings.OrderByDescending(finding => finding.Severity).Select(finding => Of(finding, record))];
+        [.. record.Findings.OrderByDescending(finding => finding.Severity).Select((finding, index) => Of(finding, record) with { Anchor = string.Create(CultureInfo.InvariantCulture, $"finding-{index + 1}") })];
 
     private static FindingPage Of(Finding finding, AuditRecord record) => new(
         finding,

@@ -51,6 +51,11 @@ internal static class OutcomeSentence
             sentences.Add("The outcome rests on the checks and on the report's own figures alone.");
         }
 
+        if (ClaimWords.Failing(record) is { } figures)
+        {
+            sentences.Add(figures);
+        }
+
         if (record.PolicyOverridden.Count > 0)
         {
             sentences.Add("Judged by a policy that differs from the shipped one: "

@@ -54,7 +54,15 @@ internal sealed record ReportPage(AuditRecord Record, PageScript Script)
 
     public ReportTable Proportions => AuditTables.Proportions(Record.Collinearity);
 
-    public ReportTable Claims => AuditTables.Claims(Record);
+    public string ClaimsSummary => ClaimWords.Summary(Record);
+
+    public string? StandardErrors => ClaimWords.StandardErrors(Record);
+
+    public ReportTable Claims => ClaimWords.Table(Record, Findings);
+
+    public string ClaimRelations => ClaimWords.Relations(Record);
+
+    public ReportTable ClaimContradictions => ClaimWords.Contradictions(Record);
 
     public ReportTable Elimination => AuditTables.Elimination(Record, Level);
 

@@ -1,0 +1,98 @@
+using Auditor.Results;
+
+namespace Auditor.Reporting.Html;
+
+/// <summary>What came of comparing the report's own figures, in words.</summary>
+internal static class ClaimWords
+{
+    private static readonly Dictionary<string, string> Outcomes = new()
+    {
+        [ClaimOutcomes.Agrees] = "agrees",
+        [ClaimOutcomes.LastDigit] = "differs in the last digit",
+        [ClaimOutcomes.Differs] = "differs",
+        [ClaimOutcomes.CannotBeRecomputed] = "cannot be recomputed",
+    };
+
+    /// <summary>"29 figures: 27 agree, 1 differs in the last digit, 1 differs."</summary>
+    public static string Summary(AuditRecord record)
+    {
+        string[] parts =
+        [
+            .. Part(Count(record, ClaimOutcomes.Agrees), "agrees", "agree"),
+            .. Part(Count(record, ClaimOutcomes.LastDigit), "differs in the last digit", "differ in the last digit"),
+            .. Part(Count(record, ClaimOutcomes.Differs), "differs", "differ"),
+            .. Part(Count(record, ClaimOutcomes.CannotBeRecomputed), "cannot be recomputed", "cannot be recomputed"),
+        ];
+        return $"{Figures(record.Claims.Count)}: {string.Join(", ", parts)}.";
+    }
+
+    /// <summary>One sentence when the report's own figures fail, else null.</summary>
+    public static string? Failing(AuditRecord record)
+    {
+        int wrong = Count(record, ClaimOutcomes.Differs) + Count(record, ClaimOutcomes.LastDigit);
+        int broken = Broken(record).Count;
+        string of = $"of the {Figures(record.Claims.Count)} that the report prints";
+        string contradictions = broken == 1 ? "1 contradiction among them needs no data" : $"{NumberText.Count(broken)} contradictions among them need no data";
+        return (wrong, broken) switch
+        {
+            (0, 0) => null,
+            (0, _) => $"The {Figures(record.Claims.Count)} that the report prints: {contradictions}.",
+            (_, 0) => $"{NumberText.Count(wrong)} {of} {(wrong == 1 ? "is" : "are")} not reproduced by the data.",
+            _ => $"{NumberText.Count(wrong)} {of} {(wrong == 1 ? "is" : "are")} not reproduced by the data; {contradictions}.",
+        };
+    }
+
+    public static string? StandardErrors(AuditRecord record) => record.StandardErrorsReproducedBy switch
+    {
+        null => null,
+        { Covariance: null } none => $"No covariance reproduces a reported standard error: {none.Why}.",
+        { } some => $"Reported standard errors: {NumberText.Count(some.Reproduced)} of {NumberText.Count(some.Of)} are reproduced by the {Form(some.Covariance)} covariance"
+            + (some.AlsoReproducedBy.Count == 0 ? "." : $"; {string.Join(", ", some.AlsoReproducedBy.Select(Form))} would reproduce as many, so their digits do not tell which was used."),
+    };
+
+    public static string Relations(AuditRecord record)
+    {
+        int all = record.ClaimsAgainstEachOther.Count;
+        int broken = Broken(record).Count;
+        return all == 0 ? "No figures are printed that could be held against each other."
+            : broken == 0 ? $"{(all == 1 ? "The 1 relation" : $"All {NumberText.Count(all)} relations")} between the printed figures can hold."
+            : $"{NumberText.Count(broken)} of {NumberText.Count(all)} relations between the printed figures cannot hold, whatever the data.";
+    }
+
+    public static ReportTable Table(AuditRecord record, IReadOnlyList<FindingPage> findings) => ReportTable.Of(
+        "Figures of the report, recomputed",
+        record.Claims,
+        new("Figure", "text", claim => Cell.Words(claim.What)),
+        new("As reported", "number", claim => new Cell(claim.Reported, null, "number", null)),
+        new("Recomputed", "number", claim => claim.Recomputed is double value
+            ? new Cell(claim.RecomputedAsPrinted ?? NumberText.Number(value), NumberText.Full(value), "number", null)
+            : Cell.Missing(claim.Why)),
+        new("Outcome", "text", claim => Cell.Words(Outcome(claim)) with { Link = findings.FirstOrDefault(finding => finding.Finding.Subject == claim.Claim)?.Anchor }));
+
+    public static ReportTable Contradictions(AuditRecord record) => ReportTable.Of(
+        "Printed figures that cannot all be right",
+        Broken(record),
+        new("What must hold", "text", relation => Cell.Words(relation.Relation)),
+        new("What is printed", "text", relation => Cell.Words(relation.Why ?? "")));
+
+    private static string Outcome(ClaimResult claim) => string.Join(
+        "; ",
+        new[]
+        {
+            Outcomes.GetValueOrDefault(claim.Outcome) ?? CheckWords.Spaced(claim.Outcome),
+            claim.ReproducedBy is { } form ? Form(form) : null,
+            claim.Rows is null ? null : "on the other row set",
+            claim.Recomputed is null ? null : claim.Why,
+        }.OfType<string>());
+
+    private static string Form(string name) =>
+        name.StartsWith("hc", StringComparison.Ordinal) || name.StartsWith("cr", StringComparison.Ordinal) ? name[..2].ToUpperInvariant() + name[2..] : CheckWords.Spaced(name);
+
+    private static List<ClaimRelation> Broken(AuditRecord record) => [.. record.ClaimsAgainstEachOther.Where(relation => !relation.Consistent)];
+
+    private static int Count(AuditRecord record, string outcome) => record.Claims.Count(claim => claim.Outcome == outcome);
+
+    private static string Figures(int count) => count == 1 ? "1 figure" : NumberText.Count(count) + " figures";
+
+    private static string[] Part(int count, string one, string many) => count == 0 ? [] : [$"{NumberText.Count(count)} {(count == 1 ? one : many)}"];
+}
