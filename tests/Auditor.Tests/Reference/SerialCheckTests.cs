@@ -127,11 +127,11 @@ public sealed class SerialCheckTests
             File.ReadAllText(path), file => File.OpenRead(Path.Combine(Path.GetDirectoryName(path)!, file)), ReferenceFiles.ReadText("policy-reference.yaml")).Value!;
         var model = ModelBinder.Bind(inputs.Declaration, inputs.Table).Value!.Model;
         var selection = RowSelection.Of(model);
-        var fits = ModelFits.Compute(model, selection, selection.Common, 1);
+        var fits = ModelFits.Compute(model, selection, selection.Common, null, false, 1);
         var rows = Enumerable.Range(0, fits.Common!.Rows.Count).ToArray();
         var fit = CheckedFits.Of(model, fits.Common, fits.Residuals, sampling: false);
         var serial = new SerialInputs(
-            SerialOrder.Of(rows), null, false, Deterministic.Constant, fits.Common.Final.Rank - 1, split is null ? null : [.. rows.Select(row => row >= split)], null);
+            Numerics.ResidualChecks.SerialOrder.Of(rows), null, false, Deterministic.Constant, fits.Common.Final.Rank - 1, split is null ? null : [.. rows.Select(row => row >= split)], null);
         return CheckFigures.Of(fit, InfluenceSummary.Of(fit, 1), serial, fits.Common.Rows, 0.05, 1).ToDictionary(check => check.Check);
     }
 }
