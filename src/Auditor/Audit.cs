@@ -53,12 +53,13 @@ public static class Audit
         results.Influence,
         results.Collinearity,
         NotYet.Claims(inputs.Declaration),
-        NotYet.Elimination(inputs.Declaration),
+        results.Elimination.Steps,
         rules.Findings,
         rules.Undecided,
         inputs.Policy.Effective,
         inputs.Provenance)
     {
+        EliminationByRule = results.Elimination.ByRule,
         PolicyOverridden = inputs.Policy.Overridden,
         Plots = results.Plots,
     };

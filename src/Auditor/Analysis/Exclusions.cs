@@ -10,7 +10,7 @@ namespace Auditor.Analysis;
 /// </summary>
 internal static class Exclusions
 {
-    public static IReadOnlyList<Exclusion> Of(BoundModel model, ModelFits fits, Policy policy, bool sampling)
+    public static IReadOnlyList<Exclusion> Of(BoundModel model, ModelFits fits, IReadOnlyList<SelectiveFigures> selective, Policy policy, bool sampling)
     {
         var groups = Enumerable.Range(0, model.Groups.Count).ToArray();
         var own = OnRows(model, groups, fits.Own, policy, sampling);
@@ -25,6 +25,7 @@ internal static class Exclusions
                 main[group].Rows,
                 sameRows ? null : ExclusionFigures.Other(other[group].Judgement, other[group].Rows),
                 fits.Common?[group],
+                selective[group],
                 policy,
                 sampling);
         })];

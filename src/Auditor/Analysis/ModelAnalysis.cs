@@ -25,19 +25,21 @@ internal static class ModelAnalysis
         var fit = CheckedFits.Of(model, main, fits.Residuals, sampling);
         var influence = InfluenceSummary.Of(fit, InfluenceFigures.Shown);
         var other = selection.Final.Equals(selection.Common) ? null : common ? fits.Final : fits.Common;
+        var elimination = EliminationFigures.Of(declaration, model, fits.Common, sampling, run.Threads);
         return Reading<AuditResults>.Of(new AuditResults(
             declaration.Model.Id,
             selection.Account(common, mentioned),
             FitFigures.Of(main, policy.Significance, sampling),
             other is null ? null : FitFigures.Of(other, policy.Significance, sampling),
             main.Fit.Perfect,
-            Exclusions.Of(model, fits, policy, sampling),
-            [.. Enumerable.Range(0, model.Groups.Count).Select(group => Inputs(model, fits, group, common))],
+            Exclusions.Of(model, fits, elimination.Selective, policy, sampling),
+            [.. Enumerable.Range(0, model.Groups.Count).Select(group => Inputs(declaration, model, fits, group, common))],
             AllLeftOut.Of(model, fits.Common, policy, sampling),
             ResidualCheckFigures.Of(fit, influence, main.Rows, policy.Significance, run.Seed),
             InfluenceFigures.Of(influence, main.Rows, model.RowLabel),
             CollinearityFigures.Of(main),
-            PlotFigures.Of(fit, [.. RowInfluence.OfAll(fit)], main.Rows, model.RowLabel, weighted: model.Weights is { Kind: not WeightKind.Frequency })));
+            PlotFigures.Of(fit, [.. RowInfluence.OfAll(fit)], main.Rows, model.RowLabel, weighted: model.Weights is { Kind: not WeightKind.Frequency }),
+            elimination));
     }
 
     private static Problem NoRows(ModelDeclaration declaration, bool common) => new(
@@ -47,12 +49,15 @@ internal static class ModelAnalysis
             ? "no row is complete for the final model and every left-out group; the policy says row_set: common"
             : "no row is complete for the final model: in every row that is kept, a column of it is missing, a transform has no value or the weight is 0");
 
-    private static ExclusionInputs Inputs(BoundModel model, ModelFits fits, int group, bool common)
+    private static ExclusionInputs Inputs(ModelDeclaration declaration, BoundModel model, ModelFits fits, int group, bool common)
     {
         var rows = common ? fits.Common : fits.Own(group);
         return new ExclusionInputs(
             ProductsElsewhere.Of(model, group),
-            rows is null ? [] : [.. rows[group].Sums.RestsOn.Select(position => rows.Rows.Rows[position] + 1)]);
+            rows is null ? [] : [.. rows[group].Sums.RestsOn.Select(position => rows.Rows.Rows[position] + 1)])
+        {
+            LeftOutByRule = declaration.Elimination?.Rule.Criterion is not (null or EliminationCriterion.Judgement),
+        };
     }
 }
 

@@ -6,7 +6,6 @@ namespace Auditor.Analysis;
 /// <summary>Parts of the record that are not computed yet: listed with the reason, never left out, the author's digits kept.</summary>
 internal static class NotYet
 {
-    private const string Why = "not built yet";
     private const string NotCompared = "not_compared";
 
     public static IReadOnlyList<ClaimResult> Claims(ModelDeclaration declaration)
@@ -33,9 +32,6 @@ internal static class NotYet
 
         return claims;
     }
-
-    public static IReadOnlyList<StepResult> Elimination(ModelDeclaration declaration) =>
-        [.. (declaration.Elimination?.Steps ?? []).Select((step, index) => new StepResult(index + 1, step.Drop, null, null, null, null, null, Why))];
 
     private static void AddFit(ReportedFigures? reported, Action<string, ReportedFigure?> add)
     {

@@ -12,6 +12,7 @@ public static class FactCatalogue
         .. RowFacts.Definitions,
         .. ColumnFacts.Definitions,
         .. CoefficientFacts.Definitions,
+        .. StepFacts.Definitions,
     ];
 
     private static readonly ILookup<About, FactDefinition> ByAbout = All.ToLookup(fact => fact.About);

@@ -13,4 +13,5 @@ internal sealed record AuditResults(
     IReadOnlyList<CheckResult> Checks,
     Influence Influence,
     Collinearity Collinearity,
-    PlotData Plots);
+    PlotData Plots,
+    EliminationResults Elimination);

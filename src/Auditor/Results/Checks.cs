@@ -60,14 +60,4 @@ public sealed record VarianceProportions(double ConditionIndex, IReadOnlyDiction
 
 public sealed record ClaimResult(string Claim, string Reported, double? Recomputed, string Outcome);
 
-public sealed record StepResult(
-    int Step,
-    string Drop,
-    double? F,
-    double? Df1,
-    double? Df2,
-    double? P,
-    bool? BreaksRule,
-    [property: JsonIgnore(Condition = JsonIgnoreCondition.WhenWritingNull)] string? Why);
-
 public sealed record EntangledGroups(string Kind, IReadOnlyList<string> Groups, double? Df1, double? Df2, double? F, double? P, double? PAdjusted);

@@ -37,6 +37,14 @@ internal static class SampleRecords
         new(Sha, "leases.csv", Sha.Replace('3', 'a'), "tractor lease/audit.yaml", Sha.Replace('f', '0'), "0.1.0", 1, "2026-03-01T06:30:00Z"))
     {
         Plots = SamplePlots.Some,
+        EliminationByRule = new(
+            EliminationRules.DropAbove, 0.05, "group", ["advance_rate"], 1871,
+            [
+                new(1, "warranty extension", true, 0.31, 2, 1853, 0.7334, null, null, null),
+                new(2, "contract_months", false, 1.12, 1, 1855, 0.29, null, null, null),
+                new(3, "contract_years", true, null, null, null, null, null, null, "It adds no direction to what else is in."),
+            ],
+            ["log(price)", "region", "age spline", "engine condition"], false, ["engine condition"], ["contract_months"], ["previous owners"], null),
     };
 
     /// <summary>No left-out group, no check, no claim, and no number that can be null.</summary>

@@ -65,16 +65,6 @@ internal static class AuditTables
         new("As reported", "number", claim => new Cell(claim.Reported, null, "number", null)),
         new("Recomputed", "number", claim => Cell.Number(claim.Recomputed, "not compared yet")));
 
-    public static ReportTable Elimination(AuditRecord record, double level) => ReportTable.Of(
-        "The author’s path, each step tested in that step’s model",
-        record.Elimination,
-        new("Step", "number", step => Cell.Count(step.Step)),
-        new("Dropped", "name", step => Cell.Name(step.Drop)),
-        new("Author’s rule", "text", step => step.BreaksRule is bool breaks ? Cell.Words(breaks ? "broken" : "kept") : Cell.Missing(step.Why)),
-        new("F", "number", step => Cell.Number(step.F, step.Why)),
-        new("on df", "number", step => Cell.Df(step.Df1, step.Df2, step.Why)),
-        new("p", "number", step => Cell.Probability(step.P, null, level, step.Why)));
-
     private static string Carried(VarianceProportions index)
     {
         const double half = 0.5;

@@ -47,7 +47,7 @@ internal sealed record ReportPage(AuditRecord Record)
 
     public ReportTable Claims => AuditTables.Claims(Record);
 
-    public ReportTable Elimination => AuditTables.Elimination(Record, Level);
+    public EliminationPage? Elimination => EliminationPage.Of(Record, Level);
 
     public ReportTable Rows => RowTables.Account(Record.Rows);
 
