@@ -24,6 +24,9 @@ public enum DroppingCriterion
 /// </remarks>
 public sealed class DroppingRule(DroppingCriterion criterion, double bound)
 {
+    /// <summary>Statistics closer than this, relative, are equal: rounding must not choose between them.</summary>
+    private const double Tie = 1e-12;
+
     private readonly Dictionary<(int, double), double> _critical = [];
 
     public DroppingCriterion Criterion => criterion;
@@ -70,7 +73,7 @@ public sealed class DroppingRule(DroppingCriterion criterion, double bound)
             if (model.Added[unit] is { Rank: > 0 } added)
             {
                 var f = Statistic(added, rss, df2, t);
-                if (f < Critical(added.Rank, df2) && (!least.TryGetValue(added.Rank, out var known) || f < known.F))
+                if (f < Critical(added.Rank, df2) && (!least.TryGetValue(added.Rank, out var known) || f < known.F * (1 - Tie)))
                 {
                     least[added.Rank] = (f, unit);
                 }
@@ -82,8 +85,9 @@ public sealed class DroppingRule(DroppingCriterion criterion, double bound)
             return least.Count == 0 ? null : least.First().Value.Unit;
         }
 
-        return least.Select(entry => (P: FisherF.LogSurvival(entry.Value.F, entry.Key, df2), entry.Value.Unit))
-            .OrderByDescending(one => one.P).ThenBy(one => one.Unit).First().Unit;
+        var logs = least.Select(entry => (Log: FisherF.LogSurvival(entry.Value.F, entry.Key, df2), entry.Value.Unit)).ToList();
+        var largest = logs.Max(one => one.Log);
+        return logs.Where(one => one.Log >= largest - Tie).Min(one => one.Unit);
     }
 
     private int? MostLowered(Submodel model, double rss, double observations, ReadOnlySpan<double> t)
@@ -94,7 +98,7 @@ public sealed class DroppingRule(DroppingCriterion criterion, double bound)
             if (model.Added[unit] is { Rank: > 0 } added)
             {
                 var change = Change(added.SumOfSquares.At(t), added.Rank, rss, observations);
-                if (change < lowest)
+                if (change < (best is null ? 0 : lowest - (Tie * (1 - lowest))))
                 {
                     (best, lowest) = (unit, change);
                 }

@@ -33,11 +33,14 @@ public sealed class PathTests
     [Fact]
     public void Equal_candidates_the_first_declared_goes()
     {
-        // Two columns that mirror each other about y's: equal F to the last bit by construction of the signs.
-        double[] a = [1, 1, -1, -1, 1, 1, -1, -1], b = [1, -1, 1, -1, 1, -1, 1, -1], y = [2, 0, 0, -2, 1.5, 0.5, -0.5, -1.5];
-        var path = new EliminationCase(new MatrixDesign(true, [], [[a], [b]], y), forced: 1).Path(new DroppingRule(DroppingCriterion.PartialF, 0.9999));
-        Assert.Equal(1, path.Drops.Count(drop => drop.Test.P < 1));
-        Assert.Equal(0, path.Drops[0].Unit);
+        double[] a = [1, 1, -1, -1, 1, 1, -1, -1], b = [1, -1, 1, -1, 1, -1, 1, -1], y = [2, 0, 0, -2, 1.5, 0.5, 0.5, -1.5];
+        foreach (var criterion in Enum.GetValues<DroppingCriterion>())
+        {
+            var rule = new DroppingRule(criterion, 1e-9);
+            double[] weak = [.. y.Select((value, i) => value + (i % 4 is 1 or 2 ? 4 : -4))]; // a and b equal in it, and weak
+            Assert.Equal(0, new EliminationCase(new MatrixDesign(true, [], [[a], [b]], weak), forced: 1).Path(rule).Drops[0].Unit);
+            Assert.Equal(0, new EliminationCase(new MatrixDesign(true, [], [[b], [a]], weak), forced: 1).Path(rule).Drops[0].Unit);
+        }
     }
 
     [Fact]

@@ -6,7 +6,7 @@ namespace Auditor.Numerics.Tests.Elimination;
 /// <summary>Selective p against draws of whole responses, and its law when nothing left out has an effect.</summary>
 public sealed class SelectivePTests
 {
-    private const int Draws = 4000;
+    private const int Draws = 1500;
 
     public static TheoryData<DroppingCriterion, double, int> Rules => new()
     {
@@ -84,7 +84,7 @@ public sealed class SelectivePTests
     {
         while (true)
         {
-            var data = new RandomElimination(random, 26, [1, 1, 2, 1], [0.8, 0.3, 0, 0.2]);
+            var data = new RandomElimination(random, 20, [1, 1, 2, 1], [0.8, 0.3, 0, 0.2]);
             if (data.Naive(kept, criterion, bound).Run(data.Y).Kept is [0])
             {
                 return (data, [0]);

@@ -1,5 +1,5 @@
 using System.Text.Json;
-using Auditor.Results;
+using Auditor.Reporting;
 using Auditor.SelfTest;
 using Auditor.Tests.Reference;
 
@@ -51,7 +51,7 @@ public sealed class PathFromRTests
     }
 
     /// <summary>What R kept is the final model, every term that R dropped a left-out group of that name.</summary>
-    private static Reporting.AuditRecord Run(JsonElement row, IReadOnlyList<string> steps)
+    private static AuditRecord Run(JsonElement row, IReadOnlyList<string> steps)
     {
         var kept = Texts(row, "kept");
         var groups = Texts(row, "terms").Except(kept).Select(term => $"  - {{group: {term}, terms: [{term}]}}\n");

@@ -42,7 +42,7 @@ path <- function(data, case, rule) {
 }
 
 rows <- unlist(lapply(cases, function(case) {
-  data <- read.csv(file.path("tests/reference", case$name, "data.csv"), stringsAsFactors = TRUE)
+  data <- read.csv(file.path("tests/reference", case$name, "data.csv"), stringsAsFactors = TRUE, na.strings = c("", "NA"))
   data <- data[complete.cases(data[c(case$y, case$terms)]), ]
   sapply(rules, function(rule) path(data, case, rule))
 }))
