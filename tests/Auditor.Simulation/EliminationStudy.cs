@@ -1,4 +1,3 @@
-using Auditor.Numerics;
 using Auditor.Numerics.Elimination;
 using Auditor.Numerics.Factor;
 using Auditor.Numerics.GroupTests;

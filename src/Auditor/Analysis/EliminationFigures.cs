@@ -25,7 +25,7 @@ internal static class EliminationFigures
         var groups = model.Groups.Select(group => group.Declared.Name).ToList();
         if (declaration.Elimination is not { } declared)
         {
-            return new EliminationResults([], null, None(groups, NotDeclared));
+            return new EliminationResults([], null, None(groups, NotDeclared), [.. groups.Select(_ => false)]);
         }
 
         if (common is null || sampling)
@@ -40,13 +40,15 @@ internal static class EliminationFigures
         return new EliminationResults(
             new AuthorSteps(declared, groups, common, units, path).Tested(),
             RulePath.Of(declared, groups, (int)common.Fit.N, units, path, why),
-            why is null ? Selective(declared.Rule, units.Candidates, path!, common, threads) : None(groups, why));
+            why is null ? Selective(declared.Rule, units.Candidates, path!, common, threads) : None(groups, why),
+            [.. groups.Select((_, group) => rule is not null && !(path is { Impediment: null } && units.OfGroup(group).Any(path.Kept.Contains)))]);
     }
 
     private static EliminationResults Without(EliminationDeclaration declared, List<string> groups, RowSetFit? common, string why) => new(
         [.. declared.Steps.Select((step, index) => new StepResult(index + 1, step.Drop, null, null, null, null, null, why) { Line = step.Line })],
         RulePath.Of(declared, groups, common is null ? 0 : (int)common.Fit.N, null, null, why),
-        None(groups, why));
+        None(groups, why),
+        [.. groups.Select(_ => Rule(declared.Rule) is not null)]);
 
     private static SelectiveFigures[] Selective(EliminationRule rule, Candidates candidates, EliminationPath path, RowSetFit common, int threads)
     {

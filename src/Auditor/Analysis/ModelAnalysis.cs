@@ -33,7 +33,7 @@ internal static class ModelAnalysis
             other is null ? null : FitFigures.Of(other, policy.Significance, sampling),
             main.Fit.Perfect,
             Exclusions.Of(model, fits, elimination.Selective, policy, sampling),
-            [.. Enumerable.Range(0, model.Groups.Count).Select(group => Inputs(declaration, model, fits, group, common))],
+            [.. Enumerable.Range(0, model.Groups.Count).Select(group => Inputs(model, fits, group, common) with { LeftOutByRule = elimination.LeftOutByRule[group] })],
             AllLeftOut.Of(model, fits.Common, policy, sampling),
             ResidualCheckFigures.Of(fit, influence, main.Rows, policy.Significance, run.Seed),
             InfluenceFigures.Of(influence, main.Rows, model.RowLabel),
@@ -49,15 +49,12 @@ internal static class ModelAnalysis
             ? "no row is complete for the final model and every left-out group; the policy says row_set: common"
             : "no row is complete for the final model: in every row that is kept, a column of it is missing, a transform has no value or the weight is 0");
 
-    private static ExclusionInputs Inputs(ModelDeclaration declaration, BoundModel model, ModelFits fits, int group, bool common)
+    private static ExclusionInputs Inputs(BoundModel model, ModelFits fits, int group, bool common)
     {
         var rows = common ? fits.Common : fits.Own(group);
         return new ExclusionInputs(
             ProductsElsewhere.Of(model, group),
-            rows is null ? [] : [.. rows[group].Sums.RestsOn.Select(position => rows.Rows.Rows[position] + 1)])
-        {
-            LeftOutByRule = declaration.Elimination?.Rule.Criterion is not (null or EliminationCriterion.Judgement),
-        };
+            rows is null ? [] : [.. rows[group].Sums.RestsOn.Select(position => rows.Rows.Rows[position] + 1)]);
     }
 }
 

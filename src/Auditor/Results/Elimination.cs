@@ -90,7 +90,9 @@ public sealed record SelectiveFigures(double? P, [property: JsonIgnore(Condition
 /// <summary>Everything found of a declared elimination.</summary>
 /// <param name="ByRule">Null when no elimination is declared.</param>
 /// <param name="Selective">By group, in declared order.</param>
-internal sealed record EliminationResults(IReadOnlyList<StepResult> Steps, EliminationByRule? ByRule, IReadOnlyList<SelectiveFigures> Selective);
+/// <param name="LeftOutByRule">By group: a rule that looks at the data is stated, and replayed it drops the group (or cannot be replayed).</param>
+internal sealed record EliminationResults(
+    IReadOnlyList<StepResult> Steps, EliminationByRule? ByRule, IReadOnlyList<SelectiveFigures> Selective, IReadOnlyList<bool> LeftOutByRule);
 
 /// <summary>The stated rules, as the record writes them.</summary>
 public static class EliminationRules

@@ -5,6 +5,6 @@ namespace Auditor.Results;
 /// <param name="OwnRows">Rows whose leverage is 1 with the group and below 1 without it: the group holds their own dummies.</param>
 public sealed record ExclusionInputs(IReadOnlyList<string> ProductsElsewhere, IReadOnlyList<int> OwnRows)
 {
-    /// <summary>The declaration states a rule of elimination that looks at the data: by p, AIC or BIC.</summary>
+    /// <summary>A stated rule of elimination that looks at the data (by p, AIC or BIC) drops the group, as far as it can be replayed.</summary>
     public bool LeftOutByRule { get; init; }
 }

@@ -56,6 +56,7 @@ public sealed class DeclaredRuleTests
         var finding = Assert.Single(record.Findings, finding => finding.Rule == "step-breaks-stated-rule");
         Assert.Equal(("step 2", 8), (finding.Subject, finding.Line));
         Assert.Equal(["needed"], record.EliminationByRule!.KeptThoughLeftOut);
+        Assert.Equal(["f"], record.Findings.Where(one => one.Rule == "exclusion-not-rejected-by-the-rule-that-chose").Select(one => one.Subject));
     }
 
     [Fact]

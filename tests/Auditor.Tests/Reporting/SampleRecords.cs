@@ -28,7 +28,7 @@ internal static class SampleRecords
             new("left_out[engine condition].reported.p", "0.49", 3.77848107e-17, "differs"),
         ],
         [
-            new(1, "engine condition", 38.4203138, 2, 2386, 3.77848107e-17, true, null),
+            new(1, "engine condition", 38.4203138, 2, 2386, 3.77848107e-17, true, null) { BreaksBecause = "p < 0.0001 of engine condition is not above 0.05" },
             new(2, "warranty extension", null, null, null, null, null, "The step's model has no rows in common with the group."),
         ],
         SampleFindings.All,

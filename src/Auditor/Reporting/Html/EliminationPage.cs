@@ -58,7 +58,7 @@ internal sealed record EliminationPage(string Rule, IReadOnlyList<string> Senten
 
         if (byRule.GroupsNotInSteps.Count > 0)
         {
-            yield return $"The author’s steps do not name {Listed(byRule.GroupsNotInSteps)}: taken as candidates that stayed in through all of the steps.";
+            yield return $"The author’s steps do not name {Listed(byRule.GroupsNotInSteps)}. What they do not name is taken as a candidate that stayed in through all of the steps.";
         }
     }
 
