@@ -66,4 +66,10 @@ public enum Impediment
 
     /// <summary>There are no rows.</summary>
     NoRows,
+
+    /// <summary>The stated rule of elimination does not end in the reported model.</summary>
+    RuleEndsElsewhere,
+
+    /// <summary>Whether the stated rule ends in the reported model is decided by rounding: two candidates are equal to the last digits.</summary>
+    SelectionHangsOnRounding,
 }

@@ -63,7 +63,7 @@ public static class Audit
         results.Influence,
         results.Collinearity,
         results.Claims.Figures,
-        NotYet.Elimination(inputs.Declaration),
+        results.Elimination.Steps,
         rules.Findings,
         rules.Undecided,
         inputs.Policy.Effective,
@@ -71,6 +71,7 @@ public static class Audit
     {
         StandardErrorsReproducedBy = results.Claims.StandardErrors,
         ClaimsAgainstEachOther = results.Claims.AgainstEachOther,
+        EliminationByRule = results.Elimination.ByRule,
         PolicyOverridden = inputs.Policy.Overridden,
         Plots = results.Plots,
         WhatIf = results.WhatIf,

@@ -7,6 +7,7 @@ namespace Auditor.Simulation;
 /// <summary>Measures the tests, verdicts and intervals of the audit on simulated data; README.md says how and what came out.</summary>
 internal static class Program
 {
+    private const string EliminationResults = "tests/Auditor.Simulation/elimination.md";
     private const string Results = "tests/Auditor.Simulation/results.md";
 
     public static int Main(string[] args)
@@ -21,6 +22,10 @@ internal static class Program
         };
         var root = new RootCommand("Simulation of the audit's tests, verdicts and intervals.") { draws, seed, write };
         root.SetAction(parsed => Run(parsed.GetValue(draws), parsed.GetValue(seed), parsed.GetResult(write) is null ? null : parsed.GetValue(write) ?? Results));
+        var elimination = new Command("elimination", "Groups that a rule of backward elimination left out: plain test and p given the rule.") { draws, seed, write };
+        elimination.SetAction(parsed => RunElimination(
+            parsed.GetValue(draws), parsed.GetValue(seed), parsed.GetResult(write) is null ? null : parsed.GetValue(write) ?? EliminationResults));
+        root.Add(elimination);
         return root.Parse(args).Invoke();
     }
 
@@ -28,7 +33,18 @@ internal static class Program
     {
         var (clock, policies) = (Stopwatch.StartNew(), Policies.Read());
         var results = new Study(policies, seed, draws, new Percentages()).Run();
-        var text = ResultText.Of(results, new RunFacts(draws, seed, DateTimeOffset.UtcNow, clock.Elapsed), policies.Hc3);
+        Show(ResultText.Of(results, new RunFacts(draws, seed, DateTimeOffset.UtcNow, clock.Elapsed), policies.Hc3), file);
+    }
+
+    private static void RunElimination(int draws, ulong seed, string? file)
+    {
+        var clock = Stopwatch.StartNew();
+        var results = new EliminationStudy(seed, draws, new Percentages()).Run();
+        Show(EliminationText.Of(results, new RunFacts(draws, seed, DateTimeOffset.UtcNow, clock.Elapsed)), file);
+    }
+
+    private static void Show(string text, string? file)
+    {
         Console.Out.Write(text);
         if (file is not null)
         {

@@ -9,6 +9,8 @@ internal static class AllLeftOut
 {
     public const string Name = "all left out";
 
+    private const string Selective = "it is computed for one group at a time: the rule dropped them one by one";
+
     public static Exclusion? Of(BoundModel model, RowSetFit? common, Policy policy, bool sampling)
     {
         if (model.Groups.Count == 0)
@@ -20,6 +22,6 @@ internal static class AllLeftOut
         var judgement = Judgement.OfFamily([new JudgedGroup(evidence, ProductsElsewhere.OfAll(model) is [var product, ..] ? product : null)], policy)[0];
         var terms = model.Groups.SelectMany(group => group.Terms).Select(term => term.Term.Label);
         var identity = new GroupIdentity(Name, [.. terms], null, null);
-        return ExclusionFigures.Of(identity, judgement, common, null, common?.Joint, policy, sampling);
+        return ExclusionFigures.Of(identity, judgement, common, null, common?.Joint, new SelectiveFigures(null, Selective), policy, sampling);
     }
 }

@@ -23,8 +23,9 @@ internal static class ExclusionFigures
     };
 
     /// <param name="common">The group on the rows common to all; null when there is none. Last in and the largest model's denominator need it.</param>
+    /// <param name="selective">p given the rule that left the group out.</param>
     public static Exclusion Of(
-        GroupIdentity identity, Judgement judgement, RowSetFit? rows, OtherRowSetFigures? other, GroupFit? common, Policy policy, bool sampling)
+        GroupIdentity identity, Judgement judgement, RowSetFit? rows, OtherRowSetFigures? other, GroupFit? common, SelectiveFigures selective, Policy policy, bool sampling)
     {
         var notComputed = new SortedDictionary<string, string>(StringComparer.Ordinal);
         foreach (var (test, missing) in NotDeclared)
@@ -52,7 +53,7 @@ internal static class ExclusionFigures
             TestFigure.P(basisTest) is { } basisP ? TestFigure.Log10(basisP.Log) : null,
             judgement.PAdjusted,
             judgement.Adjusted is { } adjusted ? TestFigure.Log10(adjusted.Log) : null,
-            new SelectiveFigures(null, "not built yet"),
+            selective,
             Effect(evidence, why),
             evidence?.Basis.EffectiveRows?.LeastInformed,
             new NegligibleFigures(policy.NegligiblePartialRSquared, evidence?.NegligibleP, judgement.NegligiblePAdjusted, evidence?.NegligibleP is null ? why["p"] : null),

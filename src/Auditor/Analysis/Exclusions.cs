@@ -10,8 +10,10 @@ namespace Auditor.Analysis;
 /// </summary>
 internal static class Exclusions
 {
+    /// <param name="selective">p of each group given the author's rule.</param>
     /// <param name="whatIf">Whether verdicts at other levels and bounds are wanted.</param>
-    public static JudgedExclusions Of(BoundModel model, ModelFits fits, Policy policy, bool sampling, bool whatIf)
+    public static JudgedExclusions Of(
+        BoundModel model, ModelFits fits, IReadOnlyList<SelectiveFigures> selective, Policy policy, bool sampling, bool whatIf)
     {
         var groups = Enumerable.Range(0, model.Groups.Count).ToArray();
         var own = OnRows(model, groups, fits.Own, policy, sampling);
@@ -26,6 +28,7 @@ internal static class Exclusions
                 main[group].Rows,
                 sameRows ? null : ExclusionFigures.Other(other[group].Judgement, other[group].Rows),
                 fits.Common?[group],
+                selective[group],
                 policy,
                 sampling);
         })];

@@ -16,6 +16,8 @@ internal static class ImpedimentWords
         Impediment.TooFewContributions => "too few rows contribute to the score for the directions tested",
         Impediment.SamplingWeights => "sampling weights: a classical test does not apply",
         Impediment.NoRows => "no row is complete for the final model and the group",
+        Impediment.RuleEndsElsewhere => "the stated rule, replayed from all candidates, does not end in the reported model",
+        Impediment.SelectionHangsOnRounding => "two candidates are equal to the last digits, so rounding decides where the stated rule ends",
         _ => "the statistic is not finite",
     };
 }

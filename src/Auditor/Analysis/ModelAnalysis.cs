@@ -29,7 +29,8 @@ internal static class ModelAnalysis
         var other = selection.Final.Equals(selection.Common) ? null : common ? fits.Final : fits.Common;
         var shown = new ClaimedRows(main, FitFigures.Of(main, policy.Significance, sampling), sampling, false);
         var beside = other is null ? null : new ClaimedRows(other, FitFigures.Of(other, policy.Significance, sampling), sampling, true);
-        var exclusions = Exclusions.Of(model, fits, policy, sampling, whatIf: run.Pictures);
+        var elimination = EliminationFigures.Of(declaration, model, fits.Common, sampling, run.Threads);
+        var exclusions = Exclusions.Of(model, fits, elimination.Selective, policy, sampling, whatIf: run.Pictures);
         return Reading<AuditResults>.Of(new AuditResults(
             declaration.Model.Id,
             selection.Account(common, mentioned),
@@ -38,12 +39,13 @@ internal static class ModelAnalysis
             beside?.Summary,
             main.Fit.Perfect,
             exclusions.All,
-            [.. Enumerable.Range(0, model.Groups.Count).Select(group => Inputs(model, fits, group, common))],
+            [.. Enumerable.Range(0, model.Groups.Count).Select(group => Inputs(model, fits, group, common) with { LeftOutByRule = elimination.LeftOutByRule[group] })],
             AllLeftOut.Of(model, fits.Common, policy, sampling),
             ResidualCheckFigures.Of(fit, influence, SerialInputs.NothingDeclared, main.Rows, policy.Significance, run.Seed),
             InfluenceFigures.Of(influence, main.Rows, model.RowLabel),
             CollinearityFigures.Of(main),
-            run.Pictures ? Pictures(model, fits, fit, main, common) : new PlotData(null, "no pictures were asked for"))
+            run.Pictures ? Pictures(model, fits, fit, main, common) : new PlotData(null, "no pictures were asked for"),
+            elimination)
         {
             WhatIf = exclusions.WhatIf,
             Claims = ClaimComparison.Of(
@@ -51,7 +53,7 @@ internal static class ModelAnalysis
                 beside is null ? [shown] : [shown, beside],
                 exclusions.All,
                 [.. Enumerable.Range(0, model.Groups.Count).Select(group => OnOtherRows(fits, group, common))],
-                NotYet.Elimination(declaration),
+                elimination.Steps,
                 policy.Significance),
         });
     }

@@ -15,12 +15,17 @@ internal static class AuditFacts
         [
             .. results.Exclusions.Select((exclusion, g) => ExclusionFacts.From(exclusion, results.ExclusionInputs[g], policy)),
             .. results.AllLeftOut is { } all ? new[] { AllLeftOutFacts.From(all, results.Exclusions, results.FinalFit.Rows, policy) } : [],
-            FitFacts.From(id, results.FinalFit, new FitInputs(results.Perfect, results.Exclusions.Count, results.Influence, results.Collinearity) { Claims = results.Claims }),
+            FitFacts.From(id, results.FinalFit, new FitInputs(results.Perfect, results.Exclusions.Count, results.Influence, results.Collinearity)
+            {
+                Claims = results.Claims,
+                Elimination = results.Elimination.ByRule,
+            }),
             RowFacts.From(id, results.Rows, results.Structure),
             .. Columns(bound, mentions, results.Rows).Select(ColumnFacts.From),
             .. results.FinalFit.Coefficients.Select(CoefficientFacts.From),
             .. results.Checks.Select(CheckFacts.From),
             .. results.Claims.Figures.Select(claim => ClaimFacts.From(claim, results.Claims.AgainstEachOther)),
+            .. results.Elimination.Steps.Select(StepFacts.From),
         ];
     }
 

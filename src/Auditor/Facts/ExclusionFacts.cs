@@ -46,6 +46,10 @@ public static class ExclusionFacts
             view => view.Rejects(view.Of.Tests.Classical?.P) is bool classical ? view.Rejects(view.Of.P) is bool basis ? classical != basis : null : null,
             view => view.Of.Tests.Classical?.P is null ? view.NotTested("classical") : view.Why("p"))
         .Number("selective_p", FactUnits.P, "p given the rule that left the group out.", view => view.Of.Selective.P, view => view.Of.Selective.Why ?? view.Why("selective.p"))
+        .Flag("has_selective_p", "selective_p could be computed.", view => view.Of.Selective.P is not null)
+        .Number("selective_plain_p", FactUnits.P, "p of the partial F on the rows of selective_p, without regard to the rule.", view => view.Of.Selective.PlainP, view => view.Of.Selective.Why ?? view.Why("selective.p"))
+        .Count("selective_rows", FactUnits.Rows, "Rows on which the rule was replayed.", view => view.Of.Selective.Rows, view => view.Of.Selective.Why ?? view.Why("selective.p"))
+        .Flag("left_out_by_rule", "A rule of elimination that looks at the data is declared, and replayed it drops the group (or it cannot be replayed).", view => view.Inputs.LeftOutByRule)
         .Word("verdict", "What the test says of leaving the group out.", FactWords.Verdicts, view => view.Of.Verdict)
         .Word("materiality", "What the interval says of the effect against the policy's bound.", FactWords.Materialities, view => view.Of.Materiality)
         .Text("reason", "What the verdict rests on, in words.", view => view.Of.Reason);

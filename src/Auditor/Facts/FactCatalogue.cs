@@ -14,6 +14,7 @@ public static class FactCatalogue
         .. CoefficientFacts.Definitions,
         .. AcceptanceFacts.Definitions,
         .. ClaimFacts.Definitions,
+        .. StepFacts.Definitions,
     ];
 
     private static readonly ILookup<About, FactDefinition> ByAbout = All.ToLookup(fact => fact.About);

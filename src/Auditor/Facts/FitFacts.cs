@@ -11,12 +11,15 @@ public sealed record FitInputs(bool Perfect, int LeftOutGroups, Influence Influe
 {
     /// <summary>The report's own figures, compared.</summary>
     internal ClaimsAudit Claims { get; init; } = new([], null, []);
+
+    /// <summary>What the author's stated rule of elimination does by itself; null when none is declared.</summary>
+    public EliminationByRule? Elimination { get; init; }
 }
 
 /// <summary>The facts of the final model's fit on its own rows.</summary>
 public static class FitFacts
 {
-    private static readonly FactFamily<FitView> Family = new FactFamily<FitView>(About.Fit)
+    private static readonly FactFamily<FitView> Family = Elimination(new FactFamily<FitView>(About.Fit))
         .Count("rows", FactUnits.Rows, "Rows of the fit.", view => view.Fit.Rows)
         .Count("rank", FactUnits.Columns, "Coefficients the data can tell apart.", view => view.Fit.Rank)
         .Number("rows_per_coefficient", FactUnits.Rows, "Rows for each of those coefficients.",
@@ -55,6 +58,19 @@ public static class FitFacts
     public static IReadOnlyList<FactDefinition> Definitions => Family.Definitions;
 
     public static FactSet From(string modelId, FitSummary fit, FitInputs inputs) => Family.From(new FitView(fit, inputs), modelId, null);
+
+    private static FactFamily<FitView> Elimination(FactFamily<FitView> family) => family
+        .Flag("rule_replayed", "A rule of elimination is declared and could be replayed.", view => view.Inputs.Elimination?.EndsInReportedModel is not null)
+        .Flag("rule_ends_in_reported_model", "From the model with every candidate in, the stated rule ends in the reported model.",
+            view => view.Inputs.Elimination?.EndsInReportedModel, NotReplayed)
+        .Text("rule_keeps", "What the rule keeps although the report left it out.", view => Listed(view.Inputs.Elimination?.KeptThoughLeftOut), NotReplayed)
+        .Text("rule_drops", "What the rule drops although the report kept it.", view => Listed(view.Inputs.Elimination?.DroppedThoughKept), NotReplayed)
+        .Flag("steps_omit_groups", "Steps of elimination are declared, and a left-out group stands in none of them.", view => view.Inputs.Elimination?.GroupsNotInSteps.Count > 0)
+        .Text("groups_not_in_steps", "Those groups.", view => string.Join(", ", view.Inputs.Elimination?.GroupsNotInSteps ?? []));
+
+    private static string? Listed(IReadOnlyList<string>? names) => names is null ? null : names.Count == 0 ? "nothing" : string.Join(", ", names);
+
+    private static string NotReplayed(FitView view) => view.Inputs.Elimination is { } elimination ? elimination.Why ?? "the rule could not be replayed" : "no elimination is declared";
 
     private static InfluentialRow? MostInfluential(FitView view) => view.Inputs.Influence.Largest is [var first, ..] ? first : null;
 

@@ -31,6 +31,9 @@ public sealed record AuditRecord(
     /// <summary>Reported figures that must fit together whatever the data are.</summary>
     public IReadOnlyList<ClaimRelation> ClaimsAgainstEachOther { get; init; } = [];
 
+    /// <summary>What the author's stated rule does by itself; null when no elimination is declared.</summary>
+    public EliminationByRule? EliminationByRule { get; init; }
+
     /// <summary>Policy values that are not the shipped ones, with the shipped value.</summary>
     public IReadOnlyDictionary<string, object> PolicyOverridden { get; init; } = new Dictionary<string, object>();
 

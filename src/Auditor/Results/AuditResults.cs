@@ -14,7 +14,8 @@ internal sealed record AuditResults(
     IReadOnlyList<CheckResult> Checks,
     Influence Influence,
     Collinearity Collinearity,
-    PlotData Plots)
+    PlotData Plots,
+    EliminationResults Elimination)
 {
     /// <summary>Null when it was not asked for.</summary>
     public WhatIf? WhatIf { get; init; }

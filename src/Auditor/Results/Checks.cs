@@ -66,14 +66,5 @@ public sealed record TermCollinearity(string Term, int Df, double? Gvif, double?
 
 public sealed record VarianceProportions(double ConditionIndex, IReadOnlyDictionary<string, double> Proportions);
 
-public sealed record StepResult(
-    int Step,
-    string Drop,
-    double? F,
-    double? Df1,
-    double? Df2,
-    double? P,
-    bool? BreaksRule,
-    [property: JsonIgnore(Condition = JsonIgnoreCondition.WhenWritingNull)] string? Why);
 
 public sealed record EntangledGroups(string Kind, IReadOnlyList<string> Groups, double? Df1, double? Df2, double? F, double? P, double? PAdjusted);

@@ -58,8 +58,6 @@ public sealed record Exclusion(
     public string? WhyNull => P is null ? Why.GetValueOrDefault("p") : null;
 }
 
-public sealed record SelectiveFigures(double? P, [property: JsonIgnore(Condition = JsonIgnoreCondition.WhenWritingNull)] string? Why);
-
 /// <summary>Partial R² with its classical and basis interval at 1 - 2 significance.</summary>
 public sealed record EffectFigures(
     double? Estimate,

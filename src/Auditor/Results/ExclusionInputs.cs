@@ -3,4 +3,8 @@ namespace Auditor.Results;
 /// <summary>What an exclusion's facts need beside its result.</summary>
 /// <param name="ProductsElsewhere">Labels of the products outside the group that hold one of its terms.</param>
 /// <param name="OwnRows">Rows whose leverage is 1 with the group and below 1 without it: the group holds their own dummies.</param>
-public sealed record ExclusionInputs(IReadOnlyList<string> ProductsElsewhere, IReadOnlyList<int> OwnRows);
+public sealed record ExclusionInputs(IReadOnlyList<string> ProductsElsewhere, IReadOnlyList<int> OwnRows)
+{
+    /// <summary>A stated rule of elimination that looks at the data (by p, AIC or BIC) drops the group, as far as it can be replayed.</summary>
+    public bool LeftOutByRule { get; init; }
+}

@@ -35,6 +35,7 @@ public sealed class FactCatalogueTests
             ColumnFacts.From(ColumnInputs.NobodyMentions("memo")),
             CheckFacts.From(new CheckResult("reset", 2, 2, 400, 0.1, "form", false, null)),
             ClaimFacts.From(new ClaimResult("reported.f", "F of the whole model", "2.1", 2.1, ClaimOutcomes.Agrees) { Kind = ClaimKinds.F }, []),
+            StepFacts.From(new StepResult(1, "engine condition", 1.2, 2, 400, 0.3, false, null)),
             CoefficientFacts.From(new CoefficientFigures("price", 1, 1, 1, 0.3, null, -1, 3, null)),
             AcceptanceFacts.From(Samples.Standing),
         ];

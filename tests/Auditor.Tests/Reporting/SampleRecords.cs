@@ -28,7 +28,7 @@ internal static class SampleRecords
             new("left_out[engine condition].reported.p", "p of the left-out group engine condition", "0.49", 3.77848107e-17, "differs") { RecomputedAsPrinted = "3.78e-17" },
         ],
         [
-            new(1, "engine condition", 38.4203138, 2, 2386, 3.77848107e-17, true, null),
+            new(1, "engine condition", 38.4203138, 2, 2386, 3.77848107e-17, true, null) { BreaksBecause = "p < 0.0001 of engine condition is not above 0.05" },
             new(2, "warranty extension", null, null, null, null, null, "The step's model has no rows in common with the group."),
         ],
         SampleFindings.All,
@@ -42,6 +42,14 @@ internal static class SampleRecords
         })
     {
         Plots = SamplePlots.Some,
+        EliminationByRule = new(
+            EliminationRules.DropAbove, 0.05, "group", ["advance_rate"], 1871,
+            [
+                new(1, "warranty extension", true, 0.31, 2, 1853, 0.7334, null, null, null),
+                new(2, "contract_months", false, 1.12, 1, 1855, 0.29, null, null, null),
+                new(3, "contract_years", true, null, null, null, null, null, null, "It adds no direction to what else is in."),
+            ],
+            ["log(price)", "region", "age spline", "engine condition"], false, ["engine condition"], ["contract_months"], ["previous owners"], null),
     };
 
     /// <summary>No left-out group, no check, no claim, and no number that can be null.</summary>

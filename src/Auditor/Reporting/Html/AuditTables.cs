@@ -58,15 +58,6 @@ internal static class AuditTables
             new("p, adjusted", "number", set => Cell.Probability(set.PAdjusted, null, level, why)));
     }
 
-    public static ReportTable Elimination(AuditRecord record, double level) => ReportTable.Of(
-        "The author’s path, each step tested in that step’s model",
-        record.Elimination,
-        new("Step", "number", step => Cell.Count(step.Step)),
-        new("Dropped", "name", step => Cell.Name(step.Drop)),
-        new("Author’s rule", "text", step => step.BreaksRule is bool breaks ? Cell.Words(breaks ? "broken" : "kept") : Cell.Missing(step.Why)),
-        new("F", "number", step => Cell.Number(step.F, step.Why)),
-        new("on df", "number", step => Cell.Df(step.Df1, step.Df2, step.Why)),
-        new("p", "number", step => Cell.Probability(step.P, null, level, step.Why)));
 
     private static string Carried(VarianceProportions index)
     {

@@ -10,6 +10,10 @@ internal sealed record ExclusionPage(
     Exclusion Exclusion, string Anchor, VerdictWords Verdict, ReportTable Tests, IReadOnlyList<Fact> NotComputed, FactList Decision, FactList Size,
     FactList? OtherRows)
 {
+    private const string MeaningOfSelective =
+        "how often the group would explain this much or more if it had no effect, among data on which the stated rule leaves the same groups out; assumes that all candidates are "
+        + "declared, the rule was followed, errors are normal with equal variance and no other left-out group has an effect.";
+
     /// <summary>What the group adds, what is left over against its columns, what the rows could show.</summary>
     public IReadOnlyList<Picture> Pictures { get; init; } = [];
 
@@ -25,13 +29,32 @@ internal sealed record ExclusionPage(
         where exclusion.TestsNotComputed.ContainsKey(test.Name)
         select (test.Title, exclusion.TestsNotComputed[test.Name]));
 
-    private static FactList DecisionOf(Exclusion exclusion, double level) => FactList.Of(
+    private static FactList DecisionOf(Exclusion exclusion, double level) => FactList.Of([
         new("Rests on", Cell.Words(TestWords.TitleOf(exclusion.Basis)), exclusion.BasisReason),
         new("p", Cell.Probability(exclusion.P, exclusion.Log10P, level, Why(exclusion, "p"))),
         new("p, adjusted for all groups", Cell.Probability(exclusion.PAdjusted, exclusion.Log10PAdjusted, level, Why(exclusion, "p_adjusted"))),
-        new("p, given how the group was dropped", Cell.Probability(exclusion.Selective.P, null, level, exclusion.Selective.Why ?? Why(exclusion, "selective.p"))),
+        .. Selective(exclusion, level),
         new("p of the test that the effect is at least the bound", Cell.Probability(exclusion.Negligible.P, null, level, NegligibleWhy(exclusion, "p")), "small: shown to be negligible"),
-        new("the same, adjusted for all groups", Cell.Probability(exclusion.Negligible.PAdjusted, null, level, NegligibleWhy(exclusion, "p_adjusted"))));
+        new("the same, adjusted for all groups", Cell.Probability(exclusion.Negligible.PAdjusted, null, level, NegligibleWhy(exclusion, "p_adjusted"))),
+    ]);
+
+    /// <summary>p given the rule, with what it means, and beside it the plain p on the same rows.</summary>
+    private static IEnumerable<Fact> Selective(Exclusion exclusion, double level)
+    {
+        var given = exclusion.Selective;
+        var rows = given.Rows is int common && common != exclusion.Rows
+            ? $" On the {NumberText.Count(common)} rows that all groups have in common, where the rule is replayed; the verdict rests on {NumberText.Count(exclusion.Rows)}."
+            : "";
+        yield return new Fact(
+            "p, given the rule that left the group out",
+            Cell.Probability(given.P, given.Log10P, level, given.Why ?? Why(exclusion, "selective.p")),
+            given.P is null ? null : MeaningOfSelective + rows);
+        if (given.PlainP is double plain)
+        {
+            yield return new Fact(
+                "Partial F’s p on the same rows", Cell.Probability(plain, null, level), "no evidence where it is large: the rule chose by it, on these rows");
+        }
+    }
 
     private static FactList SizeOf(Exclusion exclusion, double level)
     {

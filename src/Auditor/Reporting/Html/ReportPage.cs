@@ -64,7 +64,7 @@ internal sealed record ReportPage(AuditRecord Record, PageScript Script)
 
     public ReportTable ClaimContradictions => ClaimWords.Contradictions(Record);
 
-    public ReportTable Elimination => AuditTables.Elimination(Record, Level);
+    public EliminationPage? Elimination => EliminationPage.Of(Record, Level);
 
     public ReportTable Rows => RowTables.Account(Record.Rows);
 
