@@ -9,13 +9,13 @@ namespace Auditor.Numerics.GroupTests;
 /// has the mean and the total variance of a Wishart matrix when errors are independent with equal variance (Satterthwaite for q = 1). Errors of different clusters
 /// independent. Where I - H_cc is singular its generalised inverse is used; rows are times sqrt(w).
 /// </summary>
-/// <param name="Covariance">V of u, q x q.</param>
-/// <param name="Eta">Degrees of freedom of the Wishart matrix.</param>
+/// <param name="Covariance">V of u, q x q; null when the test has no value.</param>
+/// <param name="Eta">Degrees of freedom of the Wishart matrix; null likewise.</param>
 /// <remarks>
 /// Pustejovsky and Tipton 2018, Journal of Business and Economic Statistics 36. Verified against R's clubSandwich (values beside the tests) and
 /// tests/vectors/score_forms.json.
 /// </remarks>
-public sealed record Cr2(double[,] Covariance, double Eta, TestResult Test)
+public sealed record Cr2(TestResult Test, double[,]? Covariance = null, double? Eta = null)
 {
     /// <summary>Operations that the degrees of freedom may cost.</summary>
     private const double MostWork = 5e10;
@@ -23,25 +23,27 @@ public sealed record Cr2(double[,] Covariance, double Eta, TestResult Test)
     /// <summary>An expected variance further than this below the true one has lost a direction to a cluster that fits it by itself.</summary>
     private const double Lost = 1e-6;
 
-    /// <returns>The reason in place of the estimate when there is none: then <see cref="Cr1"/> stands in if clusters are too many.</returns>
-    public static (Cr2? Estimate, Impediment? Why) Of(AddedGroup group, ClassSums clusters)
+    /// <returns>Without a value when clusters are too many (<see cref="Impediment.TooManyClusters"/>): <see cref="Cr1"/> stands in then.</returns>
+    public static Cr2 Of(AddedGroup group, ClassSums clusters)
     {
         if (Impediments.OfRobust(group) is Impediment impediment)
         {
-            return (null, impediment);
+            return None(impediment);
         }
 
         if (group.Rank >= clusters.Contributing)
         {
-            return (null, Impediment.TooFewClusters);
+            return None(Impediment.TooFewClusters);
         }
 
         return clusters is { Moments: not null, Final: not null } && WishartDf.Work(group, clusters.Count) <= MostWork
             ? Estimate(group, clusters)
-            : (null, Impediment.TooManyClusters);
+            : None(Impediment.TooManyClusters);
     }
 
-    private static (Cr2? Estimate, Impediment? Why) Estimate(AddedGroup group, ClassSums clusters)
+    private static Cr2 None(Impediment why) => new(TestResult.None(why));
+
+    private static Cr2 Estimate(AddedGroup group, ClassSums clusters)
     {
         var q = group.Rank;
         var (v, expected, df) = (new double[q, q], new double[q, q], new WishartDf(group, clusters.Count));
@@ -54,19 +56,19 @@ public sealed record Cr2(double[,] Covariance, double Eta, TestResult Test)
 
         if (Quadratic.EigenvalueRange(expected).Least < 1 - Lost)
         {
-            return (null, Impediment.RestsOnOneCluster);
+            return None(Impediment.RestsOnOneCluster);
         }
 
         if (Quadratic.Form(group.U, v, Impediments.MeanSquare(group)) is not double wald)
         {
-            return (null, Impediment.SingularCovariance);
+            return None(Impediment.SingularCovariance);
         }
 
         var eta = df.Eta();
         var df2 = eta - q + 1;
         return df2 > 0
-            ? (new Cr2(v, eta, TestResult.F(df2 / (eta * q) * wald, q, df2)), null)
-            : (null, Impediment.TooFewClusters);
+            ? new Cr2(TestResult.F(df2 / (eta * q) * wald, q, df2), v, eta)
+            : None(Impediment.TooFewClusters);
     }
 
     /// <summary>E(V) under independent errors of variance 1: sum_c (S_c - K_c'K_c), the identity unless a direction rests on one cluster.</summary>

@@ -9,34 +9,18 @@ namespace Auditor.Numerics.GroupTests;
 /// period this is the published form; with several, the same on the sums by period (after Driscoll and Kraay 1998). Periods follow each other by rank:
 /// a gap in time is not seen. Over-rejects under strong dependence.
 /// </summary>
-/// <param name="Covariance">V of u, q x q.</param>
 /// <param name="Lag">L.</param>
 /// <remarks>
 /// Newey and West 1987, Econometrica 55; lag rule Newey and West 1994, Review of Economic Studies 61. Verified against R's sandwich (tests/reference,
 /// adjust_true) and published values there.
 /// </remarks>
-public sealed record NeweyWest(double[,] Covariance, int Lag, TestResult Test)
+public sealed record NeweyWest(TestResult Test, int Lag)
 {
     /// <param name="lag">Null for the rule floor(4 (T/100)^(2/9)), T periods; never more than T - 1.</param>
-    public static (NeweyWest? Estimate, Impediment? Why) Of(AddedGroup group, ClassSums periods, int? lag = null)
+    public static NeweyWest Of(AddedGroup group, ClassSums periods, int? lag = null)
     {
-        if (Impediments.OfRobust(group) is Impediment impediment)
-        {
-            return (null, impediment);
-        }
-
-        // The scores of all periods add up to zero.
-        if (group.Rank >= periods.Count)
-        {
-            return (null, Impediment.TooFewPeriods);
-        }
-
         var used = Math.Min(lag ?? Rule(periods.Count), periods.Count - 1);
-        var df2 = PartialF.ResidualDf(group);
-        var v = Quadratic.Scaled(Products(group.Rank, periods, used), group.Final.Factor.Totals.N / df2);
-        return Quadratic.Form(group.U, v, Impediments.MeanSquare(group)) is double form
-            ? (new NeweyWest(v, used, TestResult.F(form / group.Rank, group.Rank, df2)), null)
-            : (null, Impediment.SingularCovariance);
+        return new NeweyWest(Wald(group, periods, used), used);
     }
 
     /// <summary>floor(4 (T/100)^(2/9)), the largest L with 10^4 L^9 at most 4^9 T², in whole numbers.</summary>
@@ -50,6 +34,26 @@ public sealed record NeweyWest(double[,] Covariance, int Lag, TestResult Test)
         }
 
         return lag;
+    }
+
+    private static TestResult Wald(AddedGroup group, ClassSums periods, int lag)
+    {
+        if (Impediments.OfRobust(group) is Impediment impediment)
+        {
+            return TestResult.None(impediment);
+        }
+
+        // The scores of all periods add up to zero.
+        if (group.Rank >= periods.Count)
+        {
+            return TestResult.None(Impediment.TooFewPeriods);
+        }
+
+        var df2 = PartialF.ResidualDf(group);
+        var v = Quadratic.Scaled(Products(group.Rank, periods, lag), group.Final.Factor.Totals.N / df2);
+        return Quadratic.Form(group.U, v, Impediments.MeanSquare(group)) is double form
+            ? TestResult.F(form / group.Rank, group.Rank, df2)
+            : TestResult.None(Impediment.SingularCovariance);
     }
 
     private static double[,] Products(int q, ClassSums periods, int lag)

@@ -9,32 +9,31 @@ namespace Auditor.Numerics.GroupTests;
 /// independent errors of variance 1 (C the nu x n cosines of the rows' periods, H of F + group).
 /// F = (nu - q + 1)/(nu q) u'V^-1 u on (q, nu - q + 1). Effective rows and the negligible-effect test of the time form rest on it.
 /// </summary>
-/// <param name="Covariance">V of u, q x q.</param>
-/// <param name="BiasFactor">k.</param>
+/// <param name="Covariance">V of u, q x q; null when the test has no value.</param>
+/// <param name="BiasFactor">k; null likewise.</param>
 /// <remarks>The project's own correction of the form of Lazarus, Lewis, Stock and Watson 2018. Verified against tests/vectors/effective_rows.json and by brute force.</remarks>
-public sealed record PeriodWald(double[,] Covariance, double BiasFactor, TestResult Test)
+public sealed record PeriodWald(TestResult Test, double[,]? Covariance = null, double? BiasFactor = null)
 {
     private const double MostWork = 2e10;
 
-    /// <returns>The reason in place of the estimate when there is none.</returns>
-    public static (PeriodWald? Estimate, Impediment? Why) Of(AddedGroup group, ClassSums periods)
+    public static PeriodWald Of(AddedGroup group, ClassSums periods)
     {
         if (PeriodF.Why(group, periods) is Impediment impediment)
         {
-            return (null, impediment);
+            return new PeriodWald(TestResult.None(impediment));
         }
 
         var cosines = new Cosines(periods.Count);
         if (periods.Moments is null || (double)periods.Count * cosines.Count * group.Rank * group.RankWith > MostWork)
         {
-            return (null, Impediment.TooManyPeriods);
+            return new PeriodWald(TestResult.None(Impediment.TooManyPeriods));
         }
 
         var raw = cosines.Variance(group.Rank, periods.ResidualScore);
         var bias = Bias(group, periods.Moments, cosines, periods.Count);
         return bias > 0 && Quadratic.Form(group.U, raw, Impediments.MeanSquare(group)) is double form
-            ? (new PeriodWald(Quadratic.Scaled(raw, 1 / bias), bias, PeriodF.Hotelling(bias * form, group.Rank, cosines.Count)), null)
-            : (null, Impediment.SingularCovariance);
+            ? new PeriodWald(PeriodF.Hotelling(bias * form, group.Rank, cosines.Count), Quadratic.Scaled(raw, 1 / bias), bias)
+            : new PeriodWald(TestResult.None(Impediment.SingularCovariance));
     }
 
     /// <summary>|C diag(qz_a) (I - H)|² = |C diag(qz_a)|² - |C diag(qz_a) Q|², both from the sums by period.</summary>

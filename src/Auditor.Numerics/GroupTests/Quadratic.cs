@@ -51,7 +51,8 @@ public static class Quadratic
         var sum = new double[q, q];
         for (var c = 0; c < count; c++)
         {
-            AddProduct(sum, of(c), of(c), factor);
+            var v = of(c);
+            AddProduct(sum, v, v, factor);
         }
 
         return sum;

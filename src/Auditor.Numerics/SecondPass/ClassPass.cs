@@ -14,14 +14,14 @@ internal sealed class ClassPass
 
     /// <param name="capacity">Rows of a block.</param>
     /// <param name="clusters">Whether the final model's own sums are wanted, as the forms over clusters do.</param>
-    public ClassPass(RowClasses classes, FinalFactor final, IReadOnlyList<AddedGroup> groups, int capacity, bool clusters)
+    public ClassPass(RowClasses classes, FinalFactor final, IReadOnlyList<AddedGroup> groups, int capacity, bool clusters, long mostDoubles)
     {
         if (classes.Codes.Length != final.Factor.Totals.Rows)
         {
             throw new ArgumentException("every row of the row set has one class", nameof(classes));
         }
 
-        _window = new ClassWindow(classes, groups.Sum(ClassMoments.Size));
+        _window = new ClassWindow(classes, groups.Sum(ClassMoments.Size), mostDoubles);
         _rows = new FinalRows(capacity, final.Rank);
         _final = clusters && FinalMoments.Fit(classes, final.Rank) ? new FinalMoments(classes, final.Rank) : null;
         _moments = [.. groups.Select(group => new ClassMoments(_window, group))];

@@ -4,16 +4,13 @@ namespace Auditor.Numerics.SecondPass;
 /// The classes whose sums are collected in one pass over the rows: all of them when their sums fit in memory, otherwise as many as do, and the rows
 /// are passed again for the next.
 /// </summary>
-internal sealed class ClassWindow(RowClasses classes, long doublesPerClass)
+internal sealed class ClassWindow(RowClasses classes, long doublesPerClass, long mostDoubles)
 {
-    /// <summary>Doubles that the sums of all groups may take together (256 MB).</summary>
-    public const long MostDoubles = 1L << 25;
-
     private int _first;
 
     public RowClasses Classes { get; } = classes;
 
-    public int Size { get; } = (int)Math.Clamp(MostDoubles / Math.Max(1, doublesPerClass), 1, classes.Count);
+    public int Size { get; } = (int)Math.Clamp(mostDoubles / Math.Max(1, doublesPerClass), 1, classes.Count);
 
     public bool HoldsAll => Size == Classes.Count;
 

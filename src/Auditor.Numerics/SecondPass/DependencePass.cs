@@ -15,7 +15,8 @@ internal sealed class DependencePass
     {
         (_final, _groups) = (final, groups);
         _rows = [.. groups.Select(group => new GroupRows(group, capacity))];
-        ClassPass? By(RowClasses? classes, bool clusters) => classes is null ? null : new ClassPass(classes, final, groups, capacity, clusters);
+        ClassPass? By(RowClasses? classes, bool clusters) =>
+            classes is null ? null : new ClassPass(classes, final, groups, capacity, clusters, structure.MostDoubles);
         var cluster = By(structure.Cluster, clusters: true);
         var sameUnit = ReferenceEquals(structure.Unit, structure.Cluster);
         _by = (cluster, sameUnit ? cluster : By(structure.Unit, clusters: true), By(structure.Period, clusters: false));

@@ -50,4 +50,7 @@ public sealed record DependenceStructure
 
     /// <summary>Observed periods in the order of time.</summary>
     public RowClasses? Period { get; init; }
+
+    /// <summary>Doubles that the sums of all groups by one kind of class may take (256 MB); when they are more, the rows are passed several times.</summary>
+    public long MostDoubles { get; init; } = 1L << 25;
 }

@@ -72,19 +72,19 @@ public sealed class WorkedDependenceTests
         var analysis = Analyse();
         var (added, sums) = (Added(analysis, 2), analysis.Sums(2).Cluster!);
         Compare("cr1", Cr1.Of(added, sums));
-        var (both, _) = Cr2.Of(added, sums);
-        VectorFile.Near(Scores.Output("cr2_aht", "eta"), both!.Eta);
+        var both = Cr2.Of(added, sums);
+        VectorFile.Near(Scores.Output("cr2_aht", "eta"), both.Eta);
         Compare("cr2_aht", both.Test);
-        var (one, _) = Cr2.Of(Added(analysis, 0), analysis.Sums(0).Cluster!);
-        Compare("cr2_aht_z1_alone_added", one!.Test);
+        var one = Cr2.Of(Added(analysis, 0), analysis.Sums(0).Cluster!);
+        Compare("cr2_aht_z1_alone_added", one.Test);
     }
 
     [Fact]
     public void Effective_rows_interval_and_negligible_effect_CR2()
     {
         var analysis = Analyse();
-        var (estimate, _) = Cr2.Of(Added(analysis, 2), analysis.Sums(2).Cluster!);
-        CompareEffective("cr2", analysis, estimate!.Covariance, estimate.Test);
+        var estimate = Cr2.Of(Added(analysis, 2), analysis.Sums(2).Cluster!);
+        CompareEffective("cr2", analysis, estimate.Covariance!, estimate.Test);
     }
 
     /// <summary>The file's covariance is not divided by its bias factor k; that is held against n x n matrices in BruteForceTests.</summary>
@@ -92,9 +92,9 @@ public sealed class WorkedDependenceTests
     public void Effective_rows_interval_and_negligible_effect_of_the_time_form()
     {
         var analysis = Analyse();
-        var estimate = PeriodWald.Of(Added(analysis, 2), analysis.Sums(2).Period!).Estimate!;
+        var estimate = PeriodWald.Of(Added(analysis, 2), analysis.Sums(2).Period!);
         var test = Assert.IsType<FTest>(estimate.Test);
-        var (v, k) = (estimate.Covariance, estimate.BiasFactor);
+        var (v, k) = (estimate.Covariance!, estimate.BiasFactor!.Value);
         double[,] raw = { { v[0, 0] * k, v[0, 1] * k }, { v[1, 0] * k, v[1, 1] * k } };
         CompareEffective(
             "cosine_on_residuals_of_larger_model", analysis, raw, TestResult.F(test.Statistic / k, test.Df1, test.Df2));
