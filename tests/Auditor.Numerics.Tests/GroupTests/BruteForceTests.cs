@@ -1,6 +1,5 @@
 using Auditor.Numerics.GroupTests;
 using Auditor.Numerics.Random;
-using Auditor.Numerics.SecondPass;
 using MathNet.Numerics.LinearAlgebra;
 
 namespace Auditor.Numerics.Tests.GroupTests;
