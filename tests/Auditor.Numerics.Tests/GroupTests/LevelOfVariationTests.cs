@@ -72,7 +72,9 @@ public sealed class LevelOfVariationTests
 
     private static DependenceStructure Structure => new()
     {
-        Cluster = new RowClasses([.. Unit.Select(u => u / 2)], 5), Unit = new RowClasses(Unit, 10), Period = new RowClasses(Period, 12),
+        Cluster = new RowClasses([.. Unit.Select(u => u / 2)], 5),
+        Unit = new RowClasses(Unit, 10),
+        Period = new RowClasses(Period, 12),
     };
 
     private static (GroupAnalysis Analysis, LevelOfVariation Level) Analyse(double[][] group, DependenceStructure structure)
