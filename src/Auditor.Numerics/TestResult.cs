@@ -58,6 +58,21 @@ public enum Impediment
     /// <summary>The null-imposed score form has no more contributing rows (clusters, periods) than tested directions.</summary>
     TooFewContributions,
 
+    /// <summary>Fewer clusters bear on the group than a test of so many directions needs.</summary>
+    TooFewClusters,
+
+    /// <summary>More directions are tested than the form over periods has cosines for, or than periods bear on the group.</summary>
+    TooFewPeriods,
+
+    /// <summary>With the group in, some direction of it is fitted from one cluster alone: CR2 has no residual to judge it by.</summary>
+    RestsOnOneCluster,
+
+    /// <summary>More clusters, or larger matrices of them, than the form is computed for; CR1 stands in.</summary>
+    TooManyClusters,
+
+    /// <summary>More periods than the form is computed for.</summary>
+    TooManyPeriods,
+
     /// <summary>Sampling weights: the classical test does not apply.</summary>
     SamplingWeights,
 

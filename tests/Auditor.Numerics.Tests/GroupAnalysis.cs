@@ -6,12 +6,12 @@ namespace Auditor.Numerics.Tests;
 /// <summary>Both passes over a design, for tests: every group added to the final model, then all groups jointly.</summary>
 internal sealed class GroupAnalysis
 {
-    public GroupAnalysis(IDesignRows design)
+    public GroupAnalysis(IDesignRows design, DependenceStructure? structure = null)
     {
         Final = FinalFactor.Of(FactorBuilder.Build(design));
         Groups = [.. design.Layout.Groups.Select(range => AddedGroup.Of(Final, [.. range.Indices]))];
         All = AddedGroup.Of(Final, [.. design.Layout.Groups.SelectMany(range => range.Indices)]);
-        Pass = RowPass.Run(design, Final, [.. Groups, All], []);
+        Pass = RowPass.Run(design, Final, [.. Groups, All], [], structure);
         Fit = new Fit(Final, Pass);
     }
 

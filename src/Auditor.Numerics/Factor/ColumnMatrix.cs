@@ -9,6 +9,9 @@ public sealed class ColumnMatrix(int rows, int columns)
 
     public int Columns { get; } = columns;
 
+    /// <summary>All entries, column after column.</summary>
+    internal ReadOnlySpan<double> Values => _values;
+
     public double this[int row, int column]
     {
         get => _values[(column * Rows) + row];

@@ -23,4 +23,10 @@ internal static class Impediments
     /// <summary>Robust forms need residuals of F + group that are more than rounding.</summary>
     public static Impediment? OfRobust(AddedGroup group) =>
         OfGroup(group) ?? (PerfectFit.Is(group.Final, group.RssWith) ? Impediment.PerfectWithGroup : null);
+
+    /// <summary>Mean square of F + group, the classical variance of each entry of u.</summary>
+    public static double MeanSquare(AddedGroup group) => group.RssWith / PartialF.ResidualDf(group);
+
+    /// <summary>The variance that a score matrix is measured by: of the residuals or of the group's own fitted part, whichever is less.</summary>
+    public static double ScoreScale(AddedGroup group) => Math.Min(MeanSquare(group), group.SumOfSquares / group.Final.Factor.Totals.N);
 }

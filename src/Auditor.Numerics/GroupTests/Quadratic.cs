@@ -8,8 +8,12 @@ public static class Quadratic
     /// <summary>A pivot below this share of its diagonal is rounding: the matrix is singular.</summary>
     private const double Singular = 1e-13;
 
+    /// <summary>A variance below this share of the classical one is rounding.</summary>
+    private const double Rounding = 1e-20;
+
     /// <summary>u' V^-1 u for a q x q symmetric V, null when V is singular or not positive definite.</summary>
-    public static double? Form(IReadOnlyList<double> u, double[,] v)
+    /// <param name="classical">The classical variance of each entry of u, by which a V that is nothing but rounding is told.</param>
+    public static double? Form(IReadOnlyList<double> u, double[,] v, double classical = 0)
     {
         var q = u.Count;
         var (l, z, total) = (new double[q, q], new double[q], 0.0);
@@ -21,7 +25,7 @@ public static class Quadratic
             }
 
             var pivot = v[i, i] - Inner(l, i, i, i);
-            if (!(pivot > Singular * v[i, i]))
+            if (!(pivot > Math.Max(Singular * v[i, i], Rounding * classical)))
             {
                 return null;
             }
@@ -41,6 +45,46 @@ public static class Quadratic
         return (values.Min(value => value.Real), values.Max(value => value.Real));
     }
 
+    /// <summary>sum over c = 0 … count - 1 of factor v_c v_c'.</summary>
+    internal static double[,] Products(int q, int count, Vector of, double factor = 1)
+    {
+        var sum = new double[q, q];
+        for (var c = 0; c < count; c++)
+        {
+            var v = of(c);
+            AddProduct(sum, v, v, factor);
+        }
+
+        return sum;
+    }
+
+    /// <summary>factor V, a copy.</summary>
+    internal static double[,] Scaled(double[,] v, double factor)
+    {
+        var scaled = (double[,])v.Clone();
+        for (var i = 0; i < v.GetLength(0); i++)
+        {
+            for (var j = 0; j < v.GetLength(1); j++)
+            {
+                scaled[i, j] *= factor;
+            }
+        }
+
+        return scaled;
+    }
+
+    /// <summary>into += factor a b'.</summary>
+    internal static void AddProduct(double[,] into, ReadOnlySpan<double> a, ReadOnlySpan<double> b, double factor = 1)
+    {
+        for (var i = 0; i < a.Length; i++)
+        {
+            for (var j = 0; j < b.Length; j++)
+            {
+                into[i, j] += factor * a[i] * b[j];
+            }
+        }
+    }
+
     private static double Inner(double[,] l, int i, int j, int length)
     {
         var sum = 0.0;
@@ -51,4 +95,7 @@ public static class Quadratic
 
         return sum;
     }
+
+    /// <summary>The vector that belongs to class c.</summary>
+    internal delegate ReadOnlySpan<double> Vector(int c);
 }

@@ -47,8 +47,8 @@ public static class ScoreF
             : TestResult.None(Impediment.SingularCovariance);
     }
 
-    /// <summary>LM is at most n, and n itself only when every row pulls alike: F has no finite value then.</summary>
-    private static TestResult FromLagrangeMultiplier(double lm, double n, double q) => lm < n * (1 - 1e-12)
+    /// <summary>LM of n rows or clusters is at most n, and n itself only when all pull alike: F has no finite value then.</summary>
+    internal static TestResult FromLagrangeMultiplier(double lm, double n, double q) => lm < n * (1 - 1e-12)
         ? TestResult.F((n - q) / q * lm / (n - lm), q, n - q)
         : TestResult.None(Impediment.NotFinite);
 }

@@ -50,22 +50,8 @@ public static class WaldF
     public static double[,] Covariance(AddedGroup group, GroupSums sums, Heteroskedastic estimator) => estimator switch
     {
         Heteroskedastic.Hc0 => sums.Hc0,
-        Heteroskedastic.Hc1 => Scaled(sums.Hc0, group.Final.Factor.Totals.N / PartialF.ResidualDf(group)),
+        Heteroskedastic.Hc1 => Quadratic.Scaled(sums.Hc0, group.Final.Factor.Totals.N / PartialF.ResidualDf(group)),
         Heteroskedastic.Hc2 => sums.Hc2,
         _ => sums.Hc3,
     };
-
-    private static double[,] Scaled(double[,] v, double factor)
-    {
-        var scaled = (double[,])v.Clone();
-        for (var i = 0; i < v.GetLength(0); i++)
-        {
-            for (var j = 0; j < v.GetLength(1); j++)
-            {
-                scaled[i, j] *= factor;
-            }
-        }
-
-        return scaled;
-    }
 }

@@ -33,6 +33,16 @@ public sealed class GroupSums
     /// <summary>Observations with a non-zero qz row.</summary>
     public double ContributingN { get; internal set; }
 
+    /// <summary>The same sums by declared cluster, null when none is declared.</summary>
+    public ClassSums? Cluster { get; internal set; }
+
+    public ClassSums? Unit { get; internal set; }
+
+    public ClassSums? Period { get; internal set; }
+
+    /// <summary>On which level the group's columns vary; null when no dependence is declared.</summary>
+    public LevelCounts? Levels { get; internal set; }
+
     /// <summary>Positions (0-based, within the row set) of rows with leverage 1 in F.</summary>
     public IReadOnlyList<int> LeverageOneInFinal => LeverageOneRows;
 

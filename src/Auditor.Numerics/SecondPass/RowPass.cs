@@ -6,9 +6,18 @@ namespace Auditor.Numerics.SecondPass;
 public static class RowPass
 {
     /// <param name="others">Further accumulators, fed with the same blocks.</param>
+    /// <param name="structure">
+    /// The declared dependence between rows; nothing is computed for what is absent. When the sums by class do not fit in memory, the rows are
+    /// passed more than once.
+    /// </param>
     public static RowPassResult Run(
-        IDesignRows design, FinalFactor final, IReadOnlyList<AddedGroup> groups, IReadOnlyList<IAccumulator> others)
+        IDesignRows design,
+        FinalFactor final,
+        IReadOnlyList<AddedGroup> groups,
+        IReadOnlyList<IAccumulator> others,
+        DependenceStructure? structure = null)
     {
+        DependencePass? dependence = null;
         var refinement = new Refinement(final);
         ResidualBlock? residuals = null;
         GroupAccumulator[] accumulators = [];
@@ -18,6 +27,7 @@ public static class RowPass
             {
                 residuals = new ResidualBlock(final, block.Stride);
                 accumulators = [.. groups.Select(group => new GroupAccumulator(group, block.Stride))];
+                dependence = structure is null ? null : new DependencePass(final, groups, structure, block.Stride);
             }
 
             refinement.Add(block);
@@ -26,9 +36,13 @@ public static class RowPass
             {
                 accumulator.Add(residuals);
             }
+
+            dependence?.Add(block, residuals);
         }
 
-        return new RowPassResult(refinement.Finish(), [.. accumulators.Select(accumulator => accumulator.Sums)]);
+        GroupSums[] sums = [.. accumulators.Select(accumulator => accumulator.Sums)];
+        dependence?.Finish(design, sums);
+        return new RowPassResult(refinement.Finish(), sums);
     }
 }
 

@@ -36,6 +36,26 @@ public sealed class PowerTests
     }
 
     [Fact]
+    public void Clusters_needed_reach_the_power_and_one_fewer_does_not()
+    {
+        var clusters = Power.ClustersNeeded(2, 12.5, 20, 60, 0.05, 0.05, 0.8)!.Value;
+        double At(double c) => Power.AtBound(2, (12.5 * c / 20) - 1, 60 * c / 20, 0.05, 0.05);
+        Assert.True(At(clusters) >= 0.8);
+        Assert.True(At(clusters - 1) < 0.8);
+        Assert.Null(Power.ClustersNeeded(2, 12.5, 20, 1e-13, 0.05, 0.05, 0.8));
+    }
+
+    [Fact]
+    public void Periods_needed_reach_the_power_and_one_fewer_does_not()
+    {
+        var periods = Power.PeriodsNeeded(2, 40, 30, 0.05, 0.05, 0.8)!.Value;
+        double At(double t) => Power.AtBound(2, PeriodF.CosineCount((int)t) - 1, 30 * t / 40, 0.05, 0.05);
+        Assert.True(At(periods) >= 0.8);
+        Assert.True(At(periods - 1) < 0.8);
+        Assert.Null(Power.PeriodsNeeded(2, 40, 1e-9, 0.05, 0.05, 0.8));
+    }
+
+    [Fact]
     public void The_smallest_detectable_effect_has_the_wanted_power()
     {
         var fSquared = Power.SmallestDetectable(2, 97, 100, 0.05, 0.8)!.Value;

@@ -10,7 +10,7 @@ public sealed partial class HtmlReportTests
 {
     private static readonly string[] Sections =
     [
-        "summary", "verdicts", "effects", "exclusions", "jointly", "final-model", "checks", "influence", "collinearity",
+        "summary", "verdicts", "exclusions", "jointly", "final-model", "checks", "influence", "collinearity",
         "claims", "elimination", "rows", "findings", "policy", "provenance", "cautions",
     ];
 
