@@ -40,7 +40,7 @@ internal static class ModelAnalysis
             beside?.Summary,
             main.Fit.Perfect,
             exclusions.All,
-            [.. Enumerable.Range(0, model.Groups.Count).Select(group => Inputs(model, fits, group, common) with { LeftOutByRule = elimination.LeftOutByRule[group] })],
+            [.. Enumerable.Range(0, model.Groups.Count).Select(group => Inputs(model, fits, group, common) with { LeftOutByRule = elimination.LeftOutByRule[group], Groups = model.Groups.Count })],
             AllLeftOut.Of(model, fits.Common, policy, sampling),
             [.. checks],
             InfluenceFigures.Of(influence, main.Rows, model.RowLabel),
