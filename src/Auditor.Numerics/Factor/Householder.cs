@@ -1,38 +1,8 @@
 namespace Auditor.Numerics.Factor;
 
-/// <summary>Householder reflections: of a block stacked under a triangle, and of small matrices column by column.</summary>
+/// <summary>Householder reflections of small matrices, column by column.</summary>
 internal static class Householder
 {
-    /// <summary>
-    /// A squared length below this is nothing: when columns outnumber rows, rounding is reflected again and again and shrinks each time, until its squares
-    /// would underflow. A column as small as that counts as zero.
-    /// </summary>
-    private const double Nothing = 1e-200;
-
-    /// <summary>
-    /// Factors the block stacked under the triangle into the triangle. The block is used up. The reflection of column j touches row j of the
-    /// triangle and all rows of the block.
-    /// </summary>
-    public static void Stack(ColumnMatrix triangle, PreparedBlock block)
-    {
-        for (var j = 0; j < triangle.Columns; j++)
-        {
-            var below = block.Column(j);
-            var squared = BlockKernels.Dot(below, below);
-            if (squared < Nothing)
-            {
-                continue;
-            }
-
-            var diagonal = triangle[j, j];
-            var length = Math.Sqrt(Math.FusedMultiplyAdd(diagonal, diagonal, squared));
-            var image = diagonal > 0 ? -length : length;
-            var top = diagonal - image;
-            triangle[j, j] = image;
-            ReflectRest(triangle, block, j, top, 1 / (image * top));
-        }
-    }
-
     /// <summary>
     /// Reflects rows <paramref name="from"/> and below so that the column becomes zero below its row <paramref name="from"/>; the same
     /// reflection is applied to the given later columns. Trailing zeros of the column are left out, so that a nearly triangular
@@ -51,7 +21,7 @@ internal static class Householder
         var length = Math.Sqrt(BlockKernels.Dot(v, v));
         var image = v[0] > 0 ? -length : length;
         v[0] -= image;
-        var factor = 1 / (image * v[0]); // as in ReflectRest
+        var factor = 1 / (image * v[0]); // v'v = -2 image v_0
         var own = matrix.Column(column).Slice(from, rows);
         own.Clear();
         own[0] = image;
@@ -59,19 +29,6 @@ internal static class Householder
         {
             var other = matrix.Column(c).Slice(from, rows);
             BlockKernels.AddScaled(other, factor * BlockKernels.Dot(v, other), v);
-        }
-    }
-
-    private static void ReflectRest(ColumnMatrix triangle, PreparedBlock block, int j, double top, double factor)
-    {
-        // v = [top; below] and v'v = -2 image top, so the reflection I - 2 v v' / v'v is I + v v' / (image top).
-        var below = block.Column(j);
-        for (var k = j + 1; k < triangle.Columns; k++)
-        {
-            var other = block.Column(k);
-            var scale = factor * Math.FusedMultiplyAdd(top, triangle[j, k], BlockKernels.Dot(below, other));
-            triangle[j, k] = Math.FusedMultiplyAdd(scale, top, triangle[j, k]);
-            BlockKernels.AddScaled(other, scale, below);
         }
     }
 

@@ -27,7 +27,7 @@ internal sealed class ModelFits
     public RowSetFit? Common => On(Selection.Common);
 
     /// <param name="main">The rows of the fit that is shown and checked: their residuals are kept.</param>
-    /// <param name="threads">Most row sets to work on at once; each is computed by itself, so no result depends on it.</param>
+    /// <param name="threads">Most threads: for row sets, then within each; no result depends on it.</param>
     public static ModelFits Compute(BoundModel model, RowSelection selection, RowSubset main, int threads)
     {
         var wanted = Wanted(model, selection).Where(entry => entry.Key.Count > 0).ToArray();
@@ -37,7 +37,7 @@ internal sealed class ModelFits
             0,
             wanted.Length,
             new ParallelOptions { MaxDegreeOfParallelism = threads },
-            at => computed[at] = RowSetFit.Compute(model, wanted[at].Key, [.. wanted[at].Value], wanted[at].Key.Equals(selection.Common), wanted[at].Key.Equals(main) ? residuals : null));
+            at => computed[at] = RowSetFit.Compute(model, wanted[at].Key, [.. wanted[at].Value], wanted[at].Key.Equals(selection.Common), wanted[at].Key.Equals(main) ? residuals : null, Math.Max(1, threads / wanted.Length)));
         var fits = new ModelFits(selection) { Residuals = residuals };
         foreach (var fit in computed)
         {

@@ -36,11 +36,12 @@ internal sealed class RowSetFit
     /// <param name="groups">Positions of the groups to be tested on these rows.</param>
     /// <param name="jointly">Whether all of them together, and each last, are wanted too.</param>
     /// <param name="residuals">Keeps every row's residual and leverage; null when they are not wanted.</param>
-    public static RowSetFit Compute(BoundModel model, RowSubset rows, IReadOnlyList<int> groups, bool jointly, ResidualStore? residuals)
+    /// <param name="threads">Most threads to use; no result depends on it.</param>
+    public static RowSetFit Compute(BoundModel model, RowSubset rows, IReadOnlyList<int> groups, bool jointly, ResidualStore? residuals, int threads)
     {
         var plan = new DesignPlan(model, groups);
         var design = new DesignRows(model, plan, rows);
-        var final = FinalFactor.Of(FactorBuilder.Build(design));
+        var final = FinalFactor.Of(FactorBuilder.Build(design, threads));
         var added = plan.Layout.Groups.Select(range => AddedGroup.Of(final, [.. range.Indices])).ToList();
         var joint = jointly && groups.Count > 0 ? AddedGroup.Of(final, Columns(plan, [.. Enumerable.Range(0, groups.Count)])) : null;
         var pass = RowPass.Run(design, final, joint is null ? added : [.. added, joint], residuals is null ? [] : [residuals]);

@@ -9,14 +9,26 @@ public sealed class DesignRows(BoundModel model, DesignPlan plan, RowSubset rows
 {
     public DesignLayout Layout => plan.Layout;
 
-    public IEnumerable<RowBlock> Blocks()
+    public int Stripes => Cut.Count;
+
+    private RowStripes Cut => new(rows.Count, Layout.Columns);
+
+    public IEnumerable<RowBlock> Blocks() => Blocks(0, rows.Count);
+
+    public IEnumerable<RowBlock> Blocks(int stripe)
+    {
+        var (first, end) = Cut[stripe];
+        return Blocks(first, end);
+    }
+
+    private IEnumerable<RowBlock> Blocks(int from, int end)
     {
         var block = new RowBlock(Math.Min(RowBlock.DefaultCapacity, Math.Max(1, rows.Count)), Layout.Columns);
         var weights = model.Weights is null ? null : new double[block.Stride];
         var copies = model.Weights?.Kind == WeightKind.Frequency;
         block.Weights = copies ? null : weights;
         block.Copies = copies ? weights : null;
-        for (var first = 0; first < rows.Count; first += block.Stride)
+        for (var first = from; first < end; first += block.Stride)
         {
             Fill(block, first, weights);
             yield return block;
