@@ -9,6 +9,12 @@ public static class FactorBuilder
     /// <exception cref="ArgumentException">The design has no rows.</exception>
     public static OrthogonalFactor Build(IDesignRows design, int threads = 1)
     {
+        var factor = BuildPlain(design, threads);
+        return design.Extended is { } extended && PreciseFactor.IsWanted(factor) ? PreciseFactor.Build(extended, factor) : factor;
+    }
+
+    private static OrthogonalFactor BuildPlain(IDesignRows design, int threads)
+    {
         var (shifts, stripes) = (Shifts(design), new StripeFactor[design.Stripes]);
         Each(stripes.Length, threads, stripe => stripes[stripe] = new StripeFactor(design.Layout, shifts).AddAll(design.Blocks(stripe)));
         foreach (var stripe in stripes.Skip(1))

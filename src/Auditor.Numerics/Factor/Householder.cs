@@ -1,8 +1,44 @@
 namespace Auditor.Numerics.Factor;
 
-/// <summary>Householder reflections of small matrices, column by column.</summary>
+/// <summary>Householder reflections, one at a time: of small matrices, and of a short block stacked under a triangle.</summary>
 internal static class Householder
 {
+    /// <summary>
+    /// A squared length below this is nothing: when columns outnumber rows, rounding is reflected again and again and shrinks each time, until its squares
+    /// would underflow. A column as small as that counts as zero.
+    /// </summary>
+    public const double Nothing = 1e-200;
+
+    /// <summary>
+    /// Factors the block stacked under the triangle into the triangle. The block, column-major, is used up. The reflection of column j touches row j of the
+    /// triangle and all rows of the block.
+    /// </summary>
+    public static void Stack(ColumnMatrix triangle, double[] block, int stride, int rows)
+    {
+        for (var j = 0; j < triangle.Columns; j++)
+        {
+            var below = block.AsSpan(j * stride, rows);
+            var squared = BlockKernels.Dot(below, below);
+            if (squared < Nothing)
+            {
+                continue;
+            }
+
+            var diagonal = triangle[j, j];
+            var length = Math.Sqrt(Math.FusedMultiplyAdd(diagonal, diagonal, squared));
+            var image = diagonal > 0 ? -length : length;
+            triangle[j, j] = image;
+            var (top, factor) = (diagonal - image, 1 / (image * (diagonal - image))); // v'v = -2 image top
+            for (var k = j + 1; k < triangle.Columns; k++)
+            {
+                var other = block.AsSpan(k * stride, rows);
+                var scale = factor * Math.FusedMultiplyAdd(top, triangle[j, k], BlockKernels.Dot(below, other));
+                triangle[j, k] = Math.FusedMultiplyAdd(scale, top, triangle[j, k]);
+                BlockKernels.AddScaled(other, scale, below);
+            }
+        }
+    }
+
     /// <summary>
     /// Reflects rows <paramref name="from"/> and below so that the column becomes zero below its row <paramref name="from"/>; the same
     /// reflection is applied to the given later columns. Trailing zeros of the column are left out, so that a nearly triangular

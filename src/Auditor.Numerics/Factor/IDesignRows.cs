@@ -14,6 +14,12 @@ public interface IDesignRows
     /// </summary>
     int Stripes => 1;
 
+    /// <summary>
+    /// The same rows with the low parts of the columns that the source forms itself, for a factor in extended precision when digits are lost. Null: the factor stays
+    /// as it is.
+    /// </summary>
+    IDesignRows? Extended => null;
+
     IEnumerable<RowBlock> Blocks();
 
     /// <summary>The blocks of one stripe; several stripes may be read at the same time. A design of more than one stripe must give its own.</summary>

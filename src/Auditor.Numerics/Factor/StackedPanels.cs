@@ -15,11 +15,8 @@ internal sealed class StackedPanels(ColumnMatrix triangle)
 {
     private const int Width = PanelKernels.Width;
 
-    /// <summary>
-    /// A squared length below this is nothing: when columns outnumber rows, rounding is reflected again and again and shrinks each time, until its squares
-    /// would underflow. A column as small as that counts as zero.
-    /// </summary>
-    private const double Nothing = 1e-200;
+    /// <summary>A block of fewer rows is reflected column by column: panels have nothing to gain there, and lose a fraction of a digit.</summary>
+    private const int FewestRows = 256;
 
     private readonly double[] _tops = new double[Width];
     private readonly double[] _scales = new double[Width];
@@ -38,6 +35,12 @@ internal sealed class StackedPanels(ColumnMatrix triangle)
     /// <param name="triangular">The block's column c holds zeros below its row c, so that most of the work falls away.</param>
     public void Stack(double[] block, int stride, int rows, bool triangular)
     {
+        if (!triangular && rows < FewestRows)
+        {
+            Householder.Stack(triangle, block, stride, rows);
+            return;
+        }
+
         (_block, _stride) = (block, stride);
         for (var first = 0; first < triangle.Columns; first += Width)
         {
@@ -74,7 +77,7 @@ internal sealed class StackedPanels(ColumnMatrix triangle)
     {
         var squared = _dots[j - first];
         var diagonal = triangle[j, j];
-        if (squared < Nothing)
+        if (squared < Householder.Nothing)
         {
             (_tops[j - first], _scales[j - first]) = (0, 0);
         }

@@ -44,7 +44,7 @@ internal sealed class RowSetFit
         var final = FinalFactor.Of(FactorBuilder.Build(design, threads));
         var added = plan.Layout.Groups.Select(range => AddedGroup.Of(final, [.. range.Indices])).ToList();
         var joint = jointly && groups.Count > 0 ? AddedGroup.Of(final, Columns(plan, [.. Enumerable.Range(0, groups.Count)])) : null;
-        var pass = RowPass.Run(design, final, joint is null ? added : [.. added, joint], residuals is null ? [] : [residuals]);
+        var pass = RowPass.Run(final.Factor.IsExtended ? design.Extended! : design, final, joint is null ? added : [.. added, joint], residuals is null ? [] : [residuals]);
         var result = new RowSetFit(rows, plan, final, new Fit(final, pass));
         for (var g = 0; g < groups.Count; g++)
         {

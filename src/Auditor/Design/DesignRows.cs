@@ -5,9 +5,14 @@ using Auditor.Numerics.Factor;
 namespace Auditor.Design;
 
 /// <summary>Makes the columns of a plan for the rows of a subset, block by block: the whole design is never in memory.</summary>
-public sealed class DesignRows(BoundModel model, DesignPlan plan, RowSubset rows) : IDesignRows
+/// <param name="withLowParts">Whether the blocks carry what rounding took off the columns.</param>
+public sealed class DesignRows(BoundModel model, DesignPlan plan, RowSubset rows, bool withLowParts = false) : IDesignRows
 {
     public DesignLayout Layout => plan.Layout;
+
+    public IDesignRows? Extended => withLowParts ? this
+        : plan.TermColumns().Any(entry => entry.Term.HasLowParts) ? new DesignRows(model, plan, rows, withLowParts: true)
+        : null;
 
     public int Stripes => Cut.Count;
 
@@ -24,6 +29,7 @@ public sealed class DesignRows(BoundModel model, DesignPlan plan, RowSubset rows
     private IEnumerable<RowBlock> Blocks(int from, int end)
     {
         var block = new RowBlock(Math.Min(RowBlock.DefaultCapacity, Math.Max(1, rows.Count)), Layout.Columns);
+        block.Low = withLowParts ? new double[block.Values.Length] : null;
         var weights = model.Weights is null ? null : new double[block.Stride];
         var copies = model.Weights?.Kind == WeightKind.Frequency;
         block.Weights = copies ? null : weights;
@@ -48,6 +54,10 @@ public sealed class DesignRows(BoundModel model, DesignPlan plan, RowSubset rows
         foreach (var (term, column) in plan.TermColumns())
         {
             term.Fill(chosen, block.Values.AsSpan(column * block.Stride), block.Stride);
+            if (block.Low is { } low)
+            {
+                term.FillLow(chosen, low.AsSpan(column * block.Stride), block.Stride);
+            }
         }
 
         for (var i = 0; weights is not null && i < chosen.Length; i++)
