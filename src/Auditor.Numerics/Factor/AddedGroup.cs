@@ -26,6 +26,7 @@ public sealed class AddedGroup
             reduction.Rotated.Column(KeptPositions[c]).Slice(rankBefore, c + 1).CopyTo(Triangle.Column(c));
         }
 
+        PreciseTriangle = reduction.Precise?.Select(KeptPositions, rankBefore, Kept.Count);
         Aliased = before > 0
             ? []
             : [.. reduction.Aliased.Select(position => Combinations.OfGroupColumn(this, columns[position], reduction.Rotated.Column(position)))];
@@ -66,6 +67,9 @@ public sealed class AddedGroup
     /// <summary>q x q triangle R_z with Z~ = Qz R_z.</summary>
     internal ColumnMatrix Triangle { get; }
 
+    /// <summary>The same in double-double, when the factor is.</summary>
+    internal DoubleDoubleMatrix? PreciseTriangle { get; }
+
     private IReadOnlyList<int> KeptPositions { get; }
 
     /// <summary>Z added to F.</summary>
@@ -83,7 +87,7 @@ public sealed class AddedGroup
         }
 
         final.Orthogonal(response).CopyTo(matrix.Column(all.Length));
-        var reduction = Reduction.Of(final.Factor, matrix, all.Length, 0, position => all[position]);
+        var reduction = Reduction.Of(final.Factor, matrix, final.PreciseOrthogonal([.. all, response]), all.Length, 0, position => all[position]);
         return new AddedGroup(final, columns, before.Count, reduction);
     }
 }

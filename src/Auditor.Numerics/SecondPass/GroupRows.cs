@@ -25,7 +25,8 @@ internal sealed class GroupRows(AddedGroup group, int capacity)
     public void Load(ResidualBlock block)
     {
         _rows = block.Rows;
-        for (var k = 0; k < group.Rank; k++)
+        block.Precise?.CopyGroup(group, k => _qz.AsMemory(k * capacity, _rows));
+        for (var k = 0; k < group.Rank && block.Precise is null; k++)
         {
             ComputeColumn(block, k);
         }

@@ -18,6 +18,7 @@ public sealed class ResidualBlock
     internal ResidualBlock(FinalFactor final, int capacity)
     {
         Final = final;
+        Precise = final.Factor.IsExtended ? new PreciseRows(final) : null;
         Prepared = new PreparedBlock(capacity, final.Factor.Layout.Columns);
         _residuals = new double[capacity];
         _leverages = new double[capacity];
@@ -42,6 +43,9 @@ public sealed class ResidualBlock
 
     internal PreparedBlock Prepared { get; }
 
+    /// <summary>The same rows in extended precision, when the factor is.</summary>
+    internal PreciseRows? Precise { get; }
+
     /// <summary>Column k of the rows of Q_F, 0 to r - 1.</summary>
     internal Span<double> QColumn(int k) => _q.AsSpan(k * Prepared.Stride, Rows);
 
@@ -52,6 +56,7 @@ public sealed class ResidualBlock
         FirstRow = block.FirstRow;
         Copies = block.Copies;
         BlockKernels.Multiply(residuals, Prepared.Scale, _residuals.AsSpan(0, Rows));
+        Precise?.Load(block, Prepared.Scale);
         ComputeQ();
     }
 
@@ -61,15 +66,26 @@ public sealed class ResidualBlock
         leverages.Clear();
         for (var k = 0; k < Final.Rank; k++)
         {
-            var q = QColumn(k);
-            Prepared.Column(Final.Kept[k]).CopyTo(q);
-            for (var j = 0; j < k; j++)
-            {
-                BlockKernels.AddScaled(q, -Final.Triangle[j, k], QColumn(j));
-            }
-
-            BlockKernels.Scale(q, 1 / Final.Triangle[k, k]);
-            BlockKernels.AddSquares(leverages, q);
+            ComputeQColumn(k);
+            BlockKernels.AddSquares(leverages, QColumn(k));
         }
+    }
+
+    private void ComputeQColumn(int k)
+    {
+        var q = QColumn(k);
+        if (Precise is not null)
+        {
+            Precise.CopyQ(k, q);
+            return;
+        }
+
+        Prepared.Column(Final.Kept[k]).CopyTo(q);
+        for (var j = 0; j < k; j++)
+        {
+            BlockKernels.AddScaled(q, -Final.Triangle[j, k], QColumn(j));
+        }
+
+        BlockKernels.Scale(q, 1 / Final.Triangle[k, k]);
     }
 }

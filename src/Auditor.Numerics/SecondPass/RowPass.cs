@@ -21,7 +21,8 @@ public static class RowPass
         var refinement = new Refinement(final);
         ResidualBlock? residuals = null;
         GroupAccumulator[] accumulators = [];
-        foreach (var block in design.Blocks())
+        var rows = final.Factor.IsExtended ? design.Extended ?? design : design;
+        foreach (var block in rows.Blocks())
         {
             if (residuals is null)
             {
@@ -41,7 +42,7 @@ public static class RowPass
         }
 
         GroupSums[] sums = [.. accumulators.Select(accumulator => accumulator.Sums)];
-        dependence?.Finish(design, sums);
+        dependence?.Finish(rows, sums);
         return new RowPassResult(refinement.Finish(), sums);
     }
 }

@@ -39,11 +39,12 @@ internal sealed class RowSetFit
 
     /// <param name="groups">Positions of the groups to be tested on these rows.</param>
     /// <param name="wishes">What is wanted beside the fit and the groups' own tests.</param>
-    public static RowSetFit Compute(BoundModel model, RowSubset rows, IReadOnlyList<int> groups, FitWishes wishes)
+    /// <param name="threads">Most threads to use; no result depends on it.</param>
+    public static RowSetFit Compute(BoundModel model, RowSubset rows, IReadOnlyList<int> groups, FitWishes wishes, int threads)
     {
         var plan = new DesignPlan(model, groups);
         var design = new DesignRows(model, plan, rows);
-        var final = FinalFactor.Of(FactorBuilder.Build(design));
+        var final = FinalFactor.Of(FactorBuilder.Build(design, threads));
         var added = plan.Layout.Groups.Select(range => AddedGroup.Of(final, [.. range.Indices])).ToList();
         var joint = wishes.Jointly && groups.Count > 0 ? AddedGroup.Of(final, Columns(plan, [.. Enumerable.Range(0, groups.Count)])) : null;
         var pictures = groups.Select((group, g) => wishes.Pictured.Contains(group) ? GroupPictures.Of(added[g], plan, model.Groups.Count) : null).ToList();
