@@ -52,8 +52,14 @@ public sealed class FinalFactor
     /// <summary>Coordinates of a design column within F; r entries.</summary>
     internal ReadOnlySpan<double> Explained(int column) => _rotated.Column(column)[..Kept.Count];
 
+    /// <summary>The same, for use after the call.</summary>
+    internal ReadOnlyMemory<double> ExplainedMemory(int column) => _rotated.ColumnMemory(column)[..Kept.Count];
+
     /// <summary>Coordinates of a design column orthogonal to F.</summary>
     internal ReadOnlySpan<double> Orthogonal(int column) => _rotated.Column(column)[Kept.Count..];
+
+    /// <summary>Coordinates of design columns orthogonal to F, copied.</summary>
+    internal ColumnMatrix OrthogonalPart(IReadOnlyList<int> columns) => _rotated.Select(columns, Rank, _rotated.Rows - Rank);
 
     /// <summary>The kept columns' triangle in double-double, when the factor is.</summary>
     internal DoubleDoubleMatrix? PreciseTriangle => _precise?.Select(Kept, 0, Rank);

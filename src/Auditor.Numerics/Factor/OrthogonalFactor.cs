@@ -26,7 +26,7 @@ public sealed class OrthogonalFactor
 
     public DesignLayout Layout { get; }
 
-    /// <summary>P x P, zero below the diagonal; rows beyond n are zero.</summary>
+    /// <summary>P columns, zero below the diagonal; P rows, with fewer observations than columns about as many as there are observations.</summary>
     public ColumnMatrix R { get; }
 
     /// <summary>R in double-double where the columns cost so many digits that it was worth it (<see cref="PreciseFactor"/>); else null.</summary>

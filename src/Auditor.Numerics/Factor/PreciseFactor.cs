@@ -43,6 +43,11 @@ internal static class PreciseFactor
     /// <summary>The column is kept, but costs digits in double.</summary>
     public static bool IsCostly(OrthogonalFactor factor, int column)
     {
+        if (column >= factor.R.Rows)
+        {
+            return false;
+        }
+
         var share = Math.Abs(factor.R[column, column]) / factor.Lengths[column];
         return share is > RankTolerance.Aliased and < Costly;
     }

@@ -4,6 +4,9 @@ namespace Auditor.Numerics.Factor;
 /// <param name="shifts">What to subtract from each column, the same for all stripes.</param>
 internal sealed class StripeFactor(DesignLayout layout, double[] shifts)
 {
+    /// <summary>An entry of R below this share of its column's length is rounding.</summary>
+    private const double Rounding = 1e-14;
+
     private readonly StackedPanels _panels = new(new ColumnMatrix(layout.Columns, layout.Columns));
     private readonly double[] _largest = new double[layout.Columns];
     private PreparedBlock? _prepared;
@@ -44,7 +47,24 @@ internal sealed class StripeFactor(DesignLayout layout, double[] shifts)
 
     public OrthogonalFactor Finish() => _rows == 0
         ? throw new ArgumentException("a design without rows has no factor")
-        : new OrthogonalFactor(layout, _panels.Triangle, shifts, _largest, new RowTotals(_rows, _n, _sumOfWeights, _sumOfLogWeights));
+        : new OrthogonalFactor(layout, Trimmed(), shifts, _largest, new RowTotals(_rows, _n, _sumOfWeights, _sumOfLogWeights));
+
+    /// <summary>
+    /// With fewer rows than columns the last rows of R hold nothing but rounding, far below what decides whether a column is aliased
+    /// (<see cref="RankTolerance"/>): without them every submodel is a problem of as many rows as the data have.
+    /// </summary>
+    private ColumnMatrix Trimmed()
+    {
+        var (r, size) = (_panels.Triangle, layout.Columns);
+        var negligible = Enumerable.Range(0, size).Select(c => Rounding * Math.Sqrt(BlockKernels.Dot(r.Column(c), r.Column(c)))).ToArray();
+        var rows = size;
+        while (rows > _rows && Enumerable.Range(0, size).All(c => Math.Abs(r[rows - 1, c]) <= negligible[c]))
+        {
+            rows--;
+        }
+
+        return rows == size ? r : r.Select([.. Enumerable.Range(0, size)], 0, rows);
+    }
 
     private void Add(RowBlock block)
     {

@@ -13,7 +13,6 @@ public sealed class ResidualBlock
 {
     private readonly double[] _residuals;
     private readonly double[] _leverages;
-    private readonly double[] _q;
 
     internal ResidualBlock(FinalFactor final, int capacity)
     {
@@ -22,7 +21,7 @@ public sealed class ResidualBlock
         Prepared = new PreparedBlock(capacity, final.Factor.Layout.Columns);
         _residuals = new double[capacity];
         _leverages = new double[capacity];
-        _q = new double[capacity * Math.Max(1, final.Rank)];
+        Q = new PanelColumns(capacity, final.Rank);
     }
 
     public int Rows => Prepared.Rows;
@@ -47,7 +46,10 @@ public sealed class ResidualBlock
     internal PreciseRows? Precise { get; }
 
     /// <summary>Column k of the rows of Q_F, 0 to r - 1.</summary>
-    internal Span<double> QColumn(int k) => _q.AsSpan(k * Prepared.Stride, Rows);
+    internal Span<double> QColumn(int k) => Q.Column(k);
+
+    /// <summary>The rows of Q_F.</summary>
+    internal PanelColumns Q { get; }
 
     /// <param name="residuals">y - X b, not weighted.</param>
     internal void Load(RowBlock block, ReadOnlySpan<double> residuals)
@@ -62,30 +64,34 @@ public sealed class ResidualBlock
 
     private void ComputeQ()
     {
+        Q.Begin(Rows);
+        for (var k = 0; k < Final.Rank; k++)
+        {
+            if (Precise is null)
+            {
+                Prepared.Column(Final.Kept[k]).CopyTo(QColumn(k));
+            }
+            else
+            {
+                Precise.CopyQ(k, QColumn(k));
+            }
+        }
+
+        if (Precise is null)
+        {
+            Q.Solve(Final.Triangle);
+        }
+
+        AddLeverages();
+    }
+
+    private void AddLeverages()
+    {
         var leverages = _leverages.AsSpan(0, Rows);
         leverages.Clear();
         for (var k = 0; k < Final.Rank; k++)
         {
-            ComputeQColumn(k);
             BlockKernels.AddSquares(leverages, QColumn(k));
         }
-    }
-
-    private void ComputeQColumn(int k)
-    {
-        var q = QColumn(k);
-        if (Precise is not null)
-        {
-            Precise.CopyQ(k, q);
-            return;
-        }
-
-        Prepared.Column(Final.Kept[k]).CopyTo(q);
-        for (var j = 0; j < k; j++)
-        {
-            BlockKernels.AddScaled(q, -Final.Triangle[j, k], QColumn(j));
-        }
-
-        BlockKernels.Scale(q, 1 / Final.Triangle[k, k]);
     }
 }

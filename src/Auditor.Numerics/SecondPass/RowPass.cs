@@ -10,12 +10,14 @@ public static class RowPass
     /// The declared dependence between rows; nothing is computed for what is absent. When the sums by class do not fit in memory, the rows are
     /// passed more than once.
     /// </param>
+    /// <param name="threads">Most threads to use; no result depends on it.</param>
     public static RowPassResult Run(
         IDesignRows design,
         FinalFactor final,
         IReadOnlyList<AddedGroup> groups,
         IReadOnlyList<IAccumulator> others,
-        DependenceStructure? structure = null)
+        DependenceStructure? structure = null,
+        int threads = 1)
     {
         DependencePass? dependence = null;
         var refinement = new Refinement(final);
@@ -27,7 +29,7 @@ public static class RowPass
             if (residuals is null)
             {
                 residuals = new ResidualBlock(final, block.Stride);
-                accumulators = [.. groups.Select(group => new GroupAccumulator(group, block.Stride))];
+                accumulators = [.. groups.Select(group => new GroupAccumulator(group, block.Stride, threads))];
                 dependence = structure is null ? null : new DependencePass(final, groups, structure, block.Stride);
             }
 
@@ -41,7 +43,7 @@ public static class RowPass
             dependence?.Add(block, residuals);
         }
 
-        GroupSums[] sums = [.. accumulators.Select(accumulator => accumulator.Sums)];
+        GroupSums[] sums = [.. accumulators.Select(accumulator => accumulator.Finish())];
         dependence?.Finish(rows, sums);
         return new RowPassResult(refinement.Finish(), sums);
     }

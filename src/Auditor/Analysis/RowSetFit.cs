@@ -50,20 +50,17 @@ internal sealed class RowSetFit
         var pictures = groups.Select((group, g) => wishes.Pictured.Contains(group) ? GroupPictures.Of(added[g], plan, model.Groups.Count) : null).ToList();
         var scores = wishes.Scored ? new CoefficientScores(final) : null;
         IAccumulator?[] others = [wishes.Residuals, scores, .. pictures.SelectMany(picture => picture?.Accumulators ?? [])];
-        var pass = RowPass.Run(design, final, joint is null ? added : [.. added, joint], [.. others.OfType<IAccumulator>()]);
+        var pass = RowPass.Run(design, final, joint is null ? added : [.. added, joint], [.. others.OfType<IAccumulator>()], threads: threads);
         var result = new RowSetFit(rows, plan, final, new Fit(final, pass)) { Scores = scores };
+        var last = joint is null ? null : LastIn.Of(final, [.. added.Select(group => group.Columns)], threads);
         for (var g = 0; g < groups.Count; g++)
         {
-            var last = joint is null ? null : AddedGroup.After(final, Others(plan, g), added[g].Columns);
-            result._groups[groups[g]] = new GroupFit(added[g], pass.Groups[g], last, joint) { Plots = pictures[g]?.Plots() };
+            result._groups[groups[g]] = new GroupFit(added[g], pass.Groups[g], last?[g], joint) { Plots = pictures[g]?.Plots() };
         }
 
         result.Joint = joint is null ? null : new GroupFit(joint, pass.Groups[^1], null, null);
         return result;
     }
-
-    private static int[] Others(DesignPlan plan, int group) =>
-        Columns(plan, [.. Enumerable.Range(0, plan.Groups.Count).Where(other => other != group)]);
 
     private static int[] Columns(DesignPlan plan, IReadOnlyList<int> groups) =>
         [.. groups.SelectMany(group => plan.Layout.Groups[group].Indices)];
