@@ -70,6 +70,9 @@ public enum Impediment
     /// <summary>More clusters, or larger matrices of them, than the form is computed for; CR1 stands in.</summary>
     TooManyClusters,
 
+    /// <summary>So many clusters that resampling them adds nothing to the score form.</summary>
+    ManyClusters,
+
     /// <summary>More periods than the form is computed for.</summary>
     TooManyPeriods,
 

@@ -11,16 +11,8 @@ internal sealed record GroupIdentity(string Name, IReadOnlyList<string> Terms, s
 /// <summary>Puts an exclusion together from its judgement on the row set the policy asks for, the other one, and the common rows.</summary>
 internal static class ExclusionFigures
 {
-    private static readonly IReadOnlyDictionary<string, string> NotDeclared = new Dictionary<string, string>
-    {
-        ["cluster"] = "no cluster declared",
-        ["cr1"] = "no cluster declared",
-        ["cr2"] = "no cluster declared",
-        ["time"] = "no time order declared",
-        ["newey_west"] = "no time order declared",
-        ["permutation"] = "not built yet",
-        ["wild_bootstrap"] = "no cluster declared",
-    };
+    private const string NoCluster = "no cluster declared";
+    private const string NoTime = "no time order declared";
 
     /// <param name="common">The group on the rows common to all; null when there is none. Last in and the largest model's denominator need it.</param>
     /// <param name="selective">p given the rule that left the group out.</param>
@@ -28,11 +20,7 @@ internal static class ExclusionFigures
         GroupIdentity identity, Judgement judgement, RowSetFit? rows, OtherRowSetFigures? other, GroupFit? common, SelectiveFigures selective, Policy policy, bool sampling)
     {
         var notComputed = new SortedDictionary<string, string>(StringComparer.Ordinal);
-        foreach (var (test, missing) in NotDeclared)
-        {
-            notComputed[test] = missing;
-        }
-
+        notComputed["permutation"] = "not built yet";
         var evidence = judgement.Evidence;
         var added = evidence?.Fit.Added;
         var basisTest = evidence?.Basis.Test ?? TestResult.None(Impediment.NoRows);
@@ -67,6 +55,10 @@ internal static class ExclusionFigures
         {
             PowerCurve = judgement.Verdict == Verdicts.Inconclusive ? PowerCurves.Of(evidence, policy) : [],
             InShort = judgement.InShort,
+            Level = evidence?.Tests.Dependence.Level is { } level ? LevelWords.Of(level.Level) : null,
+            EffectiveClusters = evidence?.Tests.Dependence.EffectiveClusters,
+            CannotReject = evidence?.Basis.CannotReject(policy.Significance) ?? false,
+            UnrestrictedP = evidence?.Basis.Ceiling is null ? null : evidence.Basis.Wald?.Probability,
             Because = identity.Because,
             Line = identity.Line,
             Why = evidence?.Basis.Test is FTest && evidence.Basis.EffectiveRows is not null ? new Dictionary<string, string>() : why,
@@ -85,6 +77,21 @@ internal static class ExclusionFigures
     private static GroupTests Tests(GroupEvidence? evidence, GroupFit? common, IDictionary<string, string> notComputed, bool sampling)
     {
         TestFigures? Figure(string name, TestResult? result) => TestFigure.Of(result ?? TestResult.None(Impediment.NoRows), name, notComputed);
+        TestFigures? Declared(string name, TestResult? result, string undeclared)
+        {
+            if (result is null && evidence is not null)
+            {
+                notComputed[name] = undeclared;
+                return null;
+            }
+
+            return Figure(name, result);
+        }
+
+        TestFigures? Scored(string name, TestResult? result, TestResult? ceiling) =>
+            Declared(name, result, name == "cluster" ? NoCluster : NoTime) is { } shown ? shown with { CeilingP = ceiling?.P } : null;
+
+        var dependence = evidence?.Tests.Dependence;
         return new GroupTests(
             Figure("classical", evidence?.Tests.Classical),
             Figure("hc0", evidence?.Tests.Hc[0]),
@@ -92,15 +99,32 @@ internal static class ExclusionFigures
             Figure("hc2", evidence?.Tests.Hc[2]),
             Figure("hc3", evidence?.Tests.Hc[3]),
             Figure("score", evidence?.Tests.Score) is { } score ? score with { CeilingP = evidence!.Tests.Ceiling.P } : null,
+            Scored("cluster", dependence?.Cluster, dependence?.ClusterCeiling),
+            Declared("cr1", dependence?.Cr1, NoCluster),
+            Declared("cr2", dependence?.Cr2?.Test, NoCluster),
+            Scored("time", dependence?.Time, dependence?.TimeCeiling),
+            Declared("time_unrestricted", dependence?.PeriodWald?.Test, NoTime),
+            Declared("newey_west", dependence?.NeweyWest, NoTime),
             null,
-            null,
-            null,
-            null,
-            null,
-            null,
-            null,
+            Resampled(dependence, notComputed),
             JointOnly(common, "last_in", notComputed) ? null : LastIn(Against(common?.LastIn, sampling, PartialF.Of), Figure, notComputed),
             JointOnly(common, "largest_model_denominator", notComputed) ? null : Figure("largest_model_denominator", Against(common?.Largest, sampling, largest => PartialF.WithMeanSquareOf(common!.Added, largest))));
+    }
+
+    /// <summary>Resampling has no degrees of freedom: p with the interval that its draws leave open.</summary>
+    private static PermutationFigures? Resampled(DependenceResults? dependence, IDictionary<string, string> notComputed)
+    {
+        switch (dependence?.WildBootstrap)
+        {
+            case ResampledTest test:
+                return new PermutationFigures((dependence.Cr1 as FTest)?.Statistic, test.Probability, test.Lower, test.Upper, test.Draws);
+            case NotComputable none:
+                notComputed["wild_bootstrap"] = ImpedimentWords.Of(none.Why);
+                return null;
+            default:
+                notComputed["wild_bootstrap"] = dependence is null ? ImpedimentWords.Of(Impediment.NoRows) : NoCluster;
+                return null;
+        }
     }
 
     private static TestFigures? LastIn(TestResult? result, Func<string, TestResult?, TestFigures?> figure, IDictionary<string, string> notComputed)
@@ -138,7 +162,10 @@ internal static class ExclusionFigures
         evidence?.BasisInterval is null ? why["p"] : null);
 
     private static PowerFigures Power(GroupEvidence? evidence, Dictionary<string, string> why) => evidence?.Power is { } power
-        ? new PowerFigures(power.AtBound, power.SmallestDetectable, power.RowsNeeded, power.RowsNeeded is null ? "no practicable number of rows is enough" : null)
+        ? new PowerFigures(power.AtBound, power.SmallestDetectable, power.RowsNeeded, power.RowsNeeded is null ? $"no practicable number of {evidence.Basis.CountedIn} is enough" : null)
+        {
+            CountedIn = evidence.Basis.CountedIn,
+        }
         : new PowerFigures(null, null, null, why["p"]);
 
     /// <summary>Why p and everything that follows from it has no value.</summary>
@@ -148,7 +175,7 @@ internal static class ExclusionFigures
         {
             NotComputable none => ImpedimentWords.Of(none.Why),
             PerfectWithGroup => "the model with the group fits perfectly, so no effect figure can be given",
-            _ when evidence?.Basis.EffectiveRows is null => ImpedimentWords.Of(Impediment.SingularCovariance),
+            _ when evidence?.Basis.EffectiveRows is null => ImpedimentWords.Of((evidence?.Basis.Unrestricted as NotComputable)?.Why ?? Impediment.SingularCovariance),
             _ => "",
         };
         return new Dictionary<string, string>(StringComparer.Ordinal)

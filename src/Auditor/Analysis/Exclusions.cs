@@ -13,11 +13,12 @@ internal static class Exclusions
     /// <param name="selective">p of each group given the author's rule.</param>
     /// <param name="whatIf">Whether verdicts at other levels and bounds are wanted.</param>
     public static JudgedExclusions Of(
-        BoundModel model, ModelFits fits, IReadOnlyList<SelectiveFigures> selective, Policy policy, bool sampling, bool whatIf)
+        BoundModel model, ModelFits fits, IReadOnlyList<SelectiveFigures> selective, JudgementInputs inputs, bool whatIf)
     {
+        var (policy, sampling, _) = inputs;
         var groups = Enumerable.Range(0, model.Groups.Count).ToArray();
-        var own = OnRows(model, groups, fits.Own, policy, sampling);
-        var common = OnRows(model, groups, _ => fits.Common, policy, sampling);
+        var own = OnRows(model, groups, fits.Own, inputs);
+        var common = OnRows(model, groups, _ => fits.Common, inputs);
         var (main, other) = policy.RowSet == RowSet.Own ? (own, common) : (common, own);
         IReadOnlyList<Exclusion> exclusions = [.. groups.Select(group =>
         {
@@ -36,11 +37,15 @@ internal static class Exclusions
     }
 
     private static List<(Judgement Judgement, RowSetFit? Rows)> OnRows(
-        BoundModel model, int[] groups, Func<int, RowSetFit?> rows, Policy policy, bool sampling)
+        BoundModel model, int[] groups, Func<int, RowSetFit?> rows, JudgementInputs inputs)
     {
+        var (policy, sampling, drifts) = inputs;
         var judged = groups.Select(group => new JudgedGroup(
             rows(group) is { } fit ? new GroupEvidence(new GroupResults(fit[group], policy.BasisWithoutStructure, sampling), policy) : null,
-            ProductsElsewhere.Of(model, group) is [var product, ..] ? product : null)).ToList();
+            ProductsElsewhere.Of(model, group) is [var product, ..] ? product : null)
+        {
+            Drifts = drifts && model.Groups[group].Terms.Any(term => SerialBinding.MayDrift(term.Term, model)),
+        }).ToList();
         return [.. Judgement.OfFamily(judged, policy).Select((judgement, group) => (judgement, rows(group)))];
     }
 
@@ -50,3 +55,8 @@ internal static class Exclusions
 
 /// <param name="WhatIf">Null when it was not asked for.</param>
 internal sealed record JudgedExclusions(IReadOnlyList<Exclusion> All, WhatIf? WhatIf);
+
+/// <summary>What the judgement of every group depends on beside its tests.</summary>
+/// <param name="Sampling">Sampling weights are declared.</param>
+/// <param name="ResidualMayDrift">A unit root of the final model's residual is not rejected.</param>
+internal sealed record JudgementInputs(Policy Policy, bool Sampling, bool ResidualMayDrift);

@@ -19,7 +19,7 @@ internal sealed class GroupEvidence
         var (wald, rows) = (tests.Basis.Wald, tests.Basis.EffectiveRows);
         _basisInterval = new(() => wald is null || rows is null ? null : EffectInterval.Of(wald, rows, policy.Significance));
         _negligibleP = new(() => wald is null || rows is null ? null : NegligibleEffect.P(wald, rows, policy.NegligiblePartialRSquared));
-        _power = new(() => wald is null || rows is null ? null : PowerEstimate.Of(Fit, wald, rows, policy));
+        _power = new(() => wald is null || rows is null ? null : PowerEstimate.Of(tests.Basis, wald, rows, policy));
     }
 
     public GroupResults Tests { get; }
@@ -46,13 +46,12 @@ internal sealed class GroupEvidence
 /// <summary>Power at the policy's bound, the f² that the policy's power finds, the rows needed to find the bound.</summary>
 internal sealed record PowerEstimate(double AtBound, double? SmallestDetectable, double? RowsNeeded)
 {
-    public static PowerEstimate Of(GroupFit fit, FTest test, EffectiveRows rows, Policy policy)
+    public static PowerEstimate Of(Basis basis, FTest test, EffectiveRows rows, Policy policy)
     {
         var (level, bound) = (policy.Significance, policy.NegligiblePartialRSquared);
-        var classical = test.Df1 + test.Df2 + 1;
         return new PowerEstimate(
             Power.AtBound(test.Df1, test.Df2, rows.LeastInformed, bound, level),
             Power.SmallestDetectable(test.Df1, test.Df2, rows.LeastInformed, level, policy.Power),
-            Power.RowsNeeded(test.Df1, fit.Added.Final.Rank, rows.LeastInformed / classical, bound, level, policy.Power));
+            basis.Needed?.Invoke(bound, level, policy.Power));
     }
 }

@@ -15,7 +15,8 @@ internal sealed class GroupResults
         Hc = [.. Enum.GetValues<Heteroskedastic>().Select(estimator => WaldF.Of(fit.Added, fit.Sums, estimator))];
         Score = ScoreF.Of(fit.Added, fit.Sums);
         Ceiling = ScoreF.Ceiling(fit.Added, fit.Sums);
-        Basis = Basis.Of(fit, Classical, Hc[(int)Heteroskedastic.Hc3], policy, sampling);
+        Dependence = new DependenceResults(fit);
+        Basis = Basis.Of(this, policy, sampling);
     }
 
     public GroupFit Fit { get; }
@@ -28,6 +29,10 @@ internal sealed class GroupResults
     public TestResult Score { get; }
 
     public TestResult Ceiling { get; }
+
+    public TestResult Hc3 => Hc[(int)Heteroskedastic.Hc3];
+
+    public DependenceResults Dependence { get; }
 
     public Basis Basis { get; }
 

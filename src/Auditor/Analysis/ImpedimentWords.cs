@@ -18,6 +18,7 @@ internal static class ImpedimentWords
         Impediment.TooFewPeriods => "more directions are tested than the periods allow",
         Impediment.RestsOnOneCluster => "a direction of the group rests on one cluster: with it in, that cluster has no residual left for it",
         Impediment.TooManyClusters => "more clusters than this form is computed for",
+        Impediment.ManyClusters => "with more than 100 clusters the form by clusters needs no resampling beside it",
         Impediment.TooManyPeriods => "more periods than this form is computed for",
         Impediment.SamplingWeights => "sampling weights: a classical test does not apply",
         Impediment.NoRows => "no row is complete for the final model and the group",

@@ -39,7 +39,8 @@ internal sealed record Judgement(
         var verdict = adjusted switch
         {
             null => Verdicts.Untestable,
-            _ when group.ProductElsewhere is not null => Verdicts.Inconclusive,
+            _ when group.Evidence!.Basis.CannotReject(level) => Verdicts.Untestable,
+            _ when group.ProductElsewhere is not null || group.Drifts => Verdicts.Inconclusive,
             { P: var p } when p <= level => Verdicts.NotSupported,
             _ when negligible?.P <= level => Verdicts.Supported,
             _ => Verdicts.Inconclusive,
@@ -59,5 +60,8 @@ internal sealed record Judgement(
 /// <param name="ProductElsewhere">A product outside the group that holds one of its terms; null when there is none.</param>
 internal sealed record JudgedGroup(GroupEvidence? Evidence, string? ProductElsewhere)
 {
+    /// <summary>A unit root of the final model's residual is not rejected and the group holds a term that is no change: series that drift look related when they are not.</summary>
+    public bool Drifts { get; init; }
+
     public JudgedGroup Under(Policy policy) => this with { Evidence = Evidence?.Under(policy) };
 }

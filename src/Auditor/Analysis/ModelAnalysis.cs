@@ -21,7 +21,7 @@ internal static class ModelAnalysis
         }
 
         var fits = ModelFits.Compute(
-            model, selection, common ? selection.Common : selection.Final, run.Pictures ? policy.RowSet : null, DeclaredClaims.NeedCovariances(declaration), run.Threads);
+            model, selection, common ? selection.Common : selection.Final, run.Pictures ? policy.RowSet : null, DeclaredClaims.NeedCovariances(declaration), run);
         var sampling = model.Weights?.Kind == WeightKind.Sampling;
         var main = (common ? fits.Common : fits.Final)!;
         var fit = CheckedFits.Of(model, main, fits.Residuals, sampling);
@@ -29,8 +29,9 @@ internal static class ModelAnalysis
         var other = selection.Final.Equals(selection.Common) ? null : common ? fits.Final : fits.Common;
         var shown = new ClaimedRows(main, FitFigures.Of(main, policy.Significance, sampling), sampling, false);
         var beside = other is null ? null : new ClaimedRows(other, FitFigures.Of(other, policy.Significance, sampling), sampling, true);
+        var checks = ResidualCheckFigures.Of(fit, influence, SerialBinding.Of(model, main), main.Rows, policy.Significance, run.Seed);
         var elimination = EliminationFigures.Of(declaration, model, fits.Common, sampling, run.Threads);
-        var exclusions = Exclusions.Of(model, fits, elimination.Selective, policy, sampling, whatIf: run.Pictures);
+        var exclusions = Exclusions.Of(model, fits, elimination.Selective, new JudgementInputs(policy, sampling, SerialCheckFigures.ResidualMayDrift(checks)), whatIf: run.Pictures);
         return Reading<AuditResults>.Of(new AuditResults(
             declaration.Model.Id,
             selection.Account(common, mentioned),
@@ -41,7 +42,7 @@ internal static class ModelAnalysis
             exclusions.All,
             [.. Enumerable.Range(0, model.Groups.Count).Select(group => Inputs(model, fits, group, common) with { LeftOutByRule = elimination.LeftOutByRule[group] })],
             AllLeftOut.Of(model, fits.Common, policy, sampling),
-            ResidualCheckFigures.Of(fit, influence, SerialInputs.NothingDeclared, main.Rows, policy.Significance, run.Seed),
+            [.. checks],
             InfluenceFigures.Of(influence, main.Rows, model.RowLabel),
             CollinearityFigures.Of(main),
             run.Pictures ? Pictures(model, fits, fit, main, common) : new PlotData(null, "no pictures were asked for"),

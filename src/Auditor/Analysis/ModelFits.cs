@@ -30,8 +30,8 @@ internal sealed class ModelFits
     /// <param name="main">The rows of the fit that is shown and checked: their residuals are kept.</param>
     /// <param name="pictured">The rows on which each group's pictures are drawn; null when none are wanted.</param>
     /// <param name="scored">Whether robust covariances of the final model's own coefficients are wanted.</param>
-    /// <param name="threads">Most threads: for row sets, then within each; no result depends on it.</param>
-    public static ModelFits Compute(BoundModel model, RowSelection selection, RowSubset main, RowSet? pictured, bool scored, int threads)
+    /// <param name="run">Its threads are for row sets, then within each; no result depends on them.</param>
+    public static ModelFits Compute(BoundModel model, RowSelection selection, RowSubset main, RowSet? pictured, bool scored, RunSettings run)
     {
         var residuals = new ResidualStore();
         IReadOnlySet<int> Pictured(RowSubset rows) => Enumerable.Range(0, model.Groups.Count)
@@ -41,15 +41,16 @@ internal sealed class ModelFits
             rows.Equals(selection.Common),
             rows.Equals(main) ? residuals : null,
             Pictured(rows),
-            scored && (rows.Equals(selection.Final) || rows.Equals(selection.Common)));
+            scored && (rows.Equals(selection.Final) || rows.Equals(selection.Common)),
+            run.Seed);
 
         var wanted = Wanted(model, selection).Where(entry => entry.Key.Count > 0).ToArray();
         var computed = new RowSetFit[wanted.Length];
         Parallel.For(
             0,
             wanted.Length,
-            new ParallelOptions { MaxDegreeOfParallelism = threads },
-            at => computed[at] = RowSetFit.Compute(model, wanted[at].Key, [.. wanted[at].Value], Wishes(wanted[at].Key), Math.Max(1, threads / wanted.Length)));
+            new ParallelOptions { MaxDegreeOfParallelism = run.Threads },
+            at => computed[at] = RowSetFit.Compute(model, wanted[at].Key, [.. wanted[at].Value], Wishes(wanted[at].Key), Math.Max(1, run.Threads / wanted.Length)));
         var fits = new ModelFits(selection) { Residuals = residuals };
         foreach (var fit in computed)
         {

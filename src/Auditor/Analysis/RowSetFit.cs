@@ -50,15 +50,16 @@ internal sealed class RowSetFit
         var pictures = groups.Select((group, g) => wishes.Pictured.Contains(group) ? GroupPictures.Of(added[g], plan, model.Groups.Count) : null).ToList();
         var scores = wishes.Scored ? new CoefficientScores(final) : null;
         IAccumulator?[] others = [wishes.Residuals, scores, .. pictures.SelectMany(picture => picture?.Accumulators ?? [])];
-        var pass = RowPass.Run(design, final, joint is null ? added : [.. added, joint], [.. others.OfType<IAccumulator>()], threads: threads);
+        var dependence = Dependence.Of(model.Structure, model.Structure.Among(rows), wishes.Seed);
+        var pass = RowPass.Run(design, final, joint is null ? added : [.. added, joint], [.. others.OfType<IAccumulator>()], dependence.Rows, threads);
         var result = new RowSetFit(rows, plan, final, new Fit(final, pass)) { Scores = scores };
         var last = joint is null ? null : LastIn.Of(final, [.. added.Select(group => group.Columns)], threads);
         for (var g = 0; g < groups.Count; g++)
         {
-            result._groups[groups[g]] = new GroupFit(added[g], pass.Groups[g], last?[g], joint) { Plots = pictures[g]?.Plots() };
+            result._groups[groups[g]] = new GroupFit(added[g], pass.Groups[g], last?[g], joint, dependence) { Plots = pictures[g]?.Plots() };
         }
 
-        result.Joint = joint is null ? null : new GroupFit(joint, pass.Groups[^1], null, null);
+        result.Joint = joint is null ? null : new GroupFit(joint, pass.Groups[^1], null, null, dependence);
         return result;
     }
 
@@ -69,7 +70,8 @@ internal sealed class RowSetFit
 /// <summary>One group (or union) on one row set.</summary>
 /// <param name="LastIn">The group added after all others; null when the others are not on these rows.</param>
 /// <param name="Largest">All groups added at once; null likewise.</param>
-internal sealed record GroupFit(AddedGroup Added, GroupSums Sums, AddedGroup? LastIn, AddedGroup? Largest)
+/// <param name="Dependence">What is declared of the dependence between these rows.</param>
+internal sealed record GroupFit(AddedGroup Added, GroupSums Sums, AddedGroup? LastIn, AddedGroup? Largest, Dependence Dependence)
 {
     /// <summary>Null when they were not asked for on these rows or cannot be drawn.</summary>
     public GroupPlots? Plots { get; init; }
@@ -80,4 +82,5 @@ internal sealed record GroupFit(AddedGroup Added, GroupSums Sums, AddedGroup? La
 /// <param name="Residuals">Keeps every row's residual and leverage; null when they are not wanted.</param>
 /// <param name="Pictured">Groups whose pictures show these rows.</param>
 /// <param name="Scored">Robust covariances of the coefficients.</param>
-internal sealed record FitWishes(bool Jointly, ResidualStore? Residuals, IReadOnlySet<int> Pictured, bool Scored);
+/// <param name="Seed">Seed of everything drawn at random.</param>
+internal sealed record FitWishes(bool Jointly, ResidualStore? Residuals, IReadOnlySet<int> Pictured, bool Scored, long Seed);

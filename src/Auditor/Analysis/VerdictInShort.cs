@@ -11,6 +11,8 @@ internal static class VerdictInShort
     {
         { Evidence: null } => "No row is complete for it.",
         { Evidence.Basis.Test: NotComputable none } => Sentence(ImpedimentWords.Of(none.Why)),
+        { Verdict: Verdicts.Untestable } => "However large its effect, the test could not reject it on these data.",
+        { Group.Drifts: true } => "The residual may drift, and series that drift look related when they are not.",
         { Group.ProductElsewhere: { } product } => $"Its test depends on how variables are coded, because {product} is outside the group.",
         { Verdict: Verdicts.NotSupported, Evidence.Basis.Test: PerfectWithGroup } => "With it the model fits these rows perfectly; without it, it does not.",
         { Verdict: Verdicts.NotSupported, Materiality: Materialities.ShownNegligible } =>
@@ -28,7 +30,7 @@ internal static class VerdictInShort
 
     private static string Possible(Judgement judgement) => judgement.Evidence!.BasisInterval is { } interval && interval.Upper >= judgement.Policy.NegligiblePartialRSquared
         ? $": partial R² may be as large as {PlainNumber.Digits(interval.Upper, 2)}"
-        : ": the test for that fails once the number of groups is allowed for";
+        : judgement.Evidence.BasisInterval is null ? ": its size cannot be judged" : ": the test for that fails once the number of groups is allowed for";
 
     private static string Bound(Policy policy) => PlainNumber.Digits(policy.NegligiblePartialRSquared, 4);
 }

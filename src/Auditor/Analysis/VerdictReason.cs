@@ -20,6 +20,17 @@ internal static class VerdictReason
             return "The data cannot test this: " + ImpedimentWords.Of(none.Why) + ".";
         }
 
+        if (judgement.Verdict == Verdicts.Untestable)
+        {
+            return "The data cannot test this: however large the effect, the " + BasisWords.Of(evidence.Basis.Name)
+                + $" cannot reach the level here (its {PlainNumber.PAgainst(evidence.Basis.Ceiling!.P!.Value, policy.Significance)} at the least){Beside(evidence, policy)}.";
+        }
+
+        if (judgement.Group.Drifts)
+        {
+            return $"The residual of the final model may drift, and series that drift look related when they are not: no verdict can rest on this test ({Test(judgement, policy)}).";
+        }
+
         return productElsewhere is not null
             ? $"The test depends on how variables are coded, because {productElsewhere} is outside the group: no verdict can rest on it ({Test(judgement, policy)})."
             : Sentence(judgement, evidence, policy);
@@ -38,6 +49,10 @@ internal static class VerdictReason
             + $"(negligible-effect test, adjusted {PlainNumber.PAgainst(judgement.NegligiblePAdjusted!.Value, policy.Significance)}).",
         _ => $"The test does not reject leaving it out ({Test(judgement, policy)}), but the data cannot show that its effect is negligible: {Possible(evidence, policy)}{Needed(evidence, policy)}.",
     };
+
+    private static string Beside(GroupEvidence evidence, Policy policy) => evidence.Basis.Wald is { } wald
+        ? $"; with the group in the model the same kind of test gives {PlainNumber.PAgainst(wald.Probability, policy.Significance)}"
+        : "";
 
     private static string Test(Judgement judgement, Policy policy)
     {
@@ -62,16 +77,24 @@ internal static class VerdictReason
 
     private static string Possible(GroupEvidence evidence, Policy policy) => evidence.BasisInterval is { } interval && interval.Upper >= policy.NegligiblePartialRSquared
         ? $"partial R² may be as large as {PlainNumber.Digits(interval.Upper, 2)}, and {Bound(policy)} is the most that counts as negligible"
-        : $"the test that partial R² is below {Bound(policy)} does not hold after adjustment for the number of groups";
+        : evidence.BasisInterval is null
+            ? $"the size of the effect cannot be judged ({ImpedimentWords.Of((evidence.Basis.Unrestricted as NotComputable)?.Why ?? Impediment.SingularCovariance)})"
+            : $"the test that partial R² is below {Bound(policy)} does not hold after adjustment for the number of groups";
 
     private static string Needed(GroupEvidence evidence, Policy policy) =>
         evidence.Power?.RowsNeeded is double rows && evidence.Power.AtBound < policy.Power
-            ? $"; about {PlainNumber.Count(rows)} rows like these would make the test reject an effect of that size with {PlainNumber.Digits(100 * policy.Power, 3)} % power, before adjustment"
+            ? $"; about {PlainNumber.Count(rows)} {evidence.Basis.CountedIn} like these would make the test reject an effect of that size with {PlainNumber.Digits(100 * policy.Power, 3)} % power, before adjustment"
             : "";
 }
 
 /// <summary>The basis tests' names in sentences.</summary>
 internal static class BasisWords
 {
-    public static string Of(string basis) => basis == Basis.Hc3 ? "robust (HC3)" : basis;
+    public static string Of(string basis) => basis switch
+    {
+        Basis.Hc3 => "robust (HC3)",
+        Basis.Cluster => "form by clusters",
+        Basis.Time => "form by periods",
+        _ => basis,
+    };
 }

@@ -10,12 +10,6 @@ public static class NotBuiltYet
 
     private static readonly IReadOnlyList<Entry> _entries =
     [
-        new("data.time, the order of rows", declaration => [declaration.Data.Structure.TimeLine]),
-        new("data.period", declaration => [declaration.Data.Structure.PeriodLine]),
-        new("data.unit", declaration => [declaration.Data.Structure.Unit?.Line]),
-        new("data.serial_lag", declaration => [declaration.Data.Structure.SerialLagLine]),
-        new("data.split", declaration => [declaration.Data.Structure.Split?.Line]),
-        new("data.cluster", declaration => [declaration.Data.Structure.Cluster?.Line]),
         new("data.segments", declaration => [declaration.Data.Structure.Segments is [var first, ..] ? first.Line : null]),
     ];
 

@@ -65,23 +65,24 @@ public sealed class ClassedRows
             anew[old] = code;
         }
 
-        return new RowGroups(Name, new RowClasses([.. rows.Rows.Select(row => _codes[row] < 0 ? -1 : anew[_codes[row]])], kept.Length), code => Label(kept[code]));
+        return new RowGroups(Name, [.. rows.Rows.Select(row => _codes[row] < 0 ? -1 : anew[_codes[row]])], kept.Length, code => Label(kept[code]));
     }
 }
 
 /// <summary>The rows of a fit sorted into classes that have names.</summary>
 /// <param name="Name">The column they come from.</param>
-/// <param name="Classes">One code a row of the subset. The rows of a fit have one each: a row without a cluster, unit or time is incomplete. Only a segment can be -1, no value.</param>
+/// <param name="Codes">One a row of the subset, 0 to Count - 1. The rows of a fit have one each: a row without a cluster, unit or time is incomplete. Only a segment can be -1, no value.</param>
 /// <param name="Label">What to call a class.</param>
-public sealed record RowGroups(string Name, RowClasses Classes, Func<int, string> Label)
+public sealed record RowGroups(string Name, IReadOnlyList<int> Codes, int Count, Func<int, string> Label)
 {
-    public int Count => Classes.Count;
+    /// <summary>The codes as the second pass reads them.</summary>
+    public RowClasses Classes => new([.. Codes], Count);
 
     /// <summary>Rows in each class.</summary>
     public int[] Sizes()
     {
         var sizes = new int[Count];
-        foreach (var code in Classes.Codes)
+        foreach (var code in Codes)
         {
             if (code >= 0)
             {

@@ -11,7 +11,7 @@ public sealed record SerialOrder(int[] Positions, int Series, int TiedRows, long
 {
     internal static SerialOrder Of(TimeAxis time, RowGroups? units, RowGroups periods, RowSubset rows)
     {
-        int Unit(int position) => units?.Classes.Codes[position] ?? 0;
+        int Unit(int position) => units?.Codes[position] ?? 0;
         var places = Enumerable.Range(0, rows.Count).Select(position => (Unit: Unit(position), Time: time.Moments[rows.Rows[position]], Position: position)).ToArray();
         Array.Sort(places);
         int[] positions = [.. places.Select(place => place.Position)];
@@ -19,7 +19,7 @@ public sealed record SerialOrder(int[] Positions, int Series, int TiedRows, long
         return new SerialOrder(
             positions,
             units?.Count ?? 1,
-            neighbours.Count(pair => periods.Classes.Codes[pair.First] == periods.Classes.Codes[pair.Second]),
+            neighbours.Count(pair => periods.Codes[pair.First] == periods.Codes[pair.Second]),
             time.Steps is { } steps ? neighbours.Sum(pair => Math.Max(0, steps[rows.Rows[pair.Second]] - steps[rows.Rows[pair.First]] - 1)) : null);
     }
 }

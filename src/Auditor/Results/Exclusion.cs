@@ -38,6 +38,20 @@ public sealed record Exclusion(
     /// <summary>The verdict's reason for who reads nothing else: a short sentence.</summary>
     public string InShort { get; init; } = "";
 
+    /// <summary>The level on which the group's columns vary: row, period, cluster, unit or several; null when no dependence is declared.</summary>
+    public string? Level { get; init; }
+
+    /// <summary>How many equal clusters the declared ones are worth for this group; null without clusters.</summary>
+    public double? EffectiveClusters { get; init; }
+
+    /// <summary>The score form the verdict rests on cannot reach the policy's significance, however large the effect.</summary>
+    [JsonIgnore]
+    public bool CannotReject { get; init; }
+
+    /// <summary>p of the unrestricted form beside the score form the verdict rests on; null when it rests on another kind.</summary>
+    [JsonIgnore]
+    public double? UnrestrictedP { get; init; }
+
     /// <summary>The author's reason as declared; null when none was given.</summary>
     public string? Because { get; init; }
 
@@ -78,7 +92,11 @@ public sealed record PowerFigures(
     double? AtBound,
     double? SmallestDetectableFSquared,
     double? RowsNeeded,
-    [property: JsonIgnore(Condition = JsonIgnoreCondition.WhenWritingNull)] string? Why);
+    [property: JsonIgnore(Condition = JsonIgnoreCondition.WhenWritingNull)] string? Why)
+{
+    /// <summary>What <see cref="RowsNeeded"/> counts: rows, clusters or periods.</summary>
+    public string CountedIn { get; init; } = "rows";
+}
 
 /// <summary>The same test on the other row set.</summary>
 public sealed record OtherRowSetFigures(int Rows, double? F, double? Df1, double? Df2, double? P, string Verdict);

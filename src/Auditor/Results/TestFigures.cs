@@ -27,9 +27,10 @@ public sealed record GroupTests(
     TestFigures? Cr1,
     TestFigures? Cr2,
     TestFigures? Time,
+    TestFigures? TimeUnrestricted,
     TestFigures? NeweyWest,
     PermutationFigures? Permutation,
-    TestFigures? WildBootstrap,
+    PermutationFigures? WildBootstrap,
     TestFigures? LastIn,
     TestFigures? LargestModelDenominator);
 

@@ -2,7 +2,6 @@ using Auditor.Numerics.Pictures;
 using Auditor.Numerics.SecondPass;
 using CsCheck;
 using MathNet.Numerics.LinearAlgebra;
-using Xunit;
 
 namespace Auditor.Numerics.Tests.Pictures;
 

@@ -1,6 +1,5 @@
 using Auditor.Numerics.Pictures;
 using CsCheck;
-using Xunit;
 
 namespace Auditor.Numerics.Tests.Pictures;
 

@@ -1,5 +1,4 @@
 using System.Globalization;
-using Auditor.Reporting;
 using Auditor.Results;
 
 namespace Auditor.Tests.Analysis;

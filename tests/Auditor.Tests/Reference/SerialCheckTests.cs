@@ -127,7 +127,7 @@ public sealed class SerialCheckTests
             File.ReadAllText(path), file => File.OpenRead(Path.Combine(Path.GetDirectoryName(path)!, file)), ReferenceFiles.ReadText("policy-reference.yaml")).Value!;
         var model = ModelBinder.Bind(inputs.Declaration, inputs.Table).Value!.Model;
         var selection = RowSelection.Of(model);
-        var fits = ModelFits.Compute(model, selection, selection.Common, null, false, 1);
+        var fits = ModelFits.Compute(model, selection, selection.Common, null, false, new RunSettings(1, 1, false));
         var rows = Enumerable.Range(0, fits.Common!.Rows.Count).ToArray();
         var fit = CheckedFits.Of(model, fits.Common, fits.Residuals, sampling: false);
         var serial = new SerialInputs(

@@ -16,18 +16,23 @@ internal static class TestTable
 
     private static IEnumerable<Line> Lines(Exclusion exclusion) =>
         from words in TestWords.All
-        let line = words.Name == "permutation" ? Permuted(exclusion.Tests.Permutation, words) : Plain(exclusion.Tests, words)
+        let line = words.Name switch
+        {
+            "permutation" => Resampled(exclusion.Tests.Permutation, words),
+            "wild_bootstrap" => Resampled(exclusion.Tests.WildBootstrap, words),
+            _ => Plain(exclusion.Tests, words),
+        }
         where line is not null
         select line with { IsBasis = words.Name == exclusion.Basis };
 
     private static Line? Plain(GroupTests tests, TestWords words) =>
         Figures(tests, words.Name) is { } test ? new(words, test, "", test.Why) : null;
 
-    private static Line? Permuted(PermutationFigures? test, TestWords words) => test is null ? null : new(
+    private static Line? Resampled(PermutationFigures? test, TestWords words) => test is null ? null : new(
         words,
         new TestFigures(test.F, null, null, test.P),
         $" p lies between {NumberText.Number(test.PLower ?? 0)} and {NumberText.Number(test.PUpper ?? 1)} after {NumberText.Count(test.Draws)} draws.",
-        "A permutation has no degrees of freedom.");
+        "Resampling has no degrees of freedom.");
 
     private static TestFigures? Figures(GroupTests tests, string name) => name switch
     {
@@ -42,7 +47,7 @@ internal static class TestTable
         "cr2" => tests.Cr2,
         "time" => tests.Time,
         "newey_west" => tests.NeweyWest,
-        "wild_bootstrap" => tests.WildBootstrap,
+        "time_unrestricted" => tests.TimeUnrestricted,
         "last_in" => tests.LastIn,
         "largest_model_denominator" => tests.LargestModelDenominator,
         _ => throw new ArgumentOutOfRangeException(nameof(name), name, "not a test"),

@@ -14,6 +14,7 @@ internal sealed record TestWords(string Name, string Title, string Answers)
         new("cr1", "Wald F, CR1", "The usual cluster form; it rejects too often with few clusters."),
         new("wild_bootstrap", "Wild cluster bootstrap", "The same, by resampling whole clusters with the group taken as without effect."),
         new("time", "Cosine form by periods", "The same, when errors may carry over from one period to the next."),
+        new("time_unrestricted", "Cosine form, group in the model", "The same, with the spread taken from the model with the group in; size and power rest on it."),
         new("newey_west", "Wald F, Newey–West", "The usual form for serial dependence; it rejects too often."),
         new("permutation", "Permutation of residuals", "How often would shuffled residuals look as strong?"),
         new("last_in", "Last in", "Does the group still add something when every other left-out group is in?"),
