@@ -82,7 +82,7 @@ internal static class DoubleDoubleKernels
         return total;
     }
 
-    /// <summary>Sum of double-double times double; products are exact, sums carry their errors along (Ogita, Rump and Oishi 2005, from memory).</summary>
+    /// <summary>Sum of double-double times double; products of the high parts are exact, sums carry their errors along (Ogita, Rump and Oishi 2005, from memory).</summary>
     public static DoubleDouble Dot(ReadOnlySpan<double> high, ReadOnlySpan<double> low, ReadOnlySpan<double> values)
     {
         ref var h = ref MemoryMarshal.GetReference(high);

@@ -4,7 +4,7 @@ namespace Auditor.Numerics.Factor;
 /// The factor once more in double-double, for small designs whose columns are so nearly combinations of one another that a factor in double would cost
 /// digits of standard errors and tests: high powers of one number, for the most part. Columns that the tool forms itself enter with their low parts.
 /// </summary>
-/// <remarks>Checked against the certified values of NIST StRD's Filip (tests/reference).</remarks>
+/// <remarks>Checked against the certified values of NIST StRD's Filip (tests/reference) and against products of exact powers in the tests.</remarks>
 internal static class PreciseFactor
 {
     /// <summary>A column whose part orthogonal to the earlier ones is a smaller share of its length costs more than four digits (common practice, no source).</summary>

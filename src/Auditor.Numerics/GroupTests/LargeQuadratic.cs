@@ -5,7 +5,7 @@ namespace Auditor.Numerics.GroupTests;
 /// <summary>
 /// The quadratic form of a large group: Cholesky by rows, eight rows at a time, so that each earlier row is read once for eight.
 /// </summary>
-/// <remarks>Compared with the plain form in the tests.</remarks>
+/// <remarks>Compared with the Cholesky factor of MathNet.Numerics in the tests.</remarks>
 internal sealed class LargeQuadratic
 {
     private const int Width = PanelKernels.Width;

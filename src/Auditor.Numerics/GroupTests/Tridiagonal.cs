@@ -6,7 +6,7 @@ namespace Auditor.Numerics.GroupTests;
 /// The ends of a large symmetric matrix's spectrum: reflections make it tridiagonal from the last row on (each row is updated and multiplied in one go, so the
 /// matrix passes through the cache once a step), bisection by sign counts finds the two eigenvalues.
 /// </summary>
-/// <remarks>Golub and Van Loan, Matrix Computations, 8.3.1 and 8.4.1 (from memory). Compared with known spectra and with another routine in the tests.</remarks>
+/// <remarks>Golub and Van Loan, Matrix Computations, 8.3.1 and 8.4.1 (from memory). Compared with known spectra and with MathNet.Numerics in the tests.</remarks>
 internal sealed class Tridiagonal
 {
     private readonly double[] _diagonal;
