@@ -120,15 +120,26 @@ public sealed class Fit
 
     private static double[] UnscaledErrors(FinalFactor final)
     {
-        var errors = Triangle.InverseRowSquares(final.Triangle, final.Rank).Select(Math.Sqrt).ToArray();
+        var errors = (final.PreciseTriangle?.InverseRowSquares() ?? Triangle.InverseRowSquares(final.Triangle, final.Rank)).Select(Math.Sqrt).ToArray();
         if (final.Factor.Layout.Intercept)
         {
-            // The declared constant is the shifted one minus the slopes times their shifts: its variance is |R^-T a|².
-            var a = final.Kept.Select((column, k) => k == 0 ? 1 : -final.Factor.Shifts[column]).ToArray();
-            Triangle.SolveTransposed(final.Triangle, a);
-            errors[0] = Math.Sqrt(BlockKernels.Dot(a, a));
+            errors[0] = ConstantError(final, [.. final.Kept.Select((column, k) => k == 0 ? 1 : -final.Factor.Shifts[column])]);
         }
 
         return errors;
+    }
+
+    /// <summary>The declared constant is the shifted one minus the slopes times their shifts: its variance is |R^-T a|².</summary>
+    private static double ConstantError(FinalFactor final, double[] a)
+    {
+        if (final.PreciseTriangle is { } precise)
+        {
+            DoubleDouble[] exact = [.. a.Select(DoubleDouble.Of)];
+            precise.SolveTransposed(exact);
+            return DoubleDouble.Sqrt(DoubleDoubleMatrix.Dot(exact, exact)).Value;
+        }
+
+        Triangle.SolveTransposed(final.Triangle, a);
+        return Math.Sqrt(BlockKernels.Dot(a, a));
     }
 }

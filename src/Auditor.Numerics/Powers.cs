@@ -17,14 +17,32 @@ public static class Powers
     public static double Of(double x, double exponent) =>
         exponent == Math.Truncate(exponent) && Math.Abs(exponent) is >= 1 and <= MostFactors ? Whole(x, (int)exponent) : Math.Pow(x, exponent);
 
-    private static double Whole(double x, int exponent)
+    /// <summary>What rounding took off <see cref="Of"/>, for whole exponents of 2 and more; 0 for others.</summary>
+    public static double LowOf(double x, double exponent)
+    {
+        if (exponent != Math.Truncate(exponent) || exponent is < 2 or > MostFactors)
+        {
+            return 0;
+        }
+
+        var power = Multiplied(x, (int)exponent);
+        return Math.Abs(power.High) is > Smallest and < 1 / Smallest ? power.Low : 0;
+    }
+
+    private static DoubleDouble Multiplied(double x, int factors)
     {
         var power = DoubleDouble.Of(x);
-        for (var i = 1; i < Math.Abs(exponent); i++)
+        for (var i = 1; i < factors; i++)
         {
             power *= x;
         }
 
+        return power;
+    }
+
+    private static double Whole(double x, int exponent)
+    {
+        var power = Multiplied(x, Math.Abs(exponent));
         var value = exponent > 0 ? power.Value : Inverse(power);
         var inRange = Math.Abs(value) is > Smallest and < 1 / Smallest && Math.Abs(power.High) is > Smallest and < 1 / Smallest;
         return inRange ? value : Math.Pow(x, exponent);

@@ -15,7 +15,13 @@ internal sealed record ProgramRun(int Status, string Output, string Errors)
     public static ProgramRun In(TemporaryFolder folder, params string[] arguments) => Of(Path.Combine(Folder, "Auditor.Cli.dll"), folder.Root, Moment, arguments);
 
     /// <param name="moment">SOURCE_DATE_EPOCH; null leaves it unset.</param>
-    public static ProgramRun Of(string program, string folder, string? moment, params string[] arguments)
+    public static ProgramRun Of(string program, string folder, string? moment, params string[] arguments) => Of(program, folder, moment, [], arguments);
+
+    /// <summary>A run with further environment variables.</summary>
+    public static ProgramRun With(TemporaryFolder folder, (string Name, string Value)[] variables, params string[] arguments) =>
+        Of(Path.Combine(Folder, "Auditor.Cli.dll"), folder.Root, Moment, variables, arguments);
+
+    private static ProgramRun Of(string program, string folder, string? moment, (string Name, string Value)[] variables, string[] arguments)
     {
         var start = new ProcessStartInfo(Environment.GetEnvironmentVariable("DOTNET_HOST_PATH") ?? "dotnet", [program, .. arguments])
         {
@@ -27,6 +33,11 @@ internal sealed record ProgramRun(int Status, string Output, string Errors)
         if (moment is not null)
         {
             start.Environment["SOURCE_DATE_EPOCH"] = moment;
+        }
+
+        foreach (var (name, value) in variables)
+        {
+            start.Environment[name] = value;
         }
 
         using var process = Process.Start(start)!;

@@ -20,6 +20,24 @@ public sealed class PowersTests
     public void Negative_whole_powers_are_the_nearest_double(int exponent) =>
         Assert.All(_values, x => Assert.Equal(Exact(x, -exponent), Powers.Of(x, -exponent)));
 
+    /// <summary>Source: the exact power by whole-number arithmetic; value and low part together miss it by less than 2^-98 of its size.</summary>
+    [Theory]
+    [MemberData(nameof(Exponents))]
+    public void Low_parts_are_what_rounding_took_off(int exponent) => Assert.All(_values, x =>
+    {
+        var exact = Factor.Dyadic.Power(x, exponent);
+        var (value, low) = (Powers.Of(x, exponent), Powers.LowOf(x, exponent));
+        Factor.Dyadic.Near(exact, Factor.Dyadic.Of(value) + Factor.Dyadic.Of(low), exact.Bits, 98);
+    });
+
+    [Theory]
+    [InlineData(3, 1)]
+    [InlineData(3, 2.5)]
+    [InlineData(3, -2)]
+    [InlineData(3, 100)]
+    [InlineData(1e200, 2)]
+    public void No_low_part_where_none_is_known(double x, double exponent) => Assert.Equal(0, Powers.LowOf(x, exponent));
+
     /// <summary>Source: definition, and IEEE 754-2019 section 9.2.1 (pow) for the ends of the range.</summary>
     [Theory]
     [InlineData(7, 1, 7)]

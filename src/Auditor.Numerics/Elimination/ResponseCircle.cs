@@ -43,7 +43,7 @@ internal sealed class ResponseCircle
         }
 
         // The identity, carried along, becomes Q': row k holds the k-th direction in the coordinates of R.
-        var reduction = Reduction.Of(factor, matrix, candidates, 0, position => columns[position]);
+        var reduction = Reduction.Of(factor, matrix, null, candidates, 0, position => columns[position]);
         var (rank, with) = (reduction.Kept.Count(position => position < factor.Layout.FinalColumns), reduction.Kept.Count);
         var y = reduction.Rotated.Column(candidates).ToArray();
         var (explained, residual) = (Length(y[rank..with]), Length(y[with..]));

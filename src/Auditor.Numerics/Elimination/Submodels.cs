@@ -86,7 +86,7 @@ internal sealed class Submodels(OrthogonalFactor factor, Candidates candidates, 
             responses.Column(k).CopyTo(matrix.Column(columns.Length + k));
         }
 
-        return Reduction.Of(factor, matrix, columns.Length, 0, position => columns[position]);
+        return Reduction.Of(factor, matrix, null, columns.Length, 0, position => columns[position]);
     }
 }
 

@@ -8,7 +8,9 @@ namespace Auditor.Numerics.Factor;
 /// <remarks>Frisch–Waugh–Lovell; sums of squares come from u, not from a difference of two residual sums of squares.</remarks>
 public sealed class AddedGroup
 {
-    private AddedGroup(FinalFactor final, IReadOnlyList<int> columns, int before, Reduction reduction)
+    /// <param name="before">How many leading columns of the reduction stand before Z.</param>
+    /// <param name="rankOutside">Rank of what was taken out before the reduction, beside F; null when nothing was.</param>
+    private AddedGroup(FinalFactor final, IReadOnlyList<int> columns, int before, Reduction reduction, int? rankOutside = null)
     {
         Final = final;
         Columns = columns;
@@ -19,14 +21,15 @@ public sealed class AddedGroup
         var y = reduction.Rotated.Column(reduction.Rotated.Columns - 1)[rankBefore..];
         U = y[..Kept.Count].ToArray();
         RssWith = BlockKernels.Dot(y[Kept.Count..], y[Kept.Count..]);
-        RankBefore = final.Rank + rankBefore;
+        RankBefore = final.Rank + rankBefore + (rankOutside ?? 0);
         Triangle = new ColumnMatrix(Kept.Count, Kept.Count);
         for (var c = 0; c < Kept.Count; c++)
         {
             reduction.Rotated.Column(KeptPositions[c]).Slice(rankBefore, c + 1).CopyTo(Triangle.Column(c));
         }
 
-        Aliased = before > 0
+        PreciseTriangle = reduction.Precise?.Select(KeptPositions, rankBefore, Kept.Count);
+        Aliased = before > 0 || rankOutside is not null
             ? []
             : [.. reduction.Aliased.Select(position => Combinations.OfGroupColumn(this, columns[position], reduction.Rotated.Column(position)))];
     }
@@ -66,6 +69,9 @@ public sealed class AddedGroup
     /// <summary>q x q triangle R_z with Z~ = Qz R_z.</summary>
     internal ColumnMatrix Triangle { get; }
 
+    /// <summary>The same in double-double, when the factor is.</summary>
+    internal DoubleDoubleMatrix? PreciseTriangle { get; }
+
     private IReadOnlyList<int> KeptPositions { get; }
 
     /// <summary>Z added to F.</summary>
@@ -75,15 +81,12 @@ public sealed class AddedGroup
     public static AddedGroup After(FinalFactor final, IReadOnlyList<int> before, IReadOnlyList<int> columns)
     {
         int[] all = [.. before, .. columns];
-        var response = final.Factor.Layout.Response;
-        var matrix = new ColumnMatrix(final.Orthogonal(response).Length, all.Length + 1);
-        for (var c = 0; c < all.Length; c++)
-        {
-            final.Orthogonal(all[c]).CopyTo(matrix.Column(c));
-        }
-
-        final.Orthogonal(response).CopyTo(matrix.Column(all.Length));
-        var reduction = Reduction.Of(final.Factor, matrix, all.Length, 0, position => all[position]);
+        int[] carried = [.. all, final.Factor.Layout.Response];
+        var reduction = Reduction.Of(final.Factor, final.OrthogonalPart(carried), final.PreciseOrthogonal(carried), all.Length, 0, position => all[position]);
         return new AddedGroup(final, columns, before.Count, reduction);
     }
+
+    /// <param name="alone">Z and y, already orthogonal to all that stands before Z, reduced.</param>
+    internal static AddedGroup LastIn(FinalFactor final, IReadOnlyList<int> columns, Reduction alone, int rankOutside) =>
+        new(final, columns, 0, alone, rankOutside);
 }

@@ -17,7 +17,7 @@ internal static class BlockKernels
         ref var right = ref MemoryMarshal.GetReference(b);
         var sum = Vector512<double>.Zero;
         nuint i = 0;
-        var whole = (nuint)(a.Length - (a.Length % Lanes));
+        var whole = Whole(a.Length);
         for (; i < whole; i += Lanes)
         {
             sum = Vector512.FusedMultiplyAdd(Vector512.LoadUnsafe(ref left, i), Vector512.LoadUnsafe(ref right, i), sum);
@@ -39,7 +39,7 @@ internal static class BlockKernels
         ref var source = ref MemoryMarshal.GetReference(column);
         var scale = Vector512.Create(factor);
         nuint i = 0;
-        var whole = (nuint)(into.Length - (into.Length % Lanes));
+        var whole = Whole(into.Length);
         for (; i < whole; i += Lanes)
         {
             Vector512.FusedMultiplyAdd(Vector512.LoadUnsafe(ref source, i), scale, Vector512.LoadUnsafe(ref target, i))
@@ -54,7 +54,15 @@ internal static class BlockKernels
 
     public static void Scale(Span<double> column, double factor)
     {
-        foreach (ref var value in column)
+        ref var target = ref MemoryMarshal.GetReference(column);
+        var scale = Vector512.Create(factor);
+        nuint i = 0;
+        for (; i < Whole(column.Length); i += Lanes)
+        {
+            (Vector512.LoadUnsafe(ref target, i) * scale).StoreUnsafe(ref target, i);
+        }
+
+        foreach (ref var value in column[(int)i..])
         {
             value *= factor;
         }
@@ -63,25 +71,85 @@ internal static class BlockKernels
     /// <summary>into[i] += column[i]².</summary>
     public static void AddSquares(Span<double> into, ReadOnlySpan<double> column)
     {
-        for (var i = 0; i < into.Length; i++)
+        ref var target = ref MemoryMarshal.GetReference(into);
+        ref var source = ref MemoryMarshal.GetReference(column);
+        nuint i = 0;
+        for (; i < Whole(into.Length); i += Lanes)
         {
-            into[i] = Math.FusedMultiplyAdd(column[i], column[i], into[i]);
+            var value = Vector512.LoadUnsafe(ref source, i);
+            Vector512.FusedMultiplyAdd(value, value, Vector512.LoadUnsafe(ref target, i)).StoreUnsafe(ref target, i);
+        }
+
+        for (var j = (int)i; j < into.Length; j++)
+        {
+            into[j] = Math.FusedMultiplyAdd(column[j], column[j], into[j]);
         }
     }
 
     /// <summary>into[i] = a[i] * b[i].</summary>
     public static void Multiply(ReadOnlySpan<double> a, ReadOnlySpan<double> b, Span<double> into)
     {
-        for (var i = 0; i < into.Length; i++)
+        ref var target = ref MemoryMarshal.GetReference(into);
+        ref var left = ref MemoryMarshal.GetReference(a);
+        ref var right = ref MemoryMarshal.GetReference(b);
+        nuint i = 0;
+        for (; i < Whole(into.Length); i += Lanes)
         {
-            into[i] = a[i] * b[i];
+            (Vector512.LoadUnsafe(ref left, i) * Vector512.LoadUnsafe(ref right, i)).StoreUnsafe(ref target, i);
+        }
+
+        for (var j = (int)i; j < into.Length; j++)
+        {
+            into[j] = a[j] * b[j];
         }
     }
 
-    private static double SumLanes(Vector512<double> lanes)
+    /// <summary>into[i] = column[i] - shift.</summary>
+    public static void Shift(ReadOnlySpan<double> column, double shift, Span<double> into)
+    {
+        ref var target = ref MemoryMarshal.GetReference(into);
+        ref var source = ref MemoryMarshal.GetReference(column);
+        var by = Vector512.Create(shift);
+        nuint i = 0;
+        for (; i < Whole(into.Length); i += Lanes)
+        {
+            (Vector512.LoadUnsafe(ref source, i) - by).StoreUnsafe(ref target, i);
+        }
+
+        for (var j = (int)i; j < into.Length; j++)
+        {
+            into[j] = column[j] - shift;
+        }
+    }
+
+    /// <summary>The largest absolute value, 0 for none; values are finite.</summary>
+    public static double LargestAbsolute(ReadOnlySpan<double> column)
+    {
+        ref var source = ref MemoryMarshal.GetReference(column);
+        var lanes = Vector512<double>.Zero;
+        nuint i = 0;
+        for (; i < Whole(column.Length); i += Lanes)
+        {
+            lanes = Vector512.MaxNative(lanes, Vector512.Abs(Vector512.LoadUnsafe(ref source, i)));
+        }
+
+        var four = Vector256.MaxNative(lanes.GetLower(), lanes.GetUpper());
+        var two = Vector128.MaxNative(four.GetLower(), four.GetUpper());
+        var largest = Math.Max(two[0], two[1]);
+        foreach (var value in column[(int)i..])
+        {
+            largest = Math.Max(largest, Math.Abs(value));
+        }
+
+        return largest;
+    }
+
+    public static double SumLanes(Vector512<double> lanes)
     {
         var four = lanes.GetLower() + lanes.GetUpper();
         var two = four.GetLower() + four.GetUpper();
         return two[0] + two[1];
     }
+
+    private static nuint Whole(int length) => (nuint)(length - (length % Lanes));
 }

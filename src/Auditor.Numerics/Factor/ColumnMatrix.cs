@@ -20,13 +20,18 @@ public sealed class ColumnMatrix(int rows, int columns)
 
     public Span<double> Column(int column) => _values.AsSpan(column * Rows, Rows);
 
+    internal ReadOnlyMemory<double> ColumnMemory(int column) => _values.AsMemory(column * Rows, Rows);
+
     /// <summary>The given columns, in that order, copied.</summary>
-    public ColumnMatrix Select(IReadOnlyList<int> columns)
+    public ColumnMatrix Select(IReadOnlyList<int> columns) => Select(columns, 0, Rows);
+
+    /// <summary>Some rows of the given columns, in that order, copied.</summary>
+    public ColumnMatrix Select(IReadOnlyList<int> columns, int first, int count)
     {
-        var selected = new ColumnMatrix(Rows, columns.Count);
+        var selected = new ColumnMatrix(count, columns.Count);
         for (var c = 0; c < columns.Count; c++)
         {
-            Column(columns[c]).CopyTo(selected.Column(c));
+            Column(columns[c]).Slice(first, count).CopyTo(selected.Column(c));
         }
 
         return selected;

@@ -30,47 +30,13 @@ internal sealed class DoubleDoubleColumn
     }
 
     /// <summary>Makes every low part smaller than half the last place of its high part.</summary>
-    public void Renormalise()
-    {
-        for (var i = 0; i < _length; i++)
-        {
-            this[i] += DoubleDouble.Of(0);
-        }
-    }
+    public void Renormalise() => DoubleDoubleKernels.Renormalise(High, Low);
 
-    public DoubleDouble Sum()
-    {
-        var total = DoubleDouble.Of(0);
-        for (var i = 0; i < _length; i++)
-        {
-            total += this[i];
-        }
-
-        return total;
-    }
+    public DoubleDouble Sum() => DoubleDoubleKernels.Sum(High, Low);
 
     /// <summary>Sum of value times double-double.</summary>
-    public DoubleDouble Dot(ReadOnlySpan<double> values)
-    {
-        var total = DoubleDouble.Of(0);
-        for (var i = 0; i < _length; i++)
-        {
-            total += this[i] * values[i];
-        }
-
-        return total;
-    }
+    public DoubleDouble Dot(ReadOnlySpan<double> values) => DoubleDoubleKernels.Dot(High, Low, values);
 
     /// <summary>Sum of products, the other one's low parts to first order.</summary>
-    public DoubleDouble Dot(DoubleDoubleColumn other)
-    {
-        var total = DoubleDouble.Of(0);
-        for (var i = 0; i < _length; i++)
-        {
-            total += this[i] * other._high[i];
-            total += DoubleDouble.Of(_high[i] * other._low[i]);
-        }
-
-        return total;
-    }
+    public DoubleDouble Dot(DoubleDoubleColumn other) => Dot(other.High) + DoubleDouble.Of(BlockKernels.Dot(High, other.Low));
 }

@@ -1,79 +1,61 @@
+using System.Collections.Concurrent;
+
 namespace Auditor.Numerics.Factor;
 
 /// <summary>Builds the factor of a design in one pass over its rows.</summary>
 public static class FactorBuilder
 {
+    /// <param name="threads">Most stripes of rows to work on at once; no bit of the result depends on it.</param>
     /// <exception cref="ArgumentException">The design has no rows.</exception>
-    public static OrthogonalFactor Build(IDesignRows design)
+    public static OrthogonalFactor Build(IDesignRows design, int threads = 1)
     {
-        var state = new State(design.Layout);
-        foreach (var block in design.Blocks())
-        {
-            state.Add(block);
-        }
-
-        return state.Finish();
+        var factor = BuildPlain(design, threads);
+        return design.Extended is { } extended && PreciseFactor.IsWanted(factor) ? PreciseFactor.Build(extended, factor) : factor;
     }
 
-    private sealed class State(DesignLayout layout)
+    private static OrthogonalFactor BuildPlain(IDesignRows design, int threads)
     {
-        private readonly ColumnMatrix _r = new(layout.Columns, layout.Columns);
-        private readonly double[] _shifts = new double[layout.Columns];
-        private readonly double[] _largest = new double[layout.Columns];
-        private PreparedBlock? _prepared;
-        private int _rows;
-        private double _n;
-        private double _sumOfWeights;
-        private double _sumOfLogWeights;
-
-        public void Add(RowBlock block)
+        var (shifts, stripes) = (Shifts(design), new StripeFactor[design.Stripes]);
+        Each(stripes.Length, threads, stripe => stripes[stripe] = new StripeFactor(design.Layout, shifts).AddAll(design.Blocks(stripe)));
+        foreach (var stripe in stripes.Skip(1))
         {
-            if (block.Rows == 0)
-            {
-                return;
-            }
-
-            if (_rows == 0)
-            {
-                TakeShifts(block);
-            }
-
-            _prepared ??= new PreparedBlock(block.Stride, layout.Columns);
-            _prepared.Load(block, _shifts, withCopies: true);
-            Count(block);
-            Householder.Stack(_r, _prepared);
+            stripes[0].Merge(stripe);
         }
 
-        public OrthogonalFactor Finish() => _rows == 0
-            ? throw new ArgumentException("a design without rows has no factor")
-            : new OrthogonalFactor(layout, _r, _shifts, _largest, new RowTotals(_rows, _n, _sumOfWeights, _sumOfLogWeights));
+        return stripes[0].Finish();
+    }
 
-        private void TakeShifts(RowBlock block)
+    /// <summary>The first row's values when there is an intercept, which keeps its own.</summary>
+    private static double[] Shifts(IDesignRows design)
+    {
+        var shifts = new double[design.Layout.Columns];
+        if (design.Layout.Intercept && design.Blocks(0).FirstOrDefault(block => block.Rows > 0) is { } first)
         {
-            for (var c = 1; layout.Intercept && c < layout.Columns; c++)
+            for (var c = 1; c < shifts.Length; c++)
             {
-                _shifts[c] = block.Column(c)[0];
+                shifts[c] = first.Column(c)[0];
             }
         }
 
-        private void Count(RowBlock block)
+        return shifts;
+    }
+
+    /// <summary>Does the work for 0 to count - 1; a thread takes the next one as soon as it is free.</summary>
+    private static void Each(int count, int threads, Action<int> work)
+    {
+        if (threads <= 1 || count == 1)
         {
-            _rows += block.Rows;
-            for (var i = 0; i < block.Rows; i++)
+            for (var at = 0; at < count; at++)
             {
-                var (weight, copies) = (block.Weights?[i] ?? 1, block.Copies?[i] ?? 1);
-                _n += copies;
-                _sumOfWeights += weight * copies;
-                _sumOfLogWeights += copies * Math.Log(weight);
+                work(at);
             }
 
-            for (var c = 0; c < layout.Columns; c++)
-            {
-                foreach (var value in block.Column(c))
-                {
-                    _largest[c] = Math.Max(_largest[c], Math.Abs(value));
-                }
-            }
+            return;
         }
+
+        Parallel.ForEach(
+            Partitioner.Create(Enumerable.Range(0, count), EnumerablePartitionerOptions.NoBuffering),
+            new ParallelOptions { MaxDegreeOfParallelism = threads },
+            work);
     }
 }

@@ -7,11 +7,13 @@ namespace Auditor.Numerics.Factor;
 public sealed class FinalFactor
 {
     private readonly ColumnMatrix _rotated;
+    private readonly DoubleDoubleMatrix? _precise;
 
     private FinalFactor(OrthogonalFactor factor, Reduction reduction)
     {
         Factor = factor;
         _rotated = reduction.Rotated;
+        _precise = reduction.Precise;
         Kept = reduction.Kept;
         NearlyAliased = reduction.Nearly;
         Triangle = Leading(reduction.Kept);
@@ -44,14 +46,44 @@ public sealed class FinalFactor
     public static FinalFactor Of(OrthogonalFactor factor)
     {
         var all = factor.R.Select([.. Enumerable.Range(0, factor.R.Columns)]);
-        return new FinalFactor(factor, Reduction.Of(factor, all, factor.Layout.FinalColumns, 0, column => column));
+        return new FinalFactor(factor, Reduction.Of(factor, all, factor.Precise?.Copy(), factor.Layout.FinalColumns, 0, column => column));
     }
 
     /// <summary>Coordinates of a design column within F; r entries.</summary>
     internal ReadOnlySpan<double> Explained(int column) => _rotated.Column(column)[..Kept.Count];
 
+    /// <summary>The same, for use after the call.</summary>
+    internal ReadOnlyMemory<double> ExplainedMemory(int column) => _rotated.ColumnMemory(column)[..Kept.Count];
+
     /// <summary>Coordinates of a design column orthogonal to F.</summary>
     internal ReadOnlySpan<double> Orthogonal(int column) => _rotated.Column(column)[Kept.Count..];
+
+    /// <summary>Coordinates of design columns orthogonal to F, copied.</summary>
+    internal ColumnMatrix OrthogonalPart(IReadOnlyList<int> columns) => _rotated.Select(columns, Rank, _rotated.Rows - Rank);
+
+    /// <summary>The kept columns' triangle in double-double, when the factor is.</summary>
+    internal DoubleDoubleMatrix? PreciseTriangle => _precise?.Select(Kept, 0, Rank);
+
+    /// <summary>Coordinates of design columns orthogonal to F in double-double, when the factor is.</summary>
+    internal DoubleDoubleMatrix? PreciseOrthogonal(IReadOnlyList<int> columns) => _precise?.Select(columns, Rank, _precise.Rows - Rank);
+
+    /// <summary>Coordinates of a design column within F in double-double; r entries. Only when the factor is extended.</summary>
+    internal ReadOnlySpan<DoubleDouble> PreciseExplained(int column) => _precise!.Column(column)[..Rank];
+
+    /// <summary>b with R_F b = Q_F'y for the columns as factored; r entries.</summary>
+    internal DoubleDouble[] Slopes()
+    {
+        if (_precise is null)
+        {
+            var plain = Explained(Factor.Layout.Response).ToArray();
+            Numerics.Factor.Triangle.Solve(Triangle, plain);
+            return [.. plain.Select(DoubleDouble.Of)];
+        }
+
+        var slopes = _precise.Column(Factor.Layout.Response)[..Rank].ToArray();
+        PreciseTriangle!.Solve(slopes);
+        return slopes;
+    }
 
     private double FindLargestPiece()
     {

@@ -1,23 +1,23 @@
 namespace Auditor.Numerics.Factor;
 
-/// <summary>Householder reflections: of a block stacked under a triangle, and of small matrices column by column.</summary>
+/// <summary>Householder reflections, one at a time: of small matrices, and of a short block stacked under a triangle.</summary>
 internal static class Householder
 {
     /// <summary>
     /// A squared length below this is nothing: when columns outnumber rows, rounding is reflected again and again and shrinks each time, until its squares
     /// would underflow. A column as small as that counts as zero.
     /// </summary>
-    private const double Nothing = 1e-200;
+    public const double Nothing = 1e-200;
 
     /// <summary>
-    /// Factors the block stacked under the triangle into the triangle. The block is used up. The reflection of column j touches row j of the
+    /// Factors the block stacked under the triangle into the triangle. The block, column-major, is used up. The reflection of column j touches row j of the
     /// triangle and all rows of the block.
     /// </summary>
-    public static void Stack(ColumnMatrix triangle, PreparedBlock block)
+    public static void Stack(ColumnMatrix triangle, double[] block, int stride, int rows)
     {
         for (var j = 0; j < triangle.Columns; j++)
         {
-            var below = block.Column(j);
+            var below = block.AsSpan(j * stride, rows);
             var squared = BlockKernels.Dot(below, below);
             if (squared < Nothing)
             {
@@ -27,9 +27,15 @@ internal static class Householder
             var diagonal = triangle[j, j];
             var length = Math.Sqrt(Math.FusedMultiplyAdd(diagonal, diagonal, squared));
             var image = diagonal > 0 ? -length : length;
-            var top = diagonal - image;
             triangle[j, j] = image;
-            ReflectRest(triangle, block, j, top, 1 / (image * top));
+            var (top, factor) = (diagonal - image, 1 / (image * (diagonal - image))); // v'v = -2 image top
+            for (var k = j + 1; k < triangle.Columns; k++)
+            {
+                var other = block.AsSpan(k * stride, rows);
+                var scale = factor * Math.FusedMultiplyAdd(top, triangle[j, k], BlockKernels.Dot(below, other));
+                triangle[j, k] = Math.FusedMultiplyAdd(scale, top, triangle[j, k]);
+                BlockKernels.AddScaled(other, scale, below);
+            }
         }
     }
 
@@ -51,7 +57,7 @@ internal static class Householder
         var length = Math.Sqrt(BlockKernels.Dot(v, v));
         var image = v[0] > 0 ? -length : length;
         v[0] -= image;
-        var factor = 1 / (image * v[0]); // as in ReflectRest
+        var factor = 1 / (image * v[0]); // v'v = -2 image v_0
         var own = matrix.Column(column).Slice(from, rows);
         own.Clear();
         own[0] = image;
@@ -59,19 +65,6 @@ internal static class Householder
         {
             var other = matrix.Column(c).Slice(from, rows);
             BlockKernels.AddScaled(other, factor * BlockKernels.Dot(v, other), v);
-        }
-    }
-
-    private static void ReflectRest(ColumnMatrix triangle, PreparedBlock block, int j, double top, double factor)
-    {
-        // v = [top; below] and v'v = -2 image top, so the reflection I - 2 v v' / v'v is I + v v' / (image top).
-        var below = block.Column(j);
-        for (var k = j + 1; k < triangle.Columns; k++)
-        {
-            var other = block.Column(k);
-            var scale = factor * Math.FusedMultiplyAdd(top, triangle[j, k], BlockKernels.Dot(below, other));
-            triangle[j, k] = Math.FusedMultiplyAdd(scale, top, triangle[j, k]);
-            BlockKernels.AddScaled(other, scale, below);
         }
     }
 

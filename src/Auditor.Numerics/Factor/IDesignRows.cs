@@ -8,7 +8,22 @@ public interface IDesignRows
 {
     DesignLayout Layout { get; }
 
+    /// <summary>
+    /// Into how many stripes of consecutive rows the row set is cut, so that several threads may work on one factor. It depends on the rows and columns
+    /// alone, never on the threads: the stripes' factors are merged in order, and the same stripes give the same bits.
+    /// </summary>
+    int Stripes => 1;
+
+    /// <summary>
+    /// The same rows with the low parts of the columns that the source forms itself, for a factor in extended precision when digits are lost. Null: the factor stays
+    /// as it is.
+    /// </summary>
+    IDesignRows? Extended => null;
+
     IEnumerable<RowBlock> Blocks();
+
+    /// <summary>The blocks of one stripe; several stripes may be read at the same time. A design of more than one stripe must give its own.</summary>
+    IEnumerable<RowBlock> Blocks(int stripe) => Blocks();
 }
 
 /// <summary>A run of columns of the design.</summary>

@@ -10,8 +10,9 @@ namespace Auditor.Numerics.Factor;
 /// </remarks>
 public sealed class OrthogonalFactor
 {
-    internal OrthogonalFactor(DesignLayout layout, ColumnMatrix r, double[] shifts, double[] largest, RowTotals totals)
+    internal OrthogonalFactor(DesignLayout layout, ColumnMatrix r, double[] shifts, double[] largest, RowTotals totals, DoubleDoubleMatrix? precise = null)
     {
+        Precise = precise;
         Layout = layout;
         R = r;
         Shifts = shifts;
@@ -25,8 +26,14 @@ public sealed class OrthogonalFactor
 
     public DesignLayout Layout { get; }
 
-    /// <summary>P x P, zero below the diagonal; rows beyond n are zero.</summary>
+    /// <summary>P columns, zero below the diagonal; P rows, with fewer observations than columns about as many as there are observations.</summary>
     public ColumnMatrix R { get; }
+
+    /// <summary>R in double-double where the columns cost so many digits that it was worth it (<see cref="PreciseFactor"/>); else null.</summary>
+    internal DoubleDoubleMatrix? Precise { get; }
+
+    /// <summary>The factor was made in extended precision.</summary>
+    public bool IsExtended => Precise is not null;
 
     /// <summary>What was subtracted from each column before factoring; zeros without an intercept.</summary>
     public IReadOnlyList<double> Shifts { get; }

@@ -10,10 +10,13 @@ internal sealed class Reduction
     private readonly List<int> _aliased = [];
     private readonly List<NearlyAliasedColumn> _nearly = [];
 
-    private Reduction(ColumnMatrix rotated) => Rotated = rotated;
+    private Reduction(ColumnMatrix rotated, DoubleDoubleMatrix? precise) => (Rotated, Precise) = (rotated, precise);
 
     /// <summary>The matrix after all reflections: for kept column k, pivot row k.</summary>
     public ColumnMatrix Rotated { get; }
+
+    /// <summary>The same in double-double, when the factor is; <see cref="Rotated"/> is it rounded.</summary>
+    public DoubleDoubleMatrix? Precise { get; }
 
     /// <summary>Positions (in the matrix) of kept columns, in order; kept column k has pivot row <c>First + k</c>.</summary>
     public IReadOnlyList<int> Kept => _kept;
@@ -27,9 +30,10 @@ internal sealed class Reduction
     /// <param name="candidates">How many leading columns of the matrix are to be factored; the rest are carried.</param>
     /// <param name="first">The pivot row of the first kept column; rows above belong to columns factored earlier.</param>
     /// <param name="design">The design index of each candidate, for the tolerance.</param>
-    public static Reduction Of(OrthogonalFactor factor, ColumnMatrix matrix, int candidates, int first, Func<int, int> design)
+    /// <param name="precise">The matrix in double-double, used up too; null when the factor is not.</param>
+    public static Reduction Of(OrthogonalFactor factor, ColumnMatrix matrix, DoubleDoubleMatrix? precise, int candidates, int first, Func<int, int> design)
     {
-        var reduction = new Reduction(matrix);
+        var reduction = new Reduction(matrix, precise);
         var later = Enumerable.Range(0, matrix.Columns).ToArray();
         for (var c = 0; c < candidates; c++)
         {
@@ -54,7 +58,16 @@ internal sealed class Reduction
             _nearly.Add(new NearlyAliasedColumn(design, lost));
         }
 
-        Householder.Reflect(Rotated, column, pivot, later);
+        if (Precise is null)
+        {
+            Householder.Reflect(Rotated, column, pivot, later);
+        }
+        else
+        {
+            Precise.Reflect(column, pivot, later);
+            Precise.RoundTo(Rotated);
+        }
+
         _kept.Add(column);
     }
 }

@@ -13,6 +13,8 @@ internal sealed class Refinement
     private readonly FinalFactor _final;
     private readonly bool _intercept;
     private readonly DoubleDouble[] _coefficients;
+    private readonly double[] _plain;
+    private readonly bool[] _hasLowParts;
     private readonly DoubleDouble[] _gradient;
     private readonly DoubleDoubleColumn _residual = new();
     private readonly DoubleDoubleColumn _weighted = new();
@@ -23,7 +25,9 @@ internal sealed class Refinement
     {
         _final = final;
         _intercept = final.Factor.Layout.Intercept;
-        _coefficients = StartingCoefficients();
+        _coefficients = InDeclaredColumns(final.Slopes());
+        _plain = PlainCoefficients();
+        _hasLowParts = new bool[final.Rank];
         _gradient = new DoubleDouble[final.Rank];
     }
 
@@ -37,6 +41,11 @@ internal sealed class Refinement
         for (var k = 0; k < _final.Rank; k++)
         {
             _gradient[k] += weighted.Dot(block.Column(_final.Kept[k]));
+            if (block.Low is not null)
+            {
+                _hasLowParts[k] |= block.LowColumn(_final.Kept[k]).ContainsAnyExcept(0.0);
+                _gradient[k] += DoubleDouble.Of(BlockKernels.Dot(weighted.High, block.LowColumn(_final.Kept[k])));
+            }
         }
 
         _sumOfResiduals += weighted.Sum();
@@ -46,30 +55,62 @@ internal sealed class Refinement
     public RefinedCoefficients Finish()
     {
         var gradient = ShiftedGradient();
-        var step = (double[])gradient.Clone();
-        Triangle.SolveTransposed(_final.Triangle, step);
-        Triangle.Solve(_final.Triangle, step);
+        var step = Step(gradient);
         var gain = BlockKernels.Dot(step, gradient);
         var declared = DeclaredScale(step);
+        double[] values = [.. _coefficients.Zip(declared, (start, change) => (start + DoubleDouble.Of(change)).Value)];
         return new RefinedCoefficients(
-            [.. _coefficients.Zip(declared, (start, change) => (start + DoubleDouble.Of(change)).Value)],
-            declared,
+            values,
+            _final.Factor.IsExtended && !CostlyColumnsAreFormedHere() ? [.. values.Zip(_plain, (value, plain) => value - plain)] : declared,
             Math.Max(0, (_sumOfSquares - DoubleDouble.Of(gain)).Value));
     }
 
-    /// <summary>R b = Q'y, then the constant moved from the shifted columns to the declared ones.</summary>
-    private DoubleDouble[] StartingCoefficients()
+    /// <summary>The constant moved from the shifted columns to the declared ones.</summary>
+    private DoubleDouble[] InDeclaredColumns(DoubleDouble[] slopes)
+    {
+        var declared = (DoubleDouble[])slopes.Clone();
+        if (_intercept)
+        {
+            declared[0] += DoubleDouble.Of(_final.Factor.Shifts[_final.Factor.Layout.Response]);
+            for (var k = 1; k < slopes.Length; k++)
+            {
+                declared[0] -= slopes[k] * _final.Factor.Shifts[_final.Kept[k]];
+            }
+        }
+
+        return declared;
+    }
+
+    /// <summary>What the rounded factor alone gives.</summary>
+    private double[] PlainCoefficients()
     {
         var slopes = _final.Explained(_final.Factor.Layout.Response).ToArray();
         Triangle.Solve(_final.Triangle, slopes);
-        var start = slopes.Select(DoubleDouble.Of).ToArray();
-        if (_intercept)
+        return [.. InDeclaredColumns([.. slopes.Select(DoubleDouble.Of)]).Select(value => value.Value)];
+    }
+
+    /// <summary>
+    /// Every column that costs digits was formed in extended precision, so that a change in the last bit of the data does not move it alone. Otherwise the digits
+    /// are those of the rounded factor, although the coefficients are those of the data as they stand.
+    /// </summary>
+    private bool CostlyColumnsAreFormedHere() =>
+        Enumerable.Range(0, _final.Rank).All(k => _hasLowParts[k] || !PreciseFactor.IsCostly(_final.Factor, _final.Kept[k]));
+
+    /// <summary>d with R'R d = gradient.</summary>
+    private double[] Step(double[] gradient)
+    {
+        if (_final.PreciseTriangle is not { } precise)
         {
-            start[0] += DoubleDouble.Of(_final.Factor.Shifts[_final.Factor.Layout.Response]);
-            start[0] -= ShiftsTimes(slopes);
+            var step = (double[])gradient.Clone();
+            Triangle.SolveTransposed(_final.Triangle, step);
+            Triangle.Solve(_final.Triangle, step);
+            return step;
         }
 
-        return start;
+        DoubleDouble[] exact = [.. gradient.Select(DoubleDouble.Of)];
+        precise.SolveTransposed(exact);
+        precise.Solve(exact);
+        return [.. exact.Select(value => value.Value)];
     }
 
     private double[] DeclaredScale(double[] step)
@@ -100,6 +141,10 @@ internal sealed class Refinement
         for (var k = 0; k < _final.Rank; k++)
         {
             DoubleDoubleKernels.SubtractScaled(_residual.High, _residual.Low, block.Column(_final.Kept[k]), _coefficients[k]);
+            if (block.Low is not null)
+            {
+                BlockKernels.AddScaled(_residual.Low, -_coefficients[k].High, block.LowColumn(_final.Kept[k]));
+            }
         }
 
         _residual.Renormalise();

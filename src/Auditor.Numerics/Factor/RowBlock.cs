@@ -7,9 +7,12 @@ namespace Auditor.Numerics.Factor;
 public sealed class RowBlock(int capacity, int columns)
 {
     /// <summary>Rows per block that keep a block of some tens of columns in the cache nearest to the processor.</summary>
-    public const int DefaultCapacity = 512;
+    public const int DefaultCapacity = 256;
 
     public double[] Values { get; } = new double[capacity * columns];
+
+    /// <summary>What rounding took off each value, laid out as <see cref="Values"/>: value plus low part is the number that was declared. Null: nothing is known.</summary>
+    public double[]? Low { get; set; }
 
     public int Stride { get; } = capacity;
 
@@ -28,4 +31,7 @@ public sealed class RowBlock(int capacity, int columns)
     public double[]? Copies { get; set; }
 
     public Span<double> Column(int column) => Values.AsSpan(column * Stride, Rows);
+
+    /// <summary>Low parts of a column; empty when nothing is known.</summary>
+    public Span<double> LowColumn(int column) => Low is null ? [] : Low.AsSpan(column * Stride, Rows);
 }

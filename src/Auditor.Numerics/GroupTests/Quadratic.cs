@@ -11,11 +11,19 @@ public static class Quadratic
     /// <summary>A variance below this share of the classical one is rounding.</summary>
     private const double Rounding = 1e-20;
 
+    /// <summary>From this order on it pays to work on whole panels and to look for the two eigenvalues alone.</summary>
+    private const int Large = 64;
+
     /// <summary>u' V^-1 u for a q x q symmetric V, null when V is singular or not positive definite.</summary>
     /// <param name="classical">The classical variance of each entry of u, by which a V that is nothing but rounding is told.</param>
     public static double? Form(IReadOnlyList<double> u, double[,] v, double classical = 0)
     {
         var q = u.Count;
+        if (q >= Large)
+        {
+            return LargeQuadratic.Form(u, v, (pivot, diagonal) => IsRounding(pivot, diagonal, classical));
+        }
+
         var (l, z, total) = (new double[q, q], new double[q], 0.0);
         for (var i = 0; i < q; i++)
         {
@@ -25,7 +33,7 @@ public static class Quadratic
             }
 
             var pivot = v[i, i] - Inner(l, i, i, i);
-            if (!(pivot > Math.Max(Singular * v[i, i], Rounding * classical)))
+            if (IsRounding(pivot, v[i, i], classical))
             {
                 return null;
             }
@@ -41,6 +49,11 @@ public static class Quadratic
     /// <summary>Least and greatest eigenvalue of a symmetric matrix.</summary>
     public static (double Least, double Greatest) EigenvalueRange(double[,] v)
     {
+        if (v.GetLength(0) >= Large)
+        {
+            return Tridiagonal.Of(v).Range();
+        }
+
         var values = Matrix<double>.Build.DenseOfArray(v).Evd(Symmetricity.Symmetric).EigenValues;
         return (values.Min(value => value.Real), values.Max(value => value.Real));
     }
@@ -84,6 +97,9 @@ public static class Quadratic
             }
         }
     }
+
+    private static bool IsRounding(double pivot, double diagonal, double classical) =>
+        !(pivot > Math.Max(Singular * diagonal, Rounding * classical));
 
     private static double Inner(double[,] l, int i, int j, int length)
     {

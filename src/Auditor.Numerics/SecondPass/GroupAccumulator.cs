@@ -3,7 +3,7 @@ using Auditor.Numerics.Factor;
 namespace Auditor.Numerics.SecondPass;
 
 /// <summary>Fills the sums of one group.</summary>
-internal sealed class GroupAccumulator(AddedGroup group, int capacity) : IAccumulator
+internal sealed class GroupAccumulator : IAccumulator
 {
     /// <summary>A leverage this near to 1 is 1: what is left of 1 - h is rounding.</summary>
     public const double LeverageOne = 1e-10;
@@ -11,27 +11,67 @@ internal sealed class GroupAccumulator(AddedGroup group, int capacity) : IAccumu
     /// <summary>A squared row of Qz below this is rounding.</summary>
     private const double ZeroRow = 1e-24;
 
-    private readonly GroupRows _rows = new(group, capacity);
-    private readonly double[] _weight = new double[capacity];
-    private readonly double[] _scaled = new double[capacity];
-    private readonly double[] _alive = new double[capacity];
+    /// <summary>Sums of smaller groups are not worth a thread.</summary>
+    private const int LargeRank = 64;
 
-    public GroupSums Sums { get; } = new(group.Rank);
+    private readonly AddedGroup _group;
+    private readonly ParallelOptions _threads;
+    private readonly GroupRows _rows;
+    private readonly (WeightedProducts Products, Func<ResidualBlock, int, double> Omega, double[] Weights)[] _sums;
+    private readonly double[] _alive;
+
+    /// <param name="threads">Most threads for the sums of a large group, each of which is computed by itself.</param>
+    public GroupAccumulator(AddedGroup group, int capacity, int threads)
+    {
+        _group = group;
+        _threads = new ParallelOptions { MaxDegreeOfParallelism = group.Rank < LargeRank ? 1 : threads };
+        _rows = new GroupRows(group, capacity);
+        _alive = new double[capacity];
+        Sums = new GroupSums(group.Rank);
+        _sums =
+        [
+            Sum(Sums.Hc0, (_, i) => Square(_rows.Residuals[i])),
+            Sum(Sums.Hc2, (block, i) => Square(_rows.Residuals[i]) / Complement(block, i)),
+            Sum(Sums.Hc3, (block, i) => Square(_rows.Residuals[i] / Complement(block, i))),
+            Sum(Sums.Score, (block, i) => Square(block.Residuals[i])),
+            Sum(Sums.Ceiling, (_, i) => Square(_rows.Fitted[i])),
+        ];
+
+        (WeightedProducts Products, Func<ResidualBlock, int, double> Omega, double[] Weights) Sum(double[,] into, Func<ResidualBlock, int, double> omega) =>
+            (new WeightedProducts(into, capacity), omega, new double[capacity]);
+    }
+
+    public GroupSums Sums { get; }
 
     public void Add(ResidualBlock block)
     {
-        if (group.Rank == 0)
+        if (_group.Rank == 0)
         {
             return;
         }
 
         _rows.Load(block);
         MarkRows(block);
-        AddProducts(Sums.Hc0, block.Rows, i => Square(_rows.Residuals[i]));
-        AddProducts(Sums.Hc2, block.Rows, i => Square(_rows.Residuals[i]) / Complement(block, i));
-        AddProducts(Sums.Hc3, block.Rows, i => Square(_rows.Residuals[i] / Complement(block, i)));
-        AddProducts(Sums.Score, block.Rows, i => Square(block.Residuals[i]));
-        AddProducts(Sums.Ceiling, block.Rows, i => Square(_rows.Fitted[i]));
+        if (_threads.MaxDegreeOfParallelism > 1)
+        {
+            Parallel.For(0, _sums.Length, _threads, at => AddProducts(block, at));
+            return;
+        }
+
+        for (var at = 0; at < _sums.Length; at++)
+        {
+            AddProducts(block, at);
+        }
+    }
+
+    public GroupSums Finish()
+    {
+        foreach (var sum in _sums)
+        {
+            sum.Products.Finish();
+        }
+
+        return Sums;
     }
 
     private static double Square(double value) => value * value;
@@ -66,22 +106,14 @@ internal sealed class GroupAccumulator(AddedGroup group, int capacity) : IAccumu
         }
     }
 
-    private void AddProducts(double[,] into, int rows, Func<int, double> omega)
+    private void AddProducts(ResidualBlock block, int at)
     {
-        for (var i = 0; i < rows; i++)
+        var (products, omega, weights) = _sums[at];
+        for (var i = 0; i < block.Rows; i++)
         {
-            _weight[i] = _alive[i] == 0 ? 0 : _alive[i] * omega(i);
+            weights[i] = _alive[i] == 0 ? 0 : _alive[i] * omega(block, i);
         }
 
-        var scaled = _scaled.AsSpan(0, rows);
-        for (var a = 0; a < group.Rank; a++)
-        {
-            BlockKernels.Multiply(_rows.Column(a), _weight.AsSpan(0, rows), scaled);
-            for (var b = 0; b <= a; b++)
-            {
-                into[a, b] += BlockKernels.Dot(scaled, _rows.Column(b));
-                into[b, a] = into[a, b];
-            }
-        }
+        products.Add(_rows.Columns, block.Rows, weights.AsSpan(0, block.Rows));
     }
 }

@@ -5,13 +5,14 @@ namespace Auditor.Numerics.SecondPass;
 /// <summary>The rows of one group's orthonormal Qz for a block, with residual and leverage of F + group.</summary>
 internal sealed class GroupRows(AddedGroup group, int capacity)
 {
-    private readonly double[] _qz = new double[capacity * Math.Max(1, group.Rank)];
     private readonly double[] _residuals = new double[capacity];
     private readonly double[] _fitted = new double[capacity];
     private readonly double[] _squares = new double[capacity];
     private int _rows;
 
-    public Span<double> Column(int k) => _qz.AsSpan(k * capacity, _rows);
+    public PanelColumns Columns { get; } = new(capacity, group.Rank);
+
+    public Span<double> Column(int k) => Columns.Column(k);
 
     /// <summary>e(F + group) = e(F) - Qz u.</summary>
     public ReadOnlySpan<double> Residuals => _residuals.AsSpan(0, _rows);
@@ -25,30 +26,28 @@ internal sealed class GroupRows(AddedGroup group, int capacity)
     public void Load(ResidualBlock block)
     {
         _rows = block.Rows;
-        for (var k = 0; k < group.Rank; k++)
+        Columns.Begin(_rows);
+        if (block.Precise is { } precise)
         {
-            ComputeColumn(block, k);
+            precise.CopyGroup(group, Columns.Memory);
+        }
+        else
+        {
+            ComputeColumns(block);
         }
 
         ComputeSums(block);
     }
 
-    private void ComputeColumn(ResidualBlock block, int k)
+    private void ComputeColumns(ResidualBlock block)
     {
-        var target = Column(k);
-        block.Prepared.Column(group.Kept[k]).CopyTo(target);
-        var explained = group.Final.Explained(group.Kept[k]);
-        for (var j = 0; j < explained.Length; j++)
+        for (var k = 0; k < group.Rank; k++)
         {
-            BlockKernels.AddScaled(target, -explained[j], block.QColumn(j));
+            block.Prepared.Column(group.Kept[k]).CopyTo(Column(k));
         }
 
-        for (var j = 0; j < k; j++)
-        {
-            BlockKernels.AddScaled(target, -group.Triangle[j, k], Column(j));
-        }
-
-        BlockKernels.Scale(target, 1 / group.Triangle[k, k]);
+        Columns.Subtract(block.Q, k => group.Final.ExplainedMemory(group.Kept[k]));
+        Columns.Solve(group.Triangle);
     }
 
     private void ComputeSums(ResidualBlock block)

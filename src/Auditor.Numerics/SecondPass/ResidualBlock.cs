@@ -13,15 +13,15 @@ public sealed class ResidualBlock
 {
     private readonly double[] _residuals;
     private readonly double[] _leverages;
-    private readonly double[] _q;
 
     internal ResidualBlock(FinalFactor final, int capacity)
     {
         Final = final;
+        Precise = final.Factor.IsExtended ? new PreciseRows(final) : null;
         Prepared = new PreparedBlock(capacity, final.Factor.Layout.Columns);
         _residuals = new double[capacity];
         _leverages = new double[capacity];
-        _q = new double[capacity * Math.Max(1, final.Rank)];
+        Q = new PanelColumns(capacity, final.Rank);
     }
 
     public int Rows => Prepared.Rows;
@@ -42,8 +42,14 @@ public sealed class ResidualBlock
 
     internal PreparedBlock Prepared { get; }
 
+    /// <summary>The same rows in extended precision, when the factor is.</summary>
+    internal PreciseRows? Precise { get; }
+
     /// <summary>Column k of the rows of Q_F, 0 to r - 1.</summary>
-    internal Span<double> QColumn(int k) => _q.AsSpan(k * Prepared.Stride, Rows);
+    internal Span<double> QColumn(int k) => Q.Column(k);
+
+    /// <summary>The rows of Q_F.</summary>
+    internal PanelColumns Q { get; }
 
     /// <param name="residuals">y - X b, not weighted.</param>
     internal void Load(RowBlock block, ReadOnlySpan<double> residuals)
@@ -52,24 +58,40 @@ public sealed class ResidualBlock
         FirstRow = block.FirstRow;
         Copies = block.Copies;
         BlockKernels.Multiply(residuals, Prepared.Scale, _residuals.AsSpan(0, Rows));
+        Precise?.Load(block, Prepared.Scale);
         ComputeQ();
     }
 
     private void ComputeQ()
     {
+        Q.Begin(Rows);
+        for (var k = 0; k < Final.Rank; k++)
+        {
+            if (Precise is null)
+            {
+                Prepared.Column(Final.Kept[k]).CopyTo(QColumn(k));
+            }
+            else
+            {
+                Precise.CopyQ(k, QColumn(k));
+            }
+        }
+
+        if (Precise is null)
+        {
+            Q.Solve(Final.Triangle);
+        }
+
+        AddLeverages();
+    }
+
+    private void AddLeverages()
+    {
         var leverages = _leverages.AsSpan(0, Rows);
         leverages.Clear();
         for (var k = 0; k < Final.Rank; k++)
         {
-            var q = QColumn(k);
-            Prepared.Column(Final.Kept[k]).CopyTo(q);
-            for (var j = 0; j < k; j++)
-            {
-                BlockKernels.AddScaled(q, -Final.Triangle[j, k], QColumn(j));
-            }
-
-            BlockKernels.Scale(q, 1 / Final.Triangle[k, k]);
-            BlockKernels.AddSquares(leverages, q);
+            BlockKernels.AddSquares(leverages, QColumn(k));
         }
     }
 }

@@ -10,23 +10,26 @@ public static class RowPass
     /// The declared dependence between rows; nothing is computed for what is absent. When the sums by class do not fit in memory, the rows are
     /// passed more than once.
     /// </param>
+    /// <param name="threads">Most threads to use; no result depends on it.</param>
     public static RowPassResult Run(
         IDesignRows design,
         FinalFactor final,
         IReadOnlyList<AddedGroup> groups,
         IReadOnlyList<IAccumulator> others,
-        DependenceStructure? structure = null)
+        DependenceStructure? structure = null,
+        int threads = 1)
     {
         DependencePass? dependence = null;
         var refinement = new Refinement(final);
         ResidualBlock? residuals = null;
         GroupAccumulator[] accumulators = [];
-        foreach (var block in design.Blocks())
+        var rows = final.Factor.IsExtended ? design.Extended ?? design : design;
+        foreach (var block in rows.Blocks())
         {
             if (residuals is null)
             {
                 residuals = new ResidualBlock(final, block.Stride);
-                accumulators = [.. groups.Select(group => new GroupAccumulator(group, block.Stride))];
+                accumulators = [.. groups.Select(group => new GroupAccumulator(group, block.Stride, threads))];
                 dependence = structure is null ? null : new DependencePass(final, groups, structure, block.Stride);
             }
 
@@ -40,8 +43,8 @@ public static class RowPass
             dependence?.Add(block, residuals);
         }
 
-        GroupSums[] sums = [.. accumulators.Select(accumulator => accumulator.Sums)];
-        dependence?.Finish(design, sums);
+        GroupSums[] sums = [.. accumulators.Select(accumulator => accumulator.Finish())];
+        dependence?.Finish(rows, sums);
         return new RowPassResult(refinement.Finish(), sums);
     }
 }

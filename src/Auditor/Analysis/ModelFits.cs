@@ -30,6 +30,7 @@ internal sealed class ModelFits
     /// <param name="main">The rows of the fit that is shown and checked: their residuals are kept.</param>
     /// <param name="pictured">The rows on which each group's pictures are drawn; null when none are wanted.</param>
     /// <param name="scored">Whether robust covariances of the final model's own coefficients are wanted.</param>
+    /// <param name="run">Its threads are for row sets, then within each; no result depends on them.</param>
     public static ModelFits Compute(BoundModel model, RowSelection selection, RowSubset main, RowSet? pictured, bool scored, RunSettings run)
     {
         var residuals = new ResidualStore();
@@ -49,7 +50,7 @@ internal sealed class ModelFits
             0,
             wanted.Length,
             new ParallelOptions { MaxDegreeOfParallelism = run.Threads },
-            at => computed[at] = RowSetFit.Compute(model, wanted[at].Key, [.. wanted[at].Value], Wishes(wanted[at].Key)));
+            at => computed[at] = RowSetFit.Compute(model, wanted[at].Key, [.. wanted[at].Value], Wishes(wanted[at].Key), Math.Max(1, run.Threads / wanted.Length)));
         var fits = new ModelFits(selection) { Residuals = residuals };
         foreach (var fit in computed)
         {

@@ -39,31 +39,29 @@ internal sealed class RowSetFit
 
     /// <param name="groups">Positions of the groups to be tested on these rows.</param>
     /// <param name="wishes">What is wanted beside the fit and the groups' own tests.</param>
-    public static RowSetFit Compute(BoundModel model, RowSubset rows, IReadOnlyList<int> groups, FitWishes wishes)
+    /// <param name="threads">Most threads to use; no result depends on it.</param>
+    public static RowSetFit Compute(BoundModel model, RowSubset rows, IReadOnlyList<int> groups, FitWishes wishes, int threads)
     {
         var plan = new DesignPlan(model, groups);
         var design = new DesignRows(model, plan, rows);
-        var final = FinalFactor.Of(FactorBuilder.Build(design));
+        var final = FinalFactor.Of(FactorBuilder.Build(design, threads));
         var added = plan.Layout.Groups.Select(range => AddedGroup.Of(final, [.. range.Indices])).ToList();
         var joint = wishes.Jointly && groups.Count > 0 ? AddedGroup.Of(final, Columns(plan, [.. Enumerable.Range(0, groups.Count)])) : null;
         var pictures = groups.Select((group, g) => wishes.Pictured.Contains(group) ? GroupPictures.Of(added[g], plan, model.Groups.Count) : null).ToList();
         var scores = wishes.Scored ? new CoefficientScores(final) : null;
         IAccumulator?[] others = [wishes.Residuals, scores, .. pictures.SelectMany(picture => picture?.Accumulators ?? [])];
         var dependence = Dependence.Of(model.Structure, model.Structure.Among(rows), wishes.Seed);
-        var pass = RowPass.Run(design, final, joint is null ? added : [.. added, joint], [.. others.OfType<IAccumulator>()], dependence.Rows);
+        var pass = RowPass.Run(design, final, joint is null ? added : [.. added, joint], [.. others.OfType<IAccumulator>()], dependence.Rows, threads);
         var result = new RowSetFit(rows, plan, final, new Fit(final, pass)) { Scores = scores };
+        var last = joint is null ? null : LastIn.Of(final, [.. added.Select(group => group.Columns)], threads);
         for (var g = 0; g < groups.Count; g++)
         {
-            var last = joint is null ? null : AddedGroup.After(final, Others(plan, g), added[g].Columns);
-            result._groups[groups[g]] = new GroupFit(added[g], pass.Groups[g], last, joint, dependence) { Plots = pictures[g]?.Plots() };
+            result._groups[groups[g]] = new GroupFit(added[g], pass.Groups[g], last?[g], joint, dependence) { Plots = pictures[g]?.Plots() };
         }
 
         result.Joint = joint is null ? null : new GroupFit(joint, pass.Groups[^1], null, null, dependence);
         return result;
     }
-
-    private static int[] Others(DesignPlan plan, int group) =>
-        Columns(plan, [.. Enumerable.Range(0, plan.Groups.Count).Where(other => other != group)]);
 
     private static int[] Columns(DesignPlan plan, IReadOnlyList<int> groups) =>
         [.. groups.SelectMany(group => plan.Layout.Groups[group].Indices)];

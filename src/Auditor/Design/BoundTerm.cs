@@ -24,4 +24,19 @@ public abstract class BoundTerm(Term term)
     /// What stands in rows with a missing source is not specified, but no exception is thrown for them.
     /// </summary>
     public abstract void Fill(ReadOnlySpan<int> rows, Span<double> into, int stride);
+
+    /// <summary>Whether the term knows what rounding took off its values.</summary>
+    public virtual bool HasLowParts => false;
+
+    /// <summary>
+    /// Writes what rounding took off each value of <see cref="Fill"/>, laid out alike: value plus low part is the number declared, taking the values that the term is made of
+    /// as exact. Zeros for terms that do not know.
+    /// </summary>
+    public virtual void FillLow(ReadOnlySpan<int> rows, Span<double> into, int stride)
+    {
+        for (var c = 0; c < ColumnLabels.Count; c++)
+        {
+            into.Slice(c * stride, rows.Length).Clear();
+        }
+    }
 }

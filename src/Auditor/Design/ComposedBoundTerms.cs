@@ -8,11 +8,14 @@ namespace Auditor.Design;
 /// One column made of another, value by value. A value that does not exist stays one that does not exist: the cap of log(0) is no number,
 /// although a limit could be put in its place.
 /// </summary>
-internal sealed class BoundMap(Term term, BoundTerm of, Func<double, double> map) : BoundTerm(term)
+/// <param name="low">From the value to what rounding takes off its map; null when that is not known.</param>
+internal sealed class BoundMap(Term term, BoundTerm of, Func<double, double> map, Func<double, double>? low = null) : BoundTerm(term)
 {
     public override IReadOnlyList<string> ColumnLabels { get; } = [term.Label];
 
     public override IReadOnlyList<DataColumn> Sources => of.Sources;
+
+    public override bool HasLowParts => low is not null;
 
     public override void Fill(ReadOnlySpan<int> rows, Span<double> into, int stride)
     {
@@ -22,39 +25,62 @@ internal sealed class BoundMap(Term term, BoundTerm of, Func<double, double> map
             value = double.IsFinite(value) ? map(value) : double.NaN;
         }
     }
+
+    public override void FillLow(ReadOnlySpan<int> rows, Span<double> into, int stride)
+    {
+        of.Fill(rows, into, stride);
+        foreach (ref var value in into[..rows.Length])
+        {
+            value = low is not null && double.IsFinite(value) ? low(value) : 0;
+        }
+    }
 }
 
 /// <summary>Several columns made of one, value by value; the columns of a value that does not exist do not exist.</summary>
 /// <param name="map">From the value to the value of each column.</param>
-internal sealed class BoundSpread(Term term, BoundTerm of, IReadOnlyList<string> labels, Action<double, Span<double>> map) : BoundTerm(term)
+/// <param name="low">From the value to what rounding takes off each column; null when that is not known.</param>
+internal sealed class BoundSpread(
+    Term term, BoundTerm of, IReadOnlyList<string> labels, Action<double, Span<double>> map, Action<double, Span<double>>? low = null) : BoundTerm(term)
 {
     public override IReadOnlyList<string> ColumnLabels { get; } = labels;
 
     public override IReadOnlyList<DataColumn> Sources => of.Sources;
 
-    public override void Fill(ReadOnlySpan<int> rows, Span<double> into, int stride)
+    public override bool HasLowParts => low is not null;
+
+    public override void Fill(ReadOnlySpan<int> rows, Span<double> into, int stride) => Spread(rows, into, stride, map, double.NaN);
+
+    public override void FillLow(ReadOnlySpan<int> rows, Span<double> into, int stride)
+    {
+        if (low is null)
+        {
+            base.FillLow(rows, into, stride);
+        }
+        else
+        {
+            Spread(rows, into, stride, low, 0);
+        }
+    }
+
+    private void Spread(ReadOnlySpan<int> rows, Span<double> into, int stride, Action<double, Span<double>> by, double none)
     {
         var columns = new double[ColumnLabels.Count];
         of.Fill(rows, into, stride);
         for (var i = 0; i < rows.Length; i++)
         {
-            Spread(into[i], columns);
+            if (double.IsFinite(into[i]))
+            {
+                by(into[i], columns);
+            }
+            else
+            {
+                columns.AsSpan().Fill(none);
+            }
+
             for (var c = 0; c < columns.Length; c++)
             {
                 into[(c * stride) + i] = columns[c];
             }
-        }
-    }
-
-    private void Spread(double value, Span<double> columns)
-    {
-        if (double.IsFinite(value))
-        {
-            map(value, columns);
-        }
-        else
-        {
-            columns.Fill(double.NaN);
         }
     }
 }

@@ -9,8 +9,8 @@ internal static class NumberBinding
     public static BoundTerm? Of(BindingScope scope, Term term, BoundTerm of) => term switch
     {
         TransformTerm { Transform: NumberTransform.Center } => Fixed(scope, term, of, values => KeptValues.Mean(values) is var mean ? x => x - mean : null!),
-        TransformTerm transform => new BoundMap(term, of, Map(transform.Transform, transform.Plus)),
-        PowerTerm power => new BoundMap(term, of, x => Powers.Of(x, power.Exponent)),
+        TransformTerm transform => new BoundMap(term, of, Map(transform.Transform, transform.Plus), Low(transform)),
+        PowerTerm power => new BoundMap(term, of, x => Powers.Of(x, power.Exponent), x => Powers.LowOf(x, power.Exponent)),
         CapTerm cap => new BoundMap(term, of, Between(cap.Lower ?? double.NegativeInfinity, cap.Upper ?? double.PositiveInfinity)),
         WinsoriseTerm winsorise => Fixed(scope, term, of, values => Winsorise(winsorise, values)),
         PolynomialTerm polynomial => Polynomial(polynomial, of),
@@ -30,6 +30,10 @@ internal static class NumberBinding
         NumberTransform.Exp => x => Math.Exp(x + plus),
         _ => x => Math.Abs(x + plus),
     };
+
+    /// <summary>What rounding takes off a square.</summary>
+    private static Func<double, double>? Low(TransformTerm term) =>
+        term.Transform == NumberTransform.Square ? x => Powers.LowOf(x + term.Plus, 2) : null;
 
     /// <summary>log(1 + x) without losing the digits of a small x; the platform's function computes 1 + x and loses them.</summary>
     /// <remarks>The error of the rounded sum is divided out again (Goldberg 1991, What every computer scientist should know about floating-point arithmetic, theorem 4).</remarks>
@@ -56,13 +60,16 @@ internal static class NumberBinding
     private static BoundSpread Polynomial(PolynomialTerm term, BoundTerm of)
     {
         var powers = Enumerable.Range(1, term.Degree).ToList();
-        return new BoundSpread(term, of, [.. powers.Select(power => power == 1 ? term.Of.Label : term.Of.Operand + "^" + TermWords.Number(power))], (x, into) =>
+        string[] labels = [.. powers.Select(power => power == 1 ? term.Of.Label : term.Of.Operand + "^" + TermWords.Number(power))];
+        return new BoundSpread(term, of, labels, Each(Powers.Of), Each(Powers.LowOf));
+
+        Action<double, Span<double>> Each(Func<double, double, double> power) => (x, into) =>
         {
             for (var c = 0; c < into.Length; c++)
             {
-                into[c] = Powers.Of(x, powers[c]);
+                into[c] = power(x, powers[c]);
             }
-        });
+        };
     }
 
     private static BoundSpread Spline(SplineTerm term, BoundTerm of) => new(
