@@ -20,6 +20,7 @@ public sealed class Chromium : IAsyncLifetime
     {
         if (Executable() is { } executable)
         {
+            Assertions.SetDefaultExpectTimeout(20_000);
             _driver = await Playwright.CreateAsync();
             _browser = await _driver.Chromium.LaunchAsync(new() { ExecutablePath = executable, ChromiumSandbox = false, Args = Quiet });
         }
