@@ -16,7 +16,7 @@ internal sealed class BasisText(IReadOnlyList<World> worlds, IReadOnlyList<IRead
         Append($"{run.Took.TotalMinutes:F1} minutes. README.md says what is simulated.\n\n");
         Append($"Shares are in per cent with their Monte Carlo standard errors, of the data sets in which the test has a value; a dash: it has none in most. Without other words a column ");
         Append($"is the share of rejections at {level} when the group has no effect. Wrongly supported: true partial R² exactly at the bound {bound}. Power: true partial R² {Worlds.Effect}. ");
-        Append($"Cannot reject: the null-imposed form's ceiling at that effect is above the level.\nGoals: level of the basis at most 8, wrongly supported at most 8, families at most 5 ");
+        Append($"Cannot reject: in data with that effect the null-imposed form's ceiling is above the level (untestable, so never called supported; the column \"ceiling ignored\" leaves that out).\nGoals: level of the basis at most 8, wrongly supported at most 8, families at most 5 ");
         Append($"(one group: 8). `above`: over the goal by more than two standard errors; `above?`: by less.\n");
         Summary();
         for (var w = 0; w < worlds.Count; w++)

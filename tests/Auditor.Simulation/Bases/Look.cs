@@ -21,8 +21,6 @@ internal sealed class Look(AddedGroup group, GroupSums sums)
 
     public TestResult Cluster => ClusterF.Of(group, sums.Cluster!);
 
-    public TestResult ClusterCeiling => ClusterF.Ceiling(group, sums.Cluster!);
-
     public TestResult Cr1 => Numerics.GroupTests.Cr1.Of(group, sums.Cluster!);
 
     public TestResult Cr2 => _cr2.Value!.Test;
@@ -32,13 +30,14 @@ internal sealed class Look(AddedGroup group, GroupSums sums)
 
     public TestResult Period => PeriodF.Of(group, sums.Period!);
 
-    public TestResult PeriodCeiling => PeriodF.Ceiling(group, sums.Period!);
-
     public TestResult PeriodWald => _periodWald.Value!.Test;
 
     public TestResult NeweyWest => Numerics.GroupTests.NeweyWest.Of(group, sums.Period!).Test;
 
     public TestResult Basis => Declared.Test;
+
+    /// <summary>The larger p of the forms by cluster and by period; none when one has none.</summary>
+    public TestResult LargerOfBoth => Cluster is var c && Period is var t && (c.P is null || (t.P is not null && c.P >= t.P)) ? c : t;
 
     /// <summary>No test of the verdict's kind: any column's classical t in F + group beyond ±1.96.</summary>
     public bool AnyT => group.Kept.Any(column => LastIn(column) is FTest { Statistic: > 1.96 * 1.96 });
@@ -53,8 +52,11 @@ internal sealed class Look(AddedGroup group, GroupSums sums)
         { Test: var test } => (test!, true, false),
     };
 
-    /// <summary>The verdict "supported": the basis does not reject and the effect is shown negligible by its unrestricted form; by both of a mixture.</summary>
-    public bool? Supported(double level, double bound)
+    /// <summary>The verdict "supported": the basis could reject, does not, and the effect is shown negligible by its unrestricted form; by both of a mixture.</summary>
+    public bool? Supported(double level, double bound) => CannotReject(level) == true ? false : SupportedWhateverTheCeiling(level, bound);
+
+    /// <summary>The same without asking whether the basis could reject.</summary>
+    public bool? SupportedWhateverTheCeiling(double level, double bound)
     {
         var (test, byCluster, byPeriod) = Declared;
         return test.P is not double p ? null
@@ -62,6 +64,14 @@ internal sealed class Look(AddedGroup group, GroupSums sums)
                 && (byCluster || byPeriod || Negligible(Hc3, sums.Hc3, level, bound))
                 && (!byCluster || Negligible(Cr2, _cr2.Value!.Covariance, level, bound))
                 && (!byPeriod || Negligible(PeriodWald, _periodWald.Value!.Covariance, level, bound));
+    }
+
+    /// <summary>The null-imposed form's ceiling is above the level, so that the verdict is untestable; null when the basis has no value.</summary>
+    public bool? CannotReject(double level)
+    {
+        var (test, byCluster, byPeriod) = Declared;
+        return test.P is null ? null
+            : (byCluster && ClusterF.Ceiling(group, sums.Cluster!).P > level) || (byPeriod && PeriodF.Ceiling(group, sums.Period!).P > level);
     }
 
     /// <summary>The same with the classical test as the basis.</summary>

@@ -48,7 +48,7 @@ internal sealed class Worlds(Policy policy)
         [
             Basis("cluster form", look => look.Basis), Test("CR2", look => look.Cr2), Test("CR1", look => look.Cr1), Test("HC3", look => look.Hc3),
             Test("classical F", look => look.Classical), Shortcut("any t", look => look.Group.AnyT),
-            Supported, Power("cluster form", look => look.Basis), CannotReject(look => look.ClusterCeiling),
+            Supported, SupportedWhateverTheCeiling, Power("cluster form", look => look.Basis), CannotReject,
         ]);
 
     private World SeriesInTime => new(
@@ -63,9 +63,10 @@ internal sealed class Worlds(Policy policy)
         ],
         [
             Basis("cosine form", look => look.Basis),
-            new Measure("cosine form, cleared", 0, look => Rejects(look.Group.Basis) is bool rejects ? rejects && look.HasNoUnitRoot(2, Level) : null, LevelFactor * Level, Summed: true),
+            new Measure("cosine form, cleared", 0, Cleared, LevelFactor * Level, Summed: true),
             Test("Newey–West", look => look.NeweyWest), Test("HC3", look => look.Hc3), Test("classical F", look => look.Classical),
-            Shortcut("any t", look => look.Group.AnyT), Supported, Power("cosine form", look => look.Basis), CannotReject(look => look.PeriodCeiling),
+            Shortcut("any t", look => look.Group.AnyT), Supported, SupportedWhateverTheCeiling, Power("cosine form", look => look.Basis),
+            new Measure("power, cosine form, cleared", Effect, Cleared), CannotReject,
         ]);
 
     private World Panels => new(
@@ -81,7 +82,8 @@ internal sealed class Worlds(Policy policy)
         [
             Basis("by level of variation", look => look.Basis), Test("cosine form on period sums", look => look.Period), Test("cluster form by loan", look => look.Cluster),
             Test("CR1 by loan", look => look.Cr1), Test("CR1 by period", look => look.Cr1ByPeriod), Test("Newey–West on period sums", look => look.NeweyWest),
-            Test("HC3", look => look.Hc3), Shortcut("any t", look => look.Group.AnyT), Supported, Power("by level of variation", look => look.Basis),
+            Test("larger p of cosine and loan form", look => look.LargerOfBoth), Test("HC3", look => look.Hc3), Shortcut("any t", look => look.Group.AnyT),
+            Supported, SupportedWhateverTheCeiling, Power("by level of variation", look => look.Basis), Power("larger p of both", look => look.LargerOfBoth), CannotReject,
         ]);
 
     private World Families => new(
@@ -92,12 +94,17 @@ internal sealed class Worlds(Policy policy)
         [
             .. FamilySizes.Select(size => new Measure("basis, Holm, " + Whole(size), 0, look => look.AnyAfterHolm(size, one => one.Basis, Level), size == 1 ? LevelFactor * Level : Level)),
             new("classical F, Holm, 30", 0, look => look.AnyAfterHolm(30, one => one.Classical, Level)),
+            new("score form, Holm, 30", 0, look => look.AnyAfterHolm(30, one => one.Score, Level)),
             new("HC3, Holm, 30", 0, look => look.AnyAfterHolm(30, one => one.Hc3, Level)),
             new("basis, unadjusted, 30", 0, look => look.Groups.Any(one => Rejects(one.Basis) == true)),
             new("any t, 30", 0, look => look.Groups.Any(one => one.AnyT)),
         ]);
 
     private Measure Supported => new("wrongly supported", Bound, look => look.Group.Supported(Level, Bound), SupportGoal);
+
+    private Measure SupportedWhateverTheCeiling => new("the same, ceiling ignored", Bound, look => look.Group.SupportedWhateverTheCeiling(Level, Bound));
+
+    private Measure CannotReject => new("cannot reject", Effect, look => look.Group.CannotReject(Level));
 
     private Measure SupportedOnClassical => new("wrongly supported, classical", Bound, look => look.Group.SupportedOnClassical(Level, Bound));
 
@@ -150,7 +157,7 @@ internal sealed class Worlds(Policy policy)
 
     private Measure Power(string heading, Func<Look, TestResult> test) => new("power, " + heading, Effect, look => Rejects(test(look.Group)));
 
-    private Measure CannotReject(Func<Look, TestResult> ceiling) => new("cannot reject", Effect, look => ceiling(look.Group).P is double p ? p > Level : null);
+    private bool? Cleared(DataLook look) => Rejects(look.Group.Basis) is bool rejects ? rejects && look.HasNoUnitRoot(2, Level) : null;
 
     private bool? Rejects(TestResult test) => test.P is double p ? p <= Level : null;
 }
