@@ -9,39 +9,49 @@ internal static class AuditCommand
 {
     public static int Run(AuditRequest request)
     {
-        var inputs = InputFiles.Read(request);
-        if (inputs.Value is null)
+        var progress = new RunProgress(request);
+        var done = progress.Around(() => Work(request, progress));
+        if (done.Value is not { } outcome)
         {
-            return Complaint.Unusable(inputs.Problems);
-        }
-
-        Log.Debug("Auditing {Model} on {Rows} rows", inputs.Value.Declaration.Model.Id, inputs.Value.Table.RowCount);
-        var audited = Audit.Run(inputs.Value);
-        if (audited.Value is not { } record)
-        {
-            return Complaint.Unusable(audited.Problems);
-        }
-
-        var written = OutputFiles.Write(request, record);
-        if (written.Value is null)
-        {
-            return Complaint.Unusable(written.Problems);
+            return Complaint.Unusable(done.Problems);
         }
 
         if (!request.Quiet)
         {
-            Console.Out.Write(Terminal.Safe(ConsoleSummary.Of(record)));
-            foreach (var file in written.Value)
+            Console.Out.Write(Terminal.Safe(ConsoleSummary.Of(outcome.Record)));
+            foreach (var file in outcome.Files)
             {
                 Console.Out.WriteLine("Written: " + file);
             }
         }
 
-        return Status(record, request.FailOn);
+        return Status(outcome.Record, request.FailOn);
+    }
+
+    private static Reading<Outcome> Work(AuditRequest request, RunProgress progress)
+    {
+        var inputs = InputFiles.Read(request, progress);
+        if (inputs.Value is null)
+        {
+            return Reading<Outcome>.Failed(inputs.Problems);
+        }
+
+        Log.Debug("Auditing {Model} on {Rows} rows", inputs.Value.Declaration.Model.Id, inputs.Value.Table.RowCount);
+        var audited = Audit.Run(inputs.Value with { Steps = progress });
+        if (audited.Value is not { } record)
+        {
+            return Reading<Outcome>.Failed(audited.Problems);
+        }
+
+        progress.Begin("Outputs");
+        var written = OutputFiles.Write(request, record);
+        return written.Value is { } files ? Reading<Outcome>.Of(new Outcome(record, files)) : Reading<Outcome>.Failed(written.Problems);
     }
 
     private static int Status(AuditRecord record, Severity? failOn) =>
         failOn is { } least && record.Findings.Any(finding => finding.Accepted is null && finding.Severity >= least)
             ? ExitStatus.Found
             : ExitStatus.Audited;
+
+    private sealed record Outcome(AuditRecord Record, IReadOnlyList<string> Files);
 }

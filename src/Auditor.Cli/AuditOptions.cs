@@ -20,7 +20,9 @@ internal sealed record AuditRequest(
     long? MemoryBytes,
     long Seed,
     DateTimeOffset Moment,
-    bool Quiet);
+    bool Quiet,
+    bool Verbose,
+    bool NoProgress);
 
 /// <param name="File">The acceptances file; null: none.</param>
 /// <param name="AsOf">The day on which acceptances must hold, when one was asked for.</param>
@@ -40,8 +42,8 @@ internal sealed class AuditOptions
     private readonly Option<string?> _memory = Options.Text("--memory", "SIZE", "Refuse a data file larger than this, such as 512M or 4G.");
     private readonly Option<string?> _seed = Options.Text("--seed", "N", "Seed of everything drawn at random, kept in the record (default 1).");
     private readonly Option<bool> _quiet = new("--quiet") { Description = "Nothing on standard output." };
-    private readonly Option<bool> _verbose = new("--verbose") { Description = "Steps on standard error." };
-    private readonly Option<bool> _noProgress = new("--no-progress") { Description = "No progress on the terminal (none is shown yet)." };
+    private readonly Option<bool> _verbose = new("--verbose") { Description = "Steps and their seconds on standard error." };
+    private readonly Option<bool> _noProgress = new("--no-progress") { Description = "No line on the terminal that says how far the run is." };
 
     public void AddTo(Command command)
     {
@@ -69,7 +71,9 @@ internal sealed class AuditOptions
             OptionValues.Size("--memory", parsed.GetValue(_memory), problems),
             OptionValues.Whole("--seed", parsed.GetValue(_seed), 1, 0, long.MaxValue, problems),
             Clock.Now(problems),
-            parsed.GetValue(_quiet));
+            parsed.GetValue(_quiet),
+            parsed.GetValue(_verbose),
+            parsed.GetValue(_noProgress));
         return problems.Count == before ? request : null;
     }
 }

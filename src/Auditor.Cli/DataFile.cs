@@ -7,7 +7,7 @@ namespace Auditor.Cli;
 /// <summary>The data file that a declaration names, found, hashed, its columns held against the declaration's.</summary>
 internal sealed record DataFile(IDataSource Source, string Sha256)
 {
-    public static Reading<DataFile> Find(DeclarationReading reading, AuditRequest request)
+    public static Reading<DataFile> Find(DeclarationReading reading, AuditRequest request, IProgress<ReadingProgress> progress)
     {
         var line = reading.Declaration?.Data.SourceLine;
         if (reading.Sources is not [var source])
@@ -18,7 +18,7 @@ internal sealed record DataFile(IDataSource Source, string Sha256)
         var folder = Path.GetDirectoryName(Path.GetFullPath(request.Declaration))!;
         var path = Path.GetFullPath(Path.Combine(folder, source));
         var fault = Fault(path, source, folder, request);
-        return fault is null ? Open(path, source, line, reading, request) : Failed(request, line, "data.source: " + fault);
+        return fault is null ? Open(path, source, line, reading, request, progress) : Failed(request, line, "data.source: " + fault);
     }
 
     private static string? Fault(string path, string source, string folder, AuditRequest request)
@@ -62,17 +62,17 @@ internal sealed record DataFile(IDataSource Source, string Sha256)
             : $"'{source}' is not a kind of file this program reads: .csv, .tsv, .csv.gz or .tsv.gz";
     }
 
-    private static Reading<DataFile> Open(string path, string source, int? line, DeclarationReading reading, AuditRequest request)
+    private static Reading<DataFile> Open(string path, string source, int? line, DeclarationReading reading, AuditRequest request, IProgress<ReadingProgress> progress)
     {
         try
         {
-            var hash = Hash(path);
+            var (hash, rows) = Hash(path);
             if (reading.Declaration?.Data.Sha256 is { } declared && !declared.Equals(hash, StringComparison.OrdinalIgnoreCase))
             {
                 return Failed(request, line, $"data.source: '{source}' is another file than data.sha256 says: declared {declared}, found {hash}");
             }
 
-            var data = new CsvSource(source, () => File.OpenRead(path), DelimitedFormat.FromFileName(path)!);
+            var data = Csv(path, source, new CsvReading(rows, request.Threads, Progress: progress));
             var columns = data.ReadColumnNames();
             var problems = columns.Value is { } names ? ColumnCheck.Problems(request.Declaration, reading.Mentions, names) : columns.Problems;
             return problems.Count > 0 ? Reading<DataFile>.Failed(problems) : Reading<DataFile>.Of(new DataFile(data, hash));
@@ -83,10 +83,23 @@ internal sealed record DataFile(IDataSource Source, string Sha256)
         }
     }
 
-    public static string Hash(string path)
+    public static CsvSource Csv(string path, string name, CsvReading reading) =>
+        new(name, () => new FileStream(path, FileMode.Open, FileAccess.Read, FileShare.Read, bufferSize: 0), DelimitedFormat.FromFileName(path)!, reading);
+
+    /// <summary>SHA-256 of the file as stored and, from the same look at its bytes, about how many rows it has; 0 when they are compressed.</summary>
+    public static (string Sha256, int Rows) Hash(string path)
     {
-        using var stream = File.OpenRead(path);
-        return Convert.ToHexStringLower(SHA256.HashData(stream));
+        using var stream = new FileStream(path, FileMode.Open, FileAccess.Read, FileShare.Read, bufferSize: 0);
+        using var hash = IncrementalHash.CreateHash(HashAlgorithmName.SHA256);
+        var lines = new LineCount();
+        var block = new byte[1 << 16];
+        for (var got = stream.Read(block); got > 0; got = stream.Read(block))
+        {
+            hash.AppendData(block, 0, got);
+            lines.Add(block.AsSpan(0, got));
+        }
+
+        return (Convert.ToHexStringLower(hash.GetHashAndReset()), DelimitedFormat.FromFileName(path) is { Gzip: false } ? lines.Rows : 0);
     }
 
     private static Reading<DataFile> Failed(AuditRequest request, int? line, string message) =>

@@ -9,8 +9,9 @@ namespace Auditor.Cli;
 /// <summary>Reads everything an audit depends on; all problems of all files at once, as far as one does not hide another.</summary>
 internal static class InputFiles
 {
-    public static Reading<AuditInputs> Read(AuditRequest request)
+    public static Reading<AuditInputs> Read(AuditRequest request, RunProgress progress)
     {
+        progress.Begin("Declaration, rules and the file's hash");
         var file = FileText.Read(request.Declaration);
         var rules = RuleFiles.Read(request.RulesFolder, request.PolicyFile);
         var acceptances = AcceptanceFile.Read(request.Acceptances.File, rules.Value);
@@ -20,7 +21,7 @@ internal static class InputFiles
         }
 
         var reading = DeclarationReader.Read(text.Text, request.Declaration);
-        var data = DataFile.Find(reading, request);
+        var data = DataFile.Find(reading, request, progress);
         var problems = reading.Problems
             .Concat(reading.Declaration is { } checkedOne ? NotBuiltYet.In(checkedOne) : [])
             .Concat(data.Problems)
@@ -30,12 +31,13 @@ internal static class InputFiles
             .ToList();
         return problems.Count > 0 || reading.Declaration is null
             ? Reading<AuditInputs>.Failed(problems)
-            : Read(request, reading, text, data.Value!, rules.Value!, acceptances.Value!);
+            : Read(request, reading, text, data.Value!, rules.Value!, acceptances.Value!, progress);
     }
 
     private static Reading<AuditInputs> Read(
-        AuditRequest request, DeclarationReading reading, FileText text, DataFile data, RuleFiles rules, AcceptanceFile acceptances)
+        AuditRequest request, DeclarationReading reading, FileText text, DataFile data, RuleFiles rules, AcceptanceFile acceptances, RunProgress progress)
     {
+        progress.Begin("Data read");
         var declaration = reading.Declaration!;
         var table = data.Source.Read(ColumnCheck.Requests(declaration, reading.Mentions), declaration.Data.Missing);
         if (table.Value is null)

@@ -30,8 +30,9 @@ internal static class NewCommand
     {
         try
         {
-            var source = new CsvSource(data, () => File.OpenRead(data), DelimitedFormat.FromFileName(data)!);
-            var text = FirstDeclaration.Of(source, new StartRequest(id, RelativeSource(data, target), DataFile.Hash(data), response));
+            var (hash, rows) = DataFile.Hash(data);
+            var source = DataFile.Csv(data, data, new CsvReading(rows, Environment.ProcessorCount));
+            var text = FirstDeclaration.Of(source, new StartRequest(id, RelativeSource(data, target), hash, response));
             if (text.Value is { } declaration)
             {
                 using var stream = new FileStream(target, FileMode.CreateNew);

@@ -22,6 +22,7 @@ public static class Audit
     public static Reading<AuditRecord> Run(AuditInputs inputs)
     {
         var declaration = inputs.Declaration;
+        inputs.Steps?.Report(AuditStep.Terms);
         var bound = ModelBinder.Bind(declaration, inputs.Table);
         if (bound.Value is null)
         {
@@ -29,12 +30,13 @@ public static class Audit
         }
 
         var mentioned = inputs.Mentions.Select(mention => mention.Column).ToHashSet(StringComparer.Ordinal);
-        var analysis = ModelAnalysis.Run(declaration, bound.Value.Model, mentioned, inputs.Policy, new RunSettings(inputs.Threads, inputs.Provenance.Seed, inputs.Pictures));
+        var analysis = ModelAnalysis.Run(declaration, bound.Value.Model, mentioned, inputs.Policy, new RunSettings(inputs.Threads, inputs.Provenance.Seed, inputs.Pictures, inputs.Steps));
         if (analysis.Value is not { } results)
         {
             return Reading<AuditRecord>.Failed(analysis.Problems);
         }
 
+        inputs.Steps?.Report(AuditStep.Rules);
         var facts = AuditFacts.Of(results, bound.Value, inputs.Mentions, inputs.Policy);
         var found = RuleEngine.Evaluate(inputs.Rules, inputs.Policy, facts);
         return Reading<AuditRecord>.Of(Record(inputs, results, Accepted(inputs, found, facts)));
@@ -113,4 +115,20 @@ public sealed record AuditInputs(
 
     /// <summary>Findings that a named approver has accepted.</summary>
     public AcceptancesOfRun Acceptances { get; init; } = AcceptancesOfRun.None;
+
+    /// <summary>Told when each step begins; no figure depends on it.</summary>
+    public IProgress<AuditStep>? Steps { get; init; }
+}
+
+/// <summary>The parts of an audit's work, in their order; each is reported when it begins.</summary>
+public enum AuditStep
+{
+    Terms,
+    RowSets,
+    Fits,
+    Influence,
+    Checks,
+    Pictures,
+    Groups,
+    Rules,
 }

@@ -73,6 +73,17 @@ public sealed class AuditTests
 
         Assert.Equal("", run.Output);
         Assert.Contains("debug Auditing lease-loss on 120 rows", run.Errors, StringComparison.Ordinal);
+        string[] steps = ["the file's hash", "Data read", "Terms bound", "Rows chosen", "Models fitted", "Influence", "Residual checks", "pictures", "groups", "Rules", "Outputs"];
+        Assert.Equal(steps, steps.OrderBy(step => run.Errors.IndexOf(step, StringComparison.Ordinal)));
+        Assert.All(steps, step => Assert.Matches($@"debug +[0-9]+\.[0-9]{{3}} s  .*{step}", run.Errors));
+    }
+
+    /// <summary>The figures of the example: 250,000 of 1,000,000 rows' bytes in 2 seconds leave three times as long.</summary>
+    [Fact]
+    public void Progress_says_rows_a_second_and_time_left()
+    {
+        Assert.Equal("250,000 rows read, 125,000 a second, 25 %, about 6 s left", RunProgress.Words(new(250_000, 50, 200), 2));
+        Assert.Equal("250,000 rows read, 125,000 a second", RunProgress.Words(new(250_000, 0, null), 2));
     }
 
     [Theory]

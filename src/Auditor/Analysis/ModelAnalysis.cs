@@ -13,6 +13,7 @@ internal static class ModelAnalysis
 {
     public static Reading<AuditResults> Run(ModelDeclaration declaration, BoundModel model, IReadOnlyCollection<string> mentioned, Policy policy, RunSettings run)
     {
+        run.Enter(AuditStep.RowSets);
         var selection = RowSelection.Of(model);
         var common = policy.RowSet == RowSet.Common;
         if ((common ? selection.Common : selection.Final).Count == 0)
@@ -20,16 +21,22 @@ internal static class ModelAnalysis
             return Reading<AuditResults>.Failed(NoRows(declaration, common));
         }
 
+        run.Enter(AuditStep.Fits);
         var fits = ModelFits.Compute(
             model, selection, common ? selection.Common : selection.Final, run.Pictures ? policy.RowSet : null, DeclaredClaims.NeedCovariances(declaration), run);
         var sampling = model.Weights?.Kind == WeightKind.Sampling;
         var main = (common ? fits.Common : fits.Final)!;
+        run.Enter(AuditStep.Influence);
         var fit = CheckedFits.Of(model, main, fits.Residuals, sampling);
         var influence = InfluenceSummary.Of(fit, InfluenceFigures.Shown);
+        run.Enter(AuditStep.Checks);
+        var checks = ResidualCheckFigures.Of(fit, influence, SerialBinding.Of(model, main), main.Rows, policy.Significance, run.Seed);
+        run.Enter(AuditStep.Pictures);
+        var plots = run.Pictures ? Pictures(model, fits, fit, main, common) : new PlotData(null, "no pictures were asked for");
+        run.Enter(AuditStep.Groups);
         var other = selection.Final.Equals(selection.Common) ? null : common ? fits.Final : fits.Common;
         var shown = new ClaimedRows(main, FitFigures.Of(main, policy.Significance, sampling), sampling, false);
         var beside = other is null ? null : new ClaimedRows(other, FitFigures.Of(other, policy.Significance, sampling), sampling, true);
-        var checks = ResidualCheckFigures.Of(fit, influence, SerialBinding.Of(model, main), main.Rows, policy.Significance, run.Seed);
         var elimination = EliminationFigures.Of(declaration, model, fits.Common, sampling, run.Threads);
         var exclusions = Exclusions.Of(model, fits, elimination.Selective, new JudgementInputs(policy, sampling, SerialCheckFigures.ResidualMayDrift(checks)), whatIf: run.Pictures);
         return Reading<AuditResults>.Of(new AuditResults(
@@ -40,12 +47,12 @@ internal static class ModelAnalysis
             beside?.Summary,
             main.Fit.Perfect,
             exclusions.All,
-            [.. Enumerable.Range(0, model.Groups.Count).Select(group => Inputs(model, fits, group, common) with { LeftOutByRule = elimination.LeftOutByRule[group] })],
+            [.. Enumerable.Range(0, model.Groups.Count).Select(group => Inputs(model, fits, group, common) with { LeftOutByRule = elimination.LeftOutByRule[group], Groups = model.Groups.Count })],
             AllLeftOut.Of(model, fits.Common, policy, sampling),
-            [.. checks],
+            checks,
             InfluenceFigures.Of(influence, main.Rows, model.RowLabel),
             CollinearityFigures.Of(main),
-            run.Pictures ? Pictures(model, fits, fit, main, common) : new PlotData(null, "no pictures were asked for"),
+            plots,
             elimination)
         {
             WhatIf = exclusions.WhatIf,
@@ -89,4 +96,7 @@ internal static class ModelAnalysis
 /// <param name="Threads">Most row sets to work on at once.</param>
 /// <param name="Seed">Seed of everything drawn at random.</param>
 /// <param name="Pictures">Whether the points of the pictures are wanted.</param>
-internal sealed record RunSettings(int Threads, long Seed, bool Pictures);
+internal sealed record RunSettings(int Threads, long Seed, bool Pictures, IProgress<AuditStep>? Steps = null)
+{
+    public void Enter(AuditStep step) => Steps?.Report(step);
+}

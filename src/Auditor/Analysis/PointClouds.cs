@@ -41,9 +41,14 @@ internal static class PointClouds
     /// <summary>Positions of the lowest and highest points in either direction.</summary>
     private static HashSet<int> Outermost(IReadOnlyList<PlotPoint> points)
     {
-        int[] byX = [.. Enumerable.Range(0, points.Count).OrderBy(index => points[index].X)];
-        int[] byY = [.. Enumerable.Range(0, points.Count).OrderBy(index => points[index].Y)];
-        return [.. new[] { byX, byY }.SelectMany(order => order.Take(AloneOnEachSide).Concat(order.TakeLast(AloneOnEachSide)))];
+        return [.. Ends(points, point => point.X), .. Ends(points, point => point.Y)];
+    }
+
+    /// <summary>The order is asked for its two ends only: a part of a sequence in order costs no full sort.</summary>
+    private static IEnumerable<int> Ends(IReadOnlyList<PlotPoint> points, Func<PlotPoint, double> coordinate)
+    {
+        var order = Enumerable.Range(0, points.Count).OrderBy(index => coordinate(points[index]));
+        return order.Take(AloneOnEachSide).Concat(order.Skip(Math.Max(0, points.Count - AloneOnEachSide)));
     }
 
     private static PlotPoint[] Trend(IReadOnlyList<PlotPoint> points)

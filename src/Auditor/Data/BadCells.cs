@@ -19,6 +19,19 @@ internal sealed class BadCells
         }
     }
 
+    /// <summary>The bad cells of several parts of a column, in the order of the parts.</summary>
+    public static BadCells Joined(IEnumerable<BadCells> parts)
+    {
+        var joined = new BadCells();
+        foreach (var part in parts)
+        {
+            joined._first.AddRange(part._first.Take(InFull - joined._first.Count));
+            joined._count += part._count;
+        }
+
+        return joined;
+    }
+
     /// <param name="kind">What the cells should have read as.</param>
     public IEnumerable<Problem> Problems(string file, string column, ColumnKind kind)
     {

@@ -1,5 +1,6 @@
 using System.Globalization;
 using System.IO.Compression;
+using System.Runtime.ExceptionServices;
 using System.Text;
 using nietras.SeparatedValues;
 
@@ -10,11 +11,11 @@ internal sealed class CsvFile(string name, Func<Stream> open, DelimitedFormat fo
 {
     public string Name { get; } = name;
 
-    /// <summary>Size of the text, when it can be known before reading it.</summary>
-    public long? Length()
+    /// <summary>Opens the bytes as stored, and through them the text's bytes; both are closed together.</summary>
+    public (Stream Stored, Stream Text) Open()
     {
-        using var stream = open();
-        return stream.CanSeek && !format.Gzip ? stream.Length : null;
+        var stored = open();
+        return (stored, format.Gzip ? new GZipStream(stored, CompressionMode.Decompress) : stored);
     }
 
     /// <summary>Runs a pass over the open file; what it throws for unusable input comes back as a problem.</summary>
@@ -22,37 +23,46 @@ internal sealed class CsvFile(string name, Func<Stream> open, DelimitedFormat fo
     {
         try
         {
-            using var reader = Reader();
+            // Strict decoding, as in Utf8Text; a byte order mark of UTF-8 is skipped.
+            using var reader = Reader(new StreamReader(Open().Text, new UTF8Encoding(true, true), detectEncodingFromByteOrderMarks: false, bufferSize: 1 << 14));
             return pass(reader);
         }
-        catch (DecoderFallbackException)
+        catch (Exception fault)
         {
-            return [NotUtf8()];
-        }
-        catch (InvalidDataException) when (format.Gzip)
-        {
-            return [new Problem(Name, null, "found bytes that do not unpack, expected a complete gzip file")];
-        }
-        catch (NotSupportedException fault) when (fault.Message.Contains("maximum supported length", StringComparison.Ordinal))
-        {
-            return [new Problem(Name, null, "found a row of more than 16 million characters, expected a quotation mark that is opened to be closed")];
+            return [Problem(fault)];
         }
     }
 
-    private SepReader Reader()
+    /// <summary>A reader of the fields of text.</summary>
+    public SepReader Reader(TextReader text) => Sep.New(format.Separator)
+        .Reader(options => options with { HasHeader = false, DisableColCountCheck = true, CultureInfo = CultureInfo.InvariantCulture })
+        .From(text);
+
+    /// <summary>What was thrown as a problem of the input; thrown again when it is none.</summary>
+    public Problem Problem(Exception fault)
     {
-        // Strict decoding: bad bytes must not become replacement characters. A byte order mark of UTF-8 is skipped, one of UTF-16 is not UTF-8.
-        var text = new StreamReader(Content(), new UTF8Encoding(true, true), detectEncodingFromByteOrderMarks: false, bufferSize: 1 << 16);
-        return Sep.New(format.Separator)
-            .Reader(options => options with { HasHeader = false, DisableColCountCheck = true, CultureInfo = CultureInfo.InvariantCulture })
-            .From(text);
-    }
+        if (fault is DecoderFallbackException)
+        {
+            return NotUtf8();
+        }
 
-    private Stream Content() => format.Gzip ? new GZipStream(open(), CompressionMode.Decompress) : open();
+        if (fault is InvalidDataException && format.Gzip)
+        {
+            return new Problem(Name, null, "found bytes that do not unpack, expected a complete gzip file");
+        }
+
+        if (fault is NotSupportedException && fault.Message.Contains("maximum supported length", StringComparison.Ordinal))
+        {
+            return new Problem(Name, null, "found a row of more than 16 million characters, expected a quotation mark that is opened to be closed");
+        }
+
+        ExceptionDispatchInfo.Throw(fault);
+        throw fault;
+    }
 
     private Problem NotUtf8()
     {
-        using var stream = Content();
+        using var stream = Open().Text;
         return Utf8Check.Problem(Name, stream);
     }
 }

@@ -4,14 +4,15 @@ using nietras.SeparatedValues;
 namespace Auditor.Data;
 
 /// <summary>
-/// One pass over the data rows: hands the fields at the wanted positions to the builders, and keeps account of rows that do not have
+/// Consecutive data rows: hands the fields at the wanted positions to the parts of columns, and keeps account of rows that do not have
 /// the header's number of fields. Blank lines at the end are no rows; in a file of one column a blank line before another row is an empty cell.
 /// </summary>
-internal sealed class CsvRows(string file, int fields, int[] positions, IReadOnlyList<ColumnBuilder> builders)
+/// <param name="before">Data rows before these.</param>
+/// <param name="linesBefore">Lines before what is read here.</param>
+internal sealed class CsvRows(int fields, int[] positions, ColumnPart[] parts, int before = 0, int linesBefore = 0)
 {
-    private readonly List<Problem> _problems = [];
     private readonly Queue<int> _blankLines = new();
-    private int _unusable;
+    private bool _started;
 
     /// <summary>Data rows seen.</summary>
     public int Count { get; private set; }
@@ -19,26 +20,33 @@ internal sealed class CsvRows(string file, int fields, int[] positions, IReadOnl
     /// <summary>Characters in them, line ends counted as one.</summary>
     public long Characters { get; private set; }
 
+    public UnusableRows Unusable { get; } = new();
+
+    private int Row => before + Count - 1;
+
     public static string LooseMark(ReadOnlySpan<char> field) =>
         $"found a quotation mark in the field {CellText.Shown(field)}, expected the whole field between two marks and marks inside doubled";
 
+    /// <param name="header">Whether the header comes first.</param>
     /// <param name="most">Stop after so many rows.</param>
-    public IReadOnlyList<Problem> Read(SepReader reader, int most)
+    public void Read(SepReader reader, bool header, int most = int.MaxValue)
     {
-        reader.MoveNext();
+        _started = header && reader.MoveNext();
+
         while (Count < most && reader.MoveNext())
         {
             Take(reader.Current);
         }
-
-        return _unusable <= BadCells.InFull ? _problems : [.. _problems, More()];
     }
 
     private void Take(SepReader.Row row)
     {
+        // The reader of fields says 2 for the row it starts with, header or not.
+        var line = linesBefore + (_started ? row.LineNumberFrom : 1);
+        _started = true;
         if (row.Span.IsEmpty)
         {
-            _blankLines.Enqueue(row.LineNumberFrom);
+            _blankLines.Enqueue(line);
             return;
         }
 
@@ -48,39 +56,39 @@ internal sealed class CsvRows(string file, int fields, int[] positions, IReadOnl
         var marks = row.Span.Contains('"');
         if (!marks && row.ColCount == fields)
         {
-            TakeFields(row);
+            TakeFields(row, line);
         }
         else if (Fault(row) is { } fault)
         {
-            Refuse(row.LineNumberFrom, fault);
+            Unusable.Note(line, Row + 1, fault);
         }
         else
         {
-            TakeQuotedFields(row);
+            TakeQuotedFields(row, line);
         }
     }
 
-    private void TakeFields(SepReader.Row row)
+    private void TakeFields(SepReader.Row row, int line)
     {
         for (var c = 0; c < positions.Length; c++)
         {
-            Add(builders[c], row[positions[c]].Span, row.LineNumberFrom);
+            Set(parts[c], row[positions[c]].Span, line);
         }
     }
 
-    private void TakeQuotedFields(SepReader.Row row)
+    private void TakeQuotedFields(SepReader.Row row, int line)
     {
         for (var c = 0; c < positions.Length; c++)
         {
-            Add(builders[c], QuotedField.Content(row[positions[c]].Span), row.LineNumberFrom);
+            Set(parts[c], QuotedField.Content(row[positions[c]].Span), line);
         }
     }
 
-    private void Add(ColumnBuilder builder, ReadOnlySpan<char> cell, int line)
+    private void Set(ColumnPart part, ReadOnlySpan<char> cell, int line)
     {
-        if (!builder.Add(cell))
+        if (!part.Set(Row, cell))
         {
-            builder.Bad.Note(line, Count, cell);
+            part.Bad.Note(line, Row + 1, cell);
         }
     }
 
@@ -91,13 +99,13 @@ internal sealed class CsvRows(string file, int fields, int[] positions, IReadOnl
             Count++;
             if (fields > 1)
             {
-                Refuse(line, Ragged(1));
+                Unusable.Note(line, Row + 1, Ragged(1));
                 continue;
             }
 
-            foreach (var builder in builders)
+            foreach (var part in parts)
             {
-                Add(builder, [], line);
+                Set(part, [], line);
             }
         }
     }
@@ -117,15 +125,4 @@ internal sealed class CsvRows(string file, int fields, int[] positions, IReadOnl
 
     private string Ragged(int found) => string.Create(
         CultureInfo.InvariantCulture, $"found {found} {(found == 1 ? "field" : "fields")}, expected {fields} as in the header");
-
-    private void Refuse(int line, string fault)
-    {
-        if (_unusable++ < BadCells.InFull)
-        {
-            _problems.Add(new Problem(file, line, string.Create(CultureInfo.InvariantCulture, $"row {Count}: {fault}")));
-        }
-    }
-
-    private Problem More() => new(
-        file, null, string.Create(CultureInfo.InvariantCulture, $"{_unusable - BadCells.InFull} more rows that cannot be divided into fields"));
 }

@@ -7,11 +7,12 @@ namespace Auditor.Data;
 /// </summary>
 /// <param name="name">The file as the person named it, for messages.</param>
 /// <param name="open">Opens the bytes as stored; called once for each pass.</param>
-public sealed class CsvSource(string name, Func<Stream> open, DelimitedFormat format) : IDataSource
+public sealed class CsvSource(string name, Func<Stream> open, DelimitedFormat format, CsvReading? reading = null) : IDataSource
 {
-    private const int SampleRows = 1000;
+    private const int SampleBytes = 1 << 18;
 
     private readonly CsvFile _file = new(name, open, format);
+    private readonly CsvReading _reading = reading ?? new CsvReading();
 
     public Reading<IReadOnlyList<string>> ReadColumnNames() => CsvHeader.Read(_file);
 
@@ -29,30 +30,26 @@ public sealed class CsvSource(string name, Func<Stream> open, DelimitedFormat fo
 
     private Reading<DataTable> Read(IReadOnlyList<string> names, IReadOnlyList<ColumnRequest> requests, MissingTexts missing)
     {
-        var sample = Sample(names, requests, missing);
-        var pass = Pass(names, [.. requests.Zip(sample.Kinds, (request, kind) => (request.Column, kind))], missing, sample.ExpectedRows);
-        if (pass.Rows.Count == 0 && pass.Problems.Count == 0)
+        var kinds = Guesses(names, requests, missing);
+        var pass = Pass(names, [.. requests.Zip(kinds, (request, kind) => (request.Column, kind))], missing, _reading);
+        if (pass.Rows == 0 && pass.Problems.Count == 0)
         {
             return Reading<DataTable>.Failed(new Problem(name, null, "found column names and no data rows, expected at least one row"));
         }
 
         var builders = Corrected(names, requests, missing, pass);
-        IReadOnlyList<Problem> problems = [.. pass.Problems, .. builders.SelectMany(builder => builder.Bad.Problems(name, builder.Name, builder.Kind))];
+        IReadOnlyList<Problem> problems = [.. pass.Problems, .. builders.SelectMany(builder => builder.Problems(name))];
         return problems.Count == 0
-            ? Reading<DataTable>.Of(new DataTable(pass.Rows.Count, names, [.. builders.Select(builder => builder.Build())]))
+            ? Reading<DataTable>.Of(new DataTable(pass.Rows, names, [.. builders.Select(builder => builder.Build())]))
             : Reading<DataTable>.Failed(problems);
     }
 
-    /// <summary>Reads the first rows as text for a guess of each column's kind and of the number of rows. Its problems come again in the full pass.</summary>
-    private (ColumnKind[] Kinds, int ExpectedRows) Sample(IReadOnlyList<string> names, IReadOnlyList<ColumnRequest> requests, MissingTexts missing)
+    /// <summary>The kinds that the first rows have. Problems among them come again in the full pass.</summary>
+    private IEnumerable<ColumnKind> Guesses(IReadOnlyList<string> names, IReadOnlyList<ColumnRequest> requests, MissingTexts missing)
     {
-        var pass = Pass(names, [.. requests.Select(request => (request.Column, ColumnKind.Levels))], missing, SampleRows, SampleRows);
-        var kinds = requests.Zip(pass.Builders, (request, builder) => request.Kind ?? builder.Counts.Kind);
-        return ([.. kinds], pass.Rows.Count < SampleRows ? pass.Rows.Count : RowEstimate(pass.Rows));
+        var sample = Pass(names, [.. requests.Select(request => (request.Column, ColumnKind.Levels))], missing, new CsvReading(ChunkBytes: SampleBytes), most: 1);
+        return requests.Zip(sample.Builders, (request, builder) => request.Kind ?? builder.Counts.Kind);
     }
-
-    private int RowEstimate(CsvRows sample) =>
-        _file.Length() is long length ? (int)Math.Min(length * 1.02 * sample.Count / sample.Characters, Array.MaxLength) : 1 << 16;
 
     /// <summary>The builders, those of undeclared columns whose cells turned out to be of another kind than guessed replaced by right ones.</summary>
     private List<ColumnBuilder> Corrected(IReadOnlyList<string> names, IReadOnlyList<ColumnRequest> requests, MissingTexts missing, FullPass pass)
@@ -65,17 +62,18 @@ public sealed class CsvSource(string name, Func<Stream> open, DelimitedFormat fo
             return pass.Builders;
         }
 
-        var again = Pass(names, wrong, missing, pass.Rows.Count).Builders.ToDictionary(builder => builder.Name, StringComparer.Ordinal);
+        var again = Pass(names, wrong, missing, _reading with { Rows = pass.Rows }).Builders.ToDictionary(builder => builder.Name, StringComparer.Ordinal);
         return [.. pass.Builders.Select(builder => again.GetValueOrDefault(builder.Name, builder))];
     }
 
     private FullPass Pass(
-        IReadOnlyList<string> names, List<(string Column, ColumnKind Kind)> columns, MissingTexts missing, int expectedRows, int most = int.MaxValue)
+        IReadOnlyList<string> names, List<(string Column, ColumnKind Kind)> columns, MissingTexts missing, CsvReading how, int most = int.MaxValue)
     {
-        List<ColumnBuilder> builders = [.. columns.Select(column => ColumnBuilder.Of(column.Kind, column.Column, missing, expectedRows))];
-        var rows = new CsvRows(name, names.Count, [.. columns.Select(column => CsvHeader.Places(names, column.Column)[0] - 1)], builders);
-        return new FullPass(builders, rows, _file.Pass(reader => rows.Read(reader, most)));
+        List<ColumnBuilder> builders = [.. columns.Select(column => ColumnBuilder.Of(column.Kind, column.Column, missing))];
+        var pass = new CsvPass(_file, names.Count, [.. columns.Select(column => CsvHeader.Places(names, column.Column)[0] - 1)], builders, how);
+        var problems = pass.Run(most);
+        return new FullPass(builders, pass.Rows, problems);
     }
 
-    private sealed record FullPass(List<ColumnBuilder> Builders, CsvRows Rows, IReadOnlyList<Problem> Problems);
+    private sealed record FullPass(List<ColumnBuilder> Builders, int Rows, IReadOnlyList<Problem> Problems);
 }

@@ -40,7 +40,7 @@ public sealed class DataFrameSource(string name, DataFrame frame) : IDataSource
 
         var kind = request.Kind ?? Fill(column, request.Column, ColumnKind.Levels, missing).Counts.Kind;
         var builder = Fill(column, request.Column, kind, missing);
-        problems.AddRange(builder.Bad.Problems(name, request.Column, kind));
+        problems.AddRange(builder.Problems(name));
         return builder.Build();
     }
 
@@ -64,19 +64,22 @@ public sealed class DataFrameSource(string name, DataFrame frame) : IDataSource
 
     private static ColumnBuilder Fill(DataFrameColumn column, string columnName, ColumnKind kind, MissingTexts missing)
     {
-        var builder = ColumnBuilder.Of(kind, columnName, missing, checked((int)column.Length));
+        var builder = ColumnBuilder.Of(kind, columnName, missing);
+        builder.Resize(checked((int)column.Length));
+        var part = builder.NextPart();
         var row = 0;
         foreach (var cell in (IEnumerable)column)
         {
-            row++;
             if (Text(cell) is not { } text)
             {
-                builder.AddMissing();
+                part.SetMissing(row);
             }
-            else if (!builder.Add(text))
+            else if (!part.Set(row, text))
             {
-                builder.Bad.Note(null, row, text);
+                part.Bad.Note(null, row + 1, text);
             }
+
+            row++;
         }
 
         return builder;

@@ -18,6 +18,8 @@ internal readonly record struct KindCounts(int Numbers, int Dates, int Others)
         }
     }
 
+    public KindCounts With(KindCounts others) => new(Numbers + others.Numbers, Dates + others.Dates, Others + others.Others);
+
     /// <summary>The counts with a text that stands in several cells.</summary>
     public KindCounts With(string text, int cells)
     {

@@ -6,7 +6,7 @@ namespace Auditor.Facts;
 /// <summary>The facts of one left-out group.</summary>
 public static class ExclusionFacts
 {
-    private static readonly FactFamily<ExclusionView> Family = Effect(Tests(new FactFamily<ExclusionView>(About.Exclusion)))
+    private static readonly FactFamily<ExclusionView> Family = DependenceFacts.Added(Effect(Tests(new FactFamily<ExclusionView>(About.Exclusion))))
         .Count("other_rows", FactUnits.Rows, "Rows of the same test on the other row set.", view => view.Of.OtherRowSet?.Rows, SameRows)
         .Number("other_p", FactUnits.P, "p of the same test on the other row set.", view => view.Of.OtherRowSet?.P, SameRows)
         .Word("other_verdict", "Verdict on the other row set.", FactWords.Verdicts, view => view.Of.OtherRowSet?.Verdict, SameRows)

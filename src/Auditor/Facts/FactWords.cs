@@ -11,6 +11,8 @@ internal static class FactWords
 
     public static readonly IReadOnlyList<string> Bases = ["classical", "hc3", "cluster", "time"];
 
+    public static readonly IReadOnlyList<string> Levels = ["row", "period", "cluster", "unit", "several"];
+
     public static readonly IReadOnlyList<string> Kinds = ["number", "levels", "date", "text"];
 
     public static readonly IReadOnlyList<string> ClaimParts = ["final_model", "coefficient", "left_out", "step"];

@@ -44,13 +44,9 @@ public sealed record Exclusion(
     /// <summary>How many equal clusters the declared ones are worth for this group; null without clusters.</summary>
     public double? EffectiveClusters { get; init; }
 
-    /// <summary>The score form the verdict rests on cannot reach the policy's significance, however large the effect.</summary>
+    /// <summary>What the score form the verdict rests on can reach; null when it rests on another kind. The record shows it beside the tests.</summary>
     [JsonIgnore]
-    public bool CannotReject { get; init; }
-
-    /// <summary>p of the unrestricted form beside the score form the verdict rests on; null when it rests on another kind.</summary>
-    [JsonIgnore]
-    public double? UnrestrictedP { get; init; }
+    public ScoreCeiling? Ceiling { get; init; }
 
     /// <summary>The author's reason as declared; null when none was given.</summary>
     public string? Because { get; init; }
@@ -100,6 +96,11 @@ public sealed record PowerFigures(
 
 /// <summary>The same test on the other row set.</summary>
 public sealed record OtherRowSetFigures(int Rows, double? F, double? Df1, double? Df2, double? P, string Verdict);
+
+/// <param name="P">The least p that the form can reach, however large the effect.</param>
+/// <param name="CannotReject">It is above the policy's significance.</param>
+/// <param name="UnrestrictedP">p of the same kind of test with the group in the model; null when it has none.</param>
+public sealed record ScoreCeiling(double P, bool CannotReject, double? UnrestrictedP);
 
 /// <summary>A column that adds nothing, and the combination of earlier columns it equals.</summary>
 public sealed record AliasedColumn(string Column, [property: JsonPropertyName("equals")] string Combination);

@@ -7,4 +7,7 @@ public sealed record ExclusionInputs(IReadOnlyList<string> ProductsElsewhere, IR
 {
     /// <summary>A stated rule of elimination that looks at the data (by p, AIC or BIC) drops the group, as far as it can be replayed.</summary>
     public bool LeftOutByRule { get; init; }
+
+    /// <summary>How many groups are left out.</summary>
+    public int Groups { get; init; } = 1;
 }

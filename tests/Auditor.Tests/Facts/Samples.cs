@@ -7,7 +7,7 @@ namespace Auditor.Tests.Facts;
 /// <summary>Results for the tests of facts: invented figures, no computation.</summary>
 internal static class Samples
 {
-    public static readonly GroupTests NoTests = new(null, null, null, null, null, null, null, null, null, null, null, null, null, null, null);
+    public static readonly GroupTests NoTests = new(null, null, null, null, null, null, null, null, null, null, null, null, null, null, null, null);
 
     public static readonly Influence Influence = new([17], [new InfluentialRow(3, "QL-10003", 0.4, 2.1, 1.2, 1.8)]);
 

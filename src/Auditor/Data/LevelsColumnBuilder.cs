@@ -1,0 +1,115 @@
+namespace Auditor.Data;
+
+/// <summary>
+/// Codes numbered as the texts first appear; the texts are kept as they stand, white space included. Each part has a numbering of its own, in the
+/// order of its rows; the column's follows from those of the parts in turn, so it does not depend on which was filled first.
+/// </summary>
+internal sealed class LevelsColumnBuilder(string name, MissingTexts missing) : ColumnBuilder(name)
+{
+    private int[] _codes = [];
+
+    public override ColumnKind Kind => ColumnKind.Levels;
+
+    public override void Resize(int rows) => Arrays.Resize(ref _codes, rows);
+
+    public override DataColumn Build()
+    {
+        var texts = new List<string>();
+        var byText = new Dictionary<string, int>(StringComparer.Ordinal);
+        foreach (var part in Parts.Cast<Part>())
+        {
+            part.Renumber(_codes, [.. part.Texts.Select(text => CodeOf(text, texts, byText))]);
+        }
+
+        return new LevelsColumn(Name, _codes, texts);
+    }
+
+    protected override ColumnPart NewPart() => new Part(_codes, missing);
+
+    private static int CodeOf(string text, List<string> texts, Dictionary<string, int> byText)
+    {
+        if (!byText.TryGetValue(text, out var code))
+        {
+            code = texts.Count;
+            texts.Add(text);
+            byText.Add(text, code);
+        }
+
+        return code;
+    }
+
+    private sealed class Part : ColumnPart
+    {
+        private readonly int[] _codes;
+
+        /// <summary>Texts that mean "no value" stand here with -1.</summary>
+        private readonly Dictionary<string, int> _byText = new(StringComparer.Ordinal);
+        private readonly Dictionary<string, int>.AlternateLookup<ReadOnlySpan<char>> _lookup;
+        private readonly List<int> _cellsOfText = [];
+        private int _first = int.MaxValue;
+        private int _last = -1;
+
+        public Part(int[] codes, MissingTexts missing)
+            : base(missing)
+        {
+            _codes = codes;
+            _lookup = _byText.GetAlternateLookup<ReadOnlySpan<char>>();
+        }
+
+        public List<string> Texts { get; } = [];
+
+        /// <summary>Each distinct text is looked at once and counted as often as it stands.</summary>
+        public override KindCounts Counts => Texts.Zip(_cellsOfText).Aggregate(
+            default(KindCounts), (counts, text) => counts.With(text.First, text.Second));
+
+        public override bool Set(int row, ReadOnlySpan<char> cell)
+        {
+            var code = _lookup.TryGetValue(cell, out var known) ? known : NewCode(cell);
+            if (code >= 0)
+            {
+                _cellsOfText[code]++;
+            }
+
+            Put(row, code);
+            return true;
+        }
+
+        public override void SetMissing(int row) => Put(row, -1);
+
+        /// <summary>Puts the column's codes in the place of the part's.</summary>
+        public void Renumber(int[] codes, int[] codeOf)
+        {
+            if (codeOf.Index().All(pair => pair.Index == pair.Item))
+            {
+                return;
+            }
+
+            for (var row = _first; row <= _last; row++)
+            {
+                codes[row] = codes[row] < 0 ? -1 : codeOf[codes[row]];
+            }
+        }
+
+        private int NewCode(ReadOnlySpan<char> cell)
+        {
+            var isMissing = MissingTexts.Contains(cell);
+            var text = cell.ToString();
+            _byText.Add(text, isMissing ? -1 : Texts.Count);
+            if (isMissing)
+            {
+                return -1;
+            }
+
+            Texts.Add(text);
+            _cellsOfText.Add(0);
+            return Texts.Count - 1;
+        }
+
+        private void Put(int row, int code)
+        {
+            _first = Math.Min(_first, row);
+            _last = Math.Max(_last, row);
+            _codes[row] = code;
+        }
+    }
+}

@@ -1,0 +1,41 @@
+using Auditor.Results;
+
+namespace Auditor.Facts;
+
+/// <summary>The facts of a group that come from the declared dependence between rows: its level, its clusters, what the score form can reach, who disagrees.</summary>
+internal static class DependenceFacts
+{
+    private const string NoDependence = "no cluster, unit or time order declared";
+    private const string NoScoreForm = "the verdict does not rest on a form over clusters or periods";
+
+    public static FactFamily<ExclusionView> Added(FactFamily<ExclusionView> family) => family
+        .Word("level", "The level on which the group's columns vary.", FactWords.Levels, view => view.Of.Level, _ => NoDependence)
+        .Flag("varies_on_another_level", "All columns of the group are constant within period, cluster or unit, or vary on several levels.", view => view.Of.Level is { } level ? level != "row" : null, _ => NoDependence)
+        .Number("effective_clusters", "clusters", "Equal clusters that the declared ones are worth for this group.", view => view.Of.EffectiveClusters, view => view.NotTested("cluster"))
+        .Flag("has_effective_clusters", "effective_clusters could be computed.", view => view.Of.EffectiveClusters is not null)
+        .Flag("on_score_form", "The verdict rests on a form over clusters or periods with the null imposed.", view => view.Of.Ceiling is not null)
+        .Number("ceiling_p", FactUnits.P, "The least p that the test can reach, however large the group's effect.", view => view.Of.Ceiling?.P, _ => NoScoreForm)
+        .Flag("cannot_reject", "ceiling_p is above the policy's significance.", view => view.Of.Ceiling is { } ceiling ? ceiling.CannotReject : null, _ => NoScoreForm)
+        .Flag("cannot_reject_adjusted", "ceiling_p times the number of groups is above the policy's significance: in the first step of Holm's adjustment the test could not reject.",
+            view => view.Of.Ceiling is { } ceiling ? ceiling.P * view.Inputs.Groups > view.Policy.Significance : null, _ => NoScoreForm)
+        .Number("unrestricted_p", FactUnits.P, "p of the same kind of test with the group in the model.", view => view.Of.Ceiling?.UnrestrictedP, NoUnrestricted)
+        .Flag("unrestricted_rejects", "unrestricted_p is at most the policy's significance.", view => view.Rejects(view.Of.Ceiling?.UnrestrictedP), NoUnrestricted)
+        .Flag("other_forms_disagree", "Some robust form, unadjusted, falls on the other side of the policy's significance than the basis test.", view => view.Of.P is null ? null : Disagreeing(view).Any(), view => view.Why("p"))
+        .Text("disagreeing_forms", "Those forms.", view => view.Of.P is null ? null : string.Join(", ", Disagreeing(view)), view => view.Why("p"));
+
+    private static string NoUnrestricted(ExclusionView view) => view.Of.Ceiling is null ? NoScoreForm : view.Why("p");
+
+    /// <summary>Only forms of the kind that the declaration asks for: without one, HC3 and the score form by rows.</summary>
+    private static IEnumerable<string> Disagreeing(ExclusionView view)
+    {
+        var tests = view.Of.Tests;
+        (string Name, double? P)[] forms = view.Of.Level is null
+            ? [("hc3", tests.Hc3?.P), ("score", tests.Score?.P)]
+            :
+            [
+                ("cluster", tests.Cluster?.P), ("cr1", tests.Cr1?.P), ("cr2", tests.Cr2?.P), ("wild_bootstrap", tests.WildBootstrap?.P),
+                ("time", tests.Time?.P), ("time_unrestricted", tests.TimeUnrestricted?.P), ("newey_west", tests.NeweyWest?.P),
+            ];
+        return forms.Where(form => form.P is not null && form.Name != view.Of.Basis && view.Rejects(form.P) != view.Rejects(view.Of.P)).Select(form => form.Name);
+    }
+}
