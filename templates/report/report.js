@@ -10,7 +10,13 @@
   };
   const say = make('p', { className: 'said', role: 'status' });
   document.body.append(say);
-  const tell = (text) => { say.textContent = ''; setTimeout(() => { say.textContent = text; }, 30); };
+  let quiet;
+  const tell = (text) => {
+    clearTimeout(quiet);
+    say.textContent = '';
+    setTimeout(() => { say.textContent = text; }, 30);
+    quiet = setTimeout(() => { say.textContent = ''; }, 8000);
+  };
   const plain = (node) => node.innerText.replace(/\s+/g, ' ').trim();
 
   // Copying works from a file too, where the newer way may be refused.
@@ -33,10 +39,18 @@
   };
 
   // Tables.
+  // What a cell says in full: the value behind a rounded one, note letters off, a number without the spaces between its thousands.
+  const words = (cell) => {
+    const copy = cell.cloneNode(true);
+    all('sup', copy).forEach((note) => note.remove());
+    const text = (copy.querySelector('span[title]')?.title ?? copy.textContent).replace(/\s+/g, ' ').trim();
+    return /^[−-]?\d{1,3}( \d{3})*\d*(\.\d+)?(e[-+−]?\d+)?$/.test(text) ? text.replace(/ /g, '').replace(/−/g, '-') : text;
+  };
+  // A range sorts by its lower end.
   const value = (cell) => {
-    const full = cell.querySelector('[title]')?.title ?? plain(cell);
-    const text = full.replace(/[\u202f\u00a0 ]/g, '').replace('−', '-');
-    return text !== '' && Number.isFinite(Number(text)) ? Number(text) : plain(cell).toLowerCase();
+    const text = words(cell);
+    const number = Number(text.split(' to ')[0]);
+    return text !== '' && Number.isFinite(number) ? number : text.toLowerCase();
   };
   const order = (a, b) => typeof a === typeof b ? (a < b ? -1 : a > b ? 1 : 0) : typeof a === 'number' ? -1 : 1;
   const sortable = (table) => all('thead th', table).forEach((heading, column) => {
@@ -45,8 +59,8 @@
       const down = heading.getAttribute('aria-sort') === 'ascending';
       all('thead th', table).forEach((other) => other.removeAttribute('aria-sort'));
       heading.setAttribute('aria-sort', down ? 'descending' : 'ascending');
-      const rows = all('tbody tr', table).map((row, at) => ({ row, at, key: value(row.cells[column]) }));
-      rows.sort((a, b) => (down ? order(b.key, a.key) : order(a.key, b.key)) || a.at - b.at);
+      const rows = all('tbody tr', table).map((row, at) => ({ row, at, key: value(row.cells[column]), none: row.cells[column].querySelector('.none') !== null }));
+      rows.sort((a, b) => a.none - b.none || (down ? order(b.key, a.key) : order(a.key, b.key)) || a.at - b.at);
       table.tBodies[0].append(...rows.map((entry) => entry.row));
     };
     heading.replaceChildren(by);
@@ -64,45 +78,55 @@
     tools.append(field);
   };
   const tabbed = (table) => all('tr', table).filter((row) => !row.hidden)
-    .map((row) => [...row.cells].map((cell) => cell.querySelector('span[title]')?.title ?? plain(cell)).join('\t')).join('\n') + '\n';
+    .map((row) => [...row.cells].map(words).join('\t')).join('\n') + '\n';
   all('.scroll table').forEach((table) => {
     const tools = make('div', { className: 'tools' });
     const name = plain(table.caption);
     if (!table.closest('.sum') && table.tBodies[0].rows.length > 1) sortable(table);
     if (table.tBodies[0].rows.length > 8) filterable(table, tools);
-    tools.append(button('Copy table', () => copy(tabbed(table), 'Table'), 'Copy the table “' + name + '” as tab-separated text'));
+    tools.append(button('Copy table', () => copy(tabbed(table), 'Table'), 'Copy table “' + name + '” as tab-separated text'));
     table.closest('.scroll').before(tools);
   });
 
-  // One exclusion or finding as a paragraph.
-  const memo = (item) => all('[data-memo]', item).map(plain).filter((text) => text !== '').map((text) => /[.?!…]$/.test(text) ? text : text + '.').join(' ');
+  // One exclusion or finding as a paragraph, without the buttons that stand in it.
+  const own = (node) => {
+    const copy = node.cloneNode(true);
+    all('.tools', copy).forEach((tools) => tools.remove());
+    return copy.textContent.replace(/\s+/g, ' ').trim();
+  };
+  const memo = (item) => all('[data-memo]', item).map(own).filter((text) => text !== '').map((text) => /[.?!…]$/.test(text) ? text : text + '.').join(' ');
   all('[data-memo-of]').forEach((item) => {
     const tools = make('div', { className: 'tools' });
-    tools.append(button('Copy for a memo', () => copy(memo(item), 'Paragraph'), 'Copy “' + item.dataset.memoOf + '” as a paragraph for a memo'));
+    tools.append(button('Copy for a memo', () => copy(memo(item), 'Paragraph'), 'Copy for a memo: “' + item.dataset.memoOf + '” as a paragraph'));
     (item.querySelector('.memo-place') ?? item).append(tools);
   });
 
   // Folding and jumping.
   const folds = all('main details');
   const bar = make('div', { className: 'tools page-tools' });
-  if (folds.length > 0) {
-    bar.append(
-      button('Unfold all', () => { folds.forEach((fold) => { fold.open = true; }); tell('All parts unfolded.'); }),
-      button('Fold all', () => { folds.forEach((fold) => { fold.open = false; }); tell('All parts folded.'); }));
-  }
-  const stops = all('.exclusion, main > section').filter((stop) => stop.id);
-  const go = (step) => {
-    const here = stops.findIndex((stop) => stop.getBoundingClientRect().top > 40);
-    const at = step > 0 ? (here < 0 ? stops.length - 1 : here) : Math.max(0, (here < 0 ? stops.length : here) - 2);
-    const target = stops[at];
+  const turn = (open, said) => { folds.forEach((fold) => { fold.open = open; }); tell(said); };
+  const unfold = () => turn(true, 'All parts unfolded.');
+  if (folds.length > 0) bar.append(button('Unfold all', unfold), button('Fold all', () => turn(false, 'All parts folded.')));
+  const to = (target) => {
     target.tabIndex = -1;
     target.focus({ preventScroll: true });
-    target.scrollIntoView();
+    target.scrollIntoView({ behavior: 'instant' });
   };
-  const keys = { n: () => go(1), p: () => go(-1), u: () => bar.querySelector('button')?.click(), f: () => { location.hash = '#findings'; }, t: () => { location.hash = '#summary'; } };
+  // The part that was jumped to last, while its head is in sight; else the one at the top of the window.
+  const here = (stops) => {
+    const focused = stops.indexOf(document.activeElement);
+    const top = (stop) => stop.getBoundingClientRect().top;
+    return focused >= 0 && top(stops[focused]) > -5 && top(stops[focused]) < innerHeight ? focused : Math.max(0, stops.findLastIndex((stop) => top(stop) <= 60));
+  };
+  const go = (step) => {
+    const stops = all('main > header, main > section, section.exclusion').filter((stop) => stop.id && !stop.hidden);
+    to(stops[Math.min(stops.length - 1, Math.max(0, here(stops) + step))]);
+  };
+  const jump = (id) => to(document.getElementById(id));
+  const keys = { n: () => go(1), p: () => go(-1), u: unfold, f: () => jump('findings'), t: () => jump('summary') };
   let listening = true;
   document.addEventListener('keydown', (event) => {
-    if (!listening || event.ctrlKey || event.metaKey || event.altKey || /^(INPUT|SELECT|TEXTAREA)$/.test(event.target.tagName)) return;
+    if (!listening || event.ctrlKey || event.metaKey || event.altKey || event.target.matches('input[type="search"], select, textarea')) return;
     keys[event.key]?.();
   });
   const toggle = make('input', { type: 'checkbox', checked: true, onchange: () => { listening = toggle.checked; } });

@@ -111,8 +111,8 @@ public sealed class StructureBindingTests
         var segments = Bound("segments: [region, grade]").Among(new RowSubset([0, 1, 2, 3])).Segments;
 
         Assert.Equal(["region", "grade"], segments.Select(segment => segment.Name));
-        Assert.Equal([1, 0, 0, 1], segments[0].Classes.Codes);
-        Assert.Equal([0, -1, 1, 1], segments[1].Classes.Codes);
+        Assert.Equal([1, 0, 0, 1], segments[0].Codes);
+        Assert.Equal([0, -1, 1, 1], segments[1].Codes);
         Assert.Equal(["A", "B"], Labels(segments[1]));
         Assert.Equal([1, 2], segments[1].Sizes());
     }

@@ -2,7 +2,6 @@ using System.Net;
 using System.Text;
 using System.Text.RegularExpressions;
 using Auditor.Reporting;
-using Auditor.Results;
 
 namespace Auditor.Tests.Reporting;
 
@@ -61,19 +60,11 @@ public sealed partial class HtmlReportTests
     public void Text_of_the_record_never_becomes_markup()
     {
         const string attack = "\"><img src=x onerror='a'>&amp;{{ page }}";
-        AuditRecord record = SampleRecords.Full with
-        {
-            Model = SampleRecords.Full.Model with { Title = attack, Version = attack, PreparedBy = attack, Response = attack, Terms = [attack] },
-            Exclusions = [.. SampleRecords.Full.Exclusions.Select(exclusion => Attacked(exclusion, attack))],
-            Findings = [.. SampleRecords.Full.Findings.Select(finding => finding with { Subject = attack, Message = attack, Advice = attack, Rule = attack })],
-            Rows = SampleRecords.Full.Rows with { ColumnsNobodyMentions = [attack], MissingByColumn = new Dictionary<string, int> { [attack] = 1 } },
-            Policy = new Dictionary<string, object> { [attack] = attack },
-        };
 
-        string page = Pages.Render(record);
+        string page = Pages.Render(HostileRecords.Of(attack));
 
         Assert.DoesNotContain("<img", page, StringComparison.Ordinal);
-        Assert.Equal(Regex.Count(Pages.Render(SampleRecords.Full), "<script"), Regex.Count(page, "<script"));
+        Assert.Equal(Regex.Count(Pages.Render(HostileRecords.Of("plain")), "<script"), Regex.Count(page, "<script"));
         string encoded = WebUtility.HtmlEncode(attack);
         Assert.True(Regex.Count(page, Regex.Escape(encoded)) > 40);
         Assert.DoesNotContain(WebUtility.HtmlEncode(encoded), page, StringComparison.Ordinal);
@@ -134,17 +125,6 @@ public sealed partial class HtmlReportTests
         Assert.True(shipped.Length > 20);
         Assert.Equal(shipped.Order(StringComparer.Ordinal), read.Order(StringComparer.Ordinal));
     }
-
-    private static Exclusion Attacked(Exclusion exclusion, string attack) => exclusion with
-    {
-        Group = attack,
-        Terms = [attack],
-        Reason = attack,
-        BasisReason = attack,
-        Because = attack,
-        TestsNotComputed = exclusion.TestsNotComputed.ToDictionary(pair => pair.Key, _ => attack),
-        Aliased = [new(attack, attack)],
-    };
 
     [GeneratedRegex("<(td|th|dd|h[1-4])[^>]*>\\s*</\\1>")]
     private static partial Regex BlankValue();
