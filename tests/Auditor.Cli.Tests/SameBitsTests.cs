@@ -1,5 +1,6 @@
 using System.Globalization;
 using System.Text;
+using Auditor.Numerics.Random;
 
 namespace Auditor.Cli.Tests;
 
@@ -36,12 +37,12 @@ public sealed class SameBitsTests
 
     private static string Data()
     {
-        var (random, text) = (new Random(20), new StringBuilder("y"));
+        var (random, text) = (new Generator(20), new StringBuilder("y"));
         text.AppendJoin("", Enumerable.Range(1, Numbers).Select(c => ",z" + c)).Append('\n');
         for (var row = 0; row < Rows; row++)
         {
-            double[] z = [.. Enumerable.Range(0, Numbers).Select(_ => random.NextDouble() - 0.5)];
-            text.Append((z[0] + (0.2 * z[4]) + random.NextDouble()).ToString("R", CultureInfo.InvariantCulture)).Append(',');
+            double[] z = [.. Enumerable.Range(0, Numbers).Select(_ => random.Uniform() - 0.5)];
+            text.Append((z[0] + (0.2 * z[4]) + random.Uniform()).ToString("R", CultureInfo.InvariantCulture)).Append(',');
             text.AppendJoin(',', z.Select(value => value.ToString("R", CultureInfo.InvariantCulture))).Append('\n');
         }
 

@@ -73,7 +73,7 @@ internal static class ExclusionFigures
             rows is null ? 0 : (int)rows.Fit.N, f?.Statistic, f?.Df1, f?.Df2, test?.P is double p ? TestFigure.ShownP(p) : null, judgement.Verdict);
     }
 
-    private static GroupTests Tests(GroupEvidence? evidence, GroupFit? common, IDictionary<string, string> notComputed, bool sampling)
+    private static GroupTests Tests(GroupEvidence? evidence, GroupFit? common, SortedDictionary<string, string> notComputed, bool sampling)
     {
         TestFigures? Figure(string name, TestResult? result) => TestFigure.Of(result ?? TestResult.None(Impediment.NoRows), name, notComputed);
         TestFigures? Declared(string name, TestResult? result, string undeclared)

@@ -1,5 +1,3 @@
-using Auditor.Results;
-
 namespace Auditor.Facts;
 
 /// <summary>The facts of a group that come from the declared dependence between rows: its level, its clusters, what the score form can reach, who disagrees.</summary>

@@ -1,4 +1,5 @@
 using Auditor.Numerics.Factor;
+using Auditor.Numerics.Random;
 using CsCheck;
 
 namespace Auditor.Numerics.Tests.Factor;
@@ -48,14 +49,14 @@ public sealed class LastInTests
 
     private static MatrixDesign Made(int rows, int[] sizes, int[] kinds, int seed)
     {
-        var (random, columns) = (new System.Random(seed), new List<double[]>());
-        double[] Fresh() => [.. Enumerable.Range(0, rows).Select(_ => (2 * random.NextDouble()) - 1)];
+        var (random, columns) = (new Generator((ulong)seed), new List<double[]>());
+        double[] Fresh() => [.. Enumerable.Range(0, rows).Select(_ => (2 * random.Uniform()) - 1)];
         var x = Fresh();
         foreach (var kind in kinds.Take(sizes.Sum()))
         {
             columns.Add(kind switch
             {
-                4 when columns.Count > 0 => columns[random.Next(columns.Count)],
+                4 when columns.Count > 0 => columns[(int)(random.Uniform() * columns.Count)],
                 5 => x,
                 _ => Fresh(),
             });

@@ -1,4 +1,5 @@
 using Auditor.Numerics.Factor;
+using Auditor.Numerics.Random;
 using CsCheck;
 
 namespace Auditor.Numerics.Tests.Factor;
@@ -147,7 +148,7 @@ public sealed class PanelTests
 
     private static double[][] Columns(int rows, int[] kinds, int seed)
     {
-        var random = new System.Random(seed);
+        var random = new Generator((ulong)seed);
         var columns = new List<double[]>();
         foreach (var kind in kinds)
         {
@@ -156,8 +157,8 @@ public sealed class PanelTests
                 5 => 0,
                 6 when columns.Count > 0 => columns[^1][i],
                 7 when columns.Count > 1 => columns[0][i] - (2 * columns[^1][i]),
-                4 => 1e9 * random.NextDouble(),
-                _ => (2 * random.NextDouble()) - 1,
+                4 => 1e9 * random.Uniform(),
+                _ => (2 * random.Uniform()) - 1,
             })]);
         }
 

@@ -1,5 +1,6 @@
 using Auditor.Numerics.Factor;
 using Auditor.Numerics.GroupTests;
+using Auditor.Numerics.Random;
 using Auditor.Numerics.SecondPass;
 using MathNet.Numerics.LinearAlgebra;
 
@@ -113,7 +114,7 @@ public sealed class LargeGroupTests
 
     private static double[] Numbers(int count, int seed)
     {
-        var random = new System.Random(seed);
-        return [.. Enumerable.Range(0, count).Select(_ => (2 * random.NextDouble()) - 1)];
+        var random = new Generator((ulong)seed);
+        return [.. Enumerable.Range(0, count).Select(_ => (2 * random.Uniform()) - 1)];
     }
 }

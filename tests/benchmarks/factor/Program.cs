@@ -1,6 +1,6 @@
 using System.Diagnostics;
 using System.Globalization;
-using Auditor.Benchmarks.Kernels;
+using Auditor.Benchmarks.Factor;
 using Auditor.Numerics.Factor;
 
 // Factorising [X y] against the processor's dgemm peak and LAPACK's dgeqrf in one run; every figure the median of five.

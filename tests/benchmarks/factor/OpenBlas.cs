@@ -1,6 +1,6 @@
 using System.Runtime.InteropServices;
 
-namespace Auditor.Benchmarks.Kernels;
+namespace Auditor.Benchmarks.Factor;
 
 /// <summary>
 /// dgemm and dgeqrf of an OpenBLAS shared library, one thread. The library's path is given by the caller; the program runs without it. Fortran interface, 32-bit

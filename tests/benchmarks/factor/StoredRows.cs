@@ -1,6 +1,6 @@
 using Auditor.Numerics.Factor;
 
-namespace Auditor.Benchmarks.Kernels;
+namespace Auditor.Benchmarks.Factor;
 
 /// <summary>A design of normal-like numbers held in memory block by block, so that only the factorisation is timed.</summary>
 internal sealed class StoredRows : IDesignRows
