@@ -2,20 +2,21 @@ using Auditor.Numerics.Factor;
 
 namespace Auditor.Numerics.SecondPass;
 
-/// <summary>Which columns of a design have one value only within each class (values as declared, compared exactly).</summary>
+/// <summary>
+/// Which columns of a design have one value only within each class (values as declared, compared exactly). Where every class is one row, nothing can be said to be
+/// constant within one: a column is observed row by row then.
+/// </summary>
 internal sealed class ColumnLevels
 {
     private readonly RowClasses _classes;
     private readonly Dictionary<int, double[]> _constant = [];
-    private readonly bool _single;
 
     public ColumnLevels(RowClasses classes, IEnumerable<int> columns)
     {
         _classes = classes;
-        _single = classes.Count == classes.Codes.Length;
-        foreach (var column in columns)
+        foreach (var column in classes.Count == classes.Codes.Length ? [] : columns)
         {
-            _constant[column] = _single ? [] : NotSeen(classes.Count);
+            _constant[column] = NotSeen(classes.Count);
         }
     }
 
@@ -24,11 +25,6 @@ internal sealed class ColumnLevels
 
     public void Add(RowBlock block)
     {
-        if (_single)
-        {
-            return;
-        }
-
         foreach (var (column, values) in _constant.ToArray())
         {
             // A column found to vary is not looked at again, and its memory is given back.

@@ -111,7 +111,7 @@ internal static class ExclusionFigures
     }
 
     /// <summary>Resampling has no degrees of freedom: p with the interval that its draws leave open.</summary>
-    private static PermutationFigures? Resampled(DependenceResults? dependence, IDictionary<string, string> notComputed)
+    private static PermutationFigures? Resampled(DependenceResults? dependence, SortedDictionary<string, string> notComputed)
     {
         switch (dependence?.WildBootstrap)
         {
@@ -126,7 +126,7 @@ internal static class ExclusionFigures
         }
     }
 
-    private static TestFigures? LastIn(TestResult? result, Func<string, TestResult?, TestFigures?> figure, IDictionary<string, string> notComputed)
+    private static TestFigures? LastIn(TestResult? result, Func<string, TestResult?, TestFigures?> figure, SortedDictionary<string, string> notComputed)
     {
         var shown = figure("last_in", result);
         if (result is NotComputable { Why: Impediment.AddsNothing })
@@ -138,7 +138,7 @@ internal static class ExclusionFigures
     }
 
     /// <summary>All groups together are the largest model: both tests would be the partial F again.</summary>
-    private static bool JointOnly(GroupFit? common, string name, IDictionary<string, string> notComputed)
+    private static bool JointOnly(GroupFit? common, string name, SortedDictionary<string, string> notComputed)
     {
         var joint = common is { Largest: null };
         if (joint)

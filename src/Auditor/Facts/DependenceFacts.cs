@@ -18,6 +18,8 @@ internal static class DependenceFacts
             view => view.Of.Ceiling is { } ceiling ? ceiling.P * view.Inputs.Groups > view.Policy.Significance : null, _ => NoScoreForm)
         .Number("unrestricted_p", FactUnits.P, "p of the same kind of test with the group in the model.", view => view.Of.Ceiling?.UnrestrictedP, NoUnrestricted)
         .Flag("unrestricted_rejects", "unrestricted_p is at most the policy's significance.", view => view.Rejects(view.Of.Ceiling?.UnrestrictedP), NoUnrestricted)
+        .Number("df2_per_column", "degrees of freedom", "Residual degrees of freedom for each column the group adds.", view => view.Of is { Df1: > 0 and var df1, Df2: double df2 } ? df2 / df1 : null, view => view.Why("df2"))
+        .Count("groups", "groups", "Left-out groups that the adjustment allows for.", view => view.Inputs.Groups)
         .Flag("other_forms_disagree", "Some robust form, unadjusted, falls on the other side of the policy's significance than the basis test.", view => view.Of.P is null ? null : Disagreeing(view).Any(), view => view.Why("p"))
         .Text("disagreeing_forms", "Those forms.", view => view.Of.P is null ? null : string.Join(", ", Disagreeing(view)), view => view.Why("p"));
 
