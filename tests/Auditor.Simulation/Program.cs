@@ -1,12 +1,14 @@
 using System.CommandLine;
 using System.Diagnostics;
 using System.Globalization;
+using Auditor.Simulation.Bases;
 
 namespace Auditor.Simulation;
 
 /// <summary>Measures the tests, verdicts and intervals of the audit on simulated data; README.md says how and what came out.</summary>
 internal static class Program
 {
+    private const string BasisResults = "tests/Auditor.Simulation/bases.md";
     private const string EliminationResults = "tests/Auditor.Simulation/elimination.md";
     private const string Results = "tests/Auditor.Simulation/results.md";
 
@@ -26,6 +28,7 @@ internal static class Program
         elimination.SetAction(parsed => RunElimination(
             parsed.GetValue(draws), parsed.GetValue(seed), parsed.GetResult(write) is null ? null : parsed.GetValue(write) ?? EliminationResults));
         root.Add(elimination);
+        root.Add(BasisCommand(seed, write));
         return root.Parse(args).Invoke();
     }
 
@@ -41,6 +44,25 @@ internal static class Program
         var clock = Stopwatch.StartNew();
         var results = new EliminationStudy(seed, draws, new Percentages()).Run();
         Show(EliminationText.Of(results, new RunFacts(draws, seed, DateTimeOffset.UtcNow, clock.Elapsed)), file);
+    }
+
+    private static Command BasisCommand(Option<ulong> seed, Option<string?> write)
+    {
+        var draws = new Option<int>("--draws") { Description = "Data sets for each cell.", DefaultValueFactory = _ => 1000 };
+        var threads = new Option<int>("--threads") { Description = "Results do not depend on it.", DefaultValueFactory = _ => Environment.ProcessorCount };
+        var command = new Command("bases", "By which test an exclusion can be judged: clusters, series, panels, families of groups.") { draws, seed, threads, write };
+        command.SetAction(parsed => RunBases(
+            parsed.GetValue(draws), parsed.GetValue(seed), parsed.GetValue(threads), parsed.GetResult(write) is null ? null : parsed.GetValue(write) ?? BasisResults));
+        return command;
+    }
+
+    private static void RunBases(int draws, ulong seed, int threads, string? file)
+    {
+        var (clock, policy) = (Stopwatch.StartNew(), Policies.Read().Hc3);
+        var worlds = new Worlds(policy).All;
+        var counts = new BasisStudy(seed, draws, threads, new Percentages()).Run(worlds);
+        var facts = new RunFacts(draws, seed, DateTimeOffset.UtcNow, clock.Elapsed);
+        Show(new BasisText(worlds, counts, facts).Write(policy.Significance, policy.NegligiblePartialRSquared), file);
     }
 
     private static void Show(string text, string? file)

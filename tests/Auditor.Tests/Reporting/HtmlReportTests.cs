@@ -9,7 +9,7 @@ public sealed partial class HtmlReportTests
 {
     private static readonly string[] Sections =
     [
-        "summary", "verdicts", "exclusions", "jointly", "final-model", "checks", "influence", "collinearity",
+        "summary", "verdicts", "exclusions", "jointly", "checks", "influence", "collinearity", "final-model",
         "claims", "elimination", "rows", "findings", "policy", "provenance", "cautions",
     ];
 

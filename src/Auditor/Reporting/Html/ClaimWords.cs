@@ -59,9 +59,18 @@ internal static class ClaimWords
             : $"{NumberText.Count(broken)} of {NumberText.Count(all)} relations between the printed figures cannot hold, whatever the data.";
     }
 
-    public static ReportTable Table(AuditRecord record, IReadOnlyList<FindingPage> findings) => ReportTable.Of(
-        "Figures of the report, recomputed",
-        record.Claims,
+    public static ReportTable Table(AuditRecord record, IReadOnlyList<FindingPage> findings) =>
+        Table("Figures of the report, recomputed", record.Claims, findings);
+
+    /// <summary>The figures that the report prints for one left-out group.</summary>
+    public static ReportTable TableOf(string group, AuditRecord record, IReadOnlyList<FindingPage> findings) => Table(
+        $"Figures that the report prints for {group}, recomputed",
+        [.. record.Claims.Where(claim => claim.Claim.StartsWith($"left_out[{group}].", StringComparison.Ordinal))],
+        findings);
+
+    private static ReportTable Table(string caption, IReadOnlyList<ClaimResult> claims, IReadOnlyList<FindingPage> findings) => ReportTable.Of(
+        caption,
+        claims,
         new("Figure", "text", claim => Cell.Words(claim.What)),
         new("As reported", "number", claim => new Cell(claim.Reported, null, "number", null)),
         new("Recomputed", "number", claim => claim.Recomputed is double value

@@ -17,6 +17,12 @@ internal sealed record ExclusionPage(
     /// <summary>What the group adds, what is left over against its columns, what the rows could show.</summary>
     public IReadOnlyList<Picture> Pictures { get; init; } = [];
 
+    /// <summary>Figures that the report prints for the group, recomputed; null where none can be.</summary>
+    public ReportTable? Reported { get; init; }
+
+    /// <summary>Findings about the group, for what to do next.</summary>
+    public IReadOnlyList<FindingPage> Next { get; init; } = [];
+
     public static ExclusionPage Numbered(Exclusion exclusion, int index, double level) =>
         Of(exclusion, "exclusion-" + (index + 1).ToString(CultureInfo.InvariantCulture), level);
 
@@ -31,12 +37,32 @@ internal sealed record ExclusionPage(
 
     private static FactList DecisionOf(Exclusion exclusion, double level) => FactList.Of([
         new("Rests on", Cell.Words(TestWords.TitleOf(exclusion.Basis)), exclusion.BasisReason),
+        .. Level(exclusion),
         new("p", Cell.Probability(exclusion.P, exclusion.Log10P, level, Why(exclusion, "p"))),
         new("p, adjusted for all groups", Cell.Probability(exclusion.PAdjusted, exclusion.Log10PAdjusted, level, Why(exclusion, "p_adjusted"))),
         .. Selective(exclusion, level),
         new("p of the test that the effect is at least the bound", Cell.Probability(exclusion.Negligible.P, null, level, NegligibleWhy(exclusion, "p")), "small: shown to be negligible"),
         new("the same, adjusted for all groups", Cell.Probability(exclusion.Negligible.PAdjusted, null, level, NegligibleWhy(exclusion, "p_adjusted"))),
     ]);
+
+    /// <summary>On which level the group is observed, and what a form over clusters or periods can reach.</summary>
+    private static IEnumerable<Fact> Level(Exclusion exclusion)
+    {
+        if (exclusion.Level is { } level)
+        {
+            yield return new Fact("Its columns vary on the level of", Cell.Words(level == "several" ? "several levels" : level));
+        }
+
+        if (exclusion.EffectiveClusters is double clusters)
+        {
+            yield return new Fact("Clusters these are worth", Cell.Number(clusters), "equal clusters that would carry as much of this group");
+        }
+
+        if (exclusion.Ceiling is { } ceiling)
+        {
+            yield return new Fact("Least p that it can reach", Cell.Number(ceiling.P) with { Text = NumberText.Probability(ceiling.P, null, 0.5) }, "however large the effect: an effect also widens the spread this form allows for");
+        }
+    }
 
     /// <summary>p given the rule, with what it means, and beside it the plain p on the same rows.</summary>
     private static IEnumerable<Fact> Selective(Exclusion exclusion, double level)
@@ -71,7 +97,7 @@ internal sealed record ExclusionPage(
             new("Rows these are worth", Whole(exclusion.EffectiveRows, Why(exclusion, "effective_rows")), "for this question, under the basis"),
             new("Power at the bound", Cell.Share(power.AtBound, PowerWhy("at_bound")), "chance to reject an effect that large"),
             new("Smallest effect found reliably", Cell.Share(power.SmallestDetectableFSquared, PowerWhy("smallest_detectable_f_squared")), "as Cohen’s f², at the policy’s power"),
-            new("Rows needed at the bound", Whole(power.RowsNeeded, PowerWhy("rows_needed")), "for the policy’s power, before adjustment"));
+            new($"{char.ToUpperInvariant(power.CountedIn[0])}{power.CountedIn[1..]} needed at the bound", Whole(power.RowsNeeded, PowerWhy("rows_needed")), "for the policy’s power, before adjustment"));
 
         string? EffectWhy(string name) => effect.Why ?? Why(exclusion, "partial_r_squared." + name);
         string? PowerWhy(string name) => power.Why ?? Why(exclusion, "power." + name);

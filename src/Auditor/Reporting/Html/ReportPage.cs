@@ -89,6 +89,8 @@ internal sealed record ReportPage(AuditRecord Record, PageScript Script)
         var page = ExclusionPage.Numbered(exclusion, index, Level);
         return page with
         {
+            Reported = ClaimWords.TableOf(exclusion.Group, Record, Findings),
+            Next = [.. Findings.Where(finding => finding.Finding.Subject == exclusion.Group && finding.Finding.Advice.Length > 0)],
             Pictures = ExclusionPictures.Of(exclusion, Record.Plots?.Groups.ElementAtOrDefault(index), page.Anchor, Power, Record.Plots?.Plots?.Weighted ?? false),
         };
     }
