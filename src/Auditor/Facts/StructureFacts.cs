@@ -19,6 +19,7 @@ internal static class StructureFacts
         .Count("n_periods", "periods", "Periods that have a row of the final model's fit.", counts => counts.Periods, _ => NoTime)
         .Flag("has_missing_periods", "A unit has no row in a period between its first and its last.", counts => counts.MissingPeriods is long missing ? missing > 0 : null, NotCounted)
         .Count("missing_periods", "periods", "Such periods, added up over the units.", counts => counts.MissingPeriods, NotCounted)
+        .Flag("has_tied_rows", "Some rows share unit and period.", counts => counts.TiedRows is { } tied ? tied > 0 : null, _ => NoTime)
         .Count("tied_rows", FactUnits.Rows, "Rows that share unit and period with an earlier one.", counts => counts.TiedRows, _ => NoTime);
 
     public static IReadOnlyList<FactDefinition> Definitions => Family.Definitions;
