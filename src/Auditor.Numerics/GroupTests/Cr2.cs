@@ -18,7 +18,7 @@ namespace Auditor.Numerics.GroupTests;
 public sealed record Cr2(TestResult Test, double[,]? Covariance = null, double? Eta = null)
 {
     /// <summary>Operations that the degrees of freedom may cost.</summary>
-    private const double MostWork = 5e10;
+    private const double MostWork = 1e9;
 
     /// <summary>An expected variance further than this below the true one has lost a direction to a cluster that fits it by itself.</summary>
     private const double Lost = 1e-6;

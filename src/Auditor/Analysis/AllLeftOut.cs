@@ -11,15 +11,20 @@ internal static class AllLeftOut
 
     private const string Selective = "it is computed for one group at a time: the rule dropped them one by one";
 
-    public static Exclusion? Of(BoundModel model, RowSetFit? common, Policy policy, bool sampling)
+    public static Exclusion? Of(BoundModel model, RowSetFit? common, JudgementInputs inputs)
     {
+        var (policy, sampling, drifts) = inputs;
         if (model.Groups.Count == 0)
         {
             return null;
         }
 
         var evidence = common?.Joint is { } joint ? new GroupEvidence(new GroupResults(joint, policy.BasisWithoutStructure, sampling), policy) : null;
-        var judgement = Judgement.OfFamily([new JudgedGroup(evidence, ProductsElsewhere.OfAll(model) is [var product, ..] ? product : null)], policy)[0];
+        var group = new JudgedGroup(evidence, ProductsElsewhere.OfAll(model) is [var product, ..] ? product : null)
+        {
+            Drifts = drifts && model.Groups.Any(left => left.Terms.Any(term => SerialBinding.MayDrift(term.Term))),
+        };
+        var judgement = Judgement.OfFamily([group], policy)[0];
         var terms = model.Groups.SelectMany(group => group.Terms).Select(term => term.Term.Label);
         var identity = new GroupIdentity(Name, [.. terms], null, null);
         return ExclusionFigures.Of(identity, judgement, common, null, common?.Joint, new SelectiveFigures(null, Selective), policy, sampling);

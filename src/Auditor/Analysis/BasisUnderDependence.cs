@@ -34,7 +34,10 @@ internal static class BasisUnderDependence
         };
     }
 
-    /// <summary>The larger p of the two forms; a form without a value leaves no other.</summary>
+    /// <summary>
+    /// The larger p of the two forms; a form without a value leaves no other. It can reject only where both can, so its ceiling is the higher one; and the size of the
+    /// effect is judged by the form that the data inform less.
+    /// </summary>
     private static Basis OfMixture(GroupResults results)
     {
         const string reason = "its columns vary on different levels: of the forms over clusters or units and over periods the one with the larger p";
@@ -45,7 +48,21 @@ internal static class BasisUnderDependence
         }
 
         var (byCluster, byPeriod) = (OnClusters(results, clusters, reason), OnPeriods(results, reason));
-        return byPeriod.Test is NotComputable || (byCluster.Test is not NotComputable && byPeriod.Test.P >= byCluster.Test.P) ? byPeriod : byCluster;
+        if (byPeriod.Test is NotComputable || byCluster.Test is NotComputable)
+        {
+            return byPeriod.Test is NotComputable ? byPeriod : byCluster;
+        }
+
+        var decides = byPeriod.Test.P >= byCluster.Test.P ? byPeriod : byCluster;
+        var sizes = byPeriod.EffectiveRows is null || byPeriod.EffectiveRows.LeastInformed <= byCluster.EffectiveRows?.LeastInformed ? byPeriod : byCluster;
+        return decides with
+        {
+            Ceiling = byPeriod.Ceiling?.P >= byCluster.Ceiling?.P ? byPeriod.Ceiling : byCluster.Ceiling,
+            Unrestricted = sizes.Unrestricted,
+            EffectiveRows = sizes.EffectiveRows,
+            CountedIn = sizes.CountedIn,
+            Needed = sizes.Needed,
+        };
     }
 
     private static Basis OnClusters(GroupResults results, ClassSums clusters, string reason)

@@ -17,8 +17,9 @@ internal static class Exclusions
     {
         var (policy, sampling, _) = inputs;
         var groups = Enumerable.Range(0, model.Groups.Count).ToArray();
-        var own = OnRows(model, groups, fits.Own, inputs);
-        var common = OnRows(model, groups, _ => fits.Common, inputs);
+        var known = new Dictionary<GroupFit, GroupResults>(ReferenceEqualityComparer.Instance);
+        var own = OnRows(model, groups, fits.Own, inputs, known);
+        var common = OnRows(model, groups, _ => fits.Common, inputs, known);
         var (main, other) = policy.RowSet == RowSet.Own ? (own, common) : (common, own);
         IReadOnlyList<Exclusion> exclusions = [.. groups.Select(group =>
         {
@@ -37,16 +38,20 @@ internal static class Exclusions
     }
 
     private static List<(Judgement Judgement, RowSetFit? Rows)> OnRows(
-        BoundModel model, int[] groups, Func<int, RowSetFit?> rows, JudgementInputs inputs)
+        BoundModel model, int[] groups, Func<int, RowSetFit?> rows, JudgementInputs inputs, Dictionary<GroupFit, GroupResults> known)
     {
         var (policy, sampling, drifts) = inputs;
         var judged = groups.Select(group => new JudgedGroup(
-            rows(group) is { } fit ? new GroupEvidence(new GroupResults(fit[group], policy.BasisWithoutStructure, sampling), policy) : null,
+            rows(group) is { } fit ? new GroupEvidence(Results(fit[group]), policy) : null,
             ProductsElsewhere.Of(model, group) is [var product, ..] ? product : null)
         {
-            Drifts = drifts && model.Groups[group].Terms.Any(term => SerialBinding.MayDrift(term.Term, model)),
+            Drifts = drifts && model.Groups[group].Terms.Any(term => SerialBinding.MayDrift(term.Term)),
         }).ToList();
         return [.. Judgement.OfFamily(judged, policy).Select((judgement, group) => (judgement, rows(group)))];
+
+        // Own rows and common rows are often the same fit: its tests are made once.
+        GroupResults Results(GroupFit fit) =>
+            known.TryGetValue(fit, out var made) ? made : known[fit] = new GroupResults(fit, policy.BasisWithoutStructure, sampling);
     }
 
     private static GroupIdentity Identity(BoundGroup group) => new(

@@ -38,7 +38,8 @@ internal static class ModelAnalysis
         var shown = new ClaimedRows(main, FitFigures.Of(main, policy.Significance, sampling), sampling, false);
         var beside = other is null ? null : new ClaimedRows(other, FitFigures.Of(other, policy.Significance, sampling), sampling, true);
         var elimination = EliminationFigures.Of(declaration, model, fits.Common, sampling, run.Threads);
-        var exclusions = Exclusions.Of(model, fits, elimination.Selective, new JudgementInputs(policy, sampling, SerialCheckFigures.ResidualMayDrift(checks)), whatIf: run.Pictures);
+        var inputs = new JudgementInputs(policy, sampling, SerialCheckFigures.ResidualMayDrift(checks));
+        var exclusions = Exclusions.Of(model, fits, elimination.Selective, inputs, whatIf: run.Pictures);
         return Reading<AuditResults>.Of(new AuditResults(
             declaration.Model.Id,
             selection.Account(common, mentioned),
@@ -48,7 +49,7 @@ internal static class ModelAnalysis
             main.Fit.Perfect,
             exclusions.All,
             [.. Enumerable.Range(0, model.Groups.Count).Select(group => Inputs(model, fits, group, common) with { LeftOutByRule = elimination.LeftOutByRule[group], Groups = model.Groups.Count })],
-            AllLeftOut.Of(model, fits.Common, policy, sampling),
+            AllLeftOut.Of(model, fits.Common, inputs),
             checks,
             InfluenceFigures.Of(influence, main.Rows, model.RowLabel),
             CollinearityFigures.Of(main),

@@ -13,7 +13,7 @@ internal static class PowerCurves
 
     public static IReadOnlyList<PowerPoint> Of(GroupEvidence? evidence, Policy policy)
     {
-        if (evidence is not { Basis: { Test: FTest test, EffectiveRows: { } rows }, Power: { } power })
+        if (evidence is not { Basis: { Wald: { } test, EffectiveRows: { } rows }, Power: { } power })
         {
             return [];
         }

@@ -26,8 +26,8 @@ internal static class SerialBinding
             noSplit);
     }
 
-    /// <summary>Whether a term is a change, on which drifting series no longer drift, or no series at all.</summary>
-    public static bool MayDrift(Term term, BoundModel model) => term is not TimeOrderTerm { Operation: TimeOrderOperation.Change } && !IsFunctionOfTime(term, model);
+    /// <summary>Whether a term is no change: a series that drifts looks related to a drifting residual when it is not, and so do a trend and a step.</summary>
+    public static bool MayDrift(Term term) => term is not TimeOrderTerm { Operation: TimeOrderOperation.Change };
 
     private static (Order? Order, string? Why) OrderOf(BoundModel model, RowStructure structure, RowSetFit rows)
     {

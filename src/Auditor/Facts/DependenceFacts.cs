@@ -20,6 +20,7 @@ internal static class DependenceFacts
         .Flag("unrestricted_rejects", "unrestricted_p is at most the policy's significance.", view => view.Rejects(view.Of.Ceiling?.UnrestrictedP), NoUnrestricted)
         .Number("df2_per_column", "degrees of freedom", "Residual degrees of freedom for each column the group adds.", view => view.Of is { Df1: > 0 and var df1, Df2: double df2 } ? df2 / df1 : null, view => view.Why("df2"))
         .Count("groups", "groups", "Left-out groups that the adjustment allows for.", view => view.Inputs.Groups)
+        .Text("counted_in", "What rows_needed counts: rows, clusters or periods.", view => view.Of.Power.CountedIn)
         .Flag("other_forms_disagree", "Some robust form, unadjusted, falls on the other side of the policy's significance than the basis test.", view => view.Of.P is null ? null : Disagreeing(view).Any(), view => view.Why("p"))
         .Text("disagreeing_forms", "Those forms.", view => view.Of.P is null ? null : string.Join(", ", Disagreeing(view)), view => view.Why("p"));
 
