@@ -1,5 +1,4 @@
 using Auditor.Design;
-using Auditor.Policies;
 using Auditor.Results;
 
 namespace Auditor.Analysis;

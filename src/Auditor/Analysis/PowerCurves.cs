@@ -1,4 +1,3 @@
-using Auditor.Numerics;
 using Auditor.Numerics.GroupTests;
 using Auditor.Policies;
 using Auditor.Results;
