@@ -20,15 +20,18 @@ path <- function(data, case, rule) {
     table <- drop1(fit, test = "F", k = k)
     tested <- table[-1, ]
     change <- tested$AIC - table$AIC[1]
+    # By place: df, sum of squares, RSS, criterion, F, p.
+    f <- tested[[5]]
+    p <- tested[[6]]
     if (!is.null(rule$bound)) {
-      at <- which.max(tested[["Pr(>F)"]])
-      if (tested[["Pr(>F)"]][at] <= rule$bound) break
+      at <- which.max(p)
+      if (p[at] <= rule$bound) break
     } else {
       at <- which.min(change)
       if (change[at] >= 0) break
     }
     steps <- c(steps, sprintf('{"drop": "%s", "f": %s, "df1": %s, "df2": %s, "p": %s, "change": %s}', rownames(tested)[at],
-      number(tested[["F value"]][at]), number(tested$Df[at]), number(df.residual(fit)), number(tested[["Pr(>F)"]][at]),
+      number(f[at]), number(tested$Df[at]), number(df.residual(fit)), number(p[at]),
       number(if (is.null(rule$bound)) change[at] else NA)))
     inside <- inside[-at]
   }
