@@ -104,6 +104,42 @@ internal static class BlockKernels
         }
     }
 
+    /// <summary>into[i] = a[i] - b[i].</summary>
+    public static void Subtract(ReadOnlySpan<double> a, ReadOnlySpan<double> b, Span<double> into)
+    {
+        ref var target = ref MemoryMarshal.GetReference(into);
+        ref var left = ref MemoryMarshal.GetReference(a);
+        ref var right = ref MemoryMarshal.GetReference(b);
+        nuint i = 0;
+        for (; i < Whole(into.Length); i += Lanes)
+        {
+            (Vector512.LoadUnsafe(ref left, i) - Vector512.LoadUnsafe(ref right, i)).StoreUnsafe(ref target, i);
+        }
+
+        for (var j = (int)i; j < into.Length; j++)
+        {
+            into[j] = a[j] - b[j];
+        }
+    }
+
+    /// <summary>into[i] = a[i] / b[i].</summary>
+    public static void Divide(ReadOnlySpan<double> a, ReadOnlySpan<double> b, Span<double> into)
+    {
+        ref var target = ref MemoryMarshal.GetReference(into);
+        ref var left = ref MemoryMarshal.GetReference(a);
+        ref var right = ref MemoryMarshal.GetReference(b);
+        nuint i = 0;
+        for (; i < Whole(into.Length); i += Lanes)
+        {
+            (Vector512.LoadUnsafe(ref left, i) / Vector512.LoadUnsafe(ref right, i)).StoreUnsafe(ref target, i);
+        }
+
+        for (var j = (int)i; j < into.Length; j++)
+        {
+            into[j] = a[j] / b[j];
+        }
+    }
+
     /// <summary>into[i] = column[i] - shift.</summary>
     public static void Shift(ReadOnlySpan<double> column, double shift, Span<double> into)
     {

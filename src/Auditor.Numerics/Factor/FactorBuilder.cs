@@ -1,5 +1,3 @@
-using System.Collections.Concurrent;
-
 namespace Auditor.Numerics.Factor;
 
 /// <summary>Builds the factor of a design in one pass over its rows.</summary>
@@ -15,14 +13,10 @@ public static class FactorBuilder
 
     private static OrthogonalFactor BuildPlain(IDesignRows design, int threads)
     {
-        var (shifts, stripes) = (Shifts(design), new StripeFactor[design.Stripes]);
-        Each(stripes.Length, threads, stripe => stripes[stripe] = new StripeFactor(design.Layout, shifts).AddAll(design.Blocks(stripe)));
-        foreach (var stripe in stripes.Skip(1))
-        {
-            stripes[0].Merge(stripe);
-        }
-
-        return stripes[0].Finish();
+        var (shifts, count) = (Shifts(design), design.Stripes);
+        var factor = new OrderedMerge<StripeFactor>(count, (first, next) => first.Merge(next));
+        InParallel.Each(count, threads, stripe => factor.Take(stripe, new StripeFactor(design.Layout, shifts).AddAll(design.Blocks(stripe))));
+        return factor.Merged!.Finish();
     }
 
     /// <summary>The first row's values when there is an intercept, which keeps its own.</summary>
@@ -38,24 +32,5 @@ public static class FactorBuilder
         }
 
         return shifts;
-    }
-
-    /// <summary>Does the work for 0 to count - 1; a thread takes the next one as soon as it is free.</summary>
-    private static void Each(int count, int threads, Action<int> work)
-    {
-        if (threads <= 1 || count == 1)
-        {
-            for (var at = 0; at < count; at++)
-            {
-                work(at);
-            }
-
-            return;
-        }
-
-        Parallel.ForEach(
-            Partitioner.Create(Enumerable.Range(0, count), EnumerablePartitionerOptions.NoBuffering),
-            new ParallelOptions { MaxDegreeOfParallelism = threads },
-            work);
     }
 }

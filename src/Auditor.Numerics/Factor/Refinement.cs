@@ -52,6 +52,19 @@ internal sealed class Refinement
         _sumOfSquares += weighted.Dot(_residual);
     }
 
+    /// <summary>Takes in the sums over the rows that follow.</summary>
+    public void Merge(Refinement next)
+    {
+        for (var k = 0; k < _gradient.Length; k++)
+        {
+            _gradient[k] += next._gradient[k];
+            _hasLowParts[k] |= next._hasLowParts[k];
+        }
+
+        _sumOfResiduals += next._sumOfResiduals;
+        _sumOfSquares += next._sumOfSquares;
+    }
+
     public RefinedCoefficients Finish()
     {
         var gradient = ShiftedGradient();

@@ -37,8 +37,8 @@ public sealed class AddedVariable : IAccumulator
             return;
         }
 
-        _rows ??= new GroupRows(_group, block.Prepared.Stride);
-        _rows.Load(block);
+        _rows ??= new GroupRows(_group.Rank, block.Prepared.Stride);
+        _rows.Load(block, _group);
         for (var i = 0; i < block.Rows; i++)
         {
             var across = OneColumn ? _rows.Column(0)[i] * _group.Triangle[0, 0] : _rows.Fitted[i];

@@ -25,7 +25,7 @@ internal sealed record AuxiliaryRegression(double N, int Df, double Explained, d
             fill(source, derived);
             FillSquares(fit.Store, variance, derived);
         });
-        var final = FinalFactor.Of(FactorBuilder.Build(rows));
+        var final = FinalFactor.Of(FactorBuilder.Build(rows, fit.Threads));
         var explained = final.Explained(final.Factor.Layout.Response)[1..];
         var sum = BlockKernels.Dot(explained, explained);
         return new AuxiliaryRegression(final.Factor.Totals.N, final.Rank - 1, sum, sum + final.Rss, ImpedimentOf(fit, final, sum + final.Rss));
@@ -50,10 +50,10 @@ internal sealed record AuxiliaryRegression(double N, int Df, double Explained, d
     private static void FillSquares(ResidualStore store, double variance, RowBlock derived)
     {
         var response = derived.Column(derived.Columns - 1);
-        for (var i = 0; i < response.Length; i++)
+        store.Residuals.Read(derived.FirstRow, response);
+        foreach (ref var e in response)
         {
-            var e = store.Residuals[derived.FirstRow + i];
-            response[i] = e * e / variance;
+            e = e * e / variance;
         }
     }
 }

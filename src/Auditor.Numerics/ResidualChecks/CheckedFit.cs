@@ -5,7 +5,8 @@ namespace Auditor.Numerics.ResidualChecks;
 /// <summary>A fit with the residuals of all its rows, ready to be checked. What several checks need is computed once, when the first asks.</summary>
 /// <param name="design">The rows that the fit was made on, with no groups; read again by the checks that need columns.</param>
 /// <param name="sampling">The weights are sampling weights.</param>
-public sealed class CheckedFit(IDesignRows design, FinalFactor final, Fit fit, ResidualStore store, bool sampling)
+/// <param name="threads">Most threads to use; no result depends on it.</param>
+public sealed class CheckedFit(IDesignRows design, FinalFactor final, Fit fit, ResidualStore store, bool sampling, int threads = 1)
 {
     private readonly Lazy<FittedRange> _fittedRange = new(() => FittedRange.Of(design, fit));
     private double[]? _ordered;
@@ -18,6 +19,8 @@ public sealed class CheckedFit(IDesignRows design, FinalFactor final, Fit fit, R
     public Fit Fit { get; } = fit;
 
     public ResidualStore Store { get; } = store;
+
+    internal int Threads { get; } = threads;
 
     /// <summary>Kept columns beside the intercept.</summary>
     internal int[] Slopes => [.. Final.Kept.Where(column => !(Final.Factor.Layout.Intercept && column == 0))];
@@ -37,7 +40,7 @@ public sealed class CheckedFit(IDesignRows design, FinalFactor final, Fit fit, R
     internal bool FittedIsConstant => FittedRange.HalfWidth * Math.Sqrt(Fit.N) <= Noise;
 
     /// <summary>Every observation's residual, rising.</summary>
-    internal double[] Ordered => _ordered ??= [.. Store.Expanded().Order()];
+    internal double[] Ordered => _ordered ??= Rising(Store.Expanded());
 
     /// <summary>Squared residuals on the intercept and the final model's columns.</summary>
     internal AuxiliaryRegression Linear => _linear ??= AuxiliaryRegression.OfSquares(this, Slopes.Length, CopySlopes);
@@ -50,6 +53,12 @@ public sealed class CheckedFit(IDesignRows design, FinalFactor final, Fit fit, R
             : Fit.N > most ? CheckImpediment.TooMany
             : Store.Spread * Math.Sqrt(Fit.N) <= Noise ? CheckImpediment.EqualResiduals
             : null);
+
+    private static double[] Rising(double[] values)
+    {
+        Array.Sort(values);
+        return values;
+    }
 
     private void CopySlopes(RowBlock source, RowBlock derived)
     {

@@ -28,13 +28,13 @@ public static class Chow
         var columns = fit.Final.Factor.Layout.FinalColumns;
         var layout = new DesignLayout(fit.Final.Factor.Layout.Intercept, columns, [new ColumnRange(columns, columns)]);
         var rows = new DerivedRows(fit.Design, layout, keepWeights: true, (source, derived) => Fill(columns, second, source, derived));
-        return AddedGroup.Of(FinalFactor.Of(FactorBuilder.Build(rows)), [.. layout.Groups[0].Indices]);
+        return AddedGroup.Of(FinalFactor.Of(FactorBuilder.Build(rows, fit.Threads)), [.. layout.Groups[0].Indices]);
     }
 
     /// <summary>As many directions are added as a part has observations.</summary>
     private static bool IsPredictive(CheckedFit fit, IReadOnlyList<bool> second, int rank)
     {
-        var inSecond = fit.Store.Copies.Where((_, position) => second[position]).Count();
+        var inSecond = second.Count(one => one);
         return Math.Min(inSecond, second.Count - inSecond) <= rank;
     }
 

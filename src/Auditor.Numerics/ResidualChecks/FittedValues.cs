@@ -8,7 +8,7 @@ public static class FittedValues
     /// <summary>X b of every row, in order, on the response's scale.</summary>
     public static double[] Of(CheckedFit fit)
     {
-        var fitted = new double[fit.Store.Residuals.Count];
+        var fitted = new double[fit.Store.Count];
         foreach (var block in fit.Design.Blocks())
         {
             Fill(fit.Fit, block, fitted.AsSpan(block.FirstRow, block.Rows));

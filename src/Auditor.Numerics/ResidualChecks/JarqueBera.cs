@@ -19,6 +19,7 @@ public static class JarqueBera
     private const int SimulatedBelow = 500;
     private const int Draws = 9999;
     private const int Fewest = 3;
+    private const int BlockRows = 1 << 16;
 
     /// <summary>Statistics this near to each other, relatively, are the same.</summary>
     private const double Tie = 1e-10;
@@ -32,7 +33,7 @@ public static class JarqueBera
         }
 
         var n = fit.Fit.N;
-        var (skewness, excess) = Shape([.. fit.Store.Residuals], [.. fit.Store.Copies], n);
+        var (skewness, excess) = Shape(fit.Store, n);
         var check = ChiSquaredCheck.Of(
             Statistic(skewness, excess, n), 2, new CheckSize(SizeMeasure.Skewness, skewness), new CheckSize(SizeMeasure.ExcessKurtosis, excess));
         return n < SimulatedBelow
@@ -42,22 +43,46 @@ public static class JarqueBera
 
     private static double Statistic(double skewness, double excess, double n) => n / 6 * ((skewness * skewness) + (excess * excess / 4));
 
+    /// <summary>Moment skewness and excess kurtosis of the residuals about their mean, block by block.</summary>
+    private static (double Skewness, double Excess) Shape(ResidualStore store, double n)
+    {
+        var (values, copies) = (new double[Math.Min(BlockRows, store.Count)], new double[Math.Min(BlockRows, store.Count)]);
+        var sum = 0.0;
+        foreach (var rows in Blocks(store, values, copies))
+        {
+            sum += BlockKernels.Dot(values.AsSpan(0, rows), copies.AsSpan(0, rows));
+        }
+
+        var moments = new Moments(sum / n, n);
+        foreach (var rows in Blocks(store, values, copies))
+        {
+            moments.Add(values.AsSpan(0, rows), copies.AsSpan(0, rows));
+        }
+
+        return moments.Shape;
+    }
+
+    /// <summary>Loads one block after the other; gives its rows.</summary>
+    private static IEnumerable<int> Blocks(ResidualStore store, double[] values, double[] copies)
+    {
+        copies.AsSpan().Fill(1);
+        for (var first = 0; first < store.Count; first += BlockRows)
+        {
+            var rows = Math.Min(BlockRows, store.Count - first);
+            store.Residuals.Read(first, values.AsSpan(0, rows));
+            store.Copies?.Read(first, copies.AsSpan(0, rows));
+            yield return rows;
+        }
+    }
+
     /// <summary>Moment skewness and excess kurtosis about the mean.</summary>
     /// <param name="copies">How many observations each value stands for.</param>
     /// <param name="n">Their sum.</param>
     private static (double Skewness, double Excess) Shape(ReadOnlySpan<double> values, ReadOnlySpan<double> copies, double n)
     {
-        var mean = BlockKernels.Dot(values, copies) / n;
-        var (second, third, fourth) = (0.0, 0.0, 0.0);
-        for (var i = 0; i < values.Length; i++)
-        {
-            var d = values[i] - mean;
-            second += copies[i] * d * d / n;
-            third += copies[i] * d * d * d / n;
-            fourth += copies[i] * d * d * d * d / n;
-        }
-
-        return (third / Math.Pow(second, 1.5), (fourth / (second * second)) - 3);
+        var moments = new Moments(BlockKernels.Dot(values, copies) / n, n);
+        moments.Add(values, copies);
+        return moments.Shape;
     }
 
     private static double Simulate(double observed, ResidualMaker residuals, ulong seed)
@@ -77,5 +102,26 @@ public static class JarqueBera
         }
 
         return (larger + 1.0) / (Draws + 1);
+    }
+
+    /// <summary>Central moments, divisor n.</summary>
+    private sealed class Moments(double mean, double n)
+    {
+        private double _second;
+        private double _third;
+        private double _fourth;
+
+        public (double Skewness, double Excess) Shape => (_third / Math.Pow(_second, 1.5), (_fourth / (_second * _second)) - 3);
+
+        public void Add(ReadOnlySpan<double> values, ReadOnlySpan<double> copies)
+        {
+            for (var i = 0; i < values.Length; i++)
+            {
+                var d = values[i] - mean;
+                _second += copies[i] * d * d / n;
+                _third += copies[i] * d * d * d / n;
+                _fourth += copies[i] * d * d * d * d / n;
+            }
+        }
     }
 }

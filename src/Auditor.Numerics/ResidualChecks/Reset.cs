@@ -33,7 +33,7 @@ public static class Reset
         var columns = fit.Final.Factor.Layout.FinalColumns;
         var layout = new DesignLayout(fit.Final.Factor.Layout.Intercept, columns, [new ColumnRange(columns, Powers)]);
         var rows = new DerivedRows(fit.Design, layout, keepWeights: true, (source, derived) => Fill(fit, source, derived));
-        return AddedGroup.Of(FinalFactor.Of(FactorBuilder.Build(rows)), [columns, columns + 1]);
+        return AddedGroup.Of(FinalFactor.Of(FactorBuilder.Build(rows, fit.Threads)), [columns, columns + 1]);
     }
 
     private static void Fill(CheckedFit fit, RowBlock source, RowBlock derived)

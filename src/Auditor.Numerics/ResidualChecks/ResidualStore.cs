@@ -1,41 +1,71 @@
 using Auditor.Numerics.SecondPass;
+using Auditor.Numerics.Storage;
 
 namespace Auditor.Numerics.ResidualChecks;
 
 /// <summary>Keeps residual and leverage of every row: what the checks need beside the design. Two numbers a row, never the design.</summary>
-public sealed class ResidualStore : IAccumulator
+public sealed class ResidualStore : IMergeable
 {
-    private readonly List<double> _residuals = [];
-    private readonly List<double> _leverages = [];
-    private readonly List<double> _copies = [];
+    private readonly WritableCells<double> _residuals;
+    private readonly WritableCells<double> _leverages;
+    private readonly CellStore _where;
+    private readonly Lazy<(double Least, double Greatest)> _range;
+    private readonly Lock _making = new();
+    private WritableCells<double>? _copies;
+
+    /// <param name="rows">Rows of the row set.</param>
+    /// <param name="where">Where they are kept.</param>
+    public ResidualStore(int rows, CellStore? where = null)
+    {
+        _where = where ?? CellStore.Memory;
+        (_residuals, _leverages) = (Cells(rows), Cells(rows));
+        _range = new(FindRange);
+    }
+
+    public int Count => _residuals.Count;
 
     /// <summary>sqrt(w) e, one a row of the row set.</summary>
-    public IReadOnlyList<double> Residuals => _residuals;
+    public Cells<double> Residuals => _residuals;
 
     /// <summary>h, one a row.</summary>
-    public IReadOnlyList<double> Leverages => _leverages;
+    public Cells<double> Leverages => _leverages;
 
-    /// <summary>How many equal rows each row stands for; all one without frequency weights.</summary>
-    public IReadOnlyList<double> Copies => _copies;
+    /// <summary>How many equal rows each row stands for; null without frequency weights: one.</summary>
+    public Cells<double>? Copies => _copies;
 
     /// <summary>Greatest less least residual.</summary>
-    public double Spread => _residuals.Count > 0 ? _residuals.Max() - _residuals.Min() : 0;
+    public double Spread => Count > 0 ? _range.Value.Greatest - _range.Value.Least : 0;
+
+    /// <summary>How many equal rows a row stands for.</summary>
+    public double CopiesOf(int row) => _copies?[row] ?? 1;
 
     public void Add(ResidualBlock block)
     {
-        for (var i = 0; i < block.Rows; i++)
+        _residuals.Write(block.FirstRow, block.Residuals);
+        _leverages.Write(block.FirstRow, block.Leverages);
+        if (block.Copies is { } copies)
         {
-            _residuals.Add(block.Residuals[i]);
-            _leverages.Add(block.Leverages[i]);
-            _copies.Add(block.Copies?[i] ?? 1);
+            MakeCopies().Write(block.FirstRow, copies.AsSpan(0, block.Rows));
         }
+    }
+
+    /// <summary>Itself: every row has a place of its own.</summary>
+    public IMergeable Fork() => this;
+
+    public void Merge(IMergeable next)
+    {
     }
 
     /// <summary>Every observation's residual: a row that stands for several gives as many.</summary>
     public double[] Expanded()
     {
-        var expanded = new List<double>(_residuals.Count);
-        for (var i = 0; i < _residuals.Count; i++)
+        if (_copies is null)
+        {
+            return [.. _residuals];
+        }
+
+        var expanded = new List<double>(Count);
+        for (var i = 0; i < Count; i++)
         {
             for (var copy = 0; copy < _copies[i]; copy++)
             {
@@ -44,5 +74,32 @@ public sealed class ResidualStore : IAccumulator
         }
 
         return [.. expanded];
+    }
+
+    private WritableCells<double> Cells(int rows)
+    {
+        var cells = _where.Create<double>();
+        cells.Resize(rows);
+        return cells;
+    }
+
+    private WritableCells<double> MakeCopies()
+    {
+        lock (_making)
+        {
+            return _copies ??= Cells(Count);
+        }
+    }
+
+    private (double Least, double Greatest) FindRange()
+    {
+        var (least, greatest) = (double.PositiveInfinity, double.NegativeInfinity);
+        for (var row = 0; row < Count; row++)
+        {
+            var value = _residuals[row];
+            (least, greatest) = (Math.Min(least, value), Math.Max(greatest, value));
+        }
+
+        return (least, greatest);
     }
 }

@@ -26,12 +26,13 @@ public readonly record struct RowInfluence(
 
     /// <summary>Every row, in order; none for a fit without residuals.</summary>
     public static IEnumerable<RowInfluence> OfAll(CheckedFit fit) => HasResiduals(fit.Fit)
-        ? Enumerable.Range(0, fit.Store.Residuals.Count).Select(i => Of(fit, i))
+        ? Enumerable.Range(0, fit.Store.Count).Select(i => Of(fit, i))
         : [];
 
     internal static bool HasResiduals(Fit fit) => fit.Sigma is > 0 && !fit.Perfect;
 
-    private static RowInfluence Of(CheckedFit fit, int i)
+    /// <param name="i">The row's position.</param>
+    internal static RowInfluence Of(CheckedFit fit, int i)
     {
         var (e, h) = (fit.Store.Residuals[i], Math.Min(1, fit.Store.Leverages[i]));
         var free = 1 - h;

@@ -4,7 +4,7 @@ namespace Auditor.Numerics.ResidualChecks;
 /// <param name="laggedResponse">Whether a lag of the response stands among the terms.</param>
 public sealed class SerialFit(CheckedFit fit, SerialOrder order, bool laggedResponse)
 {
-    private readonly Lazy<double[]> _residuals = new(() => order.Arrange(fit.Store.Residuals));
+    private readonly Lazy<double[]> _residuals = new(() => order.Arrange(fit.Store.Residuals.ToArray()));
 
     public CheckedFit Fit { get; } = fit;
 
@@ -17,7 +17,7 @@ public sealed class SerialFit(CheckedFit fit, SerialOrder order, bool laggedResp
     /// <summary>Why no check of the order can be made, or null.</summary>
     internal CheckImpediment? Impediment =>
         Fit.Impediment is { } why ? why
-        : Fit.Store.Copies.Any(copies => copies != 1) ? CheckImpediment.FrequencyWeights
+        : Fit.Store.Copies is { } all && all.Any(copies => copies != 1) ? CheckImpediment.FrequencyWeights
         : Fit.Store.Spread * Math.Sqrt(Fit.Fit.N) <= Fit.Noise ? CheckImpediment.EqualResiduals
         : null;
 

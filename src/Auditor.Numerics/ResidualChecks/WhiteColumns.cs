@@ -14,15 +14,11 @@ internal sealed class WhiteColumns
 
     private readonly ColumnShapes _shapes;
     private readonly (int A, int B)[] _products;
-    private readonly double[] _first;
-    private readonly double[] _second;
 
-    private WhiteColumns(ColumnShapes shapes, int capacity)
+    private WhiteColumns(ColumnShapes shapes)
     {
         _shapes = shapes;
         _products = [.. shapes.Products()];
-        _first = new double[capacity];
-        _second = new double[capacity];
     }
 
     /// <summary>All columns, the intercept included.</summary>
@@ -37,10 +33,8 @@ internal sealed class WhiteColumns
         }
 
         var shapes = new ColumnShapes(fit.Slopes);
-        var capacity = 0;
         foreach (var block in fit.Design.Blocks())
         {
-            capacity = Math.Max(capacity, block.Stride);
             shapes.Add(block);
             if (1 + shapes.Columns.Length + shapes.Products().Count() > Widest)
             {
@@ -48,10 +42,10 @@ internal sealed class WhiteColumns
             }
         }
 
-        return new WhiteColumns(shapes, capacity);
+        return new WhiteColumns(shapes);
     }
 
-    /// <summary>Fills columns 1 to <see cref="Count"/> - 1 of the derived block.</summary>
+    /// <summary>Several threads may fill blocks of their own. Fills columns 1 to <see cref="Count"/> - 1 of the derived block.</summary>
     public void Fill(RowBlock source, RowBlock derived)
     {
         var next = 1;
@@ -60,10 +54,10 @@ internal sealed class WhiteColumns
             source.Column(column).CopyTo(derived.Column(next++));
         }
 
+        Span<double> first = stackalloc double[source.Rows];
+        Span<double> second = stackalloc double[source.Rows];
         foreach (var (a, b) in _products)
         {
-            var first = _first.AsSpan(0, source.Rows);
-            var second = _second.AsSpan(0, source.Rows);
             _shapes.Scale(source, a, first);
             _shapes.Scale(source, b, second);
             BlockKernels.Multiply(first, second, derived.Column(next++));

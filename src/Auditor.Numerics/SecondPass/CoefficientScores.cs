@@ -6,7 +6,7 @@ namespace Auditor.Numerics.SecondPass;
 /// Sums over the rows for the sandwich covariances of the final model's own coefficients, in the coordinates of its orthonormal Q_F (r x r matrices):
 /// each is sum_i c_i omega_i q_i q_i' with c_i the copies of the row. They serve to reproduce what an author printed.
 /// </summary>
-public sealed class CoefficientScores : IAccumulator
+public sealed class CoefficientScores : IMergeable
 {
     private readonly int _rank;
     private double[] _weight = [];
@@ -43,6 +43,17 @@ public sealed class CoefficientScores : IAccumulator
         AddProducts(Hc0, block, 0);
         AddProducts(Hc2, block, 1);
         AddProducts(Hc3, block, 2);
+    }
+
+    public IMergeable Fork() => new CoefficientScores(Final);
+
+    public void Merge(IMergeable next)
+    {
+        var other = (CoefficientScores)next;
+        SquareSums.Add(Hc0, other.Hc0);
+        SquareSums.Add(Hc2, other.Hc2);
+        SquareSums.Add(Hc3, other.Hc3);
+        LeverageOne |= other.LeverageOne;
     }
 
     /// <param name="power">Of 1 - h in the denominator.</param>

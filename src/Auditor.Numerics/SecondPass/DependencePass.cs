@@ -7,14 +7,14 @@ internal sealed class DependencePass
 {
     private readonly FinalFactor _final;
     private readonly IReadOnlyList<AddedGroup> _groups;
-    private readonly GroupRows[] _rows;
+    private readonly Dictionary<int, GroupRows> _rows;
     private readonly (ClassPass? Cluster, ClassPass? Unit, ClassPass? Period) _by;
     private readonly (ColumnLevels? Cluster, ColumnLevels? Unit, ColumnLevels? Period) _levels;
 
     public DependencePass(FinalFactor final, IReadOnlyList<AddedGroup> groups, DependenceStructure structure, int capacity)
     {
         (_final, _groups) = (final, groups);
-        _rows = [.. groups.Select(group => new GroupRows(group, capacity))];
+        _rows = groups.Select(group => group.Rank).Distinct().ToDictionary(rank => rank, rank => new GroupRows(rank, capacity));
         ClassPass? By(RowClasses? classes, bool clusters) =>
             classes is null ? null : new ClassPass(classes, final, groups, capacity, clusters, structure.MostDoubles);
         var cluster = By(structure.Cluster, clusters: true);
@@ -78,10 +78,11 @@ internal sealed class DependencePass
         Array.ForEach(all, pass => pass.Add(block));
         for (var g = 0; g < _groups.Count; g++)
         {
-            _rows[g].Load(block);
+            var rows = _rows[_groups[g].Rank];
+            rows.Load(block, _groups[g]);
             foreach (var pass in all)
             {
-                pass.Add(block, g, _rows[g]);
+                pass.Add(block, g, rows);
             }
         }
     }

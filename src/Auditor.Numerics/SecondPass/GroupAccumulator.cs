@@ -3,117 +3,112 @@ using Auditor.Numerics.Factor;
 namespace Auditor.Numerics.SecondPass;
 
 /// <summary>Fills the sums of one group.</summary>
-internal sealed class GroupAccumulator : IAccumulator
+/// <param name="space">Shared by the groups that one thread works on in turn.</param>
+internal sealed class GroupAccumulator(AddedGroup group, GroupSpace space)
 {
     /// <summary>A leverage this near to 1 is 1: what is left of 1 - h is rounding.</summary>
     public const double LeverageOne = 1e-10;
 
+    /// <summary>The q x q sums of a group.</summary>
+    public const int Sums = 5;
+
     /// <summary>A squared row of Qz below this is rounding.</summary>
     private const double ZeroRow = 1e-24;
 
-    /// <summary>Sums of smaller groups are not worth a thread.</summary>
-    private const int LargeRank = 64;
-
-    private readonly AddedGroup _group;
-    private readonly ParallelOptions _threads;
-    private readonly GroupRows _rows;
-    private readonly (WeightedProducts Products, Func<ResidualBlock, int, double> Omega, double[] Weights)[] _sums;
-    private readonly double[] _alive;
-
-    /// <param name="threads">Most threads for the sums of a large group, each of which is computed by itself.</param>
-    public GroupAccumulator(AddedGroup group, int capacity, int threads)
-    {
-        _group = group;
-        _threads = new ParallelOptions { MaxDegreeOfParallelism = group.Rank < LargeRank ? 1 : threads };
-        _rows = new GroupRows(group, capacity);
-        _alive = new double[capacity];
-        Sums = new GroupSums(group.Rank);
-        _sums =
-        [
-            Sum(Sums.Hc0, (_, i) => Square(_rows.Residuals[i])),
-            Sum(Sums.Hc2, (block, i) => Square(_rows.Residuals[i]) / Complement(block, i)),
-            Sum(Sums.Hc3, (block, i) => Square(_rows.Residuals[i] / Complement(block, i))),
-            Sum(Sums.Score, (block, i) => Square(block.Residuals[i])),
-            Sum(Sums.Ceiling, (_, i) => Square(_rows.Fitted[i])),
-        ];
-
-        (WeightedProducts Products, Func<ResidualBlock, int, double> Omega, double[] Weights) Sum(double[,] into, Func<ResidualBlock, int, double> omega) =>
-            (new WeightedProducts(into, capacity), omega, new double[capacity]);
-    }
-
-    public GroupSums Sums { get; }
+    private readonly GroupSums _sums = new(group.Rank);
 
     public void Add(ResidualBlock block)
     {
-        if (_group.Rank == 0)
+        if (group.Rank == 0)
         {
             return;
         }
 
-        _rows.Load(block);
-        MarkRows(block);
-        if (_threads.MaxDegreeOfParallelism > 1)
+        var rows = space.Rows(group.Rank);
+        rows.Load(block, group);
+        MarkRows(block, rows.Squares);
+        space.EachSum(group.Rank, (at, weights, products) =>
         {
-            Parallel.For(0, _sums.Length, _threads, at => AddProducts(block, at));
-            return;
-        }
-
-        for (var at = 0; at < _sums.Length; at++)
-        {
-            AddProducts(block, at);
-        }
+            var used = weights.AsSpan(0, block.Rows);
+            var into = Weigh(at, block, rows, used);
+            BlockKernels.Multiply(used, space.Alive.AsSpan(0, block.Rows), used);
+            products.Add(into, rows.Columns, block.Rows, used);
+        });
     }
+
+    /// <summary>Takes in the sums over the rows that follow.</summary>
+    public void Merge(GroupAccumulator next) => _sums.Merge(next._sums);
 
     public GroupSums Finish()
     {
-        foreach (var sum in _sums)
+        foreach (var sum in new[] { _sums.Hc0, _sums.Hc2, _sums.Hc3, _sums.Score, _sums.Ceiling })
         {
-            sum.Products.Finish();
+            WeightedProducts.Finish(sum);
         }
 
-        return Sums;
+        return _sums;
     }
 
-    private static double Square(double value) => value * value;
-
-    /// <summary>1 - h(F + group), 1 where the row rests on the group alone: those estimators are not used then.</summary>
-    private double Complement(ResidualBlock block, int i)
+    /// <summary>Fills omega of each row and says which sum it is for.</summary>
+    private double[,] Weigh(int at, ResidualBlock block, GroupRows rows, Span<double> omega)
     {
-        var complement = 1 - block.Leverages[i] - _rows.Squares[i];
-        return complement <= LeverageOne ? 1 : complement;
+        var complements = space.Complements.AsSpan(0, block.Rows);
+        switch (at)
+        {
+            case 0:
+                BlockKernels.Multiply(rows.Residuals, rows.Residuals, omega);
+                return _sums.Hc0;
+            case 1:
+                BlockKernels.Multiply(rows.Residuals, rows.Residuals, omega);
+                BlockKernels.Divide(omega, complements, omega);
+                return _sums.Hc2;
+            case 2:
+                BlockKernels.Divide(rows.Residuals, complements, omega);
+                BlockKernels.Multiply(omega, omega, omega);
+                return _sums.Hc3;
+            case 3:
+                BlockKernels.Multiply(block.Residuals, block.Residuals, omega);
+                return _sums.Score;
+            default:
+                BlockKernels.Multiply(rows.Fitted, rows.Fitted, omega);
+                return _sums.Ceiling;
+        }
     }
 
-    private void MarkRows(ResidualBlock block)
+    /// <summary>
+    /// Copies and 1 - h(F + group) of each row, the latter 1 where the row rests on the group alone: HC2 and HC3 are not used then. Rows with h(F) = 1 do not count.
+    /// </summary>
+    private void MarkRows(ResidualBlock block, ReadOnlySpan<double> squares)
     {
+        var leverages = block.Leverages;
+        var (alive, complements) = (space.Alive, space.Complements);
         for (var i = 0; i < block.Rows; i++)
         {
             var copies = block.Copies?[i] ?? 1;
-            _alive[i] = copies;
-            if (1 - block.Leverages[i] <= LeverageOne)
+            var free = 1 - leverages[i];
+            alive[i] = copies;
+            complements[i] = free - squares[i];
+            if (complements[i] <= LeverageOne)
             {
-                _alive[i] = 0;
-                Sums.LeverageOneRows.Add(block.FirstRow + i);
-                continue;
+                MarkSpecial(block, i, free);
             }
 
-            if (1 - block.Leverages[i] - _rows.Squares[i] <= LeverageOne)
-            {
-                Sums.RestsOnRows.Add(block.FirstRow + i);
-            }
-
-            Sums.LeverageTrace += copies * block.Leverages[i] * _rows.Squares[i];
-            Sums.ContributingN += _rows.Squares[i] > ZeroRow ? copies : 0;
+            copies = alive[i];
+            _sums.LeverageTrace += copies * leverages[i] * squares[i];
+            _sums.ContributingN += squares[i] > ZeroRow ? copies : 0;
         }
     }
 
-    private void AddProducts(ResidualBlock block, int at)
+    private void MarkSpecial(ResidualBlock block, int i, double free)
     {
-        var (products, omega, weights) = _sums[at];
-        for (var i = 0; i < block.Rows; i++)
+        space.Complements[i] = 1;
+        if (free > LeverageOne)
         {
-            weights[i] = _alive[i] == 0 ? 0 : _alive[i] * omega(block, i);
+            _sums.RestsOnRows.Add(block.FirstRow + i);
+            return;
         }
 
-        products.Add(_rows.Columns, block.Rows, weights.AsSpan(0, block.Rows));
+        space.Alive[i] = 0;
+        _sums.LeverageOneRows.Add(block.FirstRow + i);
     }
 }

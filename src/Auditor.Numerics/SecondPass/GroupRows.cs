@@ -2,15 +2,15 @@ using Auditor.Numerics.Factor;
 
 namespace Auditor.Numerics.SecondPass;
 
-/// <summary>The rows of one group's orthonormal Qz for a block, with residual and leverage of F + group.</summary>
-internal sealed class GroupRows(AddedGroup group, int capacity)
+/// <summary>The rows of a group's orthonormal Qz for a block, with residual and leverage of F + group; for one group of that rank after another.</summary>
+internal sealed class GroupRows(int rank, int capacity)
 {
     private readonly double[] _residuals = new double[capacity];
     private readonly double[] _fitted = new double[capacity];
     private readonly double[] _squares = new double[capacity];
     private int _rows;
 
-    public PanelColumns Columns { get; } = new(capacity, group.Rank);
+    public PanelColumns Columns { get; } = new(capacity, rank);
 
     public Span<double> Column(int k) => Columns.Column(k);
 
@@ -23,7 +23,7 @@ internal sealed class GroupRows(AddedGroup group, int capacity)
     /// <summary>|qz|² of each row: h(F + group) - h(F).</summary>
     public ReadOnlySpan<double> Squares => _squares.AsSpan(0, _rows);
 
-    public void Load(ResidualBlock block)
+    public void Load(ResidualBlock block, AddedGroup group)
     {
         _rows = block.Rows;
         Columns.Begin(_rows);
@@ -33,15 +33,15 @@ internal sealed class GroupRows(AddedGroup group, int capacity)
         }
         else
         {
-            ComputeColumns(block);
+            ComputeColumns(block, group);
         }
 
-        ComputeSums(block);
+        ComputeSums(block, group);
     }
 
-    private void ComputeColumns(ResidualBlock block)
+    private void ComputeColumns(ResidualBlock block, AddedGroup group)
     {
-        for (var k = 0; k < group.Rank; k++)
+        for (var k = 0; k < rank; k++)
         {
             block.Prepared.Column(group.Kept[k]).CopyTo(Column(k));
         }
@@ -50,21 +50,18 @@ internal sealed class GroupRows(AddedGroup group, int capacity)
         Columns.Solve(group.Triangle);
     }
 
-    private void ComputeSums(ResidualBlock block)
+    private void ComputeSums(ResidualBlock block, AddedGroup group)
     {
         var fitted = _fitted.AsSpan(0, _rows);
         var squares = _squares.AsSpan(0, _rows);
         fitted.Clear();
         squares.Clear();
-        for (var k = 0; k < group.Rank; k++)
+        for (var k = 0; k < rank; k++)
         {
             BlockKernels.AddScaled(fitted, group.U[k], Column(k));
             BlockKernels.AddSquares(squares, Column(k));
         }
 
-        for (var i = 0; i < _rows; i++)
-        {
-            _residuals[i] = block.Residuals[i] - fitted[i];
-        }
+        BlockKernels.Subtract(block.Residuals, fitted, _residuals.AsSpan(0, _rows));
     }
 }

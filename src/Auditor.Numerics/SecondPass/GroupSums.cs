@@ -49,6 +49,20 @@ public sealed class GroupSums
     /// <summary>Positions of rows whose leverage becomes 1 when the group is added: HC2, HC3 and the score form do not exist then.</summary>
     public IReadOnlyList<int> RestsOn => RestsOnRows;
 
+    /// <summary>Takes in the sums over the rows that follow.</summary>
+    internal void Merge(GroupSums next)
+    {
+        SquareSums.Add(Hc0, next.Hc0);
+        SquareSums.Add(Hc2, next.Hc2);
+        SquareSums.Add(Hc3, next.Hc3);
+        SquareSums.Add(Score, next.Score);
+        SquareSums.Add(Ceiling, next.Ceiling);
+        LeverageTrace += next.LeverageTrace;
+        ContributingN += next.ContributingN;
+        LeverageOneRows.AddRange(next.LeverageOneRows);
+        RestsOnRows.AddRange(next.RestsOnRows);
+    }
+
     internal List<int> LeverageOneRows { get; } = [];
 
     internal List<int> RestsOnRows { get; } = [];

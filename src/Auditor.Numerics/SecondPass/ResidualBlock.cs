@@ -8,6 +8,16 @@ public interface IAccumulator
     void Add(ResidualBlock block);
 }
 
+/// <summary>An accumulator whose sums over parts of the rows can be added up.</summary>
+public interface IMergeable : IAccumulator
+{
+    /// <summary>One like it for other rows, which may be fed by another thread.</summary>
+    IMergeable Fork();
+
+    /// <summary>Takes in what was summed over the rows that follow.</summary>
+    void Merge(IMergeable next);
+}
+
 /// <summary>A block of rows with what the final model says of them; rows times sqrt(w), each of one copy.</summary>
 public sealed class ResidualBlock
 {
@@ -25,6 +35,9 @@ public sealed class ResidualBlock
     }
 
     public int Rows => Prepared.Rows;
+
+    /// <summary>Most rows that one holds.</summary>
+    internal int Capacity => _residuals.Length;
 
     /// <summary>0-based position of the first row within the row set.</summary>
     public int FirstRow { get; private set; }

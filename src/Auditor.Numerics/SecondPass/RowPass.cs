@@ -5,7 +5,7 @@ namespace Auditor.Numerics.SecondPass;
 /// <summary>The second and last pass over the rows: with the factor known, everything that needs residuals is summed at once.</summary>
 public static class RowPass
 {
-    /// <param name="others">Further accumulators, fed with the same blocks.</param>
+    /// <param name="others">Further accumulators, fed with the same blocks; those that are no <see cref="IMergeable"/> in the order of the rows.</param>
     /// <param name="structure">
     /// The declared dependence between rows; nothing is computed for what is absent. When the sums by class do not fit in memory, the rows are
     /// passed more than once.
@@ -19,33 +19,45 @@ public static class RowPass
         DependenceStructure? structure = null,
         int threads = 1)
     {
-        DependencePass? dependence = null;
-        var refinement = new Refinement(final);
-        ResidualBlock? residuals = null;
-        GroupAccumulator[] accumulators = [];
         var rows = final.Factor.IsExtended ? design.Extended ?? design : design;
-        foreach (var block in rows.Blocks())
+        IMergeable[] mergeable = [.. others.OfType<IMergeable>()];
+        var ordered = new OrderedSums(final, groups, [.. others.Where(other => other is not IMergeable)], structure);
+        var (stripes, inside) = (rows.Stripes, rows.Stripes > 1 ? 1 : threads);
+        var merged = new OrderedMerge<StripeSums>(stripes, (first, next) => first.Merge(next));
+
+        // What needs the rows in one sequence is a piece of work like a stripe, and the longest: it begins first.
+        var extra = ordered.IsEmpty || stripes == 1 ? 0 : 1;
+        InParallel.Each(stripes + extra, threads, piece =>
         {
-            if (residuals is null)
+            if (piece < extra)
             {
-                residuals = new ResidualBlock(final, block.Stride);
-                accumulators = [.. groups.Select(group => new GroupAccumulator(group, block.Stride, threads))];
-                dependence = structure is null ? null : new DependencePass(final, groups, structure, block.Stride);
+                Feed(final, rows.Blocks(), null, ordered);
+                return;
             }
 
+            var sums = new StripeSums(final, groups, mergeable, inside);
+            Feed(final, stripes == 1 ? rows.Blocks() : rows.Blocks(piece - extra), sums, stripes == 1 ? ordered : null);
+            merged.Take(piece - extra, sums);
+        });
+        var all = merged.Merged!;
+        all.HandOver(mergeable);
+        var groupSums = all.Finish();
+        ordered.Finish(rows, groupSums);
+        return new RowPassResult(all.Refinement.Finish(), groupSums);
+    }
+
+    private static void Feed(FinalFactor final, IEnumerable<RowBlock> blocks, StripeSums? sums, OrderedSums? ordered)
+    {
+        var refinement = sums?.Refinement ?? new Refinement(final);
+        ResidualBlock? residuals = null;
+        foreach (var block in blocks)
+        {
+            residuals ??= new ResidualBlock(final, block.Stride);
             refinement.Add(block);
             residuals.Load(block, refinement.Residuals);
-            foreach (var accumulator in accumulators.Concat(others))
-            {
-                accumulator.Add(residuals);
-            }
-
-            dependence?.Add(block, residuals);
+            sums?.Add(residuals);
+            ordered?.Add(block, residuals);
         }
-
-        GroupSums[] sums = [.. accumulators.Select(accumulator => accumulator.Finish())];
-        dependence?.Finish(rows, sums);
-        return new RowPassResult(refinement.Finish(), sums);
     }
 }
 

@@ -4,31 +4,31 @@ using Auditor.Numerics.Factor;
 
 namespace Auditor.Numerics.SecondPass;
 
-/// <summary>One q x q sum over the rows, sum_i w_i qz_i qz_i', block by block. Only the lower triangle is right until <see cref="Finish"/>.</summary>
-internal sealed class WeightedProducts(double[,] into, int capacity)
+/// <summary>q x q sums over the rows, sum_i w_i qz_i qz_i', block by block. Only the lower triangle is right until <see cref="Finish"/>.</summary>
+internal sealed class WeightedProducts(int capacity)
 {
     private readonly PanelColumns _scaled = new(capacity, 2);
-    private readonly int _q = into.GetLength(0);
 
-    public void Add(PanelColumns qz, int rows, ReadOnlySpan<double> weights)
+    public void Add(double[,] into, PanelColumns qz, int rows, ReadOnlySpan<double> weights)
     {
+        var q = into.GetLength(0);
         _scaled.Begin(rows);
-        if (_q < PanelColumns.Width)
+        if (q < PanelColumns.Width)
         {
-            AddEach(qz, weights);
+            AddEach(into, qz, weights);
             return;
         }
 
-        for (var first = 0; first < _q; first += PanelColumns.Tile)
+        for (var first = 0; first < q; first += PanelColumns.Tile)
         {
-            AddTile(qz, weights, first, Math.Min(first + PanelColumns.Tile, _q));
+            AddTile(into, qz, weights, first, Math.Min(first + PanelColumns.Tile, q));
         }
     }
 
     /// <summary>Makes the matrix symmetric.</summary>
-    public void Finish()
+    public static void Finish(double[,] into)
     {
-        for (var a = 0; a < _q; a++)
+        for (var a = 0; a < into.GetLength(0); a++)
         {
             for (var b = 0; b < a; b++)
             {
@@ -37,9 +37,9 @@ internal sealed class WeightedProducts(double[,] into, int capacity)
         }
     }
 
-    private void AddEach(PanelColumns qz, ReadOnlySpan<double> weights)
+    private void AddEach(double[,] into, PanelColumns qz, ReadOnlySpan<double> weights)
     {
-        for (var a = 0; a < _q; a++)
+        for (var a = 0; a < into.GetLength(0); a++)
         {
             BlockKernels.Multiply(qz.Column(a), weights, _scaled.Column(0));
             for (var b = 0; b <= a; b++)
@@ -50,11 +50,12 @@ internal sealed class WeightedProducts(double[,] into, int capacity)
     }
 
     /// <summary>Columns first to end - 1 of the lower triangle.</summary>
-    private void AddTile(PanelColumns qz, ReadOnlySpan<double> weights, int first, int end)
+    private void AddTile(double[,] into, PanelColumns qz, ReadOnlySpan<double> weights, int first, int end)
     {
-        for (var a = first; a < _q; a += 2)
+        var q = into.GetLength(0);
+        for (var a = first; a < q; a += 2)
         {
-            var two = a + 1 < _q;
+            var two = a + 1 < q;
             BlockKernels.Multiply(qz.Column(a), weights, _scaled.Column(0));
             if (two)
             {
@@ -64,18 +65,18 @@ internal sealed class WeightedProducts(double[,] into, int capacity)
             for (var p = first; p < Math.Min(end, a + 2); p += PanelColumns.Width)
             {
                 var (withA, withB) = PanelKernels.Dots(ref qz.First(p), qz.Stride, ref _scaled.First(0), ref _scaled.First(1), qz.Steps);
-                AddRow(a, p, withA);
+                AddRow(into, a, p, withA);
                 if (two)
                 {
-                    AddRow(a + 1, p, withB);
+                    AddRow(into, a + 1, p, withB);
                 }
             }
         }
     }
 
-    private void AddRow(int row, int first, Vector512<double> values)
+    private static void AddRow(double[,] into, int row, int first, Vector512<double> values)
     {
-        var target = MemoryMarshal.CreateSpan(ref into[row, first], Math.Min(PanelColumns.Width, _q - first));
+        var target = MemoryMarshal.CreateSpan(ref into[row, first], Math.Min(PanelColumns.Width, into.GetLength(0) - first));
         for (var b = 0; b < target.Length; b++)
         {
             target[b] += values[b];

@@ -88,5 +88,5 @@ internal sealed class CheckFigure(RowSubset rows, double significance)
         _ => "sampling weights: the check's reference distribution does not apply",
     };
 
-    private int? Row(int? position) => position is int place ? rows.Rows[place] + 1 : null;
+    private int? Row(int? position) => position is int place ? rows[place] + 1 : null;
 }

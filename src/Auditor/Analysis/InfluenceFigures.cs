@@ -13,11 +13,11 @@ internal static class InfluenceFigures
     /// <param name="label">The declared row label; null when there is none.</param>
     public static Influence Of(InfluenceSummary summary, RowSubset subset, DataColumn? label)
     {
-        int Row(int position) => subset.Rows[position] + 1;
+        int Row(int position) => subset[position] + 1;
         return new Influence(
             [.. summary.LeverageOne.Select(Row)],
             [.. summary.Largest.Select(row => new InfluentialRow(
-                Row(row.Position), label?.Text(subset.Rows[row.Position]), row.Leverage, row.StudentisedResidual, row.CooksDistance, row.Dffits))])
+                Row(row.Position), label?.Text(subset[row.Position]), row.Leverage, row.StudentisedResidual, row.CooksDistance, row.Dffits))])
         {
             Why = summary.HasResiduals ? null : "the final model leaves no residuals: it fits to rounding, or no degrees of freedom are left",
         };

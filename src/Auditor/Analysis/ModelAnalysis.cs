@@ -2,6 +2,7 @@ using Auditor.Analysis.Claims;
 using Auditor.Declaration;
 using Auditor.Design;
 using Auditor.Numerics.ResidualChecks;
+using Auditor.Numerics.Storage;
 using Auditor.Policies;
 using Auditor.Results;
 using Auditor.Rows;
@@ -14,7 +15,7 @@ internal static class ModelAnalysis
     public static Reading<AuditResults> Run(ModelDeclaration declaration, BoundModel model, IReadOnlyCollection<string> mentioned, Policy policy, RunSettings run)
     {
         run.Enter(AuditStep.RowSets);
-        var selection = RowSelection.Of(model);
+        var selection = RowSelection.Of(model, run.Threads);
         var common = policy.RowSet == RowSet.Common;
         if ((common ? selection.Common : selection.Final).Count == 0)
         {
@@ -27,7 +28,7 @@ internal static class ModelAnalysis
         var sampling = model.Weights?.Kind == WeightKind.Sampling;
         var main = (common ? fits.Common : fits.Final)!;
         run.Enter(AuditStep.Influence);
-        var fit = CheckedFits.Of(model, main, fits.Residuals, sampling);
+        var fit = CheckedFits.Of(model, main, fits.Residuals, sampling, run.Threads);
         var influence = InfluenceSummary.Of(fit, InfluenceFigures.Shown);
         run.Enter(AuditStep.Checks);
         var checks = ResidualCheckFigures.Of(fit, influence, SerialBinding.Of(model, main), main.Rows, policy.Significance, run.Seed);
@@ -89,7 +90,7 @@ internal static class ModelAnalysis
         var rows = common ? fits.Common : fits.Own(group);
         return new ExclusionInputs(
             ProductsElsewhere.Of(model, group),
-            rows is null ? [] : [.. rows[group].Sums.RestsOn.Select(position => rows.Rows.Rows[position] + 1)]);
+            rows is null ? [] : [.. rows[group].Sums.RestsOn.Select(position => rows.Rows[position] + 1)]);
     }
 }
 
@@ -99,5 +100,8 @@ internal static class ModelAnalysis
 /// <param name="Pictures">Whether the points of the pictures are wanted.</param>
 internal sealed record RunSettings(int Threads, long Seed, bool Pictures, IProgress<AuditStep>? Steps = null)
 {
+    /// <summary>Where what has one value a row is kept.</summary>
+    public CellStore Store { get; init; } = CellStore.Memory;
+
     public void Enter(AuditStep step) => Steps?.Report(step);
 }

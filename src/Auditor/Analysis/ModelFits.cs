@@ -33,7 +33,7 @@ internal sealed class ModelFits
     /// <param name="run">Its threads are for row sets, then within each; no result depends on them.</param>
     public static ModelFits Compute(BoundModel model, RowSelection selection, RowSubset main, RowSet? pictured, bool scored, RunSettings run)
     {
-        var residuals = new ResidualStore();
+        var residuals = new ResidualStore(main.Count, run.Store);
         IReadOnlySet<int> Pictured(RowSubset rows) => Enumerable.Range(0, model.Groups.Count)
             .Where(group => pictured is RowSet set && rows.Equals(set == RowSet.Common ? selection.Common : selection.Own[group])).ToHashSet();
 

@@ -32,10 +32,10 @@ internal static class PlotFigures
     private static ResidualPlots Plots(CheckedFit fit, IReadOnlyList<RowInfluence> all, RowInfluence[] studentised, double[] fitted, bool weighted)
     {
         var (store, high) = (fit.Store, 2 * fit.Fit.Rank / fit.Fit.N);
-        PlotPoint Point(RowInfluence row, double x, double y) => new(x, y, store.Copies[row.Position]);
+        PlotPoint Point(RowInfluence row, double x, double y) => new(x, y, store.CopiesOf(row.Position));
         return new ResidualPlots(
             PointClouds.Of([.. all.Select(row => Point(row, fitted[row.Position], store.Residuals[row.Position]))], trend: true),
-            NormalPlots.Of(studentised.Select(row => (Standardised(fit, row), store.Copies[row.Position]))),
+            NormalPlots.Of(studentised.Select(row => (Standardised(fit, row), store.CopiesOf(row.Position)))),
             PointClouds.Of([.. studentised.Select(row => Point(row, fitted[row.Position], Math.Sqrt(Math.Abs(row.StudentisedResidual!.Value))))], trend: true),
             PointClouds.Of([.. studentised.Select(row => Point(row, row.Leverage, row.StudentisedResidual!.Value))], trend: false),
             [], high, all.Count(row => row.Leverage > high), weighted, all.Count - studentised.Length);
@@ -48,6 +48,6 @@ internal static class PlotFigures
     [
         .. studentised.Where(row => row.CooksDistance > 0).OrderByDescending(row => row.CooksDistance).ThenBy(row => row.Position).Take(Named)
             .Select(row => new NamedPoint(
-                rows.Rows[row.Position] + 1, label?.Text(rows.Rows[row.Position]), row.Leverage, row.StudentisedResidual!.Value, row.CooksDistance!.Value)),
+                rows[row.Position] + 1, label?.Text(rows[row.Position]), row.Leverage, row.StudentisedResidual!.Value, row.CooksDistance!.Value)),
     ];
 }

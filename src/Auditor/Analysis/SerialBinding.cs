@@ -43,7 +43,7 @@ internal static class SerialBinding
 
         var units = structure.Units?.Codes ?? new int[rows.Rows.Count];
         long[] periods = time.Steps is { } counted
-            ? [.. rows.Rows.Rows.Select(row => counted[row])]
+            ? [.. rows.Rows.Select(row => counted[row])]
             : [.. structure.Periods!.Codes.Select(code => (long)code)];
         return time.Steps is null && time.Column is Data.DateColumn
             ? (null, NoPeriods)

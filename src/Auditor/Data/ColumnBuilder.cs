@@ -1,3 +1,5 @@
+using Auditor.Numerics.Storage;
+
 namespace Auditor.Data;
 
 /// <summary>
@@ -22,9 +24,11 @@ internal abstract class ColumnBuilder(string name)
     public abstract void Resize(int rows);
 
     /// <summary>The next rows; parts are begun in the order of their rows.</summary>
-    public ColumnPart NextPart()
+    /// <param name="first">The first of them.</param>
+    /// <param name="count">How many there may be; for all of them there is room.</param>
+    public ColumnPart NextPart(int first, int count)
     {
-        _parts.Add(NewPart());
+        _parts.Add(NewPart(first, count));
         return _parts[^1];
     }
 
@@ -34,15 +38,15 @@ internal abstract class ColumnBuilder(string name)
     /// <summary>One problem for each cell that does not read as the kind: the first ones in full, the others counted.</summary>
     public IEnumerable<Problem> Problems(string file) => BadCells.Joined(_parts.Select(part => part.Bad)).Problems(file, Name, Kind);
 
-    public static ColumnBuilder Of(ColumnKind kind, string name, MissingTexts missing) => kind switch
+    public static ColumnBuilder Of(ColumnKind kind, string name, MissingTexts missing, CellStore store) => kind switch
     {
-        ColumnKind.Number => new NumberColumnBuilder(name, missing),
-        ColumnKind.Date => new DateColumnBuilder(name, missing),
-        ColumnKind.Levels => new LevelsColumnBuilder(name, missing),
+        ColumnKind.Number => new NumberColumnBuilder(name, missing, store),
+        ColumnKind.Date => new DateColumnBuilder(name, missing, store),
+        ColumnKind.Levels => new LevelsColumnBuilder(name, missing, store),
         _ => new TextColumnBuilder(name, missing),
     };
 
-    protected abstract ColumnPart NewPart();
+    protected abstract ColumnPart NewPart(int first, int count);
 }
 
 /// <summary>Some consecutive rows of a column that is being made.</summary>
@@ -60,4 +64,7 @@ internal abstract class ColumnPart(MissingTexts missing)
     public abstract bool Set(int row, ReadOnlySpan<char> cell);
 
     public abstract void SetMissing(int row);
+
+    /// <summary>To be called once all its rows are set.</summary>
+    public abstract void Close();
 }

@@ -1,15 +1,21 @@
 using System.Globalization;
+using Auditor.Numerics.Storage;
 
 namespace Auditor.Data;
 
 /// <summary>Finite numbers; NaN is a missing value.</summary>
-public sealed class NumberColumn(string name, double[] values) : DataColumn(name)
+public sealed class NumberColumn(string name, Cells<double> values) : DataColumn(name)
 {
-    public double[] Values { get; } = values;
+    public NumberColumn(string name, double[] values)
+        : this(name, new ArrayCells<double>(values))
+    {
+    }
+
+    public Cells<double> Values { get; } = values;
 
     public override ColumnKind Kind => ColumnKind.Number;
 
-    public override int Length => Values.Length;
+    public override int Length => Values.Count;
 
     public override bool IsMissing(int row) => double.IsNaN(Values[row]);
 
@@ -17,16 +23,21 @@ public sealed class NumberColumn(string name, double[] values) : DataColumn(name
 }
 
 /// <summary>Codes into the distinct texts of the column; -1 is a missing value. Which level is the reference is decided when terms are bound.</summary>
-public sealed class LevelsColumn(string name, int[] codes, IReadOnlyList<string> texts) : DataColumn(name)
+public sealed class LevelsColumn(string name, Cells<int> codes, IReadOnlyList<string> texts) : DataColumn(name)
 {
-    public int[] Codes { get; } = codes;
+    public LevelsColumn(string name, int[] codes, IReadOnlyList<string> texts)
+        : this(name, new ArrayCells<int>(codes), texts)
+    {
+    }
+
+    public Cells<int> Codes { get; } = codes;
 
     /// <summary>The distinct texts, numbered as they first appear in the source (so numbering does not depend on how it was read).</summary>
     public IReadOnlyList<string> Texts { get; } = texts;
 
     public override ColumnKind Kind => ColumnKind.Levels;
 
-    public override int Length => Codes.Length;
+    public override int Length => Codes.Count;
 
     public override bool IsMissing(int row) => Codes[row] < 0;
 
@@ -34,15 +45,20 @@ public sealed class LevelsColumn(string name, int[] codes, IReadOnlyList<string>
 }
 
 /// <summary>Days since 0001-01-01 (DateOnly.DayNumber); <see cref="Missing"/> is a missing value.</summary>
-public sealed class DateColumn(string name, int[] days) : DataColumn(name)
+public sealed class DateColumn(string name, Cells<int> days) : DataColumn(name)
 {
     public const int Missing = int.MinValue;
 
-    public int[] Days { get; } = days;
+    public DateColumn(string name, int[] days)
+        : this(name, new ArrayCells<int>(days))
+    {
+    }
+
+    public Cells<int> Days { get; } = days;
 
     public override ColumnKind Kind => ColumnKind.Date;
 
-    public override int Length => Days.Length;
+    public override int Length => Days.Count;
 
     public override bool IsMissing(int row) => Days[row] == Missing;
 

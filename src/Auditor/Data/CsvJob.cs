@@ -31,6 +31,7 @@ internal sealed class CsvJob
             }
 
             Check(chunk, rows.Count);
+            Array.ForEach(_parts, part => part.Close());
             (Rows, Unusable) = (rows.Count, rows.Unusable);
         }
         catch (Exception fault)

@@ -1,3 +1,5 @@
+using Auditor.Numerics.Storage;
+
 namespace Auditor.Data;
 
 /// <summary>How far the reading of a file has come.</summary>
@@ -10,7 +12,11 @@ public readonly record struct ReadingProgress(long Rows, long Bytes, long? AllBy
 /// <param name="Rows">The number of data rows if it is known or nearly; a wrong number costs time, nothing else. 0: estimated from the first rows.</param>
 /// <param name="Threads">Most threads to read with. No result depends on it.</param>
 /// <param name="ChunkBytes">Bytes that a thread takes at a time. No result depends on it.</param>
-public sealed record CsvReading(int Rows = 0, int Threads = 1, int ChunkBytes = 1 << 19, IProgress<ReadingProgress>? Progress = null);
+public sealed record CsvReading(int Rows = 0, int Threads = 1, int ChunkBytes = 1 << 19, IProgress<ReadingProgress>? Progress = null)
+{
+    /// <summary>Where the columns are kept, once it is known what they hold.</summary>
+    public Func<TableSize, CellStore> Store { get; init; } = _ => CellStore.Memory;
+}
 
 /// <summary>
 /// One pass over data rows, straight into the columns' arrays. The threads take chunks in the order of the file, and the rows of a chunk are counted before
@@ -89,7 +95,7 @@ internal sealed class CsvPass(CsvFile file, int fields, int[] positions, IReadOn
             Resize(rows);
         }
 
-        var job = new CsvJob(chunk, [.. builders.Select(builder => builder.NextPart())]);
+        var job = new CsvJob(chunk, [.. builders.Select(builder => builder.NextPart(chunk.Row, chunk.Rows))]);
         _jobs.Add(job);
         _busy.Enter();
         reading.Progress?.Report(room.Progress(chunk));

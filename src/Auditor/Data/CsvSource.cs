@@ -1,3 +1,5 @@
+using Auditor.Numerics.Storage;
+
 namespace Auditor.Data;
 
 /// <summary>
@@ -30,14 +32,15 @@ public sealed class CsvSource(string name, Func<Stream> open, DelimitedFormat fo
 
     private Reading<DataTable> Read(IReadOnlyList<string> names, IReadOnlyList<ColumnRequest> requests, MissingTexts missing)
     {
-        var kinds = Guesses(names, requests, missing);
-        var pass = Pass(names, [.. requests.Zip(kinds, (request, kind) => (request.Column, kind))], missing, _reading);
+        List<ColumnKind> kinds = [.. Guesses(names, requests, missing)];
+        var store = _reading.Store(new TableSize(_reading.Rows, kinds));
+        var pass = Pass(names, [.. requests.Zip(kinds, (request, kind) => (request.Column, kind))], missing, _reading, store);
         if (pass.Rows == 0 && pass.Problems.Count == 0)
         {
             return Reading<DataTable>.Failed(new Problem(name, null, "found column names and no data rows, expected at least one row"));
         }
 
-        var builders = Corrected(names, requests, missing, pass);
+        var builders = Corrected(names, requests, missing, pass, store);
         IReadOnlyList<Problem> problems = [.. pass.Problems, .. builders.SelectMany(builder => builder.Problems(name))];
         return problems.Count == 0
             ? Reading<DataTable>.Of(new DataTable(pass.Rows, names, [.. builders.Select(builder => builder.Build())]))
@@ -47,12 +50,12 @@ public sealed class CsvSource(string name, Func<Stream> open, DelimitedFormat fo
     /// <summary>The kinds that the first rows have. Problems among them come again in the full pass.</summary>
     private IEnumerable<ColumnKind> Guesses(IReadOnlyList<string> names, IReadOnlyList<ColumnRequest> requests, MissingTexts missing)
     {
-        var sample = Pass(names, [.. requests.Select(request => (request.Column, ColumnKind.Levels))], missing, new CsvReading(ChunkBytes: SampleBytes), most: 1);
+        var sample = Pass(names, [.. requests.Select(request => (request.Column, ColumnKind.Levels))], missing, new CsvReading(ChunkBytes: SampleBytes), CellStore.Memory, most: 1);
         return requests.Zip(sample.Builders, (request, builder) => request.Kind ?? builder.Counts.Kind);
     }
 
     /// <summary>The builders, those of undeclared columns whose cells turned out to be of another kind than guessed replaced by right ones.</summary>
-    private List<ColumnBuilder> Corrected(IReadOnlyList<string> names, IReadOnlyList<ColumnRequest> requests, MissingTexts missing, FullPass pass)
+    private List<ColumnBuilder> Corrected(IReadOnlyList<string> names, IReadOnlyList<ColumnRequest> requests, MissingTexts missing, FullPass pass, CellStore store)
     {
         var wrong = requests.Zip(pass.Builders)
             .Where(pair => pair.First.Kind is null && pair.Second.Counts.Kind != pair.Second.Kind)
@@ -62,14 +65,14 @@ public sealed class CsvSource(string name, Func<Stream> open, DelimitedFormat fo
             return pass.Builders;
         }
 
-        var again = Pass(names, wrong, missing, _reading with { Rows = pass.Rows }).Builders.ToDictionary(builder => builder.Name, StringComparer.Ordinal);
+        var again = Pass(names, wrong, missing, _reading with { Rows = pass.Rows }, store).Builders.ToDictionary(builder => builder.Name, StringComparer.Ordinal);
         return [.. pass.Builders.Select(builder => again.GetValueOrDefault(builder.Name, builder))];
     }
 
     private FullPass Pass(
-        IReadOnlyList<string> names, List<(string Column, ColumnKind Kind)> columns, MissingTexts missing, CsvReading how, int most = int.MaxValue)
+        IReadOnlyList<string> names, List<(string Column, ColumnKind Kind)> columns, MissingTexts missing, CsvReading how, CellStore store, int most = int.MaxValue)
     {
-        List<ColumnBuilder> builders = [.. columns.Select(column => ColumnBuilder.Of(column.Kind, column.Column, missing))];
+        List<ColumnBuilder> builders = [.. columns.Select(column => ColumnBuilder.Of(column.Kind, column.Column, missing, store))];
         var pass = new CsvPass(_file, names.Count, [.. columns.Select(column => CsvHeader.Places(names, column.Column)[0] - 1)], builders, how);
         var problems = pass.Run(most);
         return new FullPass(builders, pass.Rows, problems);

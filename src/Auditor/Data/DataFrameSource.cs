@@ -1,5 +1,6 @@
 using System.Collections;
 using System.Globalization;
+using Auditor.Numerics.Storage;
 using Microsoft.Data.Analysis;
 
 namespace Auditor.Data;
@@ -64,9 +65,10 @@ public sealed class DataFrameSource(string name, DataFrame frame) : IDataSource
 
     private static ColumnBuilder Fill(DataFrameColumn column, string columnName, ColumnKind kind, MissingTexts missing)
     {
-        var builder = ColumnBuilder.Of(kind, columnName, missing);
-        builder.Resize(checked((int)column.Length));
-        var part = builder.NextPart();
+        var builder = ColumnBuilder.Of(kind, columnName, missing, CellStore.Memory);
+        var rows = checked((int)column.Length);
+        builder.Resize(rows);
+        var part = builder.NextPart(0, rows);
         var row = 0;
         foreach (var cell in (IEnumerable)column)
         {
@@ -82,6 +84,7 @@ public sealed class DataFrameSource(string name, DataFrame frame) : IDataSource
             row++;
         }
 
+        part.Close();
         return builder;
     }
 

@@ -22,8 +22,9 @@ public static class DataFrameView
 
     private static DoubleDataFrameColumn Wrapped(NumberColumn column)
     {
-        var (validity, missing) = Validity(column.Values);
-        return new DoubleDataFrameColumn(column.Name, new ArrayBytes(column.Values).Memory, validity, column.Length, missing);
+        var values = column.Values.ToArray();
+        var (validity, missing) = Validity(values);
+        return new DoubleDataFrameColumn(column.Name, new ArrayBytes(values).Memory, validity, column.Length, missing);
     }
 
     /// <summary>One bit a row, lowest first, 1 where there is a value; and the number of rows without one.</summary>

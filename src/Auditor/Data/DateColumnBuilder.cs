@@ -1,19 +1,22 @@
+using Auditor.Numerics.Storage;
+
 namespace Auditor.Data;
 
-internal sealed class DateColumnBuilder(string name, MissingTexts missing) : ColumnBuilder(name)
+internal sealed class DateColumnBuilder(string name, MissingTexts missing, CellStore store) : ColumnBuilder(name)
 {
-    private int[] _days = [];
+    private readonly WritableCells<int> _days = store.Create<int>();
 
     public override ColumnKind Kind => ColumnKind.Date;
 
-    public override void Resize(int rows) => Arrays.Resize(ref _days, rows);
+    public override void Resize(int rows) => _days.Resize(rows);
 
     public override DataColumn Build() => new DateColumn(Name, _days);
 
-    protected override ColumnPart NewPart() => new Part(_days, missing);
+    protected override ColumnPart NewPart(int first, int count) => new Part(_days, first, count, missing);
 
-    private sealed class Part(int[] days, MissingTexts missing) : ColumnPart(missing)
+    private sealed class Part(WritableCells<int> cells, int first, int count, MissingTexts missing) : ColumnPart(missing)
     {
+        private readonly CellRange<int> _range = cells.Open(first, count, kept: false);
         private int _dates;
         private KindCounts _rest;
 
@@ -24,7 +27,7 @@ internal sealed class DateColumnBuilder(string name, MissingTexts missing) : Col
             if (CellText.TryDay(cell, out var day) && !MissingTexts.Contains(cell))
             {
                 _dates++;
-                days[row] = day;
+                _range.Values[row - _range.Offset] = day;
                 return true;
             }
 
@@ -34,6 +37,8 @@ internal sealed class DateColumnBuilder(string name, MissingTexts missing) : Col
             return isMissing;
         }
 
-        public override void SetMissing(int row) => days[row] = DateColumn.Missing;
+        public override void SetMissing(int row) => _range.Values[row - _range.Offset] = DateColumn.Missing;
+
+        public override void Close() => cells.Close(_range);
     }
 }

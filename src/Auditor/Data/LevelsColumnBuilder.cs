@@ -1,16 +1,18 @@
+using Auditor.Numerics.Storage;
+
 namespace Auditor.Data;
 
 /// <summary>
 /// Codes numbered as the texts first appear; the texts are kept as they stand, white space included. Each part has a numbering of its own, in the
 /// order of its rows; the column's follows from those of the parts in turn, so it does not depend on which was filled first.
 /// </summary>
-internal sealed class LevelsColumnBuilder(string name, MissingTexts missing) : ColumnBuilder(name)
+internal sealed class LevelsColumnBuilder(string name, MissingTexts missing, CellStore store) : ColumnBuilder(name)
 {
-    private int[] _codes = [];
+    private readonly WritableCells<int> _codes = store.Create<int>();
 
     public override ColumnKind Kind => ColumnKind.Levels;
 
-    public override void Resize(int rows) => Arrays.Resize(ref _codes, rows);
+    public override void Resize(int rows) => _codes.Resize(rows);
 
     public override DataColumn Build()
     {
@@ -18,13 +20,13 @@ internal sealed class LevelsColumnBuilder(string name, MissingTexts missing) : C
         var byText = new Dictionary<string, int>(StringComparer.Ordinal);
         foreach (var part in Parts.Cast<Part>())
         {
-            part.Renumber(_codes, [.. part.Texts.Select(text => CodeOf(text, texts, byText))]);
+            part.Renumber([.. part.Texts.Select(text => CodeOf(text, texts, byText))]);
         }
 
         return new LevelsColumn(Name, _codes, texts);
     }
 
-    protected override ColumnPart NewPart() => new Part(_codes, missing);
+    protected override ColumnPart NewPart(int first, int count) => new Part(_codes, first, count, missing);
 
     private static int CodeOf(string text, List<string> texts, Dictionary<string, int> byText)
     {
@@ -40,7 +42,8 @@ internal sealed class LevelsColumnBuilder(string name, MissingTexts missing) : C
 
     private sealed class Part : ColumnPart
     {
-        private readonly int[] _codes;
+        private readonly WritableCells<int> _cells;
+        private readonly CellRange<int> _range;
 
         /// <summary>Texts that mean "no value" stand here with -1.</summary>
         private readonly Dictionary<string, int> _byText = new(StringComparer.Ordinal);
@@ -49,10 +52,10 @@ internal sealed class LevelsColumnBuilder(string name, MissingTexts missing) : C
         private int _first = int.MaxValue;
         private int _last = -1;
 
-        public Part(int[] codes, MissingTexts missing)
+        public Part(WritableCells<int> cells, int first, int count, MissingTexts missing)
             : base(missing)
         {
-            _codes = codes;
+            (_cells, _range) = (cells, cells.Open(first, count, kept: false));
             _lookup = _byText.GetAlternateLookup<ReadOnlySpan<char>>();
         }
 
@@ -77,18 +80,23 @@ internal sealed class LevelsColumnBuilder(string name, MissingTexts missing) : C
         public override void SetMissing(int row) => Put(row, -1);
 
         /// <summary>Puts the column's codes in the place of the part's.</summary>
-        public void Renumber(int[] codes, int[] codeOf)
+        public void Renumber(int[] codeOf)
         {
-            if (codeOf.Index().All(pair => pair.Index == pair.Item))
+            if (_last < 0 || codeOf.Index().All(pair => pair.Index == pair.Item))
             {
                 return;
             }
 
-            for (var row = _first; row <= _last; row++)
+            var range = _cells.Open(_first, _last - _first + 1, kept: true);
+            foreach (ref var code in range.Values.AsSpan(_first - range.Offset, range.Count))
             {
-                codes[row] = codes[row] < 0 ? -1 : codeOf[codes[row]];
+                code = code < 0 ? -1 : codeOf[code];
             }
+
+            _cells.Close(range);
         }
+
+        public override void Close() => _cells.Close(_range);
 
         private int NewCode(ReadOnlySpan<char> cell)
         {
@@ -109,7 +117,7 @@ internal sealed class LevelsColumnBuilder(string name, MissingTexts missing) : C
         {
             _first = Math.Min(_first, row);
             _last = Math.Max(_last, row);
-            _codes[row] = code;
+            _range.Values[row - _range.Offset] = code;
         }
     }
 }

@@ -1,19 +1,22 @@
+using Auditor.Numerics.Storage;
+
 namespace Auditor.Data;
 
-internal sealed class NumberColumnBuilder(string name, MissingTexts missing) : ColumnBuilder(name)
+internal sealed class NumberColumnBuilder(string name, MissingTexts missing, CellStore store) : ColumnBuilder(name)
 {
-    private double[] _values = [];
+    private readonly WritableCells<double> _values = store.Create<double>();
 
     public override ColumnKind Kind => ColumnKind.Number;
 
-    public override void Resize(int rows) => Arrays.Resize(ref _values, rows);
+    public override void Resize(int rows) => _values.Resize(rows);
 
     public override DataColumn Build() => new NumberColumn(Name, _values);
 
-    protected override ColumnPart NewPart() => new Part(_values, missing);
+    protected override ColumnPart NewPart(int first, int count) => new Part(_values, first, count, missing);
 
-    private sealed class Part(double[] values, MissingTexts missing) : ColumnPart(missing)
+    private sealed class Part(WritableCells<double> cells, int first, int count, MissingTexts missing) : ColumnPart(missing)
     {
+        private readonly CellRange<double> _range = cells.Open(first, count, kept: false);
         private int _numbers;
         private KindCounts _rest;
 
@@ -24,7 +27,7 @@ internal sealed class NumberColumnBuilder(string name, MissingTexts missing) : C
             if (CellText.TryNumber(cell, out var value) && !(MissingTexts.HasNumbers && MissingTexts.Contains(cell)))
             {
                 _numbers++;
-                values[row] = value;
+                _range.Values[row - _range.Offset] = value;
                 return true;
             }
 
@@ -34,6 +37,8 @@ internal sealed class NumberColumnBuilder(string name, MissingTexts missing) : C
             return isMissing;
         }
 
-        public override void SetMissing(int row) => values[row] = double.NaN;
+        public override void SetMissing(int row) => _range.Values[row - _range.Offset] = double.NaN;
+
+        public override void Close() => cells.Close(_range);
     }
 }

@@ -6,11 +6,11 @@ internal sealed class TextColumnBuilder(string name, MissingTexts missing) : Col
 
     public override ColumnKind Kind => ColumnKind.Text;
 
-    public override void Resize(int rows) => Arrays.Resize(ref _values, rows);
+    public override void Resize(int rows) => Array.Resize(ref _values, rows);
 
     public override DataColumn Build() => new TextColumn(Name, _values);
 
-    protected override ColumnPart NewPart() => new Part(_values, missing);
+    protected override ColumnPart NewPart(int first, int count) => new Part(_values, missing);
 
     private sealed class Part(string?[] values, MissingTexts missing) : ColumnPart(missing)
     {
@@ -24,5 +24,9 @@ internal sealed class TextColumnBuilder(string name, MissingTexts missing) : Col
         }
 
         public override void SetMissing(int row) => values[row] = null;
+
+        public override void Close()
+        {
+        }
     }
 }

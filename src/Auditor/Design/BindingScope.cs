@@ -5,13 +5,13 @@ namespace Auditor.Design;
 
 /// <summary>What terms are bound to, and what was found while binding.</summary>
 internal sealed class BindingScope(
-    DataTable table, int[] keptRows, IReadOnlyDictionary<string, ColumnDeclaration> declared, Period? period, TimeOrder? order, string file)
+    DataTable table, RowSubset keptRows, IReadOnlyDictionary<string, ColumnDeclaration> declared, Period? period, TimeOrder? order, string file)
 {
     private readonly Dictionary<string, LevelCoding> _codings = new(StringComparer.Ordinal);
     private readonly HashSet<BindingNote> _noted = [];
     private readonly List<BindingNote> _notes = [];
 
-    public int[] KeptRows { get; } = keptRows;
+    public RowSubset KeptRows { get; } = keptRows;
 
     public Period? Period { get; } = period;
 

@@ -4,10 +4,10 @@ using Auditor.Declaration;
 namespace Auditor.Design;
 
 /// <summary>A declaration bound to its data: every term can make its columns, nothing is fitted yet.</summary>
-/// <param name="KeptRows">0-based rows of the table that the row filter leaves, ascending.</param>
+/// <param name="KeptRows">Rows of the table that the row filter leaves.</param>
 public sealed record BoundModel(
     DataTable Table,
-    int[] KeptRows,
+    RowSubset KeptRows,
     bool Intercept,
     BoundTerm Response,
     IReadOnlyList<BoundTerm> FinalTerms,

@@ -55,7 +55,7 @@ public sealed record RowStructure(
 /// <param name="Label">What the first part ends at, for readers.</param>
 public sealed record BoundSplit(string Label, Func<int, bool> HasPlace, Func<int, bool> IsFirst)
 {
-    internal SplitRows Among(RowSubset rows) => new([.. rows.Rows.Select(IsFirst)], rows.Rows.Count(row => !HasPlace(row)));
+    internal SplitRows Among(RowSubset rows) => new([.. rows.Select(IsFirst)], rows.Count(row => !HasPlace(row)));
 }
 
 /// <summary>The two parts of the rows of a fit.</summary>

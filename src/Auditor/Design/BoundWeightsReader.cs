@@ -11,7 +11,7 @@ internal static class BoundWeightsReader
     private const double LargestWeight = 1e50;
     private const double MostObservations = int.MaxValue;
 
-    public static BoundWeights? Read(ModelDeclaration declaration, DataTable table, int[] rows, List<Problem> problems)
+    public static BoundWeights? Read(ModelDeclaration declaration, DataTable table, RowSubset rows, List<Problem> problems)
     {
         if (declaration.Data.Weights is not { } declared)
         {

@@ -50,7 +50,7 @@ public sealed class ClassedRows
     public RowGroups Among(RowSubset rows)
     {
         var present = new bool[Count];
-        foreach (var row in rows.Rows)
+        foreach (var row in rows)
         {
             if (_codes[row] is >= 0 and var code)
             {
@@ -65,7 +65,7 @@ public sealed class ClassedRows
             anew[old] = code;
         }
 
-        return new RowGroups(Name, [.. rows.Rows.Select(row => _codes[row] < 0 ? -1 : anew[_codes[row]])], kept.Length, code => Label(kept[code]));
+        return new RowGroups(Name, [.. rows.Select(row => _codes[row] < 0 ? -1 : anew[_codes[row]])], kept.Length, code => Label(kept[code]));
     }
 }
 

@@ -8,7 +8,7 @@ internal static class ColumnKeys
     /// <summary>One key a row: the number, the day, or the place of the text among the column's texts (by value when all are numbers, else by code point).</summary>
     public static double[] Of(DataColumn column) => column switch
     {
-        NumberColumn numbers => numbers.Values,
+        NumberColumn numbers => numbers.Values.ToArray(),
         DateColumn dates => [.. dates.Days.Select(day => day == DateColumn.Missing ? double.NaN : day)],
         LevelsColumn levels => Levels(levels),
         _ => Texts(column),

@@ -45,7 +45,8 @@ public sealed class DesignRows(BoundModel model, DesignPlan plan, RowSubset rows
     {
         block.FirstRow = first;
         block.Rows = Math.Min(block.Stride, rows.Count - first);
-        var chosen = rows.Rows.AsSpan(first, block.Rows);
+        Span<int> chosen = stackalloc int[block.Rows];
+        rows.CopyTo(first, chosen);
         if (Layout.Intercept)
         {
             block.Column(0).Fill(1);
@@ -60,9 +61,9 @@ public sealed class DesignRows(BoundModel model, DesignPlan plan, RowSubset rows
             }
         }
 
-        for (var i = 0; weights is not null && i < chosen.Length; i++)
+        if (weights is not null)
         {
-            weights[i] = model.Weights!.Column.Values[chosen[i]];
+            model.Weights!.Column.Values.Read(chosen, weights);
         }
     }
 }

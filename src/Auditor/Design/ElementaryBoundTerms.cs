@@ -26,14 +26,7 @@ internal sealed class BoundNumber(ColumnTerm term, NumberColumn source) : BoundT
 
     public override IReadOnlyList<DataColumn> Sources { get; } = [source];
 
-    public override void Fill(ReadOnlySpan<int> rows, Span<double> into, int stride)
-    {
-        var values = source.Values;
-        for (var i = 0; i < rows.Length; i++)
-        {
-            into[i] = values[rows[i]];
-        }
-    }
+    public override void Fill(ReadOnlySpan<int> rows, Span<double> into, int stride) => source.Values.Read(rows, into);
 }
 
 /// <summary>Columns of 0 and 1, at most one of them 1 in a row (treatment coding).</summary>

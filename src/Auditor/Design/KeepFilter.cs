@@ -5,7 +5,7 @@ namespace Auditor.Design;
 
 /// <summary>The rows that the filter leaves, 0-based and rising, at least one.</summary>
 /// <param name="Notes">Values asked for that no row has.</param>
-public sealed record KeptRows(int[] Rows, IReadOnlyList<BindingNote> Notes);
+public sealed record KeptRows(RowSubset Rows, IReadOnlyList<BindingNote> Notes);
 
 /// <summary>
 /// The declared row filter: every condition must hold, and a missing value meets none. Values are compared numerically on a number column, by day on a
@@ -24,10 +24,29 @@ public static class KeepFilter
         }
 
         var tests = conditions.Select(condition => Test(table[condition.Column], condition)).ToList();
-        int[] rows = [.. Enumerable.Range(0, table.RowCount).Where(row => tests.TrueForAll(test => test(row)))];
-        return rows.Length > 0
+        var rows = Kept(table.RowCount, tests);
+        return rows.Count > 0
             ? Reading<KeptRows>.Of(new KeptRows(rows, [.. conditions.SelectMany(condition => Absent(table, condition)).Distinct()]))
             : Reading<KeptRows>.Failed(new Problem(file, conditions.Count > 0 ? conditions[0].Line : null, "data.keep: no row meets every condition"));
+    }
+
+    private static RowSubset Kept(int tableRows, List<Func<int, bool>> tests)
+    {
+        if (tests.Count == 0)
+        {
+            return RowSubset.All(tableRows);
+        }
+
+        var kept = new RowBits(tableRows);
+        for (var row = 0; row < tableRows; row++)
+        {
+            if (tests.TrueForAll(test => test(row)))
+            {
+                kept.Set(row);
+            }
+        }
+
+        return new RowSubset(kept);
     }
 
     private static IEnumerable<string> Faults(DataColumn column, KeepCondition condition)

@@ -14,7 +14,7 @@ namespace Auditor.Design;
 internal sealed record LevelCoding(
     IReadOnlyList<string> Levels, IReadOnlyList<string> Known, IReadOnlyList<string> Problems, IReadOnlyList<BindingNote> Notes)
 {
-    public static LevelCoding Of(LevelsColumn column, ColumnDeclaration? declared, int[] keptRows)
+    public static LevelCoding Of(LevelsColumn column, ColumnDeclaration? declared, RowSubset keptRows)
     {
         var firstRows = FirstRows(column, keptRows);
         var texts = firstRows.Keys.ToList();
@@ -42,7 +42,7 @@ internal sealed record LevelCoding(
     }
 
     /// <summary>The texts that kept rows have, each with the first row (1-based) that has it.</summary>
-    private static Dictionary<string, int> FirstRows(LevelsColumn column, int[] keptRows)
+    private static Dictionary<string, int> FirstRows(LevelsColumn column, RowSubset keptRows)
     {
         var first = new int[column.Texts.Count];
         foreach (var row in keptRows)

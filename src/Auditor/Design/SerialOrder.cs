@@ -12,7 +12,8 @@ public sealed record SerialOrder(int[] Positions, int Series, int TiedRows, long
     internal static SerialOrder Of(TimeAxis time, RowGroups? units, RowGroups periods, RowSubset rows)
     {
         int Unit(int position) => units?.Codes[position] ?? 0;
-        var places = Enumerable.Range(0, rows.Count).Select(position => (Unit: Unit(position), Time: time.Moments[rows.Rows[position]], Position: position)).ToArray();
+        int[] tableRows = [.. rows];
+        var places = Enumerable.Range(0, rows.Count).Select(position => (Unit: Unit(position), Time: time.Moments[tableRows[position]], Position: position)).ToArray();
         Array.Sort(places);
         int[] positions = [.. places.Select(place => place.Position)];
         var neighbours = positions.Zip(positions.Skip(1)).Where(pair => Unit(pair.First) == Unit(pair.Second)).ToList();
@@ -20,6 +21,6 @@ public sealed record SerialOrder(int[] Positions, int Series, int TiedRows, long
             positions,
             units?.Count ?? 1,
             neighbours.Count(pair => periods.Codes[pair.First] == periods.Codes[pair.Second]),
-            time.Steps is { } steps ? neighbours.Sum(pair => Math.Max(0, steps[rows.Rows[pair.Second]] - steps[rows.Rows[pair.First]] - 1)) : null);
+            time.Steps is { } steps ? neighbours.Sum(pair => Math.Max(0, steps[tableRows[pair.Second]] - steps[tableRows[pair.First]] - 1)) : null);
     }
 }

@@ -6,7 +6,7 @@ namespace Auditor.Design;
 
 /// <summary>Binds the declared split: the first part goes up to and includes the row, or the value, that was declared.</summary>
 /// <param name="refuse">Takes a problem at a line.</param>
-internal sealed class SplitBinding(DataTable table, int[] keptRows, Action<int?, string> refuse)
+internal sealed class SplitBinding(DataTable table, RowSubset keptRows, Action<int?, string> refuse)
 {
     private const string Key = "data.split: ";
 
@@ -46,7 +46,7 @@ internal sealed class SplitBinding(DataTable table, int[] keptRows, Action<int?,
 
     private BoundSplit? Checked(BoundSplit split, int line, string range)
     {
-        var parts = split.Among(new RowSubset(keptRows));
+        var parts = split.Among(keptRows);
         if (parts.First > 0 && parts.Second > 0)
         {
             return split;

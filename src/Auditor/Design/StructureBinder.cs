@@ -5,7 +5,7 @@ using Auditor.Declaration;
 namespace Auditor.Design;
 
 /// <summary>Binds the declared time, unit, cluster, split and segments to the table; all problems at once.</summary>
-internal sealed class StructureBinder(ModelDeclaration declaration, DataTable table, int[] keptRows)
+internal sealed class StructureBinder(ModelDeclaration declaration, DataTable table, RowSubset keptRows)
 {
     private readonly StructureDeclaration _declared = declaration.Data.Structure;
     private readonly List<Problem> _problems = [];
@@ -44,13 +44,26 @@ internal sealed class StructureBinder(ModelDeclaration declaration, DataTable ta
         }
 
         var column = table[mention.Column];
-        if (column is NumberColumn numbers && Array.FindIndex(numbers.Values, value => !double.IsNaN(value) && !double.IsInteger(value)) is >= 0 and var row)
+        if (column is NumberColumn numbers && FirstRow(numbers, value => !double.IsNaN(value) && !double.IsInteger(value)) is int row)
         {
             Refuse(mention, $"column {column.Name} has {column.Text(row)} in row {row + 1}, which looks like a measurement; if such numbers are names, declare kind: levels for it under data.columns");
             return null;
         }
 
         return ClassedRows.Of(column);
+    }
+
+    private static int? FirstRow(NumberColumn column, Func<double, bool> test)
+    {
+        for (var row = 0; row < column.Length; row++)
+        {
+            if (test(column.Values[row]))
+            {
+                return row;
+            }
+        }
+
+        return null;
     }
 
     private TimeAxis? Time(ClassedRows? units)

@@ -14,7 +14,7 @@ namespace Auditor.Design;
 /// <param name="order">The declared order of all rows of the table; null when there is none.</param>
 /// <remarks>Not thread-safe: notes gather. The bound terms are immutable and may be used from several threads.</remarks>
 public sealed class TermBinder(
-    DataTable table, int[] keptRows, IReadOnlyDictionary<string, ColumnDeclaration> columns, Period? period, string file, TimeOrder? order = null)
+    DataTable table, RowSubset keptRows, IReadOnlyDictionary<string, ColumnDeclaration> columns, Period? period, string file, TimeOrder? order = null)
 {
     private readonly BindingScope _scope = new(table, keptRows, columns, period, order, file);
 

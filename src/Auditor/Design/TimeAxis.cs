@@ -61,12 +61,13 @@ public sealed class TimeAxis
     /// <summary>Numbers step by 1, so they can be counted when all are whole.</summary>
     internal static TimeAxis Of(NumberColumn column)
     {
-        var broken = Array.FindIndex(column.Values, value => !double.IsNaN(value) && !(double.IsInteger(value) && Math.Abs(value) <= LargestWhole));
+        var values = column.Values.ToArray();
+        var broken = Array.FindIndex(values, value => !double.IsNaN(value) && !(double.IsInteger(value) && Math.Abs(value) <= LargestWhole));
         return broken >= 0
-            ? new TimeAxis(column, column.Values, ClassedRows.Of(column), null, string.Create(
+            ? new TimeAxis(column, values, ClassedRows.Of(column), null, string.Create(
                 CultureInfo.InvariantCulture,
                 $"{column.Name} has {column.Text(broken)} in row {broken + 1}, and time as a number steps by 1: number the periods with whole numbers, or use dates and data.period"))
-            : new TimeAxis(column, column.Values, ClassedRows.Of(column), [.. column.Values.Select(value => double.IsNaN(value) ? NoStep : (long)value)], null);
+            : new TimeAxis(column, values, ClassedRows.Of(column), [.. values.Select(value => double.IsNaN(value) ? NoStep : (long)value)], null);
     }
 
     private static double[] Keys(long[] steps) => [.. steps.Select(step => step == NoStep ? double.NaN : step)];

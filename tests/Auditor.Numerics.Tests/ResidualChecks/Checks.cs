@@ -12,7 +12,7 @@ internal static class Checks
     {
         var design = new MatrixDesign(intercept, columns, [], y, weights, copies);
         var final = FinalFactor.Of(FactorBuilder.Build(design));
-        var store = new ResidualStore();
+        var store = new ResidualStore(final.Factor.Totals.Rows);
         var pass = RowPass.Run(design, final, [], [store]);
         return new CheckedFit(design, final, new Fit(final, pass), store, sampling);
     }

@@ -12,12 +12,13 @@ internal sealed class DataLook
     private readonly MemoryRows _design;
     private readonly FinalFactor _final;
     private readonly RowPassResult _pass;
-    private readonly ResidualStore _residuals = new();
+    private readonly ResidualStore _residuals;
 
     public DataLook(MemoryRows design, DependenceStructure? structure)
     {
         (_design, _final) = (design, FinalFactor.Of(FactorBuilder.Build(design)));
         AddedGroup[] groups = [.. design.Layout.Groups.Select(range => AddedGroup.Of(_final, [.. range.Indices]))];
+        _residuals = new ResidualStore(_final.Factor.Totals.Rows);
         _pass = RowPass.Run(design, _final, groups, [_residuals], structure);
         Groups = [.. groups.Zip(_pass.Groups, (group, sums) => new Look(group, sums))];
     }
@@ -29,8 +30,9 @@ internal sealed class DataLook
     /// <summary>The Breusch–Pagan check of F + group, by which a tempting shortcut chooses between HC3 and the classical test.</summary>
     public bool VarianceCheckRejects(double level)
     {
-        var (rows, store) = (new Regrouped(_design), new ResidualStore());
+        var rows = new Regrouped(_design);
         var final = FinalFactor.Of(FactorBuilder.Build(rows));
+        var store = new ResidualStore(final.Factor.Totals.Rows);
         var fit = new Fit(final, RowPass.Run(rows, final, [], [store]));
         return BreuschPagan.Studentised(new CheckedFit(rows, final, fit, store, sampling: false)) is CheckStatistic check && check.P <= level;
     }
@@ -40,7 +42,7 @@ internal sealed class DataLook
     public bool HasNoUnitRoot(int drifting, double level)
     {
         var fit = new CheckedFit(_design, _final, new Fit(_final, _pass), _residuals, sampling: false);
-        var serial = new SerialFit(fit, SerialOrder.Of([.. Enumerable.Range(0, _residuals.Residuals.Count)]), laggedResponse: false);
+        var serial = new SerialFit(fit, SerialOrder.Of([.. Enumerable.Range(0, _residuals.Count)]), laggedResponse: false);
         return UnitRootResidual.Of(serial, Deterministic.Constant, drifting) is CheckStatistic check && check.P <= level;
     }
 

@@ -38,7 +38,7 @@ internal static class CsvText
         return reading.Value!;
     }
 
-    public static double[] Numbers(this DataTable table, string column) => Assert.IsType<NumberColumn>(table[column]).Values;
+    public static double[] Numbers(this DataTable table, string column) => Assert.IsType<NumberColumn>(table[column]).Values.ToArray();
 
     public static string?[] Texts(this DataTable table, string column) =>
         [.. Enumerable.Range(0, table.RowCount).Select(table[column].Text)];

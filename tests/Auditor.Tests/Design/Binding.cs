@@ -31,7 +31,7 @@ internal static class Binding
 
     /// <summary>Terms that look back do so in the file's own order.</summary>
     public static TermBinder Binder(DataTable table, int[]? keptRows = null, Period? period = null, params ColumnDeclaration[] declared) =>
-        new(table, keptRows ?? AllRows(table), declared.ToDictionary(column => column.Column), period, Model, new TimeOrder(TimeAxis.OfFileOrder(table.RowCount, null), null, 4));
+        new(table, new RowSubset(keptRows ?? AllRows(table)), declared.ToDictionary(column => column.Column), period, Model, new TimeOrder(TimeAxis.OfFileOrder(table.RowCount, null), null, 4));
 
     public static BoundTerm Bind(DataTable table, Term term, int[]? keptRows = null, Period? period = null, params ColumnDeclaration[] declared)
     {

@@ -180,7 +180,7 @@ public sealed class TimeOrderTermTests
         [.. Binder(table, null, time, units).Bind(term).Problems.Select(problem => problem.ToString())];
 
     private static TermBinder Binder(DataTable table, int[]? kept, TimeAxis? time, ClassedRows? units) =>
-        new(table, kept ?? AllRows(table), new Dictionary<string, ColumnDeclaration>(), null, Model, time is null ? null : new TimeOrder(time, units, 4));
+        new(table, new RowSubset(kept ?? AllRows(table)), new Dictionary<string, ColumnDeclaration>(), null, Model, time is null ? null : new TimeOrder(time, units, 4));
 
     private static bool IsMissing(BoundTerm term, int row) => term.Sources.Any(source => source.IsMissing(row));
 
