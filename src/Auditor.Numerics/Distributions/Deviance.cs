@@ -8,6 +8,9 @@ internal static class Deviance
 {
     private const double AsymptoticFrom = 16;
 
+    /// <summary>Every normal tail asks for it.</summary>
+    private static readonly double _errorAtHalf = ComputeStirlingError(0.5);
+
     /// <summary>u - log(1 + u) for u > -1, to a few units of the last place also where u is near 0.</summary>
     public static double Excess(double u)
     {
@@ -62,7 +65,9 @@ internal static class Deviance
     /// <summary>
     /// log gamma(z) - [(z - 1/2) log z - z + log(2 pi)/2] for z > 0: what Stirling's formula leaves out. 0 at infinity.
     /// </summary>
-    public static double StirlingError(double z)
+    public static double StirlingError(double z) => z == 0.5 ? _errorAtHalf : ComputeStirlingError(z);
+
+    private static double ComputeStirlingError(double z)
     {
         double sum = 0;
         for (; z < AsymptoticFrom; z++)

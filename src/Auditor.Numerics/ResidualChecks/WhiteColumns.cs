@@ -1,3 +1,4 @@
+using System.Buffers;
 using Auditor.Numerics.Factor;
 
 namespace Auditor.Numerics.ResidualChecks;
@@ -54,13 +55,18 @@ internal sealed class WhiteColumns
             source.Column(column).CopyTo(derived.Column(next++));
         }
 
-        Span<double> first = stackalloc double[source.Rows];
-        Span<double> second = stackalloc double[source.Rows];
+        var scaled = ArrayPool<double>.Shared.Rent(_shapes.Columns.Length * source.Rows);
+        Span<double> Scaled(int place) => scaled.AsSpan(place * source.Rows, source.Rows);
+        for (var place = 0; place < _shapes.Columns.Length; place++)
+        {
+            _shapes.Scale(source, place, Scaled(place));
+        }
+
         foreach (var (a, b) in _products)
         {
-            _shapes.Scale(source, a, first);
-            _shapes.Scale(source, b, second);
-            BlockKernels.Multiply(first, second, derived.Column(next++));
+            BlockKernels.Multiply(Scaled(a), Scaled(b), derived.Column(next++));
         }
+
+        ArrayPool<double>.Shared.Return(scaled);
     }
 }
