@@ -30,7 +30,20 @@ internal static class AuditCommand
 
     private static Reading<Outcome> Work(AuditRequest request, RunProgress progress)
     {
-        var inputs = InputFiles.Read(request, progress);
+        using var place = new ColumnPlace(request.MemoryBytes, request.OutputFolder);
+        try
+        {
+            return Work(request, place, progress);
+        }
+        catch (Exception fault) when (SpillFault.In(fault) is { } spilling)
+        {
+            return Reading<Outcome>.Failed(spilling.Problem);
+        }
+    }
+
+    private static Reading<Outcome> Work(AuditRequest request, ColumnPlace place, RunProgress progress)
+    {
+        var inputs = InputFiles.Read(request, place, progress);
         if (inputs.Value is null)
         {
             return Reading<Outcome>.Failed(inputs.Problems);

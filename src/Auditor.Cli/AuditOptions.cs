@@ -6,7 +6,7 @@ namespace Auditor.Cli;
 /// <summary>What one audit is asked to do.</summary>
 /// <param name="FailOn">Findings of this severity or graver make the exit status 1; null: never.</param>
 /// <param name="Moment">When the run started, as the record says.</param>
-/// <param name="MemoryBytes">Most memory that the data's columns may take; null: no limit declared.</param>
+/// <param name="MemoryBytes">Most memory that what has one value a row may take; null: half of what is free.</param>
 internal sealed record AuditRequest(
     string Declaration,
     string OutputFolder,
@@ -39,7 +39,7 @@ internal sealed class AuditOptions
     private readonly Option<string?> _formats = Options.Text("--formats", "LIST", "Any of html,json (default: both).");
     private readonly Option<string?> _failOn = Options.Text("--fail-on", "SEVERITY", "high | medium | low | never (default: high).");
     private readonly Option<string?> _threads = Options.Text("--threads", "N", "Threads to use (default: one for each processor).");
-    private readonly Option<string?> _memory = Options.Text("--memory", "SIZE", "Refuse a data file larger than this, such as 512M or 4G.");
+    private readonly Option<string?> _memory = Options.Text("--memory", "SIZE", "Memory for the data's columns, such as 512M or 4G; larger data go through a file beside the output (default: half of what is free).");
     private readonly Option<string?> _seed = Options.Text("--seed", "N", "Seed of everything drawn at random, kept in the record (default 1).");
     private readonly Option<bool> _quiet = new("--quiet") { Description = "Nothing on standard output." };
     private readonly Option<bool> _verbose = new("--verbose") { Description = "Steps and their seconds on standard error." };

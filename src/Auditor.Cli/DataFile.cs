@@ -7,7 +7,7 @@ namespace Auditor.Cli;
 /// <summary>The data file that a declaration names, found, hashed, its columns held against the declaration's.</summary>
 internal sealed record DataFile(IDataSource Source, string Sha256)
 {
-    public static Reading<DataFile> Find(DeclarationReading reading, AuditRequest request, IProgress<ReadingProgress> progress)
+    public static Reading<DataFile> Find(DeclarationReading reading, AuditRequest request, ColumnPlace place, IProgress<ReadingProgress> progress)
     {
         var line = reading.Declaration?.Data.SourceLine;
         if (reading.Sources is not [var source])
@@ -18,7 +18,7 @@ internal sealed record DataFile(IDataSource Source, string Sha256)
         var folder = Path.GetDirectoryName(Path.GetFullPath(request.Declaration))!;
         var path = Path.GetFullPath(Path.Combine(folder, source));
         var fault = Fault(path, source, folder, request);
-        return fault is null ? Open(path, source, line, reading, request, progress) : Failed(request, line, "data.source: " + fault);
+        return fault is null ? Open(path, source, line, reading, request, place, progress) : Failed(request, line, "data.source: " + fault);
     }
 
     private static string? Fault(string path, string source, string folder, AuditRequest request)
@@ -38,9 +38,7 @@ internal sealed record DataFile(IDataSource Source, string Sha256)
             return $"'{source}' lies outside the declaration's folder; allow it with --data-root DIR";
         }
 
-        return Unreadable(path, source) ?? (request.MemoryBytes is long most && new FileInfo(path).Length > most
-            ? $"'{source}' is larger than --memory allows; data that do not fit in memory are not built yet"
-            : null);
+        return Unreadable(path, source);
     }
 
     /// <summary>Why a path is no data file of a kind that is read; null when it is one.</summary>
@@ -62,7 +60,7 @@ internal sealed record DataFile(IDataSource Source, string Sha256)
             : $"'{source}' is not a kind of file this program reads: .csv, .tsv, .csv.gz or .tsv.gz";
     }
 
-    private static Reading<DataFile> Open(string path, string source, int? line, DeclarationReading reading, AuditRequest request, IProgress<ReadingProgress> progress)
+    private static Reading<DataFile> Open(string path, string source, int? line, DeclarationReading reading, AuditRequest request, ColumnPlace place, IProgress<ReadingProgress> progress)
     {
         try
         {
@@ -72,7 +70,7 @@ internal sealed record DataFile(IDataSource Source, string Sha256)
                 return Failed(request, line, $"data.source: '{source}' is another file than data.sha256 says: declared {declared}, found {hash}");
             }
 
-            var data = Csv(path, source, new CsvReading(rows, request.Threads, Progress: progress));
+            var data = Csv(path, source, new CsvReading(rows, request.Threads, Progress: progress) { Store = place.For });
             var columns = data.ReadColumnNames();
             var problems = columns.Value is { } names ? ColumnCheck.Problems(request.Declaration, reading.Mentions, names) : columns.Problems;
             return problems.Count > 0 ? Reading<DataFile>.Failed(problems) : Reading<DataFile>.Of(new DataFile(data, hash));

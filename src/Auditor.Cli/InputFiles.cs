@@ -9,7 +9,7 @@ namespace Auditor.Cli;
 /// <summary>Reads everything an audit depends on; all problems of all files at once, as far as one does not hide another.</summary>
 internal static class InputFiles
 {
-    public static Reading<AuditInputs> Read(AuditRequest request, RunProgress progress)
+    public static Reading<AuditInputs> Read(AuditRequest request, ColumnPlace place, RunProgress progress)
     {
         progress.Begin("Declaration, rules and the file's hash");
         var file = FileText.Read(request.Declaration);
@@ -21,7 +21,7 @@ internal static class InputFiles
         }
 
         var reading = DeclarationReader.Read(text.Text, request.Declaration);
-        var data = DataFile.Find(reading, request, progress);
+        var data = DataFile.Find(reading, request, place, progress);
         var problems = reading.Problems
             .Concat(reading.Declaration is { } checkedOne ? NotBuiltYet.In(checkedOne) : [])
             .Concat(data.Problems)
@@ -31,11 +31,11 @@ internal static class InputFiles
             .ToList();
         return problems.Count > 0 || reading.Declaration is null
             ? Reading<AuditInputs>.Failed(problems)
-            : Read(request, reading, text, data.Value!, rules.Value!, acceptances.Value!, progress);
+            : Read(request, reading, text, data.Value!, rules.Value!, acceptances.Value!, place, progress);
     }
 
     private static Reading<AuditInputs> Read(
-        AuditRequest request, DeclarationReading reading, FileText text, DataFile data, RuleFiles rules, AcceptanceFile acceptances, RunProgress progress)
+        AuditRequest request, DeclarationReading reading, FileText text, DataFile data, RuleFiles rules, AcceptanceFile acceptances, ColumnPlace place, RunProgress progress)
     {
         progress.Begin("Data read");
         var declaration = reading.Declaration!;
@@ -66,6 +66,7 @@ internal static class InputFiles
         {
             Acceptances = new AcceptancesOfRun(acceptances.Entries, asOf),
             Pictures = request.Formats.Contains("html"),
+            Store = place.Chosen,
         });
     }
 }

@@ -5,6 +5,7 @@ using Auditor.Declaration;
 using Auditor.Design;
 using Auditor.Facts;
 using Auditor.Findings;
+using Auditor.Numerics.Storage;
 using Auditor.Policies;
 using Auditor.Reporting;
 using Auditor.Results;
@@ -30,7 +31,7 @@ public static class Audit
         }
 
         var mentioned = inputs.Mentions.Select(mention => mention.Column).ToHashSet(StringComparer.Ordinal);
-        var analysis = ModelAnalysis.Run(declaration, bound.Value.Model, mentioned, inputs.Policy, new RunSettings(inputs.Threads, inputs.Provenance.Seed, inputs.Pictures, inputs.Steps));
+        var analysis = ModelAnalysis.Run(declaration, bound.Value.Model, mentioned, inputs.Policy, new RunSettings(inputs.Threads, inputs.Provenance.Seed, inputs.Pictures, inputs.Steps) { Store = inputs.Store });
         if (analysis.Value is not { } results)
         {
             return Reading<AuditRecord>.Failed(analysis.Problems);
@@ -112,6 +113,9 @@ public sealed record AuditInputs(
 {
     /// <summary>Whether the points of the pictures are gathered; no figure depends on it.</summary>
     public bool Pictures { get; init; } = true;
+
+    /// <summary>Where what has one value a row is kept; no figure depends on it.</summary>
+    public CellStore Store { get; init; } = CellStore.Memory;
 
     /// <summary>Findings that a named approver has accepted.</summary>
     public AcceptancesOfRun Acceptances { get; init; } = AcceptancesOfRun.None;

@@ -43,7 +43,7 @@ internal abstract class ColumnBuilder(string name)
         ColumnKind.Number => new NumberColumnBuilder(name, missing, store),
         ColumnKind.Date => new DateColumnBuilder(name, missing, store),
         ColumnKind.Levels => new LevelsColumnBuilder(name, missing, store),
-        _ => new TextColumnBuilder(name, missing),
+        _ => TextColumnBuilder.Of(name, missing, store),
     };
 
     protected abstract ColumnPart NewPart(int first, int count);

@@ -68,13 +68,13 @@ public sealed class DateColumn(string name, Cells<int> days) : DataColumn(name)
 }
 
 /// <summary>Free text, such as a row label; null is a missing value.</summary>
-public sealed class TextColumn(string name, string?[] values) : DataColumn(name)
+public sealed class TextColumn(string name, IReadOnlyList<string?> values) : DataColumn(name)
 {
-    public string?[] Values { get; } = values;
+    public IReadOnlyList<string?> Values { get; } = values;
 
     public override ColumnKind Kind => ColumnKind.Text;
 
-    public override int Length => Values.Length;
+    public override int Length => Values.Count;
 
     public override bool IsMissing(int row) => Values[row] is null;
 

@@ -16,7 +16,7 @@ internal sealed class DateColumnBuilder(string name, MissingTexts missing, CellS
 
     private sealed class Part(WritableCells<int> cells, int first, int count, MissingTexts missing) : ColumnPart(missing)
     {
-        private readonly CellRange<int> _range = cells.Open(first, count, kept: false);
+        private CellRange<int> _range = cells.Open(first, count, kept: false);
         private int _dates;
         private KindCounts _rest;
 
@@ -39,6 +39,10 @@ internal sealed class DateColumnBuilder(string name, MissingTexts missing, CellS
 
         public override void SetMissing(int row) => _range.Values[row - _range.Offset] = DateColumn.Missing;
 
-        public override void Close() => cells.Close(_range);
+        public override void Close()
+        {
+            cells.Close(_range);
+            _range = default;
+        }
     }
 }

@@ -43,7 +43,7 @@ internal sealed class LevelsColumnBuilder(string name, MissingTexts missing, Cel
     private sealed class Part : ColumnPart
     {
         private readonly WritableCells<int> _cells;
-        private readonly CellRange<int> _range;
+        private CellRange<int> _range;
 
         /// <summary>Texts that mean "no value" stand here with -1.</summary>
         private readonly Dictionary<string, int> _byText = new(StringComparer.Ordinal);
@@ -96,7 +96,11 @@ internal sealed class LevelsColumnBuilder(string name, MissingTexts missing, Cel
             _cells.Close(range);
         }
 
-        public override void Close() => _cells.Close(_range);
+        public override void Close()
+        {
+            _cells.Close(_range);
+            _range = default;
+        }
 
         private int NewCode(ReadOnlySpan<char> cell)
         {

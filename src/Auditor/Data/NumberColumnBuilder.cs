@@ -16,7 +16,7 @@ internal sealed class NumberColumnBuilder(string name, MissingTexts missing, Cel
 
     private sealed class Part(WritableCells<double> cells, int first, int count, MissingTexts missing) : ColumnPart(missing)
     {
-        private readonly CellRange<double> _range = cells.Open(first, count, kept: false);
+        private CellRange<double> _range = cells.Open(first, count, kept: false);
         private int _numbers;
         private KindCounts _rest;
 
@@ -39,6 +39,10 @@ internal sealed class NumberColumnBuilder(string name, MissingTexts missing, Cel
 
         public override void SetMissing(int row) => _range.Values[row - _range.Offset] = double.NaN;
 
-        public override void Close() => cells.Close(_range);
+        public override void Close()
+        {
+            cells.Close(_range);
+            _range = default;
+        }
     }
 }

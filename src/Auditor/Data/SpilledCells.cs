@@ -19,19 +19,23 @@ public sealed class SpilledStore(Func<IRandomAccessBytes> create) : CellStore, I
 {
     private readonly List<IDisposable> _made = [];
 
-    public override WritableCells<T> Create<T>()
-    {
-        var bytes = create();
-        var cells = new SpilledCells<T>(bytes);
-        lock (_made)
-        {
-            _made.AddRange([cells, bytes]);
-        }
-
-        return cells;
-    }
+    public override WritableCells<T> Create<T>() => Kept(new SpilledCells<T>(Kept(create())));
 
     public void Dispose() => _made.ForEach(one => one.Dispose());
+
+    /// <summary>Room for texts.</summary>
+    internal SpilledTexts CreateTexts() => new(Create<long>(), Kept(create()));
+
+    private T Kept<T>(T made)
+        where T : IDisposable
+    {
+        lock (_made)
+        {
+            _made.Add(made);
+        }
+
+        return made;
+    }
 }
 
 /// <summary>
