@@ -86,7 +86,6 @@ internal static class ErrorCases
         ErrorCase.Data("a row with too few fields", Leases3 + "L1,1,2,north,3,4\nL2,1,2,north\n"),
         ErrorCase.Data("cells that are no numbers", Leases3 + "L1,1,2,north,3,4\nL2,1.5,n/a,north,3,4\nL3,2,5,south,\"1,200\",4\n"),
         ErrorCase.Data("a column twice", "loss," + Leases3 + "9,L1,1,2,north,3,4\n"),
-        ErrorCase.Declared("data larger than the memory allowed", "audit: 1", "audit: 1", "--memory", "1K"),
         ErrorCase.Declared("rows that all lack a value", "response: loss", "response: {log: {of: loss, plus: -1000}}"),
     ];
 

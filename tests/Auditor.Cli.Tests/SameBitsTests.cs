@@ -22,10 +22,58 @@ public sealed class SameBitsTests
         Assert.Equal(alone, Record(folder, [("DOTNET_EnableAVX2", "0")], "2"));
     }
 
+    /// <summary>Columns in memory or in files beside the output, which leave nothing behind; numbers, levels, dates, texts and empty cells.</summary>
+    [Fact]
+    public void Data_larger_than_the_memory_allowed_give_the_same_record_and_page()
+    {
+        using var folder = new TemporaryFolder().With("leases.yaml", MixedDeclaration()).With("leases.csv", MixedData());
+        var inMemory = Outputs(folder, "1", "1G");
+        Assert.Equal(inMemory, Outputs(folder, "1", "1K"));
+        Assert.Equal(inMemory, Outputs(folder, "2", "1K"));
+        Assert.Equal(["leases.html", "leases.json"], Directory.GetFileSystemEntries(folder.At("audit-out")).Select(Path.GetFileName).Order(StringComparer.Ordinal));
+    }
+
+    [Fact]
+    public void Columns_that_cannot_be_kept_beside_the_output_are_said_and_nothing_is_written()
+    {
+        using var folder = new TemporaryFolder().With("leases.yaml", MixedDeclaration()).With("leases.csv", MixedData()).With("taken", "a file stands in the folder's place");
+        var run = ProgramRun.In(folder, "leases.yaml", "--memory", "1K", "--out", "taken").Ends(2);
+        Assert.Contains("larger than --memory allows", run.Errors, StringComparison.Ordinal);
+        Assert.False(Directory.Exists(folder.At("audit-out")));
+    }
+
     private static string Record(TemporaryFolder folder, (string, string)[] variables, string threads)
     {
         ProgramRun.With(folder, variables, "lathes.yaml", "--threads", threads, "--fail-on", "never").Ends(0);
         return folder.Text(Path.Combine("audit-out", "lathes.json"));
+    }
+
+    private static string Outputs(TemporaryFolder folder, string threads, string memory)
+    {
+        ProgramRun.With(folder, [], "leases.yaml", "--threads", threads, "--memory", memory, "--fail-on", "never").Ends(0);
+        return folder.Text(Path.Combine("audit-out", "leases.json")) + folder.Text(Path.Combine("audit-out", "leases.html"));
+    }
+
+    private static string MixedDeclaration() =>
+        "audit: 1\nmodel: {id: leases}\ndata:\n  source: leases.csv\n  row_label: lease\n  time: opened\n  period: month\n  unit: dealer\n  cluster: dealer\n"
+        + "  columns: {dealer: {kind: levels}}\n  keep: [{column: status, equals: closed}]\nresponse: loss\nfinal_model: {terms: [price, region]}\nleft_out:\n"
+        + "  - {group: age, terms: [{log: age}]}\n  - {group: grade, terms: [grade, {product: [price, grade]}]}\n  - {group: season, terms: [{season: {of: opened, by: quarter}}]}\n";
+
+    private static string MixedData()
+    {
+        var (random, text) = (new Generator(21), new StringBuilder("lease,dealer,opened,status,loss,price,region,age,grade\n"));
+        string Cell(double share, string value) => random.Uniform() < share ? "" : value;
+        for (var row = 0; row < Rows; row++)
+        {
+            var (price, dealer) = (random.Uniform(), row % 97);
+            var day = new DateOnly(2020, 1, 1).AddDays((int)(random.Uniform() * 900)).ToString("yyyy-MM-dd", CultureInfo.InvariantCulture);
+            var region = new[] { "north", "south", "\"west, upper\"" }[row % 3];
+            var loss = (price + random.Uniform()).ToString("R", CultureInfo.InvariantCulture);
+            text.Append(CultureInfo.InvariantCulture, $"{Cell(0.1, "L-" + row)},{dealer},{day},{(row % 11 == 0 ? "open" : "closed")},{Cell(0.01, loss)},");
+            text.Append(CultureInfo.InvariantCulture, $"{price:R},{region},{Cell(0.03, (row % 40).ToString(CultureInfo.InvariantCulture))},{"ABCD"[row % 4]}\n");
+        }
+
+        return text.ToString();
     }
 
     private static string Declaration()

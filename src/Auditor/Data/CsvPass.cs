@@ -32,6 +32,9 @@ internal sealed class CsvPass(CsvFile file, int fields, int[] positions, IReadOn
     /// <summary>Data rows read.</summary>
     public int Rows => _jobs.Sum(job => job.Rows);
 
+    /// <summary>About how many rows the whole file has.</summary>
+    public double Expected { get; private set; }
+
     /// <param name="most">Stop after so many chunks.</param>
     public IReadOnlyList<Problem> Run(int most = int.MaxValue)
     {
@@ -93,6 +96,7 @@ internal sealed class CsvPass(CsvFile file, int fields, int[] positions, IReadOn
         {
             _busy.WaitForNone();
             Resize(rows);
+            Expected = room.Expected;
         }
 
         var job = new CsvJob(chunk, [.. builders.Select(builder => builder.NextPart(chunk.Row, chunk.Rows))]);

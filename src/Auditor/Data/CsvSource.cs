@@ -32,8 +32,8 @@ public sealed class CsvSource(string name, Func<Stream> open, DelimitedFormat fo
 
     private Reading<DataTable> Read(IReadOnlyList<string> names, IReadOnlyList<ColumnRequest> requests, MissingTexts missing)
     {
-        List<ColumnKind> kinds = [.. Guesses(names, requests, missing)];
-        var store = _reading.Store(new TableSize(_reading.Rows, kinds));
+        var (kinds, rows) = Guesses(names, requests, missing);
+        var store = _reading.Store(new TableSize(_reading.Rows > 0 ? _reading.Rows : rows, kinds));
         var pass = Pass(names, [.. requests.Zip(kinds, (request, kind) => (request.Column, kind))], missing, _reading, store);
         if (pass.Rows == 0 && pass.Problems.Count == 0)
         {
@@ -47,11 +47,11 @@ public sealed class CsvSource(string name, Func<Stream> open, DelimitedFormat fo
             : Reading<DataTable>.Failed(problems);
     }
 
-    /// <summary>The kinds that the first rows have. Problems among them come again in the full pass.</summary>
-    private IEnumerable<ColumnKind> Guesses(IReadOnlyList<string> names, IReadOnlyList<ColumnRequest> requests, MissingTexts missing)
+    /// <summary>The kinds that the first rows have, and about how many rows there are. Problems among them come again in the full pass.</summary>
+    private (List<ColumnKind> Kinds, long Rows) Guesses(IReadOnlyList<string> names, IReadOnlyList<ColumnRequest> requests, MissingTexts missing)
     {
         var sample = Pass(names, [.. requests.Select(request => (request.Column, ColumnKind.Levels))], missing, new CsvReading(ChunkBytes: SampleBytes), CellStore.Memory, most: 1);
-        return requests.Zip(sample.Builders, (request, builder) => request.Kind ?? builder.Counts.Kind);
+        return ([.. requests.Zip(sample.Builders, (request, builder) => request.Kind ?? builder.Counts.Kind)], (long)sample.Expected);
     }
 
     /// <summary>The builders, those of undeclared columns whose cells turned out to be of another kind than guessed replaced by right ones.</summary>
@@ -75,8 +75,8 @@ public sealed class CsvSource(string name, Func<Stream> open, DelimitedFormat fo
         List<ColumnBuilder> builders = [.. columns.Select(column => ColumnBuilder.Of(column.Kind, column.Column, missing, store))];
         var pass = new CsvPass(_file, names.Count, [.. columns.Select(column => CsvHeader.Places(names, column.Column)[0] - 1)], builders, how);
         var problems = pass.Run(most);
-        return new FullPass(builders, pass.Rows, problems);
+        return new FullPass(builders, pass.Rows, pass.Expected, problems);
     }
 
-    private sealed record FullPass(List<ColumnBuilder> Builders, int Rows, IReadOnlyList<Problem> Problems);
+    private sealed record FullPass(List<ColumnBuilder> Builders, int Rows, double Expected, IReadOnlyList<Problem> Problems);
 }

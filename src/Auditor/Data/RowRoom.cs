@@ -13,6 +13,9 @@ internal sealed class RowRoom(Stream stored, int expected)
 
     private int _room;
 
+    /// <summary>About how many rows there are in all, as far as that can be told.</summary>
+    public double Expected { get; private set; }
+
     /// <summary>The new room if these rows need more, else null.</summary>
     public int? Grown(CsvChunk chunk)
     {
@@ -23,6 +26,7 @@ internal sealed class RowRoom(Stream stored, int expected)
         }
 
         var estimate = _room == 0 && expected > 0 ? expected : chunk.Ends ? needed : needed * (stored.CanSeek ? Margin / Share() : Blind);
+        Expected = estimate;
         _room = (int)Math.Max(needed, Math.Min(estimate, Array.MaxLength));
         return _room;
     }
