@@ -23,7 +23,6 @@ internal static class InputFiles
         var reading = DeclarationReader.Read(text.Text, request.Declaration);
         var data = DataFile.Find(reading, request, place, progress);
         var problems = reading.Problems
-            .Concat(reading.Declaration is { } checkedOne ? NotBuiltYet.In(checkedOne) : [])
             .Concat(data.Problems)
             .OrderBy(problem => problem.Line ?? 0)
             .Concat(rules.Problems)

@@ -85,6 +85,12 @@ public enum Impediment
     /// <summary>There are no rows.</summary>
     NoRows,
 
+    /// <summary>The effects of fewer than two parts of the rows can be told apart.</summary>
+    NothingToCompare,
+
+    /// <summary>Columns times parts are more directions than a comparison of parts is computed for.</summary>
+    TooManyDirections,
+
     /// <summary>The stated rule of elimination does not end in the reported model.</summary>
     RuleEndsElsewhere,
 

@@ -49,7 +49,6 @@ internal static class ErrorCases
         ErrorCase.Declared("a key twice", "response: loss", "response: loss\nresponse: price"),
         ErrorCase.Declared("an id that leads out of the folder", "id: lease-loss", "id: ../lease"),
         ErrorCase.Declared("a term in the model and in a group", "[engine_hours, age]", "[engine_hours, price]"),
-        ErrorCase.Declared("segments of the rows", "row_label: lease_no", "row_label: lease_no\n  segments: [region]"),
         ErrorCase.File(
             "every problem of a declaration at once",
             "lease.yaml",

@@ -8,6 +8,8 @@ namespace Auditor.Numerics.Factor;
 /// <remarks>Frisch–Waugh–Lovell; sums of squares come from u, not from a difference of two residual sums of squares.</remarks>
 public sealed class AddedGroup
 {
+    private readonly Dictionary<int, double[]> _aliasedCoordinates = [];
+
     /// <param name="before">How many leading columns of the reduction stand before Z.</param>
     /// <param name="rankOutside">Rank of what was taken out before the reduction, beside F; null when nothing was.</param>
     private AddedGroup(FinalFactor final, IReadOnlyList<int> columns, int before, Reduction reduction, int? rankOutside = null)
@@ -32,6 +34,10 @@ public sealed class AddedGroup
         Aliased = before > 0 || rankOutside is not null
             ? []
             : [.. reduction.Aliased.Select(position => Combinations.OfGroupColumn(this, columns[position], reduction.Rotated.Column(position)))];
+        foreach (var position in Aliased.Count > 0 ? reduction.Aliased : [])
+        {
+            _aliasedCoordinates[position] = AliasedCoordinates(position, reduction.Rotated.Column(position));
+        }
     }
 
     public FinalFactor Final { get; }
@@ -74,6 +80,23 @@ public sealed class AddedGroup
 
     private IReadOnlyList<int> KeptPositions { get; }
 
+    /// <summary>
+    /// Qz'Z~ of one column of Z, q entries: an aliased one is a combination of the columns kept before it, or zero where F explains it. Only when nothing else
+    /// stands before Z.
+    /// </summary>
+    /// <param name="place">Place of the column within <see cref="Columns"/>.</param>
+    internal double[] Coordinates(int place)
+    {
+        if (_aliasedCoordinates.TryGetValue(place, out var aliased))
+        {
+            return aliased;
+        }
+
+        var (coordinates, k) = (new double[Rank], KeptPositions.Index().First(kept => kept.Item == place).Index);
+        Triangle.Column(k)[..(k + 1)].CopyTo(coordinates);
+        return coordinates;
+    }
+
     /// <summary>Z added to F.</summary>
     public static AddedGroup Of(FinalFactor final, IReadOnlyList<int> columns) => After(final, [], columns);
 
@@ -89,4 +112,16 @@ public sealed class AddedGroup
     /// <param name="alone">Z and y, already orthogonal to all that stands before Z, reduced.</param>
     internal static AddedGroup LastIn(FinalFactor final, IReadOnlyList<int> columns, Reduction alone, int rankOutside) =>
         new(final, columns, 0, alone, rankOutside);
+
+    private double[] AliasedCoordinates(int position, ReadOnlySpan<double> rotated)
+    {
+        var (coordinates, before) = (new double[Rank], KeptPositions.Count(kept => kept < position));
+        var part = rotated[..before];
+        if (!RankTolerance.IsAliased(Final.Factor, Columns[position], Math.Sqrt(BlockKernels.Dot(part, part))))
+        {
+            part.CopyTo(coordinates);
+        }
+
+        return coordinates;
+    }
 }

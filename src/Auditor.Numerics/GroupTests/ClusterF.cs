@@ -31,15 +31,24 @@ public static class ClusterF
             return TestResult.None(impediment);
         }
 
-        var (c, q) = (clusters.Contributing, group.Rank);
+        return Form(group.U, clusters.Count, clusters.Contributing, scores, Phi(group, clusters), Impediments.ScoreScale(group));
+    }
+
+    /// <param name="u">q entries: the sum of all scores of y.</param>
+    /// <param name="count">Clusters.</param>
+    /// <param name="contributing">Clusters with a non-zero row.</param>
+    /// <param name="scores">s_c of each cluster, q entries.</param>
+    /// <param name="scale">The variance of an entry of u that a covariance is measured by.</param>
+    internal static TestResult Form(IReadOnlyList<double> u, int count, int contributing, Quadratic.Vector scores, double phi, double scale)
+    {
+        var (c, q) = (contributing, u.Count);
         if (q >= c)
         {
             return TestResult.None(Impediment.TooFewClusters);
         }
 
-        var m = Quadratic.Products(q, clusters.Count, scores);
-        return Quadratic.Form(group.U, m, Impediments.ScoreScale(group)) is double form
-            ? ScoreF.FromLagrangeMultiplier(Phi(group, clusters) * form, c, q)
+        return Quadratic.Form(u, Quadratic.Products(q, count, scores), scale) is double form
+            ? ScoreF.FromLagrangeMultiplier(phi * form, c, q)
             : TestResult.None(Impediment.SingularCovariance);
     }
 }

@@ -30,17 +30,20 @@ public static class PeriodF
     /// <summary>What keeps a form over periods from being computed.</summary>
     internal static Impediment? Why(AddedGroup group, ClassSums periods)
     {
-        if (Impediments.OfRobust(group) is Impediment impediment)
-        {
-            return impediment;
-        }
+        return Impediments.OfRobust(group) ?? Why(group.Rank, periods.Count, periods.Contributing);
+    }
 
-        if (group.Rank > Cosines.Number(periods.Count) || group.Rank >= periods.Contributing)
+    /// <param name="q">Directions tested.</param>
+    /// <param name="periods">Periods.</param>
+    /// <param name="contributing">Periods with a non-zero row.</param>
+    internal static Impediment? Why(int q, int periods, int contributing)
+    {
+        if (q > Cosines.Number(periods) || q >= contributing)
         {
             return Impediment.TooFewPeriods;
         }
 
-        return (double)periods.Count * Cosines.Number(periods.Count) * group.Rank > MostWork ? Impediment.TooManyPeriods : null;
+        return (double)periods * Cosines.Number(periods) * q > MostWork ? Impediment.TooManyPeriods : null;
     }
 
     /// <summary>(nu - q + 1)/(nu q) W on (q, nu - q + 1).</summary>
@@ -54,10 +57,15 @@ public static class PeriodF
             return TestResult.None(impediment);
         }
 
-        var cosines = new Cosines(periods.Count);
-        var variance = cosines.Variance(group.Rank, scores);
-        return Quadratic.Form(group.U, variance, Impediments.ScoreScale(group)) is double form
-            ? Hotelling(ClusterF.Phi(group, periods) * form, group.Rank, cosines.Count)
+        return Form(group.U, periods.Count, scores, ClusterF.Phi(group, periods), Impediments.ScoreScale(group));
+    }
+
+    /// <inheritdoc cref="ClusterF.Form(IReadOnlyList{double}, int, int, Quadratic.Vector, double, double)"/>
+    internal static TestResult Form(IReadOnlyList<double> u, int periods, Quadratic.Vector scores, double phi, double scale)
+    {
+        var cosines = new Cosines(periods);
+        return Quadratic.Form(u, cosines.Variance(u.Count, scores), scale) is double form
+            ? Hotelling(phi * form, u.Count, cosines.Count)
             : TestResult.None(Impediment.SingularCovariance);
     }
 }

@@ -27,6 +27,9 @@ internal sealed record Basis(string Name, string Reason, TestResult Test)
     /// <summary>Of a score form: the same form with the group's own fitted part in place of the residuals. Its p is the least that an effect can reach.</summary>
     public TestResult? Ceiling { get; init; }
 
+    /// <summary>The classes of rows that the form sums over; nothing for classical and HC3, two kinds where the larger p of two forms decides.</summary>
+    public SummedOver Over { get; init; }
+
     /// <summary>What <see cref="Needed"/> counts: rows, clusters or periods.</summary>
     public string CountedIn { get; init; } = Counted.Rows;
 
@@ -92,6 +95,16 @@ internal sealed record Basis(string Name, string Reason, TestResult Test)
 
     private static double? RowsNeeded(GroupFit fit, FTest f, EffectiveRows rows, double bound, double level, double power) =>
         Power.RowsNeeded(f.Df1, fit.Added.Final.Rank, rows.LeastInformed / (f.Df1 + f.Df2 + 1), bound, level, power);
+}
+
+/// <summary>Classes of rows that a form sums over.</summary>
+[Flags]
+internal enum SummedOver
+{
+    Nothing = 0,
+    Cluster = 1,
+    Unit = 2,
+    Period = 4,
 }
 
 /// <summary>What observations are counted in, as the record writes it.</summary>

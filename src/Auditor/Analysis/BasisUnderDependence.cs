@@ -57,6 +57,7 @@ internal static class BasisUnderDependence
         var sizes = byPeriod.EffectiveRows is null || byPeriod.EffectiveRows.LeastInformed <= byCluster.EffectiveRows?.LeastInformed ? byPeriod : byCluster;
         return decides with
         {
+            Over = byCluster.Over | byPeriod.Over,
             Ceiling = byPeriod.Ceiling?.P >= byCluster.Ceiling?.P ? byPeriod.Ceiling : byCluster.Ceiling,
             Unrestricted = sizes.Unrestricted,
             EffectiveRows = sizes.EffectiveRows,
@@ -68,13 +69,19 @@ internal static class BasisUnderDependence
     private static Basis OnClusters(GroupResults results, ClassSums clusters, string reason)
     {
         var group = results.Fit.Added;
-        var basis = new Basis(Basis.Cluster, reason, ClusterF.Of(group, clusters)) { Unrestricted = TestResult.None(Impediment.SingularCovariance), CountedIn = Counted.Clusters };
+        var declared = ReferenceEquals(clusters, results.Fit.Sums.Cluster);
+        var basis = new Basis(Basis.Cluster, reason, ClusterF.Of(group, clusters))
+        {
+            Unrestricted = TestResult.None(Impediment.SingularCovariance),
+            CountedIn = Counted.Clusters,
+            Over = declared ? SummedOver.Cluster : SummedOver.Unit,
+        };
         if (basis.Test is NotComputable)
         {
             return basis with { Unrestricted = basis.Test };
         }
 
-        var cr2 = ReferenceEquals(clusters, results.Fit.Sums.Cluster) ? results.Dependence.Cr2! : Cr2.Of(group, clusters);
+        var cr2 = declared ? results.Dependence.Cr2! : Cr2.Of(group, clusters);
         var (test, covariance) = cr2.Test is NotComputable { Why: Impediment.TooManyClusters }
             ? (Cr1.Of(group, clusters), Cr1.Covariance(group, clusters))
             : (cr2.Test, cr2.Covariance);
@@ -93,7 +100,12 @@ internal static class BasisUnderDependence
     private static Basis OnPeriods(GroupResults results, string reason)
     {
         var (group, periods) = (results.Fit.Added, results.Fit.Sums.Period!);
-        var basis = new Basis(Basis.Time, reason, PeriodF.Of(group, periods)) { Unrestricted = TestResult.None(Impediment.SingularCovariance), CountedIn = Counted.Periods };
+        var basis = new Basis(Basis.Time, reason, PeriodF.Of(group, periods))
+        {
+            Unrestricted = TestResult.None(Impediment.SingularCovariance),
+            CountedIn = Counted.Periods,
+            Over = SummedOver.Period,
+        };
         if (basis.Test is NotComputable)
         {
             return basis with { Unrestricted = basis.Test };

@@ -56,6 +56,7 @@ internal static class ExclusionFigures
             PowerCurve = judgement.Verdict == Verdicts.Inconclusive ? PowerCurves.Of(evidence, policy) : [],
             InShort = judgement.InShort,
             Level = evidence?.Tests.Dependence.Level is { } level ? LevelWords.Of(level.Level) : null,
+            BasisClustersOn = evidence is null ? null : ClustersOn(evidence.Basis.Over, evidence.Fit.Dependence),
             EffectiveClusters = evidence?.Tests.Dependence.EffectiveClusters,
             Ceiling = evidence?.Basis is { Ceiling.P: double ceiling } basis ? new ScoreCeiling(ceiling, basis.CannotReject(policy.Significance), basis.Wald?.Probability) : null,
             Because = identity.Because,
@@ -109,6 +110,9 @@ internal static class ExclusionFigures
             JointOnly(common, "last_in", notComputed) ? null : LastIn(Against(common?.LastIn, sampling, PartialF.Of), Figure, notComputed),
             JointOnly(common, "largest_model_denominator", notComputed) ? null : Figure("largest_model_denominator", Against(common?.Largest, sampling, largest => PartialF.WithMeanSquareOf(common!.Added, largest))));
     }
+
+    private static string? ClustersOn(SummedOver over, Dependence dependence) =>
+        over.HasFlag(SummedOver.Cluster) ? dependence.ClusteredBy : over.HasFlag(SummedOver.Unit) ? dependence.Unit : null;
 
     /// <summary>Resampling has no degrees of freedom: p with the interval that its draws leave open.</summary>
     private static PermutationFigures? Resampled(DependenceResults? dependence, SortedDictionary<string, string> notComputed)

@@ -1,3 +1,4 @@
+using Auditor.Analysis.Parts;
 using Auditor.Design;
 using Auditor.Policies;
 using Auditor.Results;
@@ -34,7 +35,10 @@ internal static class Exclusions
                 policy,
                 sampling);
         })];
-        return new JudgedExclusions(exclusions, whatIf ? OtherThresholds.Of([.. main.Select(group => group.Judgement.Group)], policy) : null);
+        return new JudgedExclusions(exclusions, whatIf ? OtherThresholds.Of([.. main.Select(group => group.Judgement.Group)], policy) : null)
+        {
+            Judged = [.. main.Select(group => new JudgedOnRows(group.Judgement, group.Rows))],
+        };
     }
 
     private static List<(Judgement Judgement, RowSetFit? Rows)> OnRows(
@@ -59,7 +63,11 @@ internal static class Exclusions
 }
 
 /// <param name="WhatIf">Null when it was not asked for.</param>
-internal sealed record JudgedExclusions(IReadOnlyList<Exclusion> All, WhatIf? WhatIf);
+internal sealed record JudgedExclusions(IReadOnlyList<Exclusion> All, WhatIf? WhatIf)
+{
+    /// <summary>Each group as it was judged on the row set that the policy asks for.</summary>
+    public required IReadOnlyList<JudgedOnRows> Judged { get; init; }
+}
 
 /// <summary>What the judgement of every group depends on beside its tests.</summary>
 /// <param name="Sampling">Sampling weights are declared.</param>

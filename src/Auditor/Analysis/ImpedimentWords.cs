@@ -22,6 +22,8 @@ internal static class ImpedimentWords
         Impediment.TooManyPeriods => "more periods than this form is computed for",
         Impediment.SamplingWeights => "sampling weights: a classical test does not apply",
         Impediment.NoRows => "no row is complete for the final model and the group",
+        Impediment.NothingToCompare => "in fewer than two parts can the group's effect be told apart",
+        Impediment.TooManyDirections => "columns times parts are more directions than the comparison is computed for",
         Impediment.RuleEndsElsewhere => "the stated rule, replayed from all candidates, does not end in the reported model",
         Impediment.SelectionHangsOnRounding => "two candidates are equal to the last digits, so rounding decides where the stated rule ends",
         _ => "the statistic is not finite",

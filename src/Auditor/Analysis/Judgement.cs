@@ -40,7 +40,7 @@ internal sealed record Judgement(
         {
             null => Verdicts.Untestable,
             _ when group.Evidence!.Basis.CannotReject(level) => Verdicts.Untestable,
-            _ when group.ProductElsewhere is not null || group.Drifts => Verdicts.Inconclusive,
+            _ when !group.Stands => Verdicts.Inconclusive,
             { P: var p } when p <= level => Verdicts.NotSupported,
             _ when negligible?.P <= level => Verdicts.Supported,
             _ => Verdicts.Inconclusive,
@@ -62,6 +62,9 @@ internal sealed record JudgedGroup(GroupEvidence? Evidence, string? ProductElsew
 {
     /// <summary>A unit root of the final model's residual is not rejected and the group holds a term that is no change: series that drift look related when they are not.</summary>
     public bool Drifts { get; init; }
+
+    /// <summary>Neither of the two keeps a verdict from being drawn from its p.</summary>
+    public bool Stands => ProductElsewhere is null && !Drifts;
 
     public JudgedGroup Under(Policy policy) => this with { Evidence = Evidence?.Under(policy) };
 }

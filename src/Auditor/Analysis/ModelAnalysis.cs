@@ -1,4 +1,5 @@
 using Auditor.Analysis.Claims;
+using Auditor.Analysis.Parts;
 using Auditor.Declaration;
 using Auditor.Design;
 using Auditor.Numerics.ResidualChecks;
@@ -41,6 +42,7 @@ internal static class ModelAnalysis
         var elimination = EliminationFigures.Of(declaration, model, fits.Common, sampling, run.Threads);
         var inputs = new JudgementInputs(policy, sampling, SerialCheckFigures.ResidualMayDrift(checks));
         var exclusions = Exclusions.Of(model, fits, elimination.Selective, inputs, whatIf: run.Pictures);
+        var inParts = GroupsInParts.Of(model, main.Rows, exclusions.Judged, inputs, run);
         return Reading<AuditResults>.Of(new AuditResults(
             declaration.Model.Id,
             selection.Account(common, mentioned),
@@ -48,8 +50,8 @@ internal static class ModelAnalysis
             shown.Summary,
             beside?.Summary,
             main.Fit.Perfect,
-            exclusions.All,
-            [.. Enumerable.Range(0, model.Groups.Count).Select(group => Inputs(model, fits, group, common) with { LeftOutByRule = elimination.LeftOutByRule[group], Groups = model.Groups.Count })],
+            [.. exclusions.All.Select((exclusion, group) => exclusion with { InParts = inParts[group] })],
+            [.. Enumerable.Range(0, model.Groups.Count).Select(group => Inputs(model, fits, group, common) with { LeftOutByRule = elimination.LeftOutByRule[group], Groups = model.Groups.Count, Stands = exclusions.Judged[group].Judgement.Group.Stands })],
             AllLeftOut.Of(model, fits.Common, inputs),
             checks,
             InfluenceFigures.Of(influence, main.Rows, model.RowLabel),

@@ -50,7 +50,7 @@ internal sealed class RowSetFit
         var pictures = groups.Select((group, g) => wishes.Pictured.Contains(group) ? GroupPictures.Of(added[g], plan, model.Groups.Count) : null).ToList();
         var scores = wishes.Scored ? new CoefficientScores(final) : null;
         IAccumulator?[] others = [wishes.Residuals, scores, .. pictures.SelectMany(picture => picture?.Accumulators ?? [])];
-        var dependence = Dependence.Of(model.Structure, model.Structure.Among(rows), wishes.Seed);
+        var dependence = Dependence.Of(model.Structure, model.Structure.Among(rows), wishes.Seed).Within(wishes.MostDoubles);
         var pass = RowPass.Run(design, final, joint is null ? added : [.. added, joint], [.. others.OfType<IAccumulator>()], dependence.Rows, threads);
         var result = new RowSetFit(rows, plan, final, new Fit(final, pass)) { Scores = scores };
         var last = joint is null ? null : LastIn.Of(final, [.. added.Select(group => group.Columns)], threads);
@@ -83,4 +83,8 @@ internal sealed record GroupFit(AddedGroup Added, GroupSums Sums, AddedGroup? La
 /// <param name="Pictured">Groups whose pictures show these rows.</param>
 /// <param name="Scored">Robust covariances of the coefficients.</param>
 /// <param name="Seed">Seed of everything drawn at random.</param>
-internal sealed record FitWishes(bool Jointly, ResidualStore? Residuals, IReadOnlySet<int> Pictured, bool Scored, long Seed);
+internal sealed record FitWishes(bool Jointly, ResidualStore? Residuals, IReadOnlySet<int> Pictured, bool Scored, long Seed)
+{
+    /// <summary>Doubles that sums by class may take; null: as many as usual.</summary>
+    public long? MostDoubles { get; init; }
+}

@@ -14,6 +14,7 @@ internal static class AuditFacts
         return
         [
             .. results.Exclusions.Select((exclusion, g) => ExclusionFacts.From(exclusion, results.ExclusionInputs[g], policy)),
+            .. SegmentFacts.From(results.Exclusions, [.. results.ExclusionInputs.Select(inputs => inputs.Stands)]),
             .. results.AllLeftOut is { } all ? new[] { AllLeftOutFacts.From(all, results.Exclusions, results.FinalFit.Rows, policy) } : [],
             FitFacts.From(id, results.FinalFit, new FitInputs(results.Perfect, results.Exclusions.Count, results.Influence, results.Collinearity)
             {

@@ -15,6 +15,7 @@ public static class FactCatalogue
         .. AcceptanceFacts.Definitions,
         .. ClaimFacts.Definitions,
         .. StepFacts.Definitions,
+        .. SegmentFacts.Definitions,
     ];
 
     private static readonly ILookup<About, FactDefinition> ByAbout = All.ToLookup(fact => fact.About);

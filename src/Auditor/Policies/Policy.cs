@@ -64,6 +64,12 @@ public sealed record Policy
 
     public RowSet RowSet => PolicyNames.RowSets[Text(PolicyNames.RowSet)];
 
+    /// <summary>Parts of the rows above which a segment column is not divided by.</summary>
+    public int MostParts => (int)Number(PolicyNames.MostParts);
+
+    /// <summary>Rows below which no test is made in a part.</summary>
+    public int PartRows => (int)Number(PolicyNames.PartRows);
+
     /// <summary>Every value under its name in the order of the file: a double, long, bool or string. What the record's "policy" shows.</summary>
     public IReadOnlyDictionary<string, object> Effective { get; }
 

@@ -8,6 +8,9 @@ public sealed record ExclusionInputs(IReadOnlyList<string> ProductsElsewhere, IR
     /// <summary>A stated rule of elimination that looks at the data (by p, AIC or BIC) drops the group, as far as it can be replayed.</summary>
     public bool LeftOutByRule { get; init; }
 
+    /// <summary>The group's p can be read: no product outside it holds one of its terms, and no unit root of the residual keeps its series from being told from drift.</summary>
+    public bool Stands { get; init; } = true;
+
     /// <summary>How many groups are left out.</summary>
     public int Groups { get; init; } = 1;
 }

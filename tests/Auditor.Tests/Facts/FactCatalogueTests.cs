@@ -38,6 +38,7 @@ public sealed class FactCatalogueTests
             StepFacts.From(new StepResult(1, "engine condition", 1.2, 2, 400, 0.3, false, null)),
             CoefficientFacts.From(new CoefficientFigures("price", 1, 1, 1, 0.3, null, -1, 3, null)),
             AcceptanceFacts.From(Samples.Standing),
+            SegmentFacts.From([Samples.Divided], [true]).Last(),
         ];
 
         Assert.Equal(FactCatalogue.All.Count, sets.Sum(set => set.Values.Count));

@@ -37,6 +37,25 @@ internal static class Samples
         Line = 31,
     };
 
+    /// <summary>By region: tested in one part, too few rows in the other; and not divided by dealer.</summary>
+    public static readonly Exclusion Divided = Tested with
+    {
+        InParts =
+        [
+            new GroupInParts("dealer", Divisions.Segment, [], new DifferenceFigures(0, null, null, null, null, "too many dealers"), "too many dealers"),
+            new GroupInParts(
+                "region",
+                Divisions.Segment,
+                [
+                    new PartFigures("coast", 300, "hc3", new TestFigures(6, 2, 290, 0.003), 0.006, null, new EffectFigures(0.04, 0.01, 0.08, 0.01, 0.09, null), null),
+                    new PartFigures("hills", 7, null, null, null, null, new EffectFigures(null, null, null, null, null, "7 rows"), "7 rows"),
+                ],
+                new DifferenceFigures(1, null, null, null, null, "one part"),
+                null),
+        ],
+        Line = 12,
+    };
+
     public static readonly FitSummary Fit = new(
         480, 6, 474, 12.5, 0.16, 0.4, 0.39, 63, 5, 474, 1e-30, null, 100, -190, -160, 12, 13, [], [], [], null);
 

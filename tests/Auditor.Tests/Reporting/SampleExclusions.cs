@@ -46,6 +46,20 @@ internal static class SampleExclusions
         Verdict = Verdicts.NotSupported,
         Materiality = Materialities.ShownMaterial,
         Reason = "The test rejects leaving engine condition out, and the effect is larger than the bound below which the policy calls it negligible.",
+        InParts =
+        [
+            new("dealer", Divisions.Segment, [], new(0, null, null, null, null, "dealer has 48 values"), "dealer has 48 values"),
+            new(
+                "region <i>",
+                Divisions.Segment,
+                [
+                    new("coast & <plain>", 1199, "hc3", new(8.02, 2, 1190, 0.000346915236), 0.00104074571, new(9.81, 2, 1190, 5.94718553e-05), new(0.0162, 0.006, 0.029, 0.005, 0.031, null), null),
+                    new("hills", 1178, "hc3", new(17.9, 2, 1169, 2.20185301e-08), 8.80741204e-08, new(21.4, 2, 1169, 7.45062275e-10), new(0.0353, 0.019, 0.054, 0.016, 0.057, null), null),
+                    new("marsh", 14, null, null, null, null, new(null, null, null, null, null, "14 rows lie in this part"), "14 rows lie in this part"),
+                ],
+                new(2, "hc3", new(4.4, 2, 2359, 0.0123782611), 0.0123782611, new(6.3, 2, 2359, 0.00186735041), null),
+                null),
+        ],
     };
 
     private static Exclusion Warranty() => Tested(

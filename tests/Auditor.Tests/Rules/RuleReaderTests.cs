@@ -42,7 +42,7 @@ public sealed class RuleReaderTests
         { "  source: common practice, no source", "", "r.yaml:1: rule 'rejected' lacks 'source'" },
         { "source: common practice, no source", "source:", "r.yaml:9: 'source' of rule 'rejected' must be a text" },
         { "{p_adjusted}", "{p_adjust}", "r.yaml:7: 'message' of rule 'rejected': unknown fact 'p_adjust' about 'exclusion'; did you mean 'p_adjusted'?" },
-        { "{policy.significance},", "{policy.level},", "r.yaml:7: 'message' of rule 'rejected': unknown policy name 'level'; known: significance, adjustment, negligible_partial_r_squared, power, basis_without_structure, row_set" },
+        { "{policy.significance},", "{policy.level},", "r.yaml:7: 'message' of rule 'rejected': unknown policy name 'level'; known: significance, adjustment, negligible_partial_r_squared, power, basis_without_structure, row_set, most_parts, part_rows" },
         { "back.", "back {now.", "r.yaml:8: 'advice' of rule 'rejected' has a brace without its partner; write {{ or }} for the sign itself" },
         { "id: rejected", "id: Rejected_1", "r.yaml:1: rule id 'Rejected_1' may hold small letters, digits and hyphens only" },
         { "- id: rejected\n ", "-", "r.yaml:1: a rule lacks 'id'" },
@@ -71,9 +71,9 @@ public sealed class RuleReaderTests
     [Fact]
     public void A_subject_without_facts_says_so()
     {
-        var reading = Read(Whole.Replace("about: exclusion", "about: segment", StringComparison.Ordinal));
+        var reading = Read(Whole.Replace("about: exclusion", "about: entangled", StringComparison.Ordinal));
 
-        Assert.Equal("r.yaml:4: unknown fact 'p_adjusted': there are no facts about 'segment' yet", reading.Problems[0].ToString());
+        Assert.Equal("r.yaml:4: unknown fact 'p_adjusted': there are no facts about 'entangled' yet", reading.Problems[0].ToString());
     }
 
     [Fact]

@@ -17,6 +17,9 @@ internal sealed record ExclusionPage(
     /// <summary>What the group adds, what is left over against its columns, what the rows could show.</summary>
     public IReadOnlyList<Picture> Pictures { get; init; } = [];
 
+    /// <summary>The group in segments and in parts of the time span; empty when none is declared.</summary>
+    public IReadOnlyList<PartsPage> Parts { get; init; } = [];
+
     /// <summary>Figures that the report prints for the group, recomputed; null where none can be.</summary>
     public ReportTable? Reported { get; init; }
 
@@ -28,7 +31,10 @@ internal sealed record ExclusionPage(
 
     public static ExclusionPage Of(Exclusion exclusion, string anchor, double level) => new(
         exclusion, anchor, VerdictWords.Of(exclusion), TestTable.Of(exclusion, level), NotComputedOf(exclusion), DecisionOf(exclusion, level), SizeOf(exclusion, level),
-        exclusion.OtherRowSet is { } other ? OtherRowsOf(other, level) : null);
+        exclusion.OtherRowSet is { } other ? OtherRowsOf(other, level) : null)
+    {
+        Parts = PartsPage.Of(exclusion, level),
+    };
 
     private static IReadOnlyList<Fact> NotComputedOf(Exclusion exclusion) => FactList.Gathered(
         from test in TestWords.All

@@ -87,10 +87,11 @@ internal sealed record ReportPage(AuditRecord Record, PageScript Script)
     private ExclusionPage Page(Exclusion exclusion, int index)
     {
         var page = ExclusionPage.Numbered(exclusion, index, Level);
+        var inParts = Divisions.Subjects(exclusion).ToHashSet(StringComparer.Ordinal);
         return page with
         {
             Reported = ClaimWords.TableOf(exclusion.Group, Record, Findings),
-            Next = [.. Findings.Where(finding => finding.Finding.Subject == exclusion.Group && finding.Finding.Advice.Length > 0)],
+            Next = [.. Findings.Where(finding => (finding.Finding.Subject == exclusion.Group || inParts.Contains(finding.Finding.Subject)) && finding.Finding.Advice.Length > 0)],
             Pictures = ExclusionPictures.Of(exclusion, Record.Plots?.Groups.ElementAtOrDefault(index), page.Anchor, Power, Record.Plots?.Plots?.Weighted ?? false),
         };
     }
