@@ -27,6 +27,9 @@ internal sealed record Basis(string Name, string Reason, TestResult Test)
     /// <summary>Of a score form: the same form with the group's own fitted part in place of the residuals. Its p is the least that an effect can reach.</summary>
     public TestResult? Ceiling { get; init; }
 
+    /// <summary>Clusters or periods that the test sums over; null when it takes row by row.</summary>
+    public int? Sums { get; init; }
+
     /// <summary>What <see cref="Needed"/> counts: rows, clusters or periods.</summary>
     public string CountedIn { get; init; } = Counted.Rows;
 

@@ -68,7 +68,7 @@ internal static class BasisUnderDependence
     private static Basis OnClusters(GroupResults results, ClassSums clusters, string reason)
     {
         var group = results.Fit.Added;
-        var basis = new Basis(Basis.Cluster, reason, ClusterF.Of(group, clusters)) { Unrestricted = TestResult.None(Impediment.SingularCovariance), CountedIn = Counted.Clusters };
+        var basis = new Basis(Basis.Cluster, reason, ClusterF.Of(group, clusters)) { Unrestricted = TestResult.None(Impediment.SingularCovariance), CountedIn = Counted.Clusters, Sums = clusters.Count };
         if (basis.Test is NotComputable)
         {
             return basis with { Unrestricted = basis.Test };
@@ -93,7 +93,7 @@ internal static class BasisUnderDependence
     private static Basis OnPeriods(GroupResults results, string reason)
     {
         var (group, periods) = (results.Fit.Added, results.Fit.Sums.Period!);
-        var basis = new Basis(Basis.Time, reason, PeriodF.Of(group, periods)) { Unrestricted = TestResult.None(Impediment.SingularCovariance), CountedIn = Counted.Periods };
+        var basis = new Basis(Basis.Time, reason, PeriodF.Of(group, periods)) { Unrestricted = TestResult.None(Impediment.SingularCovariance), CountedIn = Counted.Periods, Sums = periods.Count };
         if (basis.Test is NotComputable)
         {
             return basis with { Unrestricted = basis.Test };

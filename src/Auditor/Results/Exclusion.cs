@@ -41,6 +41,9 @@ public sealed record Exclusion(
     /// <summary>The level on which the group's columns vary: row, period, cluster, unit or several; null when no dependence is declared.</summary>
     public string? Level { get; init; }
 
+    /// <summary>Clusters or periods that the test the verdict rests on sums over; null when it takes row by row.</summary>
+    public int? BasisSums { get; init; }
+
     /// <summary>How many equal clusters the declared ones are worth for this group; null without clusters.</summary>
     public double? EffectiveClusters { get; init; }
 

@@ -42,7 +42,7 @@ internal sealed record PictureAxis(double Low, double High, double From, double 
         return [.. Enumerable.Range(0, (int)(last - first) + 1).Select(index => Tick((first + index) * step, step))];
     }
 
-    private PictureTick Tick(double value, double step) => new(PicturePath.Place(At(value)), Time is null ? NumberText.Tick(value, step) : NumberText.Plain(Math.Round(value / step) * step));
+    private PictureTick Tick(double value, double step) => new(PicturePath.Place(At(value)), Time is null ? NumberText.Tick(value, step) : NumberText.Label(Math.Round(value / step) * step));
 
     /// <summary>The smallest of 1, 2 and 5 times a power of ten that gives few enough steps.</summary>
     private static double Step(double range, int most)

@@ -34,7 +34,10 @@ internal sealed record ReportPage(AuditRecord Record, PageScript Script)
     /// <summary>Verdicts at other levels and bounds, as JSON; null when there are none to try.</summary>
     public Markup? WhatIf => WhatIfValues.Of(Record);
 
-    public ExclusionPage? Jointly => Record.AllLeftOut is { } all ? ExclusionPage.Of(all, "all-left-out", Level) : null;
+    public ExclusionPage? Jointly => Record.AllLeftOut is { } all ? ExclusionPage.Of(all, "all-left-out", Level, alone: true) : null;
+
+    /// <summary>A check contradicts what the classical standard errors need.</summary>
+    public bool ClassicalDoubted => Record.Checks.Any(check => check is { Contradicts: true, Assumption: CheckFindings.EqualVariance or CheckFindings.Independence });
 
     public FitPage FinalFit => FitPage.Of(Record.FinalFit, Level, "Coefficients");
 
@@ -47,6 +50,9 @@ internal sealed record ReportPage(AuditRecord Record, PageScript Script)
     public IReadOnlyList<CheckConsequence> Consequences => CheckConsequence.Of(Record);
 
     public IReadOnlyList<Picture> ResidualPictures => Html.ResidualPictures.Of(Record, Level);
+
+    /// <summary>Rows through which the fit passes, named by their number in the source.</summary>
+    public IReadOnlyList<string> LeverageOne => [.. Record.Influence.LeverageOne.Select(row => NumberText.Count(row))];
 
     public ReportTable Influence => AuditTables.Influence(Record.Influence);
 
@@ -86,7 +92,7 @@ internal sealed record ReportPage(AuditRecord Record, PageScript Script)
 
     private ExclusionPage Page(Exclusion exclusion, int index)
     {
-        var page = ExclusionPage.Numbered(exclusion, index, Level);
+        var page = ExclusionPage.Numbered(exclusion, index, Level, Record.Exclusions.Count == 1);
         return page with
         {
             Reported = ClaimWords.TableOf(exclusion.Group, Record, Findings),
