@@ -34,8 +34,8 @@ public sealed class OutcomeSentenceTests
     {
         Assert.Equal("1 high, 2 medium, 1 low, 1 note", OutcomeSentence.Findings(SampleRecords.Full));
         Assert.Equal("1 finding accepted as of 2026-03-01", OutcomeSentence.Accepted(SampleRecords.Full));
-        Assert.Contains("Findings: 1 high, 2 medium, 1 low, 1 note; 1 finding accepted as of \n", ConsoleSummary.Of(SampleRecords.Full), StringComparison.Ordinal);
-        Assert.Equal("6 findings accepted", OutcomeSentence.Accepted(AllAccepted));
+        Assert.Contains("Findings: 1 high, 2 medium, 1 low, 1 note; 1 finding accepted as of 2026-03-01.\n", ConsoleSummary.Of(SampleRecords.Full), StringComparison.Ordinal);
+        Assert.Equal("6 findings accepted as of 2026-03-01", OutcomeSentence.Accepted(AllAccepted));
         Assert.Equal("none open", OutcomeSentence.Findings(AllAccepted));
         Assert.Null(OutcomeSentence.Accepted(SampleRecords.WithoutFindings));
     }

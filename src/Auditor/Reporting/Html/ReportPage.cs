@@ -1,4 +1,5 @@
 using System.Globalization;
+using System.Text.RegularExpressions;
 using Auditor.Results;
 
 namespace Auditor.Reporting.Html;
@@ -82,6 +83,12 @@ internal sealed record ReportPage(AuditRecord Record, PageScript Script)
 
     public IReadOnlyList<FindingPage> AcceptedFindings => [.. FindingPage.Of(Record).Where(finding => finding.Accepted is not null)];
 
+    /// <summary>Rules that could not decide, those with one reason together.</summary>
+    public IReadOnlyList<UndecidedPage> Undecided =>
+    [
+        .. Record.Undecided.GroupBy(item => (item.Rule, item.Why)).Select(group => new UndecidedPage(group.Key.Rule, [.. group.Select(item => FindingPage.SubjectWords(item.Subject, Record))], UndecidedPage.WithoutNames(group.Key.Why))),
+    ];
+
     public FactList Policy => FactList.Of([.. Record.Policy.Select(pair => new Fact(CheckWords.Spaced(pair.Key), PolicyCell(pair.Value), ShippedNote(pair.Key)))]);
 
     /// <summary>The words that make this page again, quoted for a shell.</summary>
@@ -106,9 +113,26 @@ internal sealed record ReportPage(AuditRecord Record, PageScript Script)
 
     private static Cell PolicyCell(object value) => value is IFormattable number
         ? Cell.Number(Convert.ToDouble(number, CultureInfo.InvariantCulture)) with { Text = NumberText.Plain(Convert.ToDouble(number, CultureInfo.InvariantCulture)) }
-        : Cell.Words(CheckWords.Spaced(Convert.ToString(value, CultureInfo.InvariantCulture) ?? ""));
+        : Cell.Words(Convert.ToString(value, CultureInfo.InvariantCulture) switch
+        {
+            "holm" => "Holm",
+            "hc3" => "robust HC3 test",
+            "own" => "each group’s own rows",
+            "common" => "rows common to all groups",
+            var words => CheckWords.Spaced(words ?? ""),
+        });
 
     private static string Quoted(string path) => path.All(sign => char.IsAsciiLetterOrDigit(sign) || "._-/".Contains(sign, StringComparison.Ordinal))
         ? path
         : "'" + path.Replace("'", "'\\''", StringComparison.Ordinal) + "'";
+}
+
+/// <summary>A rule that could not decide for want of a fact, with all subjects of which the same fact is missing.</summary>
+internal sealed partial record UndecidedPage(string Rule, IReadOnlyList<string> Subjects, string Why)
+{
+    /// <summary>The reasons alone, each once: the record names the facts.</summary>
+    public static string WithoutNames(string why) => string.Join("; ", NamedFact().Replace(why, "\n").Split('\n', StringSplitOptions.RemoveEmptyEntries).Distinct());
+
+    [GeneratedRegex(@"(?:; |\A)[a-z0-9_]+ could not be computed: ")]
+    private static partial Regex NamedFact();
 }
