@@ -39,12 +39,12 @@
   };
 
   // Tables.
-  // What a cell says in full: the value behind a rounded one, note letters off, a number without the spaces between its thousands.
+  // What a cell says in full: the value behind a rounded one, note letters off, a minus that other programs read.
   const words = (cell) => {
     const copy = cell.cloneNode(true);
     all('sup', copy).forEach((note) => note.remove());
     const text = (copy.querySelector('span[title]')?.title ?? copy.textContent).replace(/\s+/g, ' ').trim();
-    return /^[−-]?\d{1,3}( \d{3})*\d*(\.\d+)?(e[-+−]?\d+)?$/.test(text) ? text.replace(/ /g, '').replace(/−/g, '-') : text;
+    return /^[−-]?\d+(\.\d+)?(e[-+−]?\d+)?$/.test(text) ? text.replace(/−/g, '-') : text;
   };
   // A range sorts by its lower end.
   const value = (cell) => {

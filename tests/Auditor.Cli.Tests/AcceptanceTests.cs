@@ -24,7 +24,7 @@ public sealed class AcceptanceTests
         var run = ProgramRun.In(folder, "lease.yaml", "--acceptances", "accepted.yaml", "--verbose").Ends(0);
 
         Assert.Contains("The only exclusion is not supported by the data.", run.Output, StringComparison.Ordinal);
-        Assert.Contains("; 1 finding accepted.", run.Output, StringComparison.Ordinal);
+        Assert.Contains("; 1 finding accepted as of ", run.Output, StringComparison.Ordinal);
         Assert.Contains("2 acceptances, 1 of them for other models", run.Errors, StringComparison.Ordinal);
         using var record = Record(folder);
         Assert.Equal("exclusions_not_supported", record.RootElement.GetProperty("outcome").GetString());

@@ -34,7 +34,7 @@ public sealed class ReadmeTests
         }
 
         var accepted = ProgramRun.In(folder, "leases.yaml", "--acceptances", "accepted.yaml", "--as-of", "2026-06-30").Ends(0);
-        Assert.Contains("; 1 finding accepted.", accepted.Output, StringComparison.Ordinal);
+        Assert.Contains("; 1 finding accepted as of ", accepted.Output, StringComparison.Ordinal);
         Assert.DoesNotContain("acceptance-", folder.Text(Path.Combine("audit-out", "lease-loss.json")), StringComparison.Ordinal);
     }
 

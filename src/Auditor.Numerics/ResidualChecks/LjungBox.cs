@@ -15,23 +15,14 @@ public static class LjungBox
             return CheckOutcome.None(impediment);
         }
 
-        int[][] pairs = [.. Enumerable.Range(1, lags).Select(fit.Order.Lag)];
-        double[] counts = [.. pairs.Select(lag => (double)lag.Count(at => at >= 0))];
-        if (counts.Any(count => count == 0))
+        Autocorrelation[] correlations = [.. Enumerable.Range(1, lags).Select(lag => Autocorrelation.At(fit, lag))];
+        if (correlations.Any(correlation => correlation.Pairs == 0))
         {
             return CheckOutcome.None(CheckImpediment.TooFew);
         }
 
-        double[] correlations = [.. pairs.Select(lag => Correlation(fit.Residuals, lag))];
         var n = fit.Residuals.Length;
-        var statistic = n * (n + 2.0) * correlations.Zip(counts, (r, count) => r * r / count).Sum();
-        return ChiSquaredCheck.Of(statistic, lags, new CheckSize(SizeMeasure.LargestAutocorrelation, correlations.MaxBy(Math.Abs)));
-    }
-
-    private static double Correlation(double[] residuals, int[] lag)
-    {
-        var mean = residuals.Average();
-        var products = residuals.Select((value, t) => lag[t] >= 0 ? (value - mean) * (residuals[lag[t]] - mean) : 0).Sum();
-        return products / residuals.Sum(value => (value - mean) * (value - mean));
+        var statistic = n * (n + 2.0) * correlations.Sum(correlation => correlation.Value * correlation.Value / correlation.Pairs);
+        return ChiSquaredCheck.Of(statistic, lags, new CheckSize(SizeMeasure.LargestAutocorrelation, correlations.Select(correlation => correlation.Value).MaxBy(Math.Abs)));
     }
 }

@@ -26,8 +26,18 @@ public static class AcceptanceMatching
             .ToList();
         var holding = standings.Where(standing => standing.Holds).Select(standing => standing.Entry)
             .ToDictionary(entry => (entry.Rule, entry.Subject));
+        if (standings.Count == 0)
+        {
+            standings.AddRange(OfNearModels(acceptances, model, version));
+        }
+
         return new MatchedAcceptances([.. findings.Select(finding => Accepted(finding, holding.GetValueOrDefault((finding.Rule, finding.Subject))))], standings);
     }
+
+    /// <summary>A file may serve many models, so entries of others are nothing to speak of; but where none is for this one, a name that is nearly this one's may be a slip.</summary>
+    private static IEnumerable<AcceptanceStanding> OfNearModels(AcceptancesOfRun acceptances, string model, string? version) => acceptances.Entries
+        .Where(entry => NearestName.DidYouMean(entry.Model, [model]).Length > 0)
+        .Select(entry => new AcceptanceStanding(entry, version, acceptances.AsOf, null, null, null, [], "") { NearModel = entry.Model });
 
     private static AcceptanceStanding Standing(
         AcceptanceEntry entry, string? version, DateOnly asOf, IReadOnlyList<Finding> findings, IReadOnlyList<FactSet> facts, IReadOnlyList<Rule> rules)

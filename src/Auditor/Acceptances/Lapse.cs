@@ -48,14 +48,14 @@ internal static class Lapse
         if (worst?.P is double leastP && !(evidence.P >= leastP))
         {
             yield return evidence.P is double p
-                ? $"p is {PlainNumber.P(p)}, below the accepted {PlainNumber.Digits(leastP, 3)}"
+                ? $"p is {PlainNumber.Probability(p, null, leastP)}, below the accepted {PlainNumber.Digits(leastP, 3)}"
                 : "there is no p to hold against the accepted one: " + evidence.PWhy;
         }
 
         if (worst?.PartialRSquared is double most && !(evidence.PartialRSquared <= most))
         {
             yield return evidence.PartialRSquared is double effect
-                ? $"partial R² is {PlainNumber.Digits(effect, 4)}, above the accepted {PlainNumber.Digits(most, 4)}"
+                ? $"partial R² is {PlainNumber.Share(effect)}, above the accepted {PlainNumber.Digits(most, 4)}"
                 : "there is no partial R² to hold against the accepted one: " + evidence.EffectWhy;
         }
     }

@@ -88,7 +88,7 @@ internal sealed class AuthorSteps(EliminationDeclaration declared, List<string> 
 
         var criterion = declared.Rule.Criterion == EliminationCriterion.DropWorseAic ? "AIC" : "BIC";
         return best.CriterionChange >= 0
-            ? $"without {name} {criterion} would rise by {PlainNumber.Digits(best.CriterionChange.Value, 3)}"
-            : $"without {units.Names[next!.Value]} {criterion} would fall more: by {PlainNumber.Digits(-rule.Removal(set, next.Value).CriterionChange ?? 0, 3)}";
+            ? $"without {name} {criterion} would rise by {PlainNumber.Share(best.CriterionChange.Value)}"
+            : $"without {units.Names[next!.Value]} {criterion} would fall more: by {PlainNumber.Share(-rule.Removal(set, next.Value).CriterionChange ?? 0)}";
     }
 }

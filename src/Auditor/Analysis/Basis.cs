@@ -30,6 +30,9 @@ internal sealed record Basis(string Name, string Reason, TestResult Test)
     /// <summary>The classes of rows that the form sums over; nothing for classical and HC3, two kinds where the larger p of two forms decides.</summary>
     public SummedOver Over { get; init; }
 
+    /// <summary>Clusters or periods that the test sums over; null when it takes row by row.</summary>
+    public int? Sums { get; init; }
+
     /// <summary>What <see cref="Needed"/> counts: rows, clusters or periods.</summary>
     public string CountedIn { get; init; } = Counted.Rows;
 

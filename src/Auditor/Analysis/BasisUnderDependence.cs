@@ -74,6 +74,7 @@ internal static class BasisUnderDependence
         {
             Unrestricted = TestResult.None(Impediment.SingularCovariance),
             CountedIn = Counted.Clusters,
+            Sums = clusters.Count,
             Over = declared ? SummedOver.Cluster : SummedOver.Unit,
         };
         if (basis.Test is NotComputable)
@@ -104,6 +105,7 @@ internal static class BasisUnderDependence
         {
             Unrestricted = TestResult.None(Impediment.SingularCovariance),
             CountedIn = Counted.Periods,
+            Sums = periods.Count,
             Over = SummedOver.Period,
         };
         if (basis.Test is NotComputable)

@@ -47,7 +47,7 @@ internal sealed class CheckFigure(RowSubset rows, double significance)
         string[] parts =
         [
             .. check.OnFittedValues ? [OnFittedValues] : Array.Empty<string>(),
-            .. check.WithinUnits is int units ? [string.Create(CultureInfo.InvariantCulture, $"within {units:N0} units")] : Array.Empty<string>(),
+            .. check.WithinUnits is int units ? [$"within {PlainNumber.Count(units)} units"] : Array.Empty<string>(),
             .. check.Lags is int lags ? [string.Create(CultureInfo.InvariantCulture, $"{lags} lagged {(lags == 1 ? "change" : "changes")}, chosen by AIC")] : Array.Empty<string>(),
             .. check.Predictive ? [Predictive] : Array.Empty<string>(),
             .. check.NormalApproximation ? [NormalApproximation] : Array.Empty<string>(),

@@ -13,6 +13,7 @@ internal static class ExclusionFigures
 {
     private const string NoCluster = "no cluster declared";
     private const string NoTime = "no time order declared";
+    private const string CannotReject = "the test that would decide cannot reject on these data, however large the effect, so it has no power to state";
 
     /// <param name="common">The group on the rows common to all; null when there is none. Last in and the largest model's denominator need it.</param>
     /// <param name="selective">p given the rule that left the group out.</param>
@@ -45,7 +46,7 @@ internal static class ExclusionFigures
             Effect(evidence, why),
             evidence?.Basis.EffectiveRows?.LeastInformed,
             new NegligibleFigures(policy.NegligiblePartialRSquared, evidence?.NegligibleP, judgement.NegligiblePAdjusted, evidence?.NegligibleP is null ? why["p"] : null),
-            Power(evidence, why),
+            Power(judgement, why),
             other,
             judgement.Verdict,
             judgement.Materiality,
@@ -55,6 +56,7 @@ internal static class ExclusionFigures
         {
             PowerCurve = judgement.Verdict == Verdicts.Inconclusive ? PowerCurves.Of(evidence, policy) : [],
             InShort = judgement.InShort,
+            BasisSums = evidence?.Basis.Sums,
             Level = evidence?.Tests.Dependence.Level is { } level ? LevelWords.Of(level.Level) : null,
             BasisClustersOn = evidence is null ? null : ClustersOn(evidence.Basis.Over, evidence.Fit.Dependence),
             EffectiveClusters = evidence?.Tests.Dependence.EffectiveClusters,
@@ -163,6 +165,11 @@ internal static class ExclusionFigures
         evidence?.BasisInterval?.Lower,
         evidence?.BasisInterval?.Upper,
         evidence?.BasisInterval is null ? why["p"] : null);
+
+    /// <summary>Of a test that cannot reject there is no power to speak of: that of the other form beside it would only seem to be one.</summary>
+    private static PowerFigures Power(Judgement judgement, Dictionary<string, string> why) => judgement is { Verdict: Verdicts.Untestable, Evidence: { Basis.Test: FTest, Power: not null } ofTest }
+        ? new PowerFigures(null, null, null, CannotReject) { CountedIn = ofTest.Basis.CountedIn }
+        : Power(judgement.Evidence, why);
 
     private static PowerFigures Power(GroupEvidence? evidence, Dictionary<string, string> why) => evidence?.Power is { } power
         ? new PowerFigures(power.AtBound, power.SmallestDetectable, power.RowsNeeded, power.RowsNeeded is null ? $"no practicable number of {evidence.Basis.CountedIn} is enough" : null)

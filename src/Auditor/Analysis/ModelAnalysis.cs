@@ -32,9 +32,10 @@ internal static class ModelAnalysis
         var fit = CheckedFits.Of(model, main, fits.Residuals, sampling, run.Threads);
         var influence = InfluenceSummary.Of(fit, InfluenceFigures.Shown);
         run.Enter(AuditStep.Checks);
-        var checks = ResidualCheckFigures.Of(fit, influence, SerialBinding.Of(model, main), main.Rows, policy.Significance, run.Seed);
+        var serial = SerialBinding.Of(model, main);
+        var checks = ResidualCheckFigures.Of(fit, influence, serial, main.Rows, policy.Significance, run.Seed);
         run.Enter(AuditStep.Pictures);
-        var plots = run.Pictures ? Pictures(model, fits, fit, main, common) : new PlotData(null, "no pictures were asked for");
+        var plots = run.Pictures ? Pictures(model, fits, fit, serial, main, common) : new PlotData(null, "no pictures were asked for");
         run.Enter(AuditStep.Groups);
         var other = selection.Final.Equals(selection.Common) ? null : common ? fits.Final : fits.Common;
         var shown = new ClaimedRows(main, FitFigures.Of(main, policy.Significance, sampling), sampling, false);
@@ -70,11 +71,17 @@ internal static class ModelAnalysis
         });
     }
 
-    private static PlotData Pictures(BoundModel model, ModelFits fits, CheckedFit fit, RowSetFit main, bool common) =>
-        PlotFigures.Of(fit, [.. RowInfluence.OfAll(fit)], main.Rows, model.RowLabel, weighted: model.Weights is { Kind: not WeightKind.Frequency }) with
+    private static PlotData Pictures(BoundModel model, ModelFits fits, CheckedFit fit, SerialInputs serial, RowSetFit main, bool common)
+    {
+        var plots = PlotFigures.Of(fit, [.. RowInfluence.OfAll(fit)], main.Rows, model.RowLabel, weighted: model.Weights is { Kind: not WeightKind.Frequency });
+        return plots with
         {
+            Plots = plots.Plots is { } residuals
+                ? residuals with { InTime = TimePlots.InTime(model, fit, serial, main.Rows), Autocorrelations = TimePlots.Autocorrelations(model, fit, serial, main.Rows) }
+                : null,
             Groups = [.. Enumerable.Range(0, model.Groups.Count).Select(group => (common ? fits.Common : fits.Own(group))?[group].Plots)],
         };
+    }
 
     /// <summary>A group on the row set that its exclusion does not rest on; null when they are the same.</summary>
     private static GroupFit? OnOtherRows(ModelFits fits, int group, bool common) =>

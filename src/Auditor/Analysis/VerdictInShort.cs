@@ -11,7 +11,7 @@ internal static class VerdictInShort
     {
         { Evidence: null } => "No row is complete for it.",
         { Evidence.Basis.Test: NotComputable none } => Sentence(ImpedimentWords.Of(none.Why)),
-        { Verdict: Verdicts.Untestable } => "However large its effect, the test could not reject it on these data.",
+        { Verdict: Verdicts.Untestable } => $"However large its effect, the {BasisWords.Of(judgement.Evidence!.Basis)} could not reject leaving it out.",
         { Group.Drifts: true } => "The residual may drift, and series that drift look related when they are not.",
         { Group.ProductElsewhere: { } product } => $"Its test depends on how variables are coded, because {product} is outside the group.",
         { Verdict: Verdicts.NotSupported, Evidence.Basis.Test: PerfectWithGroup } => "With it the model fits these rows perfectly; without it, it does not.",
@@ -29,7 +29,7 @@ internal static class VerdictInShort
         : "";
 
     private static string Possible(Judgement judgement) => judgement.Evidence!.BasisInterval is { } interval && interval.Upper >= judgement.Policy.NegligiblePartialRSquared
-        ? $": partial R² may be as large as {PlainNumber.Digits(interval.Upper, 2)}"
+        ? $": partial R² may be as large as {PlainNumber.Share(interval.Upper)}"
         : judgement.Evidence.BasisInterval is null ? ": its size cannot be judged" : ": the test for that fails once the number of groups is allowed for";
 
     private static string Bound(Policy policy) => PlainNumber.Digits(policy.NegligiblePartialRSquared, 4);

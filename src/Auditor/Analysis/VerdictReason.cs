@@ -22,8 +22,8 @@ internal static class VerdictReason
 
         if (judgement.Verdict == Verdicts.Untestable)
         {
-            return "The data cannot test this: however large the effect, the " + BasisWords.Of(evidence.Basis.Name)
-                + $" cannot reach the level here (its {PlainNumber.PAgainst(evidence.Basis.Ceiling!.P!.Value, policy.Significance)} at the least){Beside(evidence, policy)}.";
+            return $"The data cannot test this: however large the effect, the {BasisWords.Of(evidence.Basis)} cannot reach the level"
+                + $" {PlainNumber.Digits(policy.Significance, 4)} ({PlainNumber.PAgainst(evidence.Basis.Ceiling!.P!.Value, policy.Significance)} at the least){Beside(evidence, policy)}.";
         }
 
         if (judgement.Group.Drifts)
@@ -60,23 +60,21 @@ internal static class VerdictReason
         var p = judgement.PAdjusted is double adjusted ? (judgement.Alone ? "" : "adjusted ") + PlainNumber.PAgainst(adjusted, policy.Significance) : "no p";
         p += RejectedBeforeAdjustment(judgement, policy) ? ", before adjustment " + PlainNumber.PAgainst(test.P!.Value, policy.Significance) : "";
         return test is FTest f
-            ? string.Create(CultureInfo.InvariantCulture, $"{BasisWords.Of(judgement.Evidence.Basis.Name)} F = {PlainNumber.Digits(f.Statistic, 3)} on {PlainNumber.Digits(f.Df1, 4)} and {Df2(f)} degrees of freedom, {p}")
+            ? string.Create(CultureInfo.InvariantCulture, $"{BasisWords.Of(judgement.Evidence.Basis)}: F = {PlainNumber.Number(f.Statistic)} on {PlainNumber.Count(f.Df1)} and {PlainNumber.Count(f.Df2)} degrees of freedom, {p}")
             : p;
     }
 
     private static bool RejectedBeforeAdjustment(Judgement judgement, Policy policy) =>
         judgement.PAdjusted > policy.Significance && judgement.Evidence!.Basis.Test.P <= policy.Significance;
 
-    private static string Df2(FTest f) => double.IsInteger(f.Df2) ? PlainNumber.Count(f.Df2) : PlainNumber.Digits(f.Df2, 4);
-
     private static string Bound(Policy policy) => PlainNumber.Digits(policy.NegligiblePartialRSquared, 4);
 
     private static string Interval(GroupEvidence evidence) => evidence.BasisInterval is { } interval
-        ? PlainNumber.Digits(interval.Lower, 2) + " to " + PlainNumber.Digits(interval.Upper, 2)
+        ? PlainNumber.Share(interval.Lower) + " to " + PlainNumber.Share(interval.Upper)
         : "not computed";
 
     private static string Possible(GroupEvidence evidence, Policy policy) => evidence.BasisInterval is { } interval && interval.Upper >= policy.NegligiblePartialRSquared
-        ? $"partial R² may be as large as {PlainNumber.Digits(interval.Upper, 2)}, and {Bound(policy)} is the most that counts as negligible"
+        ? $"partial R² may be as large as {PlainNumber.Share(interval.Upper)}, and {Bound(policy)} is the most that counts as negligible"
         : evidence.BasisInterval is null
             ? $"the size of the effect cannot be judged ({ImpedimentWords.Of((evidence.Basis.Unrestricted as NotComputable)?.Why ?? Impediment.SingularCovariance)})"
             : $"the test that partial R² is below {Bound(policy)} does not hold after adjustment for the number of groups";
@@ -90,11 +88,11 @@ internal static class VerdictReason
 /// <summary>The basis tests' names in sentences.</summary>
 internal static class BasisWords
 {
-    public static string Of(string basis) => basis switch
+    public static string Of(Basis basis) => (basis.Name, basis.Sums) switch
     {
-        Basis.Hc3 => "robust (HC3)",
-        Basis.Cluster => "form by clusters",
-        Basis.Time => "form by periods",
-        _ => basis,
+        (Basis.Hc3, _) => "robust HC3 test",
+        (Basis.Cluster, int sums) => $"test over {PlainNumber.Count(sums)} clusters",
+        (Basis.Time, int sums) => $"test over {PlainNumber.Count(sums)} periods",
+        _ => "classical test",
     };
 }

@@ -25,6 +25,8 @@ public static class AcceptanceFacts
         .Number("worst_partial_r_squared", FactUnits.PartialRSquared, "Largest partial R² that is accepted.",
             standing => standing.Entry.Worst?.PartialRSquared, _ => "the acceptance sets no such limit")
         .Number("partial_r_squared", FactUnits.PartialRSquared, "Estimated partial R² of the finding's subject.", standing => standing.PartialRSquared, NoValue)
+        .Flag("for_near_model", "It is for a model whose name is nearly this one's, and no acceptance is for this one.", standing => standing.NearModel is not null)
+        .Text("near_model", "That model.", standing => standing.NearModel, _ => "it is for this model")
         .Flag("matched", "This audit made the finding that it is for.", standing => standing.Matched)
         .Flag("lapsed", "This audit made the finding, and it does not hold for it.", standing => standing.Matched && !standing.Holds)
         .Text("lapsed_because", "Why it does not hold.", standing => standing.Reasons.Count > 0 ? string.Join("; ", standing.Reasons) : null, _ => "nothing speaks against it")

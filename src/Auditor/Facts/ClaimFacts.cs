@@ -20,7 +20,7 @@ public static class ClaimFacts
         .Flag("other_sign", "An estimate that is not reproduced has another sign than the recomputed one.", view => view.Of.OtherSign)
         .Flag("other_side_of_significance", "A p that is not reproduced lies on the other side of the policy's significance than the recomputed one.", view => view.Of.OtherSideOfSignificance)
         .Flag("in_other_form", "The figure is reproduced by another form than the classical one.", view => view.Of.ReproducedBy is not null)
-        .Text("reproduced_by", "That form.", view => view.Of.ReproducedBy?.Replace('_', ' '), _ => "the classical form, or none, reproduces it")
+        .Text("reproduced_by", "That form.", view => view.Of.ReproducedBy is { } form ? FormNames.InWords(form) : null, _ => "the classical form, or none, reproduces it")
         .Flag("on_other_rows", "The figure is reproduced on the other row set only.", view => view.Of.Rows is not null)
         .Flag("contradicts_others", "Other reported figures and this one cannot all be right, whatever the data.", view => view.Broken.Count > 0)
         .Text("contradiction", "What they contradict.", view => string.Join("; ", view.Broken.Select(broken => $"{broken.Relation}, but {broken.Why}")));

@@ -1,3 +1,5 @@
+using Auditor.Results;
+
 namespace Auditor.Facts;
 
 /// <summary>The facts of a group that come from the declared dependence between rows: its level, its clusters, what the score form can reach, who disagrees.</summary>
@@ -9,7 +11,7 @@ internal static class DependenceFacts
     public static FactFamily<ExclusionView> Added(FactFamily<ExclusionView> family) => family
         .Word("level", "The level on which the group's columns vary.", FactWords.Levels, view => view.Of.Level, _ => NoDependence)
         .Flag("varies_on_another_level", "All columns of the group are constant within period, cluster or unit, or vary on several levels.", view => view.Of.Level is { } level ? level != "row" : null, _ => NoDependence)
-        .Number("effective_clusters", "clusters", "Equal clusters that the declared ones are worth for this group.", view => view.Of.EffectiveClusters, view => view.NotTested("cluster"))
+        .Number("effective_clusters", FactUnits.Clusters, "Equal clusters that the declared ones are worth for this group.", view => view.Of.EffectiveClusters, view => view.NotTested("cluster"))
         .Flag("has_effective_clusters", "effective_clusters could be computed.", view => view.Of.EffectiveClusters is not null)
         .Flag("on_score_form", "The verdict rests on a form over clusters or periods with the null imposed.", view => view.Of.Ceiling is not null)
         .Number("ceiling_p", FactUnits.P, "The least p that the test can reach, however large the group's effect.", view => view.Of.Ceiling?.P, _ => NoScoreForm)
@@ -37,6 +39,6 @@ internal static class DependenceFacts
                 ("cluster", tests.Cluster?.P), ("cr1", tests.Cr1?.P), ("cr2", tests.Cr2?.P), ("wild_bootstrap", tests.WildBootstrap?.P),
                 ("time", tests.Time?.P), ("time_unrestricted", tests.TimeUnrestricted?.P), ("newey_west", tests.NeweyWest?.P),
             ];
-        return forms.Where(form => form.P is not null && form.Name != view.Of.Basis && view.Rejects(form.P) != view.Rejects(view.Of.P)).Select(form => form.Name);
+        return forms.Where(form => form.P is not null && form.Name != view.Of.Basis && view.Rejects(form.P) != view.Rejects(view.Of.P)).Select(form => FormNames.InWords(form.Name));
     }
 }

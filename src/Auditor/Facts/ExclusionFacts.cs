@@ -39,6 +39,7 @@ public static class ExclusionFacts
         .Text("basis_reason", "Why that test.", view => view.Of.BasisReason)
         .Number("p", FactUnits.P, "p of the basis test.", view => view.Of.P, Why("p"))
         .Number("p_adjusted", FactUnits.P, "p of the basis test, adjusted for the number of groups.", view => view.Of.PAdjusted, Why("p_adjusted"))
+        .Text("p_in_words", "p_adjusted with p beside it; p alone where there is one group.", PInWords, Why("p_adjusted"))
         .Flag("rejects", "p is at most the policy's significance.", view => view.Rejects(view.Of.P), Why("p"))
         .Flag("rejects_adjusted", "p_adjusted is at most the policy's significance.", view => view.Rejects(view.Of.PAdjusted), Why("p_adjusted"))
         .Number("classical_p", FactUnits.P, "p of the classical partial F test.", view => view.Of.Tests.Classical?.P, view => view.NotTested("classical"))
@@ -63,6 +64,14 @@ public static class ExclusionFacts
         .Number("negligible_p_adjusted", FactUnits.P, "negligible_p, adjusted for the number of groups.", view => view.Of.Negligible.PAdjusted, Negligible("p_adjusted"))
         .Number("power_at_bound", FactUnits.Probability, "Power of the basis test when the partial R² is at the policy's bound.", view => view.Of.Power.AtBound, Power("at_bound"))
         .Number("rows_needed", FactUnits.Rows, "Rows, clusters or periods needed for the policy's power at the bound.", view => view.Of.Power.RowsNeeded, Power("rows_needed"));
+
+    private static string? PInWords(ExclusionView view) => (view.Of.P, view.Of.PAdjusted) switch
+    {
+        (double p, double adjusted) when view.Inputs.Groups > 1 =>
+            $"adjusted {PlainNumber.PAgainst(adjusted, view.Policy.Significance)}, {PlainNumber.PAgainst(p, view.Policy.Significance)} before the adjustment for {PlainNumber.Count(view.Inputs.Groups)} groups",
+        (double p, double) => PlainNumber.PAgainst(p, view.Policy.Significance),
+        _ => null,
+    };
 
     private static Func<ExclusionView, string> Why(string path) => view => view.Why(path);
 

@@ -40,6 +40,8 @@ public static class FactUnits
 
     public const string Columns = "columns";
 
+    public const string Clusters = "clusters";
+
     public const string DegreesOfFreedom = "df";
 
     public const string Digits = "decimal digits";

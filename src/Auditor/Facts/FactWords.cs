@@ -13,6 +13,22 @@ internal static class FactWords
 
     public static readonly IReadOnlyList<string> Levels = ["row", "period", "cluster", "unit", "several"];
 
+    /// <summary>What a message says in place of a word of the record.</summary>
+    public static string InWords(string fact, string word) => fact switch
+    {
+        "basis" => Basis(word),
+        "level" => word == "several" ? "several levels" : word,
+        _ => word.Replace('_', ' '),
+    };
+
+    private static string Basis(string basis) => basis switch
+    {
+        "hc3" => "the robust HC3 test",
+        "cluster" => "the test over clusters",
+        "time" => "the test over periods",
+        _ => "the classical F test",
+    };
+
     public static readonly IReadOnlyList<string> Kinds = ["number", "levels", "date", "text"];
 
     public static readonly IReadOnlyList<string> ClaimParts = ["final_model", "coefficient", "left_out", "step"];

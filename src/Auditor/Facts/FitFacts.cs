@@ -43,7 +43,7 @@ public static class FitFacts
         .Count("left_out_groups", "groups", "Groups of terms declared as left out.", view => view.Inputs.LeftOutGroups)
         .Count("standard_errors_reported", "standard errors", "Standard errors that the report prints.", view => view.Inputs.Claims.StandardErrors?.Of ?? 0)
         .Count("standard_errors_reproduced", "standard errors", "Of those, how many the covariance reproduces that reproduces most.", view => view.Inputs.Claims.StandardErrors?.Reproduced ?? 0)
-        .Text("standard_errors_reproduced_by", "That covariance.", view => view.Inputs.Claims.StandardErrors?.Covariance, _ => "no covariance reproduces a reported standard error")
+        .Text("standard_errors_reproduced_by", "That covariance.", view => view.Inputs.Claims.StandardErrors?.Covariance is { } covariance ? FormNames.InWords(covariance) : null, _ => "no covariance reproduces a reported standard error")
         .Flag("robust_standard_errors_reported", "That covariance is not the classical one.", view => view.Inputs.Claims.StandardErrors?.Covariance is not (null or "classical"))
         .Flag("reported_on_other_rows", "Figures of the final model are reproduced on the other row set, not on the fit shown.",
             view => view.Inputs.Claims.Figures.Any(claim => claim.Rows is not null && claim.Claim.StartsWith("reported.", StringComparison.Ordinal)))

@@ -18,6 +18,9 @@ public sealed record AcceptanceStanding(
     IReadOnlyList<string> Reasons,
     string Hint)
 {
+    /// <summary>The model that the entry names, when it is not the audited one but nearly; null otherwise.</summary>
+    public string? NearModel { get; init; }
+
     public bool Matched => Found is not null;
 
     public bool Holds => Matched && Reasons.Count == 0;

@@ -47,6 +47,9 @@ public sealed record Exclusion(
     /// <summary>The group in segments and in parts of the time span; empty when neither is declared.</summary>
     public IReadOnlyList<GroupInParts> InParts { get; init; } = [];
 
+    /// <summary>Clusters or periods that the test the verdict rests on sums over; null when it takes row by row.</summary>
+    public int? BasisSums { get; init; }
+
     /// <summary>How many equal clusters the declared ones are worth for this group; null without clusters.</summary>
     public double? EffectiveClusters { get; init; }
 

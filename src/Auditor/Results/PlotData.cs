@@ -34,7 +34,14 @@ public sealed record PowerPoint(double PartialRSquared, double Power);
 /// <param name="LeverageOne">Rows without a studentised residual, which only the first picture can show.</param>
 public sealed record ResidualPlots(
     PointCloud Fitted, NormalPlot Normal, PointCloud Scale, PointCloud Leverage,
-    IReadOnlyList<NamedPoint> Named, double HighLeverage, int AboveHighLeverage, bool Weighted, int LeverageOne);
+    IReadOnlyList<NamedPoint> Named, double HighLeverage, int AboveHighLeverage, bool Weighted, int LeverageOne)
+{
+    /// <summary>Residuals in time order; null where no time is declared.</summary>
+    public TimePlot? InTime { get; init; }
+
+    /// <summary>Null where the rows have no order in time, or nothing can be correlated.</summary>
+    public AutocorrelationPlot? Autocorrelations { get; init; }
+}
 
 /// <summary>Points of a picture; when there are too many, most stand for all points of a cell of a grid, at their mean.</summary>
 /// <param name="Rows">How many rows the points stand for.</param>

@@ -56,17 +56,38 @@ public sealed class MessageTemplate
     }
 
     public string Fill(FactSet facts, Policy policy) =>
-        string.Concat(_parts.Select(part => part.IsName ? Value(part.Text, facts, policy) : part.Text));
+        Joined(_parts.Select(part => part.IsName ? Value(part.Text, facts, policy) : part.Text));
+
+    /// <summary>"p = {p}" of a p that is only known to be smaller than something is "p &lt; 0.0001".</summary>
+    private static string Joined(IEnumerable<string> parts)
+    {
+        var text = new StringBuilder();
+        foreach (var part in parts)
+        {
+            if (part.Length > 0 && part[0] is '<' or '>' && text.Length > 1 && text[^2] == '=' && text[^1] == ' ')
+            {
+                text.Length -= "= ".Length;
+            }
+
+            text.Append(part);
+        }
+
+        return text.ToString();
+    }
+
+    private static double Level(Policy policy) => policy.TryGet("significance", out var value) && value.AsFact() is FactValue.Number level ? level.Value : 1;
 
     private static string Value(string name, FactSet facts, Policy policy)
     {
         if (!name.StartsWith(ComparisonWords.PolicyPrefix, StringComparison.Ordinal))
         {
-            return Figures.Shown(facts[name], FactCatalogue.Find(facts.About, name)?.Unit ?? FactUnits.None);
+            return FactCatalogue.Find(facts.About, name) is { Words.Count: > 0 } && facts[name] is FactValue.Text word
+                ? FactWords.InWords(name, word.Value)
+                : Figures.Shown(facts[name], FactCatalogue.Find(facts.About, name)?.Unit ?? FactUnits.None, Level(policy));
         }
 
         return policy.TryGet(name[ComparisonWords.PolicyPrefix.Length..], out var value)
-            ? Figures.Shown(value.AsFact(), value.Type == PolicyType.Share ? FactUnits.Share : FactUnits.None)
+            ? value.Type == PolicyType.Share ? Figures.SettingAsPercent(value.AsFact()) : Figures.SettingInWords(value.AsFact())
             : throw new InvalidOperationException($"the rules were read against another policy: no '{name}'");
     }
 }

@@ -6,7 +6,7 @@ namespace Auditor.Rules;
 /// <summary>The right side of a comparison: a value written in the rule, or a value of the policy by name. One of the two is set.</summary>
 public sealed record Operand(FactValue? Value, string? PolicyName)
 {
-    public string Wording => PolicyName is null ? Figures.Shown(Value!, FactUnits.None) : ComparisonWords.PolicyPrefix + PolicyName;
+    public string Wording => PolicyName is null ? Figures.Setting(Value!) : ComparisonWords.PolicyPrefix + PolicyName;
 
     public FactValue Resolve(Policy policy) => Value ?? FromPolicy(policy);
 

@@ -69,7 +69,7 @@ public static class RuleListing
         Tests(rule).SelectMany(test => test.Right).Select(operand => operand.PolicyName).OfType<string>().Distinct();
 
     private static string PolicyLine(string name, Policy policy) =>
-        policy.TryGet(name, out var value) ? $"{name}: {Figures.Shown(value.AsFact(), FactUnits.None)}" : name;
+        policy.TryGet(name, out var value) ? $"{name}: {Figures.Setting(value.AsFact())}" : name;
 
     private static string TypeWord(FactType type) => type switch
     {

@@ -81,8 +81,8 @@ public sealed class LapseTests
                 "it expired on 2026-12-31, before 2027-01-01",
                 "it is for version 2026.2 of the model, and the declaration states no version",
                 "it is for a finding of severity low, and this one is medium",
-                "p is 0.06, below the accepted 0.5",
-                "partial R² is 0.032, above the accepted 0.001",
+                "p is 0.0600, below the accepted 0.5",
+                "partial R² is 0.0320, above the accepted 0.001",
             ],
             matched.Standings.Single().Reasons);
     }

@@ -33,9 +33,9 @@ public sealed class OutcomeSentenceTests
     public void Accepted_findings_are_not_open_and_are_counted_apart()
     {
         Assert.Equal("1 high, 2 medium, 1 low, 1 note", OutcomeSentence.Findings(SampleRecords.Full));
-        Assert.Equal("1 finding accepted", OutcomeSentence.Accepted(SampleRecords.Full));
-        Assert.Contains("Findings: 1 high, 2 medium, 1 low, 1 note; 1 finding accepted.\n", ConsoleSummary.Of(SampleRecords.Full), StringComparison.Ordinal);
-        Assert.Equal("6 findings accepted", OutcomeSentence.Accepted(AllAccepted));
+        Assert.Equal("1 finding accepted as of 2026-03-01", OutcomeSentence.Accepted(SampleRecords.Full));
+        Assert.Contains("Findings: 1 high, 2 medium, 1 low, 1 note; 1 finding accepted as of 2026-03-01.\n", ConsoleSummary.Of(SampleRecords.Full), StringComparison.Ordinal);
+        Assert.Equal("6 findings accepted as of 2026-03-01", OutcomeSentence.Accepted(AllAccepted));
         Assert.Equal("none open", OutcomeSentence.Findings(AllAccepted));
         Assert.Null(OutcomeSentence.Accepted(SampleRecords.WithoutFindings));
     }

@@ -9,11 +9,11 @@ public sealed class PictureAxisTests
     [InlineData(-70, 68, "−60 −40 −20 0 20 40 60")]
     [InlineData(0, 0.0102, "0 0.002 0.004 0.006 0.008 0.010")]
     [InlineData(0.31, 0.33, "0.310 0.315 0.320 0.325 0.330")]
-    [InlineData(1_000_000, 3_000_000, "1 000 000 1 500 000 2 000 000 2 500 000 3 000 000")]
+    [InlineData(1_000_000, 3_000_000, "1,000,000 1,500,000 2,000,000 2,500,000 3,000,000")]
     [InlineData(-3e-7, 3e-7, "−3 × 10⁻⁷ −2 × 10⁻⁷ −1 × 10⁻⁷ 0 1 × 10⁻⁷ 2 × 10⁻⁷ 3 × 10⁻⁷")]
     [InlineData(2e12, 4e12, "2.0 × 10¹² 2.5 × 10¹² 3.0 × 10¹² 3.5 × 10¹² 4.0 × 10¹²")]
     public void Ticks_are_round_and_no_longer_than_needed(double low, double high, string ticks) =>
-        Assert.Equal(ticks, string.Join(' ', PictureAxis.Covering([low, high], 0, 100).Ticks(8).Select(tick => tick.Text)).Replace('\u202F', ' ').Replace('\u00A0', ' '));
+        Assert.Equal(ticks, string.Join(' ', PictureAxis.Covering([low, high], 0, 100).Ticks(8).Select(tick => tick.Text)).Replace('\u00A0', ' '));
 
     [Theory]
     [InlineData(5, 5)]

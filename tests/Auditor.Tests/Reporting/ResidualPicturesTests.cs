@@ -60,7 +60,7 @@ public sealed partial class ResidualPicturesTests
         var consequences = CheckConsequence.Of(SampleRecords.Full);
         Assert.Equal(["equal variance", "normality", "no outlier"], consequences.Select(item => item.Assumption));
         Assert.All(consequences, item => Assert.Contains(WebUtility.HtmlEncode(item.Follows), Pages.Render(SampleRecords.Full), StringComparison.Ordinal));
-        Assert.Contains("Wald F, HC3, which does not need an equal spread", consequences[0].Follows, StringComparison.Ordinal);
+        Assert.Contains("Robust F (HC3), which does not need an equal spread", consequences[0].Follows, StringComparison.Ordinal);
     }
 
     [Fact]
@@ -68,7 +68,7 @@ public sealed partial class ResidualPicturesTests
     {
         var record = SampleRecords.Full with { Exclusions = [SampleExclusions.All[0] with { Basis = "classical" }, SampleExclusions.All[1] with { Basis = "hc3" }] };
         Assert.StartsWith($"The verdict on {record.Exclusions[0].Group} rests on the classical test", CheckConsequence.Of(record)[0].Follows, StringComparison.Ordinal);
-        Assert.Contains("The other verdicts rest on Wald F, HC3", CheckConsequence.Of(record)[0].Follows, StringComparison.Ordinal);
+        Assert.Contains("The other verdicts rest on Robust F (HC3)", CheckConsequence.Of(record)[0].Follows, StringComparison.Ordinal);
     }
 
     [Fact]
@@ -99,7 +99,7 @@ public sealed partial class ResidualPicturesTests
     public void Names_of_near_points_do_not_cover_each_other()
     {
         var labels = Pictures(SampleRecords.Full)[3].Labels;
-        Assert.Equal(["L-20418", "row 1980", "a label of ma…"], labels.Select(label => label.Text));
+        Assert.Equal(["L-20418", "row 1,980", "a label of ma…"], labels.Select(label => label.Text));
         double[] heights = [.. labels.Select(label => double.Parse(label.Y, CultureInfo.InvariantCulture)).Order()];
         Assert.All(heights.Zip(heights.Skip(1)), pair => Assert.True(pair.Second - pair.First >= 12.9));
     }

@@ -7,20 +7,21 @@ namespace Auditor.Tests.Rules;
 public sealed class MessageTests
 {
     [Theory]
-    [InlineData("p", 0.0, "below 1e-300")]
-    [InlineData("p", 1e-301, "below 1e-300")]
-    [InlineData("p", 3.21e-8, "3.21e-8")]
+    [InlineData("p", 0.0, "< 0.0001")]
+    [InlineData("p", 1e-301, "< 0.0001")]
+    [InlineData("p", 3.21e-8, "< 0.0001")]
     [InlineData("p", 0.00012345, "0.000123")]
-    [InlineData("p", 0.04996, "0.05")]
+    [InlineData("p", 0.04996, "0.0500")]
+    [InlineData("p", 0.05004, "0.05004")]
     [InlineData("p", 0.0496, "0.0496")]
     [InlineData("p", 1.0, "1")]
     [InlineData("partial_r_squared", 0.0, "0")]
-    [InlineData("partial_r_squared", 0.0123456, "0.01235")]
-    [InlineData("effective_rows", 63.218, "63.22")]
+    [InlineData("partial_r_squared", 0.0123456, "0.0123")]
+    [InlineData("effective_rows", 63.218, "63.2")]
     [InlineData("effective_rows", 123456.7, "123,457")]
-    [InlineData("rows_needed", 99.96, "99.96")]
-    [InlineData("df2", -7.25, "-7.25")]
-    [InlineData("df2", 2.5e12, "2.5e12")]
+    [InlineData("rows_needed", 99.96, "100")]
+    [InlineData("df2", 37.25, "37.2")]
+    [InlineData("f", 2.5e12, "2.500 × 10¹²")]
     public void Numbers_are_shown_by_what_they_are(string fact, double value, string shown) =>
         Assert.Equal(shown, Fill($"{{{fact}}}", About.Exclusion, (fact, new FactValue.Number(value))));
 
@@ -47,8 +48,8 @@ public sealed class MessageTests
 
     [Theory]
     [InlineData("{{p}}", "{p}")]
-    [InlineData("a {{{p}}} b", "a {0.5} b")]
-    [InlineData("level {policy.significance}, {policy.adjustment}, {policy.row_set}", "level 0.05, holm, own")]
+    [InlineData("a {{{p}}} b", "a {0.500} b")]
+    [InlineData("level {policy.significance}, {policy.adjustment}, {policy.row_set}", "level 0.05, Holm, own rows")]
     [InlineData("", "")]
     public void Braces_and_policy_names(string template, string filled) =>
         Assert.Equal(filled, Fill(template, About.Exclusion, ("p", new FactValue.Number(0.5))));

@@ -101,7 +101,7 @@ public sealed class RuleEngineTests
 
         var finding = Assert.Single(outcome.Findings);
         Assert.Equal(
-            new Finding("rejected", Severity.Medium, "engine", "p 0.01 is at most 0.05.", "Test {engine} again.", null, 7) { Source = "from memory" }, finding);
+            new Finding("rejected", Severity.Medium, "engine", "p 0.0100 is at most 0.05.", "Test {engine} again.", null, 7) { Source = "from memory" }, finding);
     }
 
     [Fact]

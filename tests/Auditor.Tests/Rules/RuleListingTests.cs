@@ -38,7 +38,7 @@ public sealed class RuleListingTests
 
             Holds when
               p_adjusted at_most policy.significance
-              any of: verdict equals not_supported; rows above 1000
+              any of: verdict equals not_supported; rows above 1,000
 
             With the policy's
               significance: 0.01

@@ -18,6 +18,7 @@ public sealed class ShippedRulesTests(ITestOutputHelper output)
         var wrong = Cases.Select(Wrong).OfType<string>().ToList();
 
         output.WriteLine(string.Create(CultureInfo.InvariantCulture, $"{Rules.Count} rules, {Cases.Count} cases"));
+        output.WriteLine(string.Join(Environment.NewLine, wrong));
         Assert.Empty(wrong);
         Assert.True(Rules.Count >= 30 && Cases.Count >= 100, "rules or cases are missing from the output folder");
     }

@@ -35,8 +35,8 @@ internal static class AuditTables
         collinearity.Terms,
         new("Term", "name", term => Cell.Name(term.Term)),
         new("Columns", "number", term => Cell.Count(term.Df)),
-        new("Interval widened by (per column)", "number", term => Cell.Number(term.GvifScaled, "The term is aliased.")),
-        new("Generalised variance inflation", "number", term => Cell.Number(term.Gvif, "The term is aliased.")));
+        new("Standard error multiplied by", "number", term => Cell.Number(term.GvifScaled, "The term is aliased.")),
+        new("Generalised variance inflation factor", "number", term => Cell.Number(term.Gvif, "The term is aliased.")));
 
     public static ReportTable Proportions(Collinearity collinearity) => ReportTable.Of(
         "Condition indices and the coefficients whose variance they carry",

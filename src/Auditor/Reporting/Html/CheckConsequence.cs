@@ -19,7 +19,7 @@ internal sealed record CheckConsequence(string Assumption, string Checks, string
             "It matters for p-values in small samples, where single residuals carry weight, and little in large ones; "
             + $"here {NumberText.Count(record.FinalFit.DfResidual)} residual degrees of freedom are left.",
         CheckFindings.Form => "A group that is not supported may be standing in for a curve that the model lacks; give its terms their right form before the group is read as needed.",
-        CheckFindings.Outlier => $"A verdict may hang on {(rejecting[0].Row is int row ? "row " + NumberText.Plain(row) : "this row")}: see the rows that move the fit.",
+        CheckFindings.Outlier => $"A verdict may hang on {(rejecting[0].Row is int row ? "row " + NumberText.Count(row) : "this row")}: see the rows that move the fit.",
         "no_serial_correlation" => "Tests that take rows as independent, HC3 among them, have p-values that cannot be relied on.",
         "stationary_residual" => "Series that wander look related when they are not: a group with a term that is not a change cannot be judged by these tests.",
         "stable_coefficients" => "The final model is an average over parts that differ; a verdict need not hold in each of them.",

@@ -9,6 +9,7 @@ internal sealed class CheckFindings(IReadOnlyList<CheckResult> checks, double le
     public const string Normality = "normality";
     public const string Form = "functional_form";
     public const string Outlier = "no_outlier";
+    public const string Independence = "no_serial_correlation";
 
     /// <summary>Needs normal errors besides, so it never decides a title alone.</summary>
     public const string NeedsNormality = "breusch_pagan_original";

@@ -84,18 +84,21 @@ internal static class ClaimWords
         new("What must hold", "text", relation => Cell.Words(relation.Relation)),
         new("What is printed", "text", relation => Cell.Words(relation.Why ?? "")));
 
+    /// <summary>An F or p of a left-out group that is the classical one: the verdict may rest on another.</summary>
+    private static bool ByClassical(ClaimResult claim) =>
+        claim is { Outcome: ClaimOutcomes.Agrees, Kind: ClaimKinds.F or ClaimKinds.P } && claim.Claim.StartsWith("left_out[", StringComparison.Ordinal);
+
     private static string Outcome(ClaimResult claim) => string.Join(
         "; ",
         new[]
         {
             Outcomes.GetValueOrDefault(claim.Outcome) ?? CheckWords.Spaced(claim.Outcome),
-            claim.ReproducedBy is { } form ? Form(form) : null,
-            claim.Rows is null ? null : "on the other row set",
+            claim.ReproducedBy is { } form ? "by " + Form(form) : ByClassical(claim) ? "by the classical test" : null,
+            claim.Rows is null ? null : "on the other set of rows",
             claim.Recomputed is null ? null : claim.Why,
         }.OfType<string>());
 
-    private static string Form(string name) =>
-        name.StartsWith("hc", StringComparison.Ordinal) || name.StartsWith("cr", StringComparison.Ordinal) ? name[..2].ToUpperInvariant() + name[2..] : CheckWords.Spaced(name);
+    private static string Form(string name) => FormNames.InWords(name);
 
     private static List<ClaimRelation> Broken(AuditRecord record) => [.. record.ClaimsAgainstEachOther.Where(relation => !relation.Consistent)];
 

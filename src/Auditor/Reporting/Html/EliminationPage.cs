@@ -12,7 +12,7 @@ internal sealed record EliminationPage(string Rule, IReadOnlyList<string> Senten
 {
     private const string Meaning =
         "Each group’s own section gives its p given this rule: among data on which the rule leaves the same groups out, how often would a group without any effect explain at "
-        + "least as much as this one does? It assumes that the declared candidates are all there were, that the rule was followed, that errors are normal with equal variance, and "
+        + "least as much as this one does? It assumes that the declared candidates are all there were, that the rule was followed, that errors are independent and normal with equal variance, and "
         + "that the other left-out groups have no effect either. The plain p of a group that this rule dropped on these rows is no evidence: it was dropped because that p was large.";
 
     public static EliminationPage? Of(AuditRecord record, double level)
@@ -56,6 +56,7 @@ internal sealed record EliminationPage(string Rule, IReadOnlyList<string> Senten
             yield return rows + (byRule.EndsInReportedModel == true ? "ends in the reported model" + (same ? " by the author’s steps." : steps > 0 ? ", by other steps than the author’s." : ".") : Elsewhere(byRule));
         }
 
+        yield return "Steps and replay are judged by the classical F, as such rules usually are, whatever test the verdicts rest on.";
         if (byRule.GroupsNotInSteps.Count > 0)
         {
             yield return $"The author’s steps do not name {Listed(byRule.GroupsNotInSteps)}. What they do not name is taken as a candidate that stayed in through all of the steps.";

@@ -12,7 +12,7 @@ internal sealed record ExclusionPage(
 {
     private const string MeaningOfSelective =
         "how often the group would explain this much or more if it had no effect, among data on which the stated rule leaves the same groups out; assumes that all candidates are "
-        + "declared, the rule was followed, errors are normal with equal variance and no other left-out group has an effect.";
+        + "declared, the rule was followed, errors are independent and normal with equal variance and no other left-out group has an effect.";
 
     /// <summary>What the group adds, what is left over against its columns, what the rows could show.</summary>
     public IReadOnlyList<Picture> Pictures { get; init; } = [];
@@ -26,11 +26,12 @@ internal sealed record ExclusionPage(
     /// <summary>Findings about the group, for what to do next.</summary>
     public IReadOnlyList<FindingPage> Next { get; init; } = [];
 
-    public static ExclusionPage Numbered(Exclusion exclusion, int index, double level) =>
-        Of(exclusion, "exclusion-" + (index + 1).ToString(CultureInfo.InvariantCulture), level);
+    public static ExclusionPage Numbered(Exclusion exclusion, int index, double level, bool alone) =>
+        Of(exclusion, "exclusion-" + (index + 1).ToString(CultureInfo.InvariantCulture), level, alone);
 
-    public static ExclusionPage Of(Exclusion exclusion, string anchor, double level) => new(
-        exclusion, anchor, VerdictWords.Of(exclusion), TestTable.Of(exclusion, level), NotComputedOf(exclusion), DecisionOf(exclusion, level), SizeOf(exclusion, level),
+    /// <param name="alone">No adjustment: the only group, or the joint test.</param>
+    public static ExclusionPage Of(Exclusion exclusion, string anchor, double level, bool alone) => new(
+        exclusion, anchor, VerdictWords.Of(exclusion), TestTable.Of(exclusion, level), NotComputedOf(exclusion), DecisionOf(exclusion, level, alone), SizeOf(exclusion, level),
         exclusion.OtherRowSet is { } other ? OtherRowsOf(other, level) : null)
     {
         Parts = PartsPage.Of(exclusion, level),
@@ -41,14 +42,14 @@ internal sealed record ExclusionPage(
         where exclusion.TestsNotComputed.ContainsKey(test.Name)
         select (test.Title, exclusion.TestsNotComputed[test.Name]));
 
-    private static FactList DecisionOf(Exclusion exclusion, double level) => FactList.Of([
+    private static FactList DecisionOf(Exclusion exclusion, double level, bool alone) => FactList.Of([
         new("Rests on", Cell.Words(TestWords.TitleOf(exclusion.Basis)), exclusion.BasisReason),
         .. Level(exclusion),
         new("p", Cell.Probability(exclusion.P, exclusion.Log10P, level, Why(exclusion, "p"))),
-        new("p, adjusted for all groups", Cell.Probability(exclusion.PAdjusted, exclusion.Log10PAdjusted, level, Why(exclusion, "p_adjusted"))),
+        .. alone ? [] : new[] { new Fact("p, adjusted for all groups", Cell.Probability(exclusion.PAdjusted, exclusion.Log10PAdjusted, level, Why(exclusion, "p_adjusted")), "the verdict is judged by this one") },
         .. Selective(exclusion, level),
         new("p of the test that the effect is at least the bound", Cell.Probability(exclusion.Negligible.P, null, level, NegligibleWhy(exclusion, "p")), "small: shown to be negligible"),
-        new("the same, adjusted for all groups", Cell.Probability(exclusion.Negligible.PAdjusted, null, level, NegligibleWhy(exclusion, "p_adjusted"))),
+        .. alone ? [] : new[] { new Fact("the same, adjusted for all groups", Cell.Probability(exclusion.Negligible.PAdjusted, null, level, NegligibleWhy(exclusion, "p_adjusted"))) },
     ]);
 
     /// <summary>On which level the group is observed, and what a form over clusters or periods can reach.</summary>
@@ -59,9 +60,17 @@ internal sealed record ExclusionPage(
             yield return new Fact("Its columns vary on the level of", Cell.Words(level == "several" ? "several levels" : level));
         }
 
+        if (exclusion.BasisSums is int sums)
+        {
+            var clustered = exclusion.Basis == "cluster";
+            yield return new Fact(
+                clustered ? "Clusters in this test" : "Periods in this test", Cell.Count(sums),
+                clustered ? "they, not the rows, are what it counts as separate observations" : "they, not the rows, are what it takes its evidence from");
+        }
+
         if (exclusion.EffectiveClusters is double clusters)
         {
-            yield return new Fact("Clusters these are worth", Cell.Number(clusters), "equal clusters that would carry as much of this group");
+            yield return new Fact("Clusters these are worth", Cell.Tenths(clusters), "equal clusters that would carry as much of this group");
         }
 
         if (exclusion.Ceiling is { } ceiling)
@@ -96,13 +105,13 @@ internal sealed record ExclusionPage(
         return FactList.Of(
             new($"Against the bound {NumberText.Plain(exclusion.Negligible.Bound)}", Cell.Words(VerdictWords.Materiality(exclusion.Materiality)), "by this group’s own interval, before adjustment for the number of groups"),
             new("Partial R²", Cell.Share(effect.Estimate, EffectWhy("estimate")), "share of what the final model leaves over, as the classical fit has it; the intervals allow for chance and can lie beside it"),
-            new(interval + " of the basis", Cell.Range(effect.BasisLower, effect.BasisUpper, EffectWhy("basis_lower"), NumberText.Share)),
+            new(interval + " by the test the verdict rests on", Cell.Range(effect.BasisLower, effect.BasisUpper, EffectWhy("basis_lower"), NumberText.Share)),
             new(interval + ", classical", Cell.Range(effect.Lower, effect.Upper, EffectWhy("lower"), NumberText.Share)),
             new("Rows of this test", Cell.Count(exclusion.Rows)),
             new("Columns added", Cell.Count(exclusion.Df1, Why(exclusion, "df1"))),
-            new("Rows these are worth", Whole(exclusion.EffectiveRows, Why(exclusion, "effective_rows")), "for this question, under the basis"),
+            new("Independent rows these are worth", Whole(exclusion.EffectiveRows, Why(exclusion, "effective_rows")), "for this question, by the test the verdict rests on"),
             new("Power at the bound", Cell.Share(power.AtBound, PowerWhy("at_bound")), "chance to reject an effect that large"),
-            new("Smallest effect found reliably", Cell.Share(power.SmallestDetectableFSquared, PowerWhy("smallest_detectable_f_squared")), "as Cohen’s f², at the policy’s power"),
+            new("Smallest effect found reliably", Cell.Share(power.SmallestDetectableFSquared, PowerWhy("smallest_detectable_f_squared")), "as Cohen’s f², which is R²/(1 − R²) of the partial R²; at the policy’s power"),
             new($"{char.ToUpperInvariant(power.CountedIn[0])}{power.CountedIn[1..]} needed at the bound", Whole(power.RowsNeeded, PowerWhy("rows_needed")), "for the policy’s power, before adjustment"));
 
         string? EffectWhy(string name) => effect.Why ?? Why(exclusion, "partial_r_squared." + name);

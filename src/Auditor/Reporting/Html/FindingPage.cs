@@ -18,9 +18,16 @@ internal sealed record FindingPage(Finding Finding, string Severity, string Subj
     private static FindingPage Of(Finding finding, AuditRecord record) => new(
         finding,
         OutcomeSentence.Word(finding.Severity),
-        record.Checks.Any(check => check.Check == finding.Subject) ? CheckWords.Title(finding.Subject) : finding.Subject,
+        SubjectWords(finding.Subject, record),
         finding.Accepted is { } acceptance ? Words(acceptance) : null,
         finding.Accepted?.Because);
+
+    /// <summary>What a finding is about, for readers: the record's names of checks, figures and of the model itself in words.</summary>
+    public static string SubjectWords(string subject, AuditRecord record) =>
+        record.Checks.Any(check => check.Check == subject) ? CheckWords.Title(subject)
+        : record.Claims.FirstOrDefault(claim => claim.Claim == subject) is { } claimed ? claimed.What
+        : subject == record.Model.Id && record.Exclusions.All(exclusion => exclusion.Group != subject) ? "The final model"
+        : subject;
 
     private static string Words(Acceptance acceptance) => string.Create(
         CultureInfo.InvariantCulture,

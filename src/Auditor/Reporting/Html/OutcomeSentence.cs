@@ -96,9 +96,11 @@ internal static class OutcomeSentence
     public static string? Accepted(AuditRecord record) => record.Findings.Count(finding => finding.Accepted is not null) switch
     {
         0 => null,
-        1 => "1 finding accepted",
-        var count => $"{NumberText.Count(count)} findings accepted",
+        1 => "1 finding accepted" + On(record),
+        var count => $"{NumberText.Count(count)} findings accepted" + On(record),
     };
+
+    private static string On(AuditRecord record) => record.Provenance.AsOf is { } day ? $" as of {day}" : "";
 
     /// <summary>Nothing that the outcome counts is open.</summary>
     private static bool AllAccepted(AuditRecord record) =>

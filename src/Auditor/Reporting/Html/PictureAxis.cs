@@ -1,3 +1,5 @@
+using Auditor.Results;
+
 namespace Auditor.Reporting.Html;
 
 /// <summary>One axis of a picture: from values to places, and round ticks between.</summary>
@@ -8,6 +10,9 @@ internal sealed record PictureAxis(double Low, double High, double From, double 
     private const double Margin = 0.04;
     private const double NarrowestRange = 1e-9;
     private static readonly double[] Steps = [1, 2, 5, 10];
+
+    /// <summary>What its values are when it is an axis of time.</summary>
+    public TimeScale? Time { get; init; }
 
     /// <summary>Covers all values with a small margin; a range too narrow to divide is widened.</summary>
     public static PictureAxis Covering(IEnumerable<double> values, double from, double to)
@@ -27,12 +32,17 @@ internal sealed record PictureAxis(double Low, double High, double From, double 
     /// <param name="most">Most steps that have room.</param>
     public IReadOnlyList<PictureTick> Ticks(int most)
     {
+        if (Time == TimeScale.Date)
+        {
+            return CalendarTicks.Of(this, most);
+        }
+
         double step = Step(High - Low, most);
         double first = Math.Ceiling(Low / step), last = Math.Floor(High / step);
         return [.. Enumerable.Range(0, (int)(last - first) + 1).Select(index => Tick((first + index) * step, step))];
     }
 
-    private PictureTick Tick(double value, double step) => new(PicturePath.Place(At(value)), NumberText.Tick(value, step));
+    private PictureTick Tick(double value, double step) => new(PicturePath.Place(At(value)), Time is null ? NumberText.Tick(value, step) : NumberText.Label(Math.Round(value / step) * step));
 
     /// <summary>The smallest of 1, 2 and 5 times a power of ten that gives few enough steps.</summary>
     private static double Step(double range, int most)

@@ -26,7 +26,7 @@ internal static class PictureLabels
     }
 
     /// <summary>The row's label, or its number in the source.</summary>
-    public static string Text(NamedPoint point) => ShortName.Of(point.Label ?? "row " + point.Row.ToString(CultureInfo.InvariantCulture), Longest);
+    public static string Text(NamedPoint point) => ShortName.Of(point.Label ?? "row " + NumberText.Count(point.Row), Longest);
 
     /// <summary>The nearest height to the wished one that is a line away from all taken ones, within the ruled part.</summary>
     private static double Free(double wish, List<double> taken) => Enumerable.Range(0, 2 * (taken.Count + 1))

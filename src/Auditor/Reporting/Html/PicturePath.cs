@@ -27,6 +27,10 @@ internal sealed record PicturePath(string Kind, string D)
     public static PicturePath Line(string kind, IEnumerable<(double X, double Y)> points, PictureAxis x, PictureAxis y) =>
         new(kind, "M" + string.Join("L", points.Select(point => Pair(point.X, point.Y, x, y)).Distinct()));
 
+    /// <summary>Upright bars from zero.</summary>
+    public static PicturePath Bars(string kind, IEnumerable<(double X, double Y)> points, PictureAxis x, PictureAxis y) =>
+        new(kind, string.Concat(points.Select(point => "M" + Pair(point.X, 0, x, y) + "V" + Place(y.At(point.Y)))));
+
     /// <summary>The area between two lines, each given from left to right.</summary>
     public static PicturePath Band(string kind, IReadOnlyList<(double X, double Y)> lower, IReadOnlyList<(double X, double Y)> upper, PictureAxis x, PictureAxis y) =>
         Line(kind, Thinned(lower, x).Concat(Thinned(upper, x).Reverse()), x, y) is var line ? line with { D = line.D + "Z" } : line;

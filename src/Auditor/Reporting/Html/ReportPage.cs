@@ -1,4 +1,5 @@
 using System.Globalization;
+using System.Text.RegularExpressions;
 using Auditor.Results;
 
 namespace Auditor.Reporting.Html;
@@ -34,7 +35,10 @@ internal sealed record ReportPage(AuditRecord Record, PageScript Script)
     /// <summary>Verdicts at other levels and bounds, as JSON; null when there are none to try.</summary>
     public Markup? WhatIf => WhatIfValues.Of(Record);
 
-    public ExclusionPage? Jointly => Record.AllLeftOut is { } all ? ExclusionPage.Of(all, "all-left-out", Level) : null;
+    public ExclusionPage? Jointly => Record.AllLeftOut is { } all ? ExclusionPage.Of(all, "all-left-out", Level, alone: true) : null;
+
+    /// <summary>A check contradicts what the classical standard errors need.</summary>
+    public bool ClassicalDoubted => Record.Checks.Any(check => check is { Contradicts: true, Assumption: CheckFindings.EqualVariance or CheckFindings.Independence });
 
     public FitPage FinalFit => FitPage.Of(Record.FinalFit, Level, "Coefficients");
 
@@ -47,6 +51,9 @@ internal sealed record ReportPage(AuditRecord Record, PageScript Script)
     public IReadOnlyList<CheckConsequence> Consequences => CheckConsequence.Of(Record);
 
     public IReadOnlyList<Picture> ResidualPictures => Html.ResidualPictures.Of(Record, Level);
+
+    /// <summary>Rows through which the fit passes, named by their number in the source.</summary>
+    public IReadOnlyList<string> LeverageOne => [.. Record.Influence.LeverageOne.Select(row => NumberText.Count(row))];
 
     public ReportTable Influence => AuditTables.Influence(Record.Influence);
 
@@ -76,6 +83,12 @@ internal sealed record ReportPage(AuditRecord Record, PageScript Script)
 
     public IReadOnlyList<FindingPage> AcceptedFindings => [.. FindingPage.Of(Record).Where(finding => finding.Accepted is not null)];
 
+    /// <summary>Rules that could not decide, those with one reason together.</summary>
+    public IReadOnlyList<UndecidedPage> Undecided =>
+    [
+        .. Record.Undecided.GroupBy(item => (item.Rule, item.Why)).Select(group => new UndecidedPage(group.Key.Rule, [.. group.Select(item => FindingPage.SubjectWords(item.Subject, Record))], UndecidedPage.WithoutNames(group.Key.Why))),
+    ];
+
     public FactList Policy => FactList.Of([.. Record.Policy.Select(pair => new Fact(CheckWords.Spaced(pair.Key), PolicyCell(pair.Value), ShippedNote(pair.Key)))]);
 
     /// <summary>The words that make this page again, quoted for a shell.</summary>
@@ -86,7 +99,7 @@ internal sealed record ReportPage(AuditRecord Record, PageScript Script)
 
     private ExclusionPage Page(Exclusion exclusion, int index)
     {
-        var page = ExclusionPage.Numbered(exclusion, index, Level);
+        var page = ExclusionPage.Numbered(exclusion, index, Level, Record.Exclusions.Count == 1);
         var inParts = Divisions.Subjects(exclusion).ToHashSet(StringComparer.Ordinal);
         return page with
         {
@@ -101,9 +114,26 @@ internal sealed record ReportPage(AuditRecord Record, PageScript Script)
 
     private static Cell PolicyCell(object value) => value is IFormattable number
         ? Cell.Number(Convert.ToDouble(number, CultureInfo.InvariantCulture)) with { Text = NumberText.Plain(Convert.ToDouble(number, CultureInfo.InvariantCulture)) }
-        : Cell.Words(CheckWords.Spaced(Convert.ToString(value, CultureInfo.InvariantCulture) ?? ""));
+        : Cell.Words(Convert.ToString(value, CultureInfo.InvariantCulture) switch
+        {
+            "holm" => "Holm",
+            "hc3" => "robust HC3 test",
+            "own" => "each group’s own rows",
+            "common" => "rows common to all groups",
+            var words => CheckWords.Spaced(words ?? ""),
+        });
 
     private static string Quoted(string path) => path.All(sign => char.IsAsciiLetterOrDigit(sign) || "._-/".Contains(sign, StringComparison.Ordinal))
         ? path
         : "'" + path.Replace("'", "'\\''", StringComparison.Ordinal) + "'";
+}
+
+/// <summary>A rule that could not decide for want of a fact, with all subjects of which the same fact is missing.</summary>
+internal sealed partial record UndecidedPage(string Rule, IReadOnlyList<string> Subjects, string Why)
+{
+    /// <summary>The reasons alone, each once: the record names the facts.</summary>
+    public static string WithoutNames(string why) => string.Join("; ", NamedFact().Replace(why, "\n").Split('\n', StringSplitOptions.RemoveEmptyEntries).Distinct());
+
+    [GeneratedRegex(@"(?:; |\A)[a-z0-9_]+ could not be computed: ")]
+    private static partial Regex NamedFact();
 }

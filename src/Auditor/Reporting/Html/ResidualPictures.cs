@@ -2,7 +2,7 @@ using Auditor.Results;
 
 namespace Auditor.Reporting.Html;
 
-/// <summary>The four pictures of the final model's residuals.</summary>
+/// <summary>The pictures of the final model's residuals: four, and two more where a time order is declared.</summary>
 internal static class ResidualPictures
 {
     public static IReadOnlyList<Picture> Of(AuditRecord record, double level)
@@ -13,7 +13,7 @@ internal static class ResidualPictures
         }
 
         var findings = new CheckFindings(record.Checks, level);
-        return [Fitted(plots, findings), Normal(plots.Normal, findings), Scale(plots, findings), Leverage(plots, findings)];
+        return [Fitted(plots, findings), Normal(plots.Normal, findings), Scale(plots, findings), Leverage(plots, findings), .. TimePictures.Of(plots, findings)];
     }
 
     private static Picture Fitted(ResidualPlots plots, CheckFindings findings)
