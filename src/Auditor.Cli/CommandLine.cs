@@ -123,11 +123,11 @@ internal sealed class CommandLine
     }
 
     /// <summary>The parser names the program after its file; people start it by the script's name.</summary>
-    private static int Help(ParseResult parsed)
+    private int Help(ParseResult parsed)
     {
         var text = new StringWriter(System.Globalization.CultureInfo.InvariantCulture);
         var status = parsed.Invoke(new InvocationConfiguration { EnableDefaultExceptionHandler = false, Output = text });
-        Console.Out.Write(text.ToString().Replace(typeof(CommandLine).Assembly.GetName().Name! + " ", "./" + Program + " ", StringComparison.Ordinal));
+        Console.Out.Write(text.ToString().Replace("  " + _root.Name + " ", "  ./" + Program + " ", StringComparison.Ordinal));
         return status;
     }
 

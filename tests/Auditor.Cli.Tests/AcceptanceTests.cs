@@ -111,7 +111,7 @@ public sealed class AcceptanceTests
         using var folder = Folder();
         foreach (var arguments in new[] { new[] { "lease.yaml" }, ["demo"], ["self-test"] })
         {
-            var run = ProgramRun.Of(Path.Combine(ProgramRun.Folder, "Auditor.Cli.dll"), folder.Root, moment, arguments).Ends(2);
+            var run = ProgramRun.Of(ProgramRun.Built, folder.Root, moment, arguments).Ends(2);
             Assert.StartsWith($"error: SOURCE_DATE_EPOCH: '{moment}' is not a whole number of seconds since 1970-01-01", run.Errors, StringComparison.Ordinal);
         }
 

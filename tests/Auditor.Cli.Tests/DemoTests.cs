@@ -36,7 +36,7 @@ public sealed class DemoTests
     public void Without_a_fixed_moment_the_record_carries_that_of_the_run()
     {
         using var folder = new TemporaryFolder();
-        ProgramRun.Of(Path.Combine(ProgramRun.Folder, "Auditor.Cli.dll"), folder.Root, null, "demo", "--formats", "json").Ends(1);
+        ProgramRun.Of(ProgramRun.Built, folder.Root, null, "demo", "--formats", "json").Ends(1);
 
         var started = Record(folder, Json).GetProperty("provenance").GetProperty("started").GetDateTimeOffset();
         Assert.InRange(DateTimeOffset.UtcNow - started, TimeSpan.FromSeconds(-1), TimeSpan.FromMinutes(5));

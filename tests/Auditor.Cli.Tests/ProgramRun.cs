@@ -12,23 +12,26 @@ internal sealed record ProgramRun(int Status, string Output, string Errors)
 
     public static string Folder => AppContext.BaseDirectory;
 
-    public static ProgramRun In(TemporaryFolder folder, params string[] arguments) => Of(Path.Combine(Folder, "Auditor.Cli.dll"), folder.Root, Moment, arguments);
+    /// <summary>The program beside the tests, or the one that AUDITOR_PROGRAM names: what run-audit.sh built.</summary>
+    public static string Built { get; } = Environment.GetEnvironmentVariable("AUDITOR_PROGRAM") ?? Path.Combine(Folder, "Auditor.Cli.dll");
+
+    public static ProgramRun In(TemporaryFolder folder, params string[] arguments) => Of(Built, folder.Root, Moment, arguments);
 
     /// <param name="moment">SOURCE_DATE_EPOCH; null leaves it unset.</param>
     public static ProgramRun Of(string program, string folder, string? moment, params string[] arguments) => Of(program, folder, moment, [], arguments);
 
     /// <summary>A run with further environment variables.</summary>
     public static ProgramRun With(TemporaryFolder folder, (string Name, string Value)[] variables, params string[] arguments) =>
-        Of(Path.Combine(Folder, "Auditor.Cli.dll"), folder.Root, Moment, variables, arguments);
+        Of(Built, folder.Root, Moment, variables, arguments);
 
     private static ProgramRun Of(string program, string folder, string? moment, (string Name, string Value)[] variables, string[] arguments)
     {
-        var start = new ProcessStartInfo(Environment.GetEnvironmentVariable("DOTNET_HOST_PATH") ?? "dotnet", [program, .. arguments])
-        {
-            WorkingDirectory = folder,
-            RedirectStandardOutput = true,
-            RedirectStandardError = true,
-        };
+        var start = program.EndsWith(".dll", StringComparison.Ordinal)
+            ? new ProcessStartInfo(Environment.GetEnvironmentVariable("DOTNET_HOST_PATH") ?? "dotnet", [program, .. arguments])
+            : new ProcessStartInfo(program, arguments);
+        start.WorkingDirectory = folder;
+        start.RedirectStandardOutput = true;
+        start.RedirectStandardError = true;
         start.Environment.Remove("SOURCE_DATE_EPOCH");
         if (moment is not null)
         {

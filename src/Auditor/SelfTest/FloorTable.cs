@@ -7,7 +7,7 @@ internal static class FloorTable
 {
     public static SortedDictionary<string, SortedDictionary<string, int>> Read(string json)
     {
-        var read = JsonSerializer.Deserialize<Dictionary<string, Dictionary<string, int>>>(json)!;
+        var read = JsonSerializer.Deserialize(json, SelfTestShapes.Default.Floors)!;
         var sorted = read.ToDictionary(line => line.Key, line => new SortedDictionary<string, int>(line.Value, StringComparer.Ordinal));
         return new SortedDictionary<string, SortedDictionary<string, int>>(sorted, StringComparer.Ordinal);
     }

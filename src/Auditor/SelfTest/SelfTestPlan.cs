@@ -5,9 +5,7 @@ namespace Auditor.SelfTest;
 /// <summary>What the self-test compares (self-test.json): declarations of reference cases, and files of values of distributions.</summary>
 internal sealed record SelfTestPlan(IReadOnlyList<PlannedAudit> Audits, IReadOnlyList<string> Distributions)
 {
-    private static readonly JsonSerializerOptions Options = new(JsonSerializerDefaults.Web);
-
-    public static SelfTestPlan Read(Func<string, string> read) => JsonSerializer.Deserialize<SelfTestPlan>(read("self-test.json"), Options)!;
+    public static SelfTestPlan Read(Func<string, string> read) => JsonSerializer.Deserialize(read("self-test.json"), SelfTestShapes.Default.SelfTestPlan)!;
 }
 
 /// <param name="Variant">The ending of the declaration: empty, -largest, -powers, -largest-powers.</param>
