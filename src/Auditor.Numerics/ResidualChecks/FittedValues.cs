@@ -5,13 +5,18 @@ namespace Auditor.Numerics.ResidualChecks;
 /// <summary>Fitted values of the final model.</summary>
 public static class FittedValues
 {
-    /// <summary>X b of every row, in order, on the response's scale.</summary>
-    public static double[] Of(CheckedFit fit)
+    /// <summary>X b of the rows at some positions, rising, on the response's scale.</summary>
+    public static double[] Of(CheckedFit fit, IReadOnlyList<int> positions)
     {
-        var fitted = new double[fit.Store.Count];
+        var (fitted, values, next) = (new double[positions.Count], Array.Empty<double>(), 0);
         foreach (var block in fit.Design.Blocks())
         {
-            Fill(fit.Fit, block, fitted.AsSpan(block.FirstRow, block.Rows));
+            values = values.Length < block.Stride ? new double[block.Stride] : values;
+            Fill(fit.Fit, block, values.AsSpan(0, block.Rows));
+            for (; next < positions.Count && positions[next] < block.FirstRow + block.Rows; next++)
+            {
+                fitted[next] = values[positions[next] - block.FirstRow];
+            }
         }
 
         return fitted;

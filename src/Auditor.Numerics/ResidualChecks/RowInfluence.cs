@@ -25,9 +25,10 @@ public readonly record struct RowInfluence(
     public bool HasLeverageOne => 1 - Leverage <= GroupAccumulator.LeverageOne;
 
     /// <summary>Every row, in order; none for a fit without residuals.</summary>
-    public static IEnumerable<RowInfluence> OfAll(CheckedFit fit) => HasResiduals(fit.Fit)
-        ? Enumerable.Range(0, fit.Store.Count).Select(i => Of(fit, i))
-        : [];
+    public static IEnumerable<RowInfluence> OfAll(CheckedFit fit) => Of(fit, Enumerable.Range(0, fit.Store.Count));
+
+    /// <summary>The rows at some positions; none for a fit without residuals.</summary>
+    public static IEnumerable<RowInfluence> Of(CheckedFit fit, IEnumerable<int> positions) => HasResiduals(fit.Fit) ? positions.Select(i => Of(fit, i)) : [];
 
     internal static bool HasResiduals(Fit fit) => fit.Sigma is > 0 && !fit.Perfect;
 

@@ -35,7 +35,7 @@ internal static class ModelAnalysis
         var serial = SerialBinding.Of(model, main);
         var checks = ResidualCheckFigures.Of(fit, influence, serial, main.Rows, policy.Significance, run.Seed);
         run.Enter(AuditStep.Pictures);
-        var plots = run.Pictures ? Pictures(model, fits, fit, serial, main, common) : new PlotData(null, "no pictures were asked for");
+        var plots = run.Pictures ? Pictures(model, fits, fit, serial, influence, main, common) : new PlotData(null, "no pictures were asked for");
         run.Enter(AuditStep.Groups);
         var other = selection.Final.Equals(selection.Common) ? null : common ? fits.Final : fits.Common;
         var shown = new ClaimedRows(main, FitFigures.Of(main, policy.Significance, sampling), sampling, false);
@@ -71,9 +71,9 @@ internal static class ModelAnalysis
         });
     }
 
-    private static PlotData Pictures(BoundModel model, ModelFits fits, CheckedFit fit, SerialInputs serial, RowSetFit main, bool common)
+    private static PlotData Pictures(BoundModel model, ModelFits fits, CheckedFit fit, SerialInputs serial, InfluenceSummary influence, RowSetFit main, bool common)
     {
-        var plots = PlotFigures.Of(fit, [.. RowInfluence.OfAll(fit)], main.Rows, model.RowLabel, weighted: model.Weights is { Kind: not WeightKind.Frequency });
+        var plots = PlotFigures.Of(fit, influence, main.Rows, model.RowLabel, weighted: model.Weights is { Kind: not WeightKind.Frequency });
         return plots with
         {
             Plots = plots.Plots is { } residuals

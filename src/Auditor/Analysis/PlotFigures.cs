@@ -12,33 +12,38 @@ internal static class PlotFigures
     /// <summary>Beyond this, differences and squares of coordinates would overflow.</summary>
     private const double Largest = 1e150;
 
-    /// <param name="influence">Every row, or none when the fit leaves no residuals.</param>
+    /// <param name="influence">The rows that bear most on the fit, which are drawn whatever the number of rows.</param>
     /// <param name="label">The declared row label; null when there is none.</param>
     /// <param name="weighted">The fit has weights that are no counts.</param>
-    public static PlotData Of(CheckedFit fit, IReadOnlyList<RowInfluence> influence, RowSubset rows, DataColumn? label, bool weighted)
+    public static PlotData Of(CheckedFit fit, InfluenceSummary influence, RowSubset rows, DataColumn? label, bool weighted)
     {
-        RowInfluence[] studentised = [.. influence.Where(row => row.StudentisedResidual is not null)];
+        var drawn = DrawnRows.Of(fit.Store.Count, influence);
+        RowInfluence[] all = [.. RowInfluence.Of(fit, drawn.Positions)];
+        RowInfluence[] studentised = [.. all.Where(row => row.StudentisedResidual is not null)];
         if (studentised.Length == 0)
         {
             return new PlotData(null, "the final model leaves no residuals: it fits to rounding, or no degrees of freedom are left");
         }
 
-        var fitted = FittedValues.Of(fit);
-        return fitted.Concat(fit.Store.Residuals).All(value => Math.Abs(value) < Largest)
-            ? new PlotData(Plots(fit, influence, studentised, fitted, weighted) with { Named = MostInfluential(studentised, rows, label) }, null)
+        var fitted = FittedValues.Of(fit, drawn.Positions);
+        return fitted.Concat(all.Select(row => fit.Store.Residuals[row.Position])).All(value => Math.Abs(value) < Largest)
+            ? new PlotData(Plots(fit, all, studentised, fitted, weighted, drawn.OneIn) with { Named = MostInfluential(studentised, rows, label) }, null)
             : new PlotData(null, "the response's numbers are too large to draw");
     }
 
-    private static ResidualPlots Plots(CheckedFit fit, IReadOnlyList<RowInfluence> all, RowInfluence[] studentised, double[] fitted, bool weighted)
+    private static ResidualPlots Plots(CheckedFit fit, RowInfluence[] all, RowInfluence[] studentised, double[] fitted, bool weighted, int oneIn)
     {
         var (store, high) = (fit.Store, 2 * fit.Fit.Rank / fit.Fit.N);
-        PlotPoint Point(RowInfluence row, double x, double y) => new(x, y, store.CopiesOf(row.Position));
+        var fittedAt = all.Zip(fitted).ToDictionary(pair => pair.First.Position, pair => pair.Second);
+        PointCloud Cloud(IEnumerable<RowInfluence> rows, Func<RowInfluence, double> x, Func<RowInfluence, double> y, bool trend) =>
+            PointClouds.Of([.. rows.Select(row => new PlotPoint(x(row), y(row), store.CopiesOf(row.Position)))], trend) with { OneIn = oneIn };
+
         return new ResidualPlots(
-            PointClouds.Of([.. all.Select(row => Point(row, fitted[row.Position], store.Residuals[row.Position]))], trend: true),
+            Cloud(all, row => fittedAt[row.Position], row => store.Residuals[row.Position], trend: true),
             NormalPlots.Of(studentised.Select(row => (Standardised(fit, row), store.CopiesOf(row.Position)))),
-            PointClouds.Of([.. studentised.Select(row => Point(row, fitted[row.Position], Math.Sqrt(Math.Abs(row.StudentisedResidual!.Value))))], trend: true),
-            PointClouds.Of([.. studentised.Select(row => Point(row, row.Leverage, row.StudentisedResidual!.Value))], trend: false),
-            [], high, all.Count(row => row.Leverage > high), weighted, all.Count - studentised.Length);
+            Cloud(studentised, row => fittedAt[row.Position], row => Math.Sqrt(Math.Abs(row.StudentisedResidual!.Value)), trend: true),
+            Cloud(studentised, row => row.Leverage, row => row.StudentisedResidual!.Value, trend: false),
+            [], high, store.Leverages.Count(leverage => leverage > high), weighted, all.Length - studentised.Length);
     }
 
     private static double Standardised(CheckedFit fit, RowInfluence row) =>

@@ -57,13 +57,13 @@ internal static class TimePlots
 
     /// <summary>The time of a row as a number.</summary>
     private static Func<int, double> Times(TimeAxis time, RowSubset rows) => position =>
-        time.Column is null ? time.Steps![rows.Rows[position]] + 1 : time.Moments[rows.Rows[position]];
+        time.Column is null ? time.Steps![rows[position]] + 1 : time.Moments[rows[position]];
 
     private static TimePoint Point(int[] positions, ResidualStore store, Func<int, double> time, Func<int, string> label)
     {
         var first = positions.MinBy(time);
-        var (sum, count) = (positions.Sum(position => store.Copies[position] * store.Residuals[position]), positions.Sum(position => store.Copies[position]));
-        (double Value, double Copies)[] ordered = [.. positions.Select(position => (store.Residuals[position], store.Copies[position])).Order()];
+        var (sum, count) = (positions.Sum(position => store.CopiesOf(position) * store.Residuals[position]), positions.Sum(position => store.CopiesOf(position)));
+        (double Value, double Copies)[] ordered = [.. positions.Select(position => (store.Residuals[position], store.CopiesOf(position))).Order()];
         return new TimePoint(time(first), label(first), sum / count, Quantile(ordered, count, LowerQuartile), Quantile(ordered, count, UpperQuartile), count, false);
     }
 
@@ -92,7 +92,7 @@ internal static class TimePlots
         var numbers = new long[periods.Count];
         for (var position = 0; position < rows.Count; position++)
         {
-            numbers[periods.Codes[position]] = steps[rows.Rows[position]];
+            numbers[periods.Codes[position]] = steps[rows[position]];
         }
 
         return numbers;
@@ -103,12 +103,12 @@ internal static class TimePlots
         var (sums, counts) = (new double[periods.Count], new double[periods.Count]);
         for (var position = 0; position < store.Residuals.Count; position++)
         {
-            sums[periods.Codes[position]] += store.Copies[position] * store.Residuals[position];
-            counts[periods.Codes[position]] += store.Copies[position];
+            sums[periods.Codes[position]] += store.CopiesOf(position) * store.Residuals[position];
+            counts[periods.Codes[position]] += store.CopiesOf(position);
         }
 
         var mean = sums.Sum() / counts.Sum();
-        var all = store.Residuals.Zip(store.Copies, (e, copies) => copies * (e - mean) * (e - mean)).Sum();
+        var all = store.Residuals.Select((e, position) => store.CopiesOf(position) * (e - mean) * (e - mean)).Sum();
         return all > 0 ? sums.Zip(counts, (sum, count) => ((sum / count) - mean) * ((sum / count) - mean) * count).Sum() / all : 0;
     }
 

@@ -46,7 +46,11 @@ public sealed record ResidualPlots(
 /// <summary>Points of a picture; when there are too many, most stand for all points of a cell of a grid, at their mean.</summary>
 /// <param name="Rows">How many rows the points stand for.</param>
 /// <param name="Trend">Mean of y within runs of rows ordered by x; empty when there are few rows.</param>
-public sealed record PointCloud(IReadOnlyList<PlotPoint> Points, int Rows, bool Binned, IReadOnlyList<PlotPoint> Trend);
+public sealed record PointCloud(IReadOnlyList<PlotPoint> Points, int Rows, bool Binned, IReadOnlyList<PlotPoint> Trend)
+{
+    /// <summary>Of so many neighbouring rows one is drawn; 1: all.</summary>
+    public int OneIn { get; init; } = 1;
+}
 
 /// <param name="Count">How many observations the point stands for.</param>
 public sealed record PlotPoint(double X, double Y, double Count);

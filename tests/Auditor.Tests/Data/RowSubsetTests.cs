@@ -1,4 +1,5 @@
 using Auditor.Data;
+using Auditor.Numerics.Random;
 using CsCheck;
 
 namespace Auditor.Tests.Data;
@@ -51,8 +52,8 @@ public sealed class RowSubsetTests
 
     private static int[] List(int rows, double share, int seed)
     {
-        var random = new Random(seed);
-        return [.. Enumerable.Range(0, rows).Where(_ => random.NextDouble() < share)];
+        var random = new Generator((ulong)seed);
+        return [.. Enumerable.Range(0, rows).Where(_ => random.Uniform() < share)];
     }
 
     private static RowSubset Bits(int tableRows, int[] rows)

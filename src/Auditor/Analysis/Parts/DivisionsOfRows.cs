@@ -32,7 +32,7 @@ internal static class DivisionsOfRows
 
     private static Division OfSegment(ClassedRows segment, RowSubset shown, int most)
     {
-        int[] codes = [.. shown.Rows.Select(row => segment[row]).Where(code => code >= 0).Distinct().Order()];
+        int[] codes = [.. shown.Select(row => segment[row]).Where(code => code >= 0).Distinct().Order()];
         var why = codes.Length > most
             ? $"{segment.Name} has {PlainNumber.Count(codes.Length)} values in the rows that are used, more than the {PlainNumber.Count(most)} parts that the policy allows (most_parts)"
             : codes.Length < 2 ? "all rows that are used and have a value of it have the same one" : null;
@@ -68,7 +68,7 @@ internal static class DivisionsOfRows
             (last, best) = apart < best ? (period, apart) : (last, best);
         }
 
-        var (label, end) = (periods.Label(last), time.Periods[shown.Rows[periods.Codes.Index().First(row => row.Item == last).Index]]);
+        var (label, end) = (periods.Label(last), time.Periods[shown[periods.Codes.Index().First(row => row.Item == last).Index]]);
         return new Division(HalvesOfSpan, Divisions.Halves, [new("up to " + Named(label), row => time.Periods[row] <= end), new("after " + Named(label), row => time.Periods[row] > end)]);
 
         string Named(string period) => (time.Column is null ? "place " : time.Column.Name + " ") + period;

@@ -69,7 +69,7 @@ internal sealed class PartFits
                 SummedOver.Unit => Model.Structure.Units!,
                 _ => Model.Structure.Time!.Periods,
             };
-            _codes[(fit, over)] = codes = [.. fit.Rows.Rows.Select(row => classes[row]).Distinct().Order()];
+            _codes[(fit, over)] = codes = [.. fit.Rows.Select(row => classes[row]).Distinct().Order()];
         }
 
         return codes;

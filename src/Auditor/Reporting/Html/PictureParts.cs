@@ -9,9 +9,9 @@ internal static class PictureParts
 
     public static string Residual(bool weighted) => (weighted ? "Residual times the root of its weight" : "Residual of the final model") + Units;
 
-    public static string Dots(PointCloud cloud) => cloud.Binned
-        ? $"{NumberText.Count(cloud.Rows)} rows: a larger dot stands for up to 10, up to 100 or more of them. "
-        : "";
+    public static string Dots(PointCloud cloud) =>
+        (cloud.OneIn > 1 ? $"One row in {NumberText.Count(cloud.OneIn)} is drawn, and the rows that bear most on the fit. " : "")
+        + (cloud.Binned ? $"{NumberText.Count(cloud.Rows)} rows: a larger dot stands for up to 10, up to 100 or more of them. " : "");
 
     public static PicturePath Level(double value, PictureAxis x, PictureAxis y) => PicturePath.Line("level", [(x.Low, value), (x.High, value)], x, y);
 
