@@ -22,7 +22,7 @@ internal static class VerdictReason
 
         if (judgement.Verdict == Verdicts.Untestable)
         {
-            return "The data cannot test this: however large the effect, the " + BasisWords.Of(evidence.Basis.Name)
+            return "The data cannot test this: however large the effect, the " + BasisWords.Of(evidence.Basis)
                 + $" cannot reach the level here (its {PlainNumber.PAgainst(evidence.Basis.Ceiling!.P!.Value, policy.Significance)} at the least){Beside(evidence, policy)}.";
         }
 
@@ -60,7 +60,7 @@ internal static class VerdictReason
         var p = judgement.PAdjusted is double adjusted ? (judgement.Alone ? "" : "adjusted ") + PlainNumber.PAgainst(adjusted, policy.Significance) : "no p";
         p += RejectedBeforeAdjustment(judgement, policy) ? ", before adjustment " + PlainNumber.PAgainst(test.P!.Value, policy.Significance) : "";
         return test is FTest f
-            ? string.Create(CultureInfo.InvariantCulture, $"{BasisWords.Of(judgement.Evidence.Basis.Name)} F = {PlainNumber.Digits(f.Statistic, 3)} on {PlainNumber.Digits(f.Df1, 4)} and {Df2(f)} degrees of freedom, {p}")
+            ? string.Create(CultureInfo.InvariantCulture, $"{BasisWords.Of(judgement.Evidence.Basis)} F = {PlainNumber.Digits(f.Statistic, 3)} on {PlainNumber.Digits(f.Df1, 4)} and {Df2(f)} degrees of freedom, {p}")
             : p;
     }
 
@@ -75,10 +75,15 @@ internal static class VerdictReason
         ? PlainNumber.Digits(interval.Lower, 2) + " to " + PlainNumber.Digits(interval.Upper, 2)
         : "not computed";
 
+    /// <summary>Why no effect is called negligible on few degrees of freedom.</summary>
+    public static string FewDegreesOfFreedom(double df, Policy policy) =>
+        $"the covariance rests on {PlainNumber.Digits(df, 3)} {(df == 1 ? "degree" : "degrees")} of freedom, and on fewer than {PlainNumber.Count(policy.NegligibleDf)} no effect is called negligible (policy negligible_df)";
+
     private static string Possible(GroupEvidence evidence, Policy policy) => evidence.BasisInterval is { } interval && interval.Upper >= policy.NegligiblePartialRSquared
         ? $"partial R² may be as large as {PlainNumber.Digits(interval.Upper, 2)}, and {Bound(policy)} is the most that counts as negligible"
         : evidence.BasisInterval is null
             ? $"the size of the effect cannot be judged ({ImpedimentWords.Of((evidence.Basis.Unrestricted as NotComputable)?.Why ?? Impediment.SingularCovariance)})"
+            : evidence.FewDf is double few ? FewDegreesOfFreedom(few, policy)
             : $"the test that partial R² is below {Bound(policy)} does not hold after adjustment for the number of groups";
 
     private static string Needed(GroupEvidence evidence, Policy policy) =>
@@ -90,11 +95,12 @@ internal static class VerdictReason
 /// <summary>The basis tests' names in sentences.</summary>
 internal static class BasisWords
 {
-    public static string Of(string basis) => basis switch
+    public static string Of(Basis basis) => basis.Name switch
     {
         Basis.Hc3 => "robust (HC3)",
+        Basis.Cluster when basis.Over.HasFlag(SummedOver.Unit) => "form by units",
         Basis.Cluster => "form by clusters",
         Basis.Time => "form by periods",
-        _ => basis,
+        var other => other,
     };
 }

@@ -59,6 +59,11 @@ internal sealed record ExclusionPage(
             yield return new Fact("Its columns vary on the level of", Cell.Words(level == "several" ? "several levels" : level));
         }
 
+        if (exclusion.BasisClustersOn is { } variable)
+        {
+            yield return new Fact("Its clusters", Cell.Name(variable), "rows with one value of it may move together, or share the group’s values");
+        }
+
         if (exclusion.EffectiveClusters is double clusters)
         {
             yield return new Fact("Clusters these are worth", Cell.Number(clusters), "equal clusters that would carry as much of this group");
