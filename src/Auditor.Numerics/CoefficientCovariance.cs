@@ -5,7 +5,7 @@ using Auditor.Numerics.SecondPass;
 namespace Auditor.Numerics;
 
 /// <summary>
-/// Heteroskedasticity-robust covariance of the final model's own coefficients, R^-1 S R^-T with S = sum omega_i q_i q_i' (r x r). Kept for reproducing
+/// Robust covariances of the final model's own coefficients, R^-1 S R^-T with S = sum omega_i q_i q_i' (r x r), or over clusters or periods. Kept for reproducing
 /// what an author printed: no verdict rests on it.
 /// </summary>
 /// <remarks>
@@ -22,7 +22,23 @@ public static class CoefficientCovariance
             return null;
         }
 
-        return [.. Enumerable.Range(0, scores.Final.Rank).Select(k => Math.Sqrt(Form(Row(scores.Final, k), s)))];
+        return Errors(scores.Final, s);
+    }
+
+    /// <summary>CR1 by cluster, C/(C - 1) (n - 1)/(n - r) sum_c s_c s_c', which goes with t on C - 1 degrees of freedom; null where it does not exist.</summary>
+    /// <remarks>Liang and Zeger 1986, Biometrika 73. Verified against R's sandwich and published values (tests/reference/petersen_panel).</remarks>
+    public static IReadOnlyList<double>? ClusteredErrors(CoefficientClassScores clusters)
+    {
+        var (n, c, r) = (clusters.Final.Factor.Totals.N, clusters.Count, clusters.Final.Rank);
+        return c > 1 && n > r ? Errors(clusters.Final, Quadratic.Products(r, c, clusters.Score, c / (c - 1.0) * (n - 1) / (n - r))) : null;
+    }
+
+    /// <summary>Newey and West's by period, lag L: G_0 + sum_l (1 - l/(L + 1)) (G_l + G_l'), times n/(n - r) where it is adjusted; null where it does not exist.</summary>
+    /// <remarks>Newey and West 1987, Econometrica 55. Verified against R's sandwich and published values (tests/reference/us_investment).</remarks>
+    public static IReadOnlyList<double>? SerialErrors(CoefficientClassScores periods, int lag, bool adjusted)
+    {
+        var (n, r) = (periods.Final.Factor.Totals.N, periods.Final.Rank);
+        return n > r ? Errors(periods.Final, Scaled(NeweyWest.Products(r, periods.Count, periods.Score, Math.Min(lag, periods.Count - 1)), adjusted ? n / (n - r) : 1)) : null;
     }
 
     /// <summary>Null: all coefficients but the intercept are zero. Wald F = u' S^-1 u / k on (k, n - r), k = r - i.</summary>
@@ -49,6 +65,8 @@ public static class CoefficientCovariance
             ? TestResult.F(form / k, k, final.Factor.Totals.N - final.Rank)
             : TestResult.None(Impediment.SingularCovariance);
     }
+
+    private static double[] Errors(FinalFactor final, double[,] s) => [.. Enumerable.Range(0, final.Rank).Select(k => Math.Sqrt(Form(Row(final, k), s)))];
 
     private static double[,]? Matrix(CoefficientScores scores, Heteroskedastic estimator)
     {

@@ -10,6 +10,7 @@ internal static class Program
 {
     private const string BasisResults = "tests/Auditor.Simulation/bases.md";
     private const string EliminationResults = "tests/Auditor.Simulation/elimination.md";
+    private const string FewDfResults = "tests/Auditor.Simulation/few-df.md";
     private const string Results = "tests/Auditor.Simulation/results.md";
 
     public static int Main(string[] args)
@@ -29,6 +30,9 @@ internal static class Program
             parsed.GetValue(draws), parsed.GetValue(seed), parsed.GetResult(write) is null ? null : parsed.GetValue(write) ?? EliminationResults));
         root.Add(elimination);
         root.Add(BasisCommand(seed, write));
+        var few = new Command("few-df", "The negligible-effect test where few degrees of freedom stand behind the covariance.") { draws, seed, write };
+        few.SetAction(parsed => RunFewDf(parsed.GetValue(draws), parsed.GetValue(seed), parsed.GetResult(write) is null ? null : parsed.GetValue(write) ?? FewDfResults));
+        root.Add(few);
         return root.Parse(args).Invoke();
     }
 
@@ -45,6 +49,9 @@ internal static class Program
         var results = new EliminationStudy(seed, draws, new Percentages()).Run();
         Show(EliminationText.Of(results, new RunFacts(draws, seed, DateTimeOffset.UtcNow, clock.Elapsed)), file);
     }
+
+    private static void RunFewDf(int draws, ulong seed, string? file) =>
+        Show(new FewDfStudy(seed, draws).Table(new RunFacts(draws, seed, DateTimeOffset.UtcNow, TimeSpan.Zero)), file);
 
     private static Command BasisCommand(Option<ulong> seed, Option<string?> write)
     {

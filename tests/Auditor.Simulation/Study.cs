@@ -59,7 +59,7 @@ internal sealed class Study(Policies policies, ulong seed, int draws, IProgress<
     {
         var final = FinalFactor.Of(FactorBuilder.Build(design));
         var group = AddedGroup.Of(final, [.. design.Layout.Groups[0].Indices]);
-        return new GroupFit(group, RowPass.Run(design, final, [group], []).Groups[0], null, null, new Dependence(null, null, 1));
+        return new GroupFit("group", group, RowPass.Run(design, final, [group], []).Groups[0], null, null, new Dependence(null, null, 1));
     }
 
     private IEnumerable<Event> Events(GroupFit fit, double effect)

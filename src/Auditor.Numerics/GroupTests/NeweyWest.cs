@@ -50,22 +50,23 @@ public sealed record NeweyWest(TestResult Test, int Lag)
         }
 
         var df2 = PartialF.ResidualDf(group);
-        var v = Quadratic.Scaled(Products(group.Rank, periods, lag), group.Final.Factor.Totals.N / df2);
+        var v = Quadratic.Scaled(Products(group.Rank, periods.Count, periods.ResidualScore, lag), group.Final.Factor.Totals.N / df2);
         return Quadratic.Form(group.U, v, Impediments.MeanSquare(group)) is double form
             ? TestResult.F(form / group.Rank, group.Rank, df2)
             : TestResult.None(Impediment.SingularCovariance);
     }
 
-    private static double[,] Products(int q, ClassSums periods, int lag)
+    /// <summary>G_0 + sum_l (1 - l/(L + 1)) (G_l + G_l') of the sums b_t by period.</summary>
+    internal static double[,] Products(int q, int periods, Quadratic.Vector sums, int lag)
     {
-        var v = Quadratic.Products(q, periods.Count, periods.ResidualScore);
+        var v = Quadratic.Products(q, periods, sums);
         for (var l = 1; l <= lag; l++)
         {
             var weight = 1 - (l / (lag + 1.0));
-            for (var t = l; t < periods.Count; t++)
+            for (var t = l; t < periods; t++)
             {
-                Quadratic.AddProduct(v, periods.ResidualScore(t), periods.ResidualScore(t - l), weight);
-                Quadratic.AddProduct(v, periods.ResidualScore(t - l), periods.ResidualScore(t), weight);
+                Quadratic.AddProduct(v, sums(t), sums(t - l), weight);
+                Quadratic.AddProduct(v, sums(t - l), sums(t), weight);
             }
         }
 

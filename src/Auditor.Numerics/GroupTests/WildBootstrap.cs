@@ -58,14 +58,20 @@ public sealed class WildBootstrap
             return TestResult.None(Impediment.TooManyClusters);
         }
 
+        // Without a statistic of the data nothing could be counted against it.
         var bootstrap = new WildBootstrap(group, clusters);
+        if (bootstrap.Statistic() is not double observed)
+        {
+            return TestResult.None(Impediment.SingularCovariance);
+        }
+
         var patterns = clusters.Count is >= SignsFrom and < 31 ? 1 << (clusters.Count - 1) : int.MaxValue;
-        return patterns <= draws ? bootstrap.Enumerate(patterns) : bootstrap.Draw(draws, alpha, random);
+        return patterns <= draws ? bootstrap.Enumerate(observed, patterns) : bootstrap.Draw(observed, draws, alpha, random);
     }
 
-    private ResampledTest Enumerate(int patterns)
+    private ResampledTest Enumerate(double observed, int patterns)
     {
-        var (observed, atLeast) = (Statistic(), 0);
+        var atLeast = 0;
         for (var pattern = 0; pattern < patterns; pattern++)
         {
             // The first cluster keeps its sign: a pattern and its opposite give the same statistic.
@@ -81,9 +87,9 @@ public sealed class WildBootstrap
         return new ResampledTest(p, p, p, atLeast, patterns, Exhaustive: true);
     }
 
-    private ResampledTest Draw(int draws, double alpha, Generator random)
+    private ResampledTest Draw(double observed, int draws, double alpha, Generator random)
     {
-        var (observed, atLeast) = (Statistic(), 0);
+        var atLeast = 0;
         for (var draw = 0; draw < draws; draw++)
         {
             foreach (ref var factor in _factors.AsSpan())
@@ -99,7 +105,7 @@ public sealed class WildBootstrap
     }
 
     /// <summary>A draw whose covariance is singular counts against the group.</summary>
-    private bool Reaches(double? observed) => Statistic() is not double statistic || statistic >= observed * (1 - Tie);
+    private bool Reaches(double observed) => Statistic() is not double statistic || statistic >= observed * (1 - Tie);
 
     /// <summary>u*'V*^-1 u* but for CR1's constant factor; u* = sum v_c s_c, b*_c = v_c s_c - Qz_c' (Q_F m + Qz u*), m = sum v_c Q_Fc'e_c(F).</summary>
     private double? Statistic()

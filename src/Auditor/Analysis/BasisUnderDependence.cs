@@ -11,6 +11,10 @@ namespace Auditor.Analysis;
 /// </summary>
 internal static class BasisUnderDependence
 {
+    /// <summary>Clusters by their own number or by the memory that the sums of all groups together take.</summary>
+    private const string Cr1StandsIn =
+        "; interval, power and the test for a negligible effect rest on CR1, because clusters and columns, over all groups together, are more than CR2 is computed for";
+
     /// <summary>Null when no declared dependence bears on the group.</summary>
     public static Basis? Of(GroupResults results)
     {
@@ -58,6 +62,7 @@ internal static class BasisUnderDependence
         return decides with
         {
             Over = byCluster.Over | byPeriod.Over,
+            Reason = byCluster.Reason,
             Ceiling = byPeriod.Ceiling?.P >= byCluster.Ceiling?.P ? byPeriod.Ceiling : byCluster.Ceiling,
             Unrestricted = sizes.Unrestricted,
             EffectiveRows = sizes.EffectiveRows,
@@ -89,6 +94,7 @@ internal static class BasisUnderDependence
         var rows = Worth(group, test, covariance);
         return basis with
         {
+            Reason = cr2.Test is NotComputable { Why: Impediment.TooManyClusters } ? reason + Cr1StandsIn : reason,
             Unrestricted = test,
             EffectiveRows = rows,
             Ceiling = ClusterF.Ceiling(group, clusters),

@@ -42,8 +42,9 @@ internal sealed class DependenceResults(GroupFit fit)
 
     public LevelOfVariation? Level => _level.Value;
 
-    /// <summary>How many equal clusters the declared ones are worth for this group; null without clusters.</summary>
-    public double? EffectiveClusters => Clusters is { } clusters ? Numerics.GroupTests.EffectiveClusters.Of(fit.Added, clusters)?.Uncorrelated : null;
+    /// <summary>How many equal clusters those that a basis sums over are worth for this group, else the declared ones; null where there are none.</summary>
+    public double? EffectiveClusters(SummedOver over) =>
+        (over.HasFlag(SummedOver.Unit) ? fit.Sums.Unit : Clusters) is { } clusters ? Numerics.GroupTests.EffectiveClusters.Of(fit.Added, clusters)?.Uncorrelated : null;
 
     private ClassSums? Clusters => fit.Sums.Cluster;
 
@@ -57,6 +58,9 @@ internal sealed class DependenceResults(GroupFit fit)
             fit.Added, clusters, Draws, BootstrapInterval, new Generator(Stream(fit))),
     };
 
-    /// <summary>A stream of each group's own: nothing depends on how many groups there are before it or on threads.</summary>
-    private static ulong Stream(GroupFit fit) => unchecked((ulong)fit.Dependence.Seed * 0x9E3779B97F4A7C15UL) ^ (ulong)(fit.Added.Columns.Count > 0 ? fit.Added.Columns[0] + 1 : 0);
+    /// <summary>A stream of each group's own, by its name: nothing depends on what other groups there are, on their order or on threads.</summary>
+    private static ulong Stream(GroupFit fit) => unchecked((ulong)fit.Dependence.Seed * 0x9E3779B97F4A7C15UL) ^ Hash(fit.Name);
+
+    /// <summary>FNV-1a of the name's UTF-16 units, the same on every machine.</summary>
+    private static ulong Hash(string name) => name.Aggregate(14695981039346656037UL, (hash, unit) => unchecked((hash ^ unit) * 1099511628211UL));
 }

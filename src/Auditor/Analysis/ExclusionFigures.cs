@@ -45,7 +45,7 @@ internal static class ExclusionFigures
             selective,
             Effect(evidence, why),
             evidence?.Basis.EffectiveRows?.LeastInformed,
-            new NegligibleFigures(policy.NegligiblePartialRSquared, evidence?.NegligibleP, judgement.NegligiblePAdjusted, evidence?.NegligibleP is null ? why["p"] : null),
+            new NegligibleFigures(policy.NegligiblePartialRSquared, evidence?.NegligibleP, judgement.NegligiblePAdjusted, evidence?.NegligibleP is not null ? null : evidence?.FewDf is double few ? VerdictReason.FewDegreesOfFreedom(few, policy) : why["p"]),
             Power(judgement, why),
             other,
             judgement.Verdict,
@@ -58,8 +58,9 @@ internal static class ExclusionFigures
             InShort = judgement.InShort,
             BasisSums = evidence?.Basis.Sums,
             Level = evidence?.Tests.Dependence.Level is { } level ? LevelWords.Of(level.Level) : null,
-            BasisClustersOn = evidence is null ? null : ClustersOn(evidence.Basis.Over, evidence.Fit.Dependence),
-            EffectiveClusters = evidence?.Tests.Dependence.EffectiveClusters,
+            BasisClustersOn = evidence is null ? null : ClustersOn(evidence.Basis, evidence.Fit.Dependence),
+            EffectiveClusters = evidence?.Tests.Dependence.EffectiveClusters(evidence.Basis.Over),
+            BasisTest = TestFigure.Of(basisTest, "basis", new Dictionary<string, string>()) is { } decides ? decides with { CeilingP = evidence?.Basis.Ceiling?.P } : null,
             Ceiling = evidence?.Basis is { Ceiling.P: double ceiling } basis ? new ScoreCeiling(ceiling, basis.CannotReject(policy.Significance), basis.Wald?.Probability) : null,
             Because = identity.Because,
             Line = identity.Line,
@@ -113,8 +114,8 @@ internal static class ExclusionFigures
             JointOnly(common, "largest_model_denominator", notComputed) ? null : Figure("largest_model_denominator", Against(common?.Largest, sampling, largest => PartialF.WithMeanSquareOf(common!.Added, largest))));
     }
 
-    private static string? ClustersOn(SummedOver over, Dependence dependence) =>
-        over.HasFlag(SummedOver.Cluster) ? dependence.ClusteredBy : over.HasFlag(SummedOver.Unit) ? dependence.Unit : null;
+    private static string? ClustersOn(Basis basis, Dependence dependence) => basis.Name != Basis.Cluster ? null
+        : basis.Over.HasFlag(SummedOver.Unit) ? dependence.Unit : dependence.ClusteredBy;
 
     /// <summary>Resampling has no degrees of freedom: p with the interval that its draws leave open.</summary>
     private static PermutationFigures? Resampled(DependenceResults? dependence, SortedDictionary<string, string> notComputed)

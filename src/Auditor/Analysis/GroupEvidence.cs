@@ -18,7 +18,8 @@ internal sealed class GroupEvidence
         _policy = policy;
         var (wald, rows) = (tests.Basis.Wald, tests.Basis.EffectiveRows);
         _basisInterval = new(() => wald is null || rows is null ? null : EffectInterval.Of(wald, rows, policy.Significance));
-        _negligibleP = new(() => wald is null || rows is null ? null : NegligibleEffect.P(wald, rows, policy.NegligiblePartialRSquared));
+        FewDf = wald?.Df2 < policy.NegligibleDf ? wald.Df2 : null;
+        _negligibleP = new(() => wald is null || rows is null || FewDf is not null ? null : NegligibleEffect.P(wald, rows, policy.NegligiblePartialRSquared));
         _power = new(() => wald is null || rows is null ? null : PowerEstimate.Of(tests.Basis, wald, rows, policy));
     }
 
@@ -34,7 +35,10 @@ internal sealed class GroupEvidence
 
     public EffectInterval? BasisInterval => _basisInterval.Value;
 
-    /// <summary>p of the null that the partial R² is at least the policy's bound.</summary>
+    /// <summary>Denominator degrees of freedom so few that the policy lets no effect be called negligible on them; null when there are enough.</summary>
+    public double? FewDf { get; }
+
+    /// <summary>p of the null that the partial R² is at least the policy's bound; null also on few degrees of freedom.</summary>
     public double? NegligibleP => _negligibleP.Value;
 
     public PowerEstimate? Power => _power.Value;

@@ -1,5 +1,4 @@
 using Auditor.Numerics;
-using Auditor.Numerics.GroupTests;
 using Auditor.Policies;
 using Auditor.Results;
 
@@ -45,13 +44,13 @@ internal sealed record Judgement(
             _ when negligible?.P <= level => Verdicts.Supported,
             _ => Verdicts.Inconclusive,
         };
-        var materiality = MaterialityOf(group.Evidence?.BasisInterval, policy.NegligiblePartialRSquared);
+        var materiality = MaterialityOf(group.Evidence, policy.NegligiblePartialRSquared);
         return new Judgement(group, adjusted, negligible?.P, verdict, materiality, policy) { Alone = alone };
     }
 
-    private static string MaterialityOf(EffectInterval? interval, double bound) => interval switch
+    private static string MaterialityOf(GroupEvidence? evidence, double bound) => evidence?.BasisInterval switch
     {
-        { Upper: var upper } when upper < bound => Materialities.ShownNegligible,
+        { Upper: var upper } when upper < bound && evidence.FewDf is null => Materialities.ShownNegligible,
         { Lower: var lower } when lower > bound => Materialities.ShownMaterial,
         _ => Materialities.NotShown,
     };

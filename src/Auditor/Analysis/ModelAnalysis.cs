@@ -52,7 +52,7 @@ internal static class ModelAnalysis
             beside?.Summary,
             main.Fit.Perfect,
             [.. exclusions.All.Select((exclusion, group) => exclusion with { InParts = inParts[group] })],
-            [.. Enumerable.Range(0, model.Groups.Count).Select(group => Inputs(model, fits, group, common) with { LeftOutByRule = elimination.LeftOutByRule[group], Groups = model.Groups.Count, Stands = exclusions.Judged[group].Judgement.Group.Stands })],
+            [.. Enumerable.Range(0, model.Groups.Count).Select(group => Inputs(model, fits, group, common) with { LeftOutByRule = elimination.LeftOutByRule[group], Groups = exclusions.All.Count(exclusion => exclusion.P is not null), Stands = exclusions.Judged[group].Judgement.Group.Stands })],
             AllLeftOut.Of(model, fits.Common, inputs),
             checks,
             InfluenceFigures.Of(influence, main.Rows, model.RowLabel),

@@ -35,6 +35,15 @@ internal sealed class RowSetFit
     /// <summary>Sums for robust covariances of the final model's own coefficients; null when they were not asked for.</summary>
     public CoefficientScores? Scores { get; private set; }
 
+    /// <summary>The same by declared cluster; null also when none is declared.</summary>
+    public CoefficientClassScores? ClusterScores { get; private set; }
+
+    /// <summary>The same by period, where a lag is declared.</summary>
+    public CoefficientClassScores? PeriodScores { get; private set; }
+
+    /// <summary>The declared lag.</summary>
+    public int? SerialLag { get; private set; }
+
     public GroupFit this[int group] => _groups[group];
 
     /// <param name="groups">Positions of the groups to be tested on these rows.</param>
@@ -49,17 +58,19 @@ internal sealed class RowSetFit
         var joint = wishes.Jointly && groups.Count > 0 ? AddedGroup.Of(final, Columns(plan, [.. Enumerable.Range(0, groups.Count)])) : null;
         var pictures = groups.Select((group, g) => wishes.Pictured.Contains(group) ? GroupPictures.Of(added[g], plan, model.Groups.Count) : null).ToList();
         var scores = wishes.Scored ? new CoefficientScores(final) : null;
-        IAccumulator?[] others = [wishes.Residuals, scores, .. pictures.SelectMany(picture => picture?.Accumulators ?? [])];
         var dependence = Dependence.Of(model.Structure, model.Structure.Among(rows), wishes.Seed).Within(wishes.MostDoubles);
+        var byCluster = wishes.Scored && dependence.Rows?.Cluster is { } clusters ? CoefficientClassScores.Of(final, clusters) : null;
+        var byPeriod = wishes.Scored && dependence is { SerialLag: not null, Rows.Period: { } periods } ? CoefficientClassScores.Of(final, periods) : null;
+        IAccumulator?[] others = [wishes.Residuals, scores, byCluster, byPeriod, .. pictures.SelectMany(picture => picture?.Accumulators ?? [])];
         var pass = RowPass.Run(design, final, joint is null ? added : [.. added, joint], [.. others.OfType<IAccumulator>()], dependence.Rows, threads);
-        var result = new RowSetFit(rows, plan, final, new Fit(final, pass)) { Scores = scores };
+        var result = new RowSetFit(rows, plan, final, new Fit(final, pass)) { Scores = scores, ClusterScores = byCluster, PeriodScores = byPeriod, SerialLag = dependence.SerialLag };
         var last = joint is null ? null : LastIn.Of(final, [.. added.Select(group => group.Columns)], threads);
         for (var g = 0; g < groups.Count; g++)
         {
-            result._groups[groups[g]] = new GroupFit(added[g], pass.Groups[g], last?[g], joint, dependence) { Plots = pictures[g]?.Plots() };
+            result._groups[groups[g]] = new GroupFit(model.Groups[groups[g]].Declared.Name, added[g], pass.Groups[g], last?[g], joint, dependence) { Plots = pictures[g]?.Plots() };
         }
 
-        result.Joint = joint is null ? null : new GroupFit(joint, pass.Groups[^1], null, null, dependence);
+        result.Joint = joint is null ? null : new GroupFit(AllLeftOut.Name, joint, pass.Groups[^1], null, null, dependence);
         return result;
     }
 
@@ -68,10 +79,11 @@ internal sealed class RowSetFit
 }
 
 /// <summary>One group (or union) on one row set.</summary>
+/// <param name="Name">The group's, or that of all groups together.</param>
 /// <param name="LastIn">The group added after all others; null when the others are not on these rows.</param>
 /// <param name="Largest">All groups added at once; null likewise.</param>
 /// <param name="Dependence">What is declared of the dependence between these rows.</param>
-internal sealed record GroupFit(AddedGroup Added, GroupSums Sums, AddedGroup? LastIn, AddedGroup? Largest, Dependence Dependence)
+internal sealed record GroupFit(string Name, AddedGroup Added, GroupSums Sums, AddedGroup? LastIn, AddedGroup? Largest, Dependence Dependence)
 {
     /// <summary>Null when they were not asked for on these rows or cannot be drawn.</summary>
     public GroupPlots? Plots { get; init; }

@@ -19,6 +19,24 @@ internal static class StructureFigures
             structure.Units?.Count,
             structure.Periods?.Count,
             structure.Order?.MissingPeriods,
-            structure.Order?.TiedRows);
+            structure.Order?.TiedRows)
+        {
+            UnitsInSeveralClusters = structure is { Units: { } units, Clusters: { } clusters } ? InSeveral(units, clusters) : null,
+        };
+    }
+
+    /// <summary>Units with rows in more than one cluster.</summary>
+    private static int InSeveral(RowGroups units, RowGroups clusters)
+    {
+        var (first, several) = (new int[units.Count], new bool[units.Count]);
+        Array.Fill(first, -1);
+        for (var row = 0; row < units.Codes.Count; row++)
+        {
+            var (unit, cluster) = (units.Codes[row], clusters.Codes[row]);
+            several[unit] |= first[unit] >= 0 && first[unit] != cluster;
+            first[unit] = cluster;
+        }
+
+        return several.Count(one => one);
     }
 }

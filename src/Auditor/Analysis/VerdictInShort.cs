@@ -30,7 +30,8 @@ internal static class VerdictInShort
 
     private static string Possible(Judgement judgement) => judgement.Evidence!.BasisInterval is { } interval && interval.Upper >= judgement.Policy.NegligiblePartialRSquared
         ? $": partial R² may be as large as {PlainNumber.Share(interval.Upper)}"
-        : judgement.Evidence.BasisInterval is null ? ": its size cannot be judged" : ": the test for that fails once the number of groups is allowed for";
+        : judgement.Evidence.BasisInterval is null ? ": its size cannot be judged"
+        : judgement.Evidence.FewDf is not null ? ": too few degrees of freedom stand behind its spread" : ": the test for that fails once the number of groups is allowed for";
 
     private static string Bound(Policy policy) => PlainNumber.Digits(policy.NegligiblePartialRSquared, 4);
 }

@@ -73,10 +73,15 @@ internal static class VerdictReason
         ? PlainNumber.Share(interval.Lower) + " to " + PlainNumber.Share(interval.Upper)
         : "not computed";
 
+    /// <summary>Why no effect is called negligible on few degrees of freedom.</summary>
+    public static string FewDegreesOfFreedom(double df, Policy policy) =>
+        $"the covariance rests on {PlainNumber.Digits(df, 3)} {(df == 1 ? "degree" : "degrees")} of freedom, and on fewer than {PlainNumber.Count(policy.NegligibleDf)} no effect is called negligible (policy negligible_df)";
+
     private static string Possible(GroupEvidence evidence, Policy policy) => evidence.BasisInterval is { } interval && interval.Upper >= policy.NegligiblePartialRSquared
         ? $"partial R² may be as large as {PlainNumber.Share(interval.Upper)}, and {Bound(policy)} is the most that counts as negligible"
         : evidence.BasisInterval is null
             ? $"the size of the effect cannot be judged ({ImpedimentWords.Of((evidence.Basis.Unrestricted as NotComputable)?.Why ?? Impediment.SingularCovariance)})"
+            : evidence.FewDf is double few ? FewDegreesOfFreedom(few, policy)
             : $"the test that partial R² is below {Bound(policy)} does not hold after adjustment for the number of groups";
 
     private static string Needed(GroupEvidence evidence, Policy policy) =>
@@ -91,6 +96,7 @@ internal static class BasisWords
     public static string Of(Basis basis) => (basis.Name, basis.Sums) switch
     {
         (Basis.Hc3, _) => "robust HC3 test",
+        (Basis.Cluster, int sums) when basis.Over.HasFlag(SummedOver.Unit) => $"test over {PlainNumber.Count(sums)} units",
         (Basis.Cluster, int sums) => $"test over {PlainNumber.Count(sums)} clusters",
         (Basis.Time, int sums) => $"test over {PlainNumber.Count(sums)} periods",
         _ => "classical test",

@@ -15,6 +15,8 @@ internal static class StructureFacts
         .Number("largest_cluster_share", FactUnits.Share, "Rows of the largest cluster as a share of the rows used.", Largest, NoClusters)
         .Flag("units_declared", "The declaration names a unit column.", counts => counts.Units is not null)
         .Count("n_units", "units", "Units that have a row of the final model's fit.", counts => counts.Units, _ => "no unit declared")
+        .Count("units_in_several_clusters", "units", "Units with rows in more than one cluster.", counts => counts.UnitsInSeveralClusters, NoUnitsOrClusters)
+        .Number("units_in_several_clusters_share", FactUnits.Share, "Those units as a share of all.", counts => counts.Units > 0 ? (double?)counts.UnitsInSeveralClusters / counts.Units : null, NoUnitsOrClusters)
         .Flag("time_declared", "The declaration gives the rows an order in time.", counts => counts.Periods is not null)
         .Count("n_periods", "periods", "Periods that have a row of the final model's fit.", counts => counts.Periods, _ => NoTime)
         .Flag("has_missing_periods", "A unit has no row in a period between its first and its last.", counts => counts.MissingPeriods is long missing ? missing > 0 : null, NotCounted)
@@ -29,6 +31,8 @@ internal static class StructureFacts
     private static double? Largest(StructureCounts counts) => counts.Rows > 0 ? (double?)counts.LargestCluster / counts.Rows : null;
 
     private static string NoClusters(StructureCounts counts) => "no cluster declared";
+
+    private static string NoUnitsOrClusters(StructureCounts counts) => counts.Clusters is null ? "no cluster declared" : "no unit declared";
 
     private static string NotCounted(StructureCounts counts) => counts.Periods is null ? NoTime : "periods cannot be counted: dates without a declared period, or numbers that are not whole";
 }

@@ -64,6 +64,9 @@ public sealed record Policy
 
     public RowSet RowSet => PolicyNames.RowSets[Text(PolicyNames.RowSet)];
 
+    /// <summary>Denominator degrees of freedom below which no effect is shown to be negligible.</summary>
+    public int NegligibleDf => (int)Number(PolicyNames.NegligibleDf);
+
     /// <summary>Parts of the rows above which a segment column is not divided by.</summary>
     public int MostParts => (int)Number(PolicyNames.MostParts);
 

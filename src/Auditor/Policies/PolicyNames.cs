@@ -9,6 +9,7 @@ internal static class PolicyNames
     public const string Power = "power";
     public const string BasisWithoutStructure = "basis_without_structure";
     public const string RowSet = "row_set";
+    public const string NegligibleDf = "negligible_df";
     public const string MostParts = "most_parts";
     public const string PartRows = "part_rows";
 
@@ -44,6 +45,7 @@ internal static class PolicyNames
         [Power] = new(PolicyValue.Of(PolicyType.Number, 0.8), new Between(0, 1), [], []),
         [BasisWithoutStructure] = new(PolicyValue.Of("hc3"), null, [.. Bases.Keys], []),
         [RowSet] = new(PolicyValue.Of("own"), null, [.. RowSets.Keys], []),
+        [NegligibleDf] = new(PolicyValue.Of(PolicyType.Count, 5), null, [], []),
         [MostParts] = new(PolicyValue.Of(PolicyType.Count, 12), null, [], []),
         [PartRows] = new(PolicyValue.Of(PolicyType.Count, 20), null, [], []),
     };

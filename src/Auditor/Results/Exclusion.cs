@@ -41,6 +41,9 @@ public sealed record Exclusion(
     /// <summary>The level on which the group's columns vary: row, period, cluster, unit or several; null when no dependence is declared.</summary>
     public string? Level { get; init; }
 
+    /// <summary>The test of the basis itself, on which p rests; null when it has no value.</summary>
+    public TestFigures? BasisTest { get; init; }
+
     /// <summary>The variable by which the basis sums rows into clusters: the declared cluster, or the unit where the group does not vary within one; null for another basis.</summary>
     public string? BasisClustersOn { get; init; }
 
@@ -50,7 +53,7 @@ public sealed record Exclusion(
     /// <summary>Clusters or periods that the test the verdict rests on sums over; null when it takes row by row.</summary>
     public int? BasisSums { get; init; }
 
-    /// <summary>How many equal clusters the declared ones are worth for this group; null without clusters.</summary>
+    /// <summary>How many equal clusters those that the basis sums over are worth for this group, or the declared ones where it sums over none; null without clusters.</summary>
     public double? EffectiveClusters { get; init; }
 
     /// <summary>What the score form the verdict rests on can reach; null when it rests on another kind. The record shows it beside the tests.</summary>

@@ -11,6 +11,6 @@ public sealed record ExclusionInputs(IReadOnlyList<string> ProductsElsewhere, IR
     /// <summary>The group's p can be read: no product outside it holds one of its terms, and no unit root of the residual keeps its series from being told from drift.</summary>
     public bool Stands { get; init; } = true;
 
-    /// <summary>How many groups are left out.</summary>
+    /// <summary>How many left-out groups have a p: the family that the adjustment allows for.</summary>
     public int Groups { get; init; } = 1;
 }

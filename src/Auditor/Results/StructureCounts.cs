@@ -7,4 +7,8 @@ namespace Auditor.Results;
 /// <param name="MissingPeriods">Periods without a row between the first and the last of each unit, added up; null also when periods cannot be counted.</param>
 /// <param name="TiedRows">Rows that share unit and period with an earlier one.</param>
 public sealed record StructureCounts(
-    int Rows, int? Clusters, int? LargestCluster, int? OneRowClusters, int? Units, int? Periods, long? MissingPeriods, int? TiedRows);
+    int Rows, int? Clusters, int? LargestCluster, int? OneRowClusters, int? Units, int? Periods, long? MissingPeriods, int? TiedRows)
+{
+    /// <summary>Units with rows in more than one cluster; null unless both are declared.</summary>
+    public int? UnitsInSeveralClusters { get; init; }
+}

@@ -119,4 +119,20 @@ public sealed class ExclusionFactsTests
     }
 
     private static FactSet Of(Exclusion exclusion) => ExclusionFacts.From(exclusion, Nothing, Samples.Policy());
+
+    /// <summary>A ceiling of 0.012 and four groups: 0.048 after Holm's factor 4, 0.1 after Benjamini and Yekutieli's 4 (1 + 1/2 + 1/3 + 1/4), 0.012 without an adjustment.</summary>
+    [Theory]
+    [InlineData("holm", 4, false)]
+    [InlineData("holm", 5, true)]
+    [InlineData("hochberg", 5, true)]
+    [InlineData("benjamini_hochberg", 4, false)]
+    [InlineData("benjamini_yekutieli", 4, true)]
+    [InlineData("benjamini_yekutieli", 2, false)]
+    [InlineData("none", 40, false)]
+    public void The_ceiling_after_adjustment_takes_the_policys_own_factor(string adjustment, int groups, bool cannot)
+    {
+        var exclusion = Samples.Tested with { Ceiling = new ScoreCeiling(0.012, false, null) };
+        var facts = ExclusionFacts.From(exclusion, new ExclusionInputs([], []) { Groups = groups }, Samples.Policy("adjustment: " + adjustment));
+        Assert.Equal(new FactValue.Flag(cannot), facts["cannot_reject_adjusted"]);
+    }
 }

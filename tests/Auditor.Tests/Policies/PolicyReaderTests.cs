@@ -67,9 +67,9 @@ public sealed class PolicyReaderTests
         var policy = Read("few_rows: 25\nsignificance: 1e-2\nadjustment: benjamini_yekutieli\nrow_set: common\nbasis_without_structure: classical");
 
         Assert.Equal(
-            ["significance", "adjustment", "negligible_partial_r_squared", "power", "basis_without_structure", "row_set", "few_rows", "lost_share", "digits", "strict", "most_parts", "part_rows"],
+            ["significance", "adjustment", "negligible_partial_r_squared", "power", "basis_without_structure", "row_set", "few_rows", "lost_share", "digits", "strict", "negligible_df", "most_parts", "part_rows"],
             policy.Effective.Keys);
-        Assert.Equal([0.01, "benjamini_yekutieli", 0.01, 0.8, "classical", "common", 25L, 0.2, 4.5, false, 12L, 20L], policy.Effective.Values);
+        Assert.Equal([0.01, "benjamini_yekutieli", 0.01, 0.8, "classical", "common", 25L, 0.2, 4.5, false, 5L, 12L, 20L], policy.Effective.Values);
         Assert.Equal(AdjustmentMethod.BenjaminiYekutieli, policy.Adjustment);
         Assert.Equal(RowSet.Common, policy.RowSet);
         Assert.Equal(BasisWithoutStructure.Classical, policy.BasisWithoutStructure);
@@ -106,7 +106,7 @@ public sealed class PolicyReaderTests
     {
         var policy = PolicyReader.Read("few_rows: 10", "policy.yaml", null, null).Value!;
 
-        Assert.Equal(["few_rows", "significance", "adjustment", "negligible_partial_r_squared", "power", "basis_without_structure", "row_set", "most_parts", "part_rows"], policy.Names);
+        Assert.Equal(["few_rows", "significance", "adjustment", "negligible_partial_r_squared", "power", "basis_without_structure", "row_set", "negligible_df", "most_parts", "part_rows"], policy.Names);
         Assert.Equal((0.05, AdjustmentMethod.Holm, 0.01, 0.8), (policy.Significance, policy.Adjustment, policy.NegligiblePartialRSquared, policy.Power));
         Assert.Equal((BasisWithoutStructure.Hc3, RowSet.Own), (policy.BasisWithoutStructure, policy.RowSet));
     }

@@ -42,7 +42,7 @@ public sealed class RuleReaderTests
         { "  source: common practice, no source", "", "r.yaml:1: rule 'rejected' lacks 'source'" },
         { "source: common practice, no source", "source:", "r.yaml:9: 'source' of rule 'rejected' must be a text" },
         { "{p_adjusted}", "{p_adjust}", "r.yaml:7: 'message' of rule 'rejected': unknown fact 'p_adjust' about 'exclusion'; did you mean 'p_adjusted'?" },
-        { "{policy.significance},", "{policy.level},", "r.yaml:7: 'message' of rule 'rejected': unknown policy name 'level'; known: significance, adjustment, negligible_partial_r_squared, power, basis_without_structure, row_set, most_parts, part_rows" },
+        { "{policy.significance},", "{policy.level},", "r.yaml:7: 'message' of rule 'rejected': unknown policy name 'level'; known: significance, adjustment, negligible_partial_r_squared, power, basis_without_structure, row_set, negligible_df, most_parts, part_rows" },
         { "back.", "back {now.", "r.yaml:8: 'advice' of rule 'rejected' has a brace without its partner; write {{ or }} for the sign itself" },
         { "id: rejected", "id: Rejected_1", "r.yaml:1: rule id 'Rejected_1' may hold small letters, digits and hyphens only" },
         { "- id: rejected\n ", "-", "r.yaml:1: a rule lacks 'id'" },

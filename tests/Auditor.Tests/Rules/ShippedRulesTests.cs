@@ -52,7 +52,7 @@ public sealed class ShippedRulesTests(ITestOutputHelper output)
     public void Thresholds_stand_in_the_policy_only_and_each_of_its_own_is_used()
     {
         var used = Rules.SelectMany(rule => rule.When).OfType<FactCondition>().SelectMany(condition => condition.Right).Select(operand => operand.PolicyName).OfType<string>().ToHashSet();
-        string[] statistics = ["adjustment", "negligible_partial_r_squared", "basis_without_structure", "row_set", "most_parts", "part_rows"];
+        string[] statistics = ["adjustment", "negligible_partial_r_squared", "basis_without_structure", "row_set", "negligible_df", "most_parts", "part_rows"];
 
         Assert.All(Rules.SelectMany(rule => rule.When).OfType<FactCondition>().Where(BySize), condition => Assert.NotNull(condition.Right[0].PolicyName));
         Assert.Equal(Policy.Names.Except(statistics).Order(), used.Order());

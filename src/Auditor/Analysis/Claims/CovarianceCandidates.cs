@@ -39,13 +39,22 @@ internal static class CovarianceCandidates
             ("hc1", Robust(rows, Heteroskedastic.Hc1), fit.ResidualDf),
             ("hc2", Robust(rows, Heteroskedastic.Hc2), fit.ResidualDf),
             ("hc3", Robust(rows, Heteroskedastic.Hc3), fit.ResidualDf),
+            ("cr1", Usable(rows) && rows.Fit.ClusterScores is { } clusters ? CoefficientCovariance.ClusteredErrors(clusters) : null, (rows.Fit.ClusterScores?.Count ?? 2) - 1),
+            ("newey_west", Serial(rows, adjusted: true), fit.ResidualDf),
+            ("newey_west_unadjusted", Serial(rows, adjusted: false), fit.ResidualDf),
         ];
         var estimates = ByLabel(rows, fit.Coefficients);
         return [.. from one in tried where one.Errors is not null select new CovarianceCandidate(one.Name, rows.Other, ByLabel(rows, one.Errors!), estimates, one.Df, rows.Digits)];
     }
 
     private static IReadOnlyList<double>? Robust(ClaimedRows rows, Heteroskedastic estimator) =>
-        rows.Fit.Scores is { } scores && !rows.Fit.Fit.Perfect && rows.Fit.Fit.ResidualDf > 0 ? CoefficientCovariance.StandardErrors(scores, estimator) : null;
+        Usable(rows) && rows.Fit.Scores is { } scores ? CoefficientCovariance.StandardErrors(scores, estimator) : null;
+
+    private static IReadOnlyList<double>? Serial(ClaimedRows rows, bool adjusted) => Usable(rows) && rows.Fit is { PeriodScores: { } periods, SerialLag: int lag }
+        ? CoefficientCovariance.SerialErrors(periods, lag, adjusted)
+        : null;
+
+    private static bool Usable(ClaimedRows rows) => !rows.Fit.Fit.Perfect && rows.Fit.Fit.ResidualDf > 0;
 
     private static Dictionary<string, double> ByLabel(ClaimedRows rows, IReadOnlyList<double> values) =>
         rows.Fit.Fit.Columns.Select((column, k) => (rows.Fit.Plan.Labels[column], values[k])).ToDictionary(StringComparer.Ordinal);

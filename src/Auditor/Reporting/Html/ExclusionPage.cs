@@ -68,6 +68,11 @@ internal sealed record ExclusionPage(
                 clustered ? "they, not the rows, are what it counts as separate observations" : "they, not the rows, are what it takes its evidence from");
         }
 
+        if (exclusion.BasisClustersOn is { } variable)
+        {
+            yield return new Fact("Its clusters", Cell.Name(variable), "rows with one value of it may move together, or share the group’s values");
+        }
+
         if (exclusion.EffectiveClusters is double clusters)
         {
             yield return new Fact("Clusters these are worth", Cell.Tenths(clusters), "equal clusters that would carry as much of this group");

@@ -14,7 +14,19 @@ internal static class TestTable
         new("p", "number", line => Cell.Probability(line.Test.P, line.Test.Log10P, level, line.Test.Why)),
         new("What it answers", "text", line => Cell.Words(line.Words.Answers + line.Accuracy)));
 
-    private static IEnumerable<Line> Lines(Exclusion exclusion) =>
+    private static Line[] Lines(Exclusion exclusion)
+    {
+        Line[] named = [.. Named(exclusion)];
+        return BasisApart(exclusion) is { } apart ? [.. named.Take(1).Append(apart).Concat(named.Skip(1)).Select(line => line with { IsBasis = line == apart })] : named;
+    }
+
+    /// <summary>The basis where it sums over another variable than the declared cluster, and so is none of the tests that have names.</summary>
+    private static Line? BasisApart(Exclusion exclusion) =>
+        exclusion is { Basis: "cluster", BasisTest: { } test, BasisClustersOn: { } variable } && exclusion.Tests.Cluster?.F != test.F
+            ? new(new TestWords("cluster", $"Score form by {variable}", "The same, when the group does not vary within one value of it."), test, "", test.Why)
+            : null;
+
+    private static IEnumerable<Line> Named(Exclusion exclusion) =>
         from words in TestWords.All
         let line = words.Name switch
         {

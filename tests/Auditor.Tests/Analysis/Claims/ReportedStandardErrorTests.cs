@@ -80,6 +80,39 @@ public sealed class ReportedStandardErrorTests
         Assert.Null(wrong.StandardErrorsReproducedBy!.Covariance);
     }
 
+    /// <summary>Petersen's panel, standard errors clustered by firm as sandwich prints them (published_values), and as many digits as R gives.</summary>
+    [Theory]
+    [InlineData("0.067013", "0.050596")]
+    [InlineData("0.0670127037", "0.0505957259")]
+    public void Clustered_standard_errors_are_reproduced_and_named(string intercept, string x)
+    {
+        var record = Reported.Of(
+            "petersen_panel", "", $"reported: {{coefficients: {{intercept: {{standard_error: {intercept}}}, x: {{standard_error: {x}}}}}}}", With("cluster: firm"));
+        Assert.Empty(Reported.Wrong(record));
+        Assert.Equal(("cr1", 2), (record.StandardErrorsReproducedBy!.Covariance, record.StandardErrorsReproducedBy.Reproduced));
+        var without = Reported.Of("petersen_panel", "", $"reported: {{coefficients: {{x: {{standard_error: {x}}}}}}}");
+        Assert.Null(without.StandardErrorsReproducedBy!.Covariance);
+    }
+
+    /// <summary>US investment with lag 4: as the vignette of sandwich prints them, not adjusted, and R's with its factor n/(n - r) (case.json).</summary>
+    [Theory]
+    [InlineData("18.958298", "0.016751", "3.342375", "newey_west_unadjusted")]
+    [InlineData("18.9582981", "0.0167507859", "3.34237535", "newey_west_unadjusted")]
+    [InlineData("20.6593264", "0.0182537457", "3.64226910", "newey_west")]
+    public void Newey_and_Wests_standard_errors_are_reproduced_and_named(string intercept, string gnp, string interest, string form)
+    {
+        var record = Reported.Of(
+            "us_investment",
+            "",
+            $"reported: {{coefficients: {{intercept: {{standard_error: {intercept}}}, real_gnp: {{standard_error: {gnp}}}, real_int: {{standard_error: {interest}}}}}}}",
+            With("time: {file_order: true}\n  serial_lag: 4"));
+        Assert.Empty(Reported.Wrong(record));
+        Assert.Equal((form, 3), (record.StandardErrorsReproducedBy!.Covariance, record.StandardErrorsReproducedBy.Reproduced));
+    }
+
+    private static Func<string, string> With(string data) =>
+        declaration => declaration.Replace("  source: data.csv\n", $"  source: data.csv\n  {data}\n", StringComparison.Ordinal);
+
     private static JsonElement Fit(string name) => ReferenceCases.Named(name).Values.GetProperty("final_model");
 
     private static JsonElement? Errors(string name, string estimator) =>

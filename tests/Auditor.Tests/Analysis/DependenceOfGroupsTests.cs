@@ -1,0 +1,106 @@
+using System.Globalization;
+using System.Text;
+using Auditor.Numerics.Random;
+using Auditor.Reporting;
+using Auditor.Reporting.Html;
+using Auditor.Results;
+
+namespace Auditor.Tests.Analysis;
+
+/// <summary>What the record says of the basis under declared dependence, in whole audits of made-up panels: dealers observed over quarters.</summary>
+public sealed class DependenceOfGroupsTests
+{
+    [Fact]
+    public void A_group_that_does_not_vary_within_a_unit_names_the_unit_as_its_clusters()
+    {
+        var exclusion = Panel("time: quarter, unit: dealer", "size").Exclusions[0];
+        Assert.Equal(("cluster", "unit", "dealer"), (exclusion.Basis, exclusion.Level, exclusion.BasisClustersOn));
+        Assert.Null(exclusion.Tests.Cluster);
+        Assert.Equal(exclusion.P, exclusion.BasisTest!.P);
+        Assert.Equal((1, 23), (exclusion.BasisTest.Df1, exclusion.BasisTest.Df2));
+        Assert.Equal(24, exclusion.EffectiveClusters!.Value, 24 * 0.9);
+        Assert.Contains("form by units F = ", exclusion.Reason, StringComparison.Ordinal);
+        Assert.Contains("Score form by dealer (the verdict rests on it)", Text(TestTable.Of(exclusion, 0.05)), StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void A_declared_cluster_names_itself_and_its_test_is_the_one_beside()
+    {
+        var exclusion = Panel("time: quarter, unit: dealer, cluster: dealer", "z").Exclusions[0];
+        Assert.Equal(("cluster", "row", "dealer"), (exclusion.Basis, exclusion.Level, exclusion.BasisClustersOn));
+        Assert.Equal(exclusion.Tests.Cluster, exclusion.BasisTest);
+        Assert.Null(Panel("time: quarter", "z").Exclusions[0].BasisClustersOn);
+    }
+
+    [Fact]
+    public void Clusters_that_cut_units_apart_are_a_finding_and_coarser_ones_are_not()
+    {
+        var apart = Panel("time: quarter, unit: dealer, cluster: office", "z");
+        Assert.Contains(apart.Findings, finding => finding.Rule == "structure-clusters-split-units" && finding.Message.StartsWith("24 of the 24 units", StringComparison.Ordinal));
+        Assert.DoesNotContain(Panel("time: quarter, unit: dealer, cluster: region", "z").Findings, finding => finding.Rule == "structure-clusters-split-units");
+    }
+
+    [Fact]
+    public void More_clusters_than_CR2_is_computed_for_are_said_in_the_reason()
+    {
+        var text = new StringBuilder("y,x,z,pair\n");
+        var random = new Generator(3);
+        for (var i = 0; i < 10_002; i++)
+        {
+            text.AppendLine(CultureInfo.InvariantCulture, $"{random.Normal():R},{random.Normal():R},{random.Normal():R},{i / 2}");
+        }
+
+        var exclusion = Record("cluster: pair", "z", text.ToString()).Exclusions[0];
+        Assert.Equal("more clusters than this form is computed for", exclusion.TestsNotComputed["cr2"]);
+        Assert.EndsWith("rest on CR1, because clusters and columns, over all groups together, are more than CR2 is computed for", exclusion.BasisReason, StringComparison.Ordinal);
+        Assert.NotNull(exclusion.PartialRSquared.BasisUpper);
+        Assert.DoesNotContain("CR1", Panel("cluster: dealer", "z").Exclusions[0].BasisReason, StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void On_few_degrees_of_freedom_no_effect_is_called_negligible()
+    {
+        var few = Panel("time: quarter", "z", "negligible_partial_r_squared: 0.9").Exclusions[0];
+        Assert.Equal((2.0, Verdicts.Inconclusive, null), (few.BasisTest!.Df2, few.Verdict, few.Negligible.P));
+        const string why = "the covariance rests on 2 degrees of freedom, and on fewer than 5 no effect is called negligible (policy negligible_df)";
+        Assert.Equal(why, few.Negligible.Why);
+        Assert.Contains(why, few.Reason, StringComparison.Ordinal);
+        Assert.Equal(Materialities.NotShown, few.Materiality);
+        var allowed = Panel("time: quarter", "z", "negligible_partial_r_squared: 0.9\nnegligible_df: 2").Exclusions[0];
+        Assert.Equal((Verdicts.Supported, Materialities.ShownNegligible), (allowed.Verdict, allowed.Materiality));
+    }
+
+    [Fact]
+    public void A_groups_resampling_does_not_depend_on_the_other_groups()
+    {
+        double P(string groups, string name) => Record("cluster: dealer", groups, Csv(), named: true).Exclusions.Single(exclusion => exclusion.Group == name).Tests.WildBootstrap!.P!.Value;
+        var both = P("{group: first, terms: [z]}, {group: second, terms: [other]}", "second");
+        Assert.Equal(both, P("{group: second, terms: [other]}, {group: first, terms: [z]}", "second"));
+        Assert.Equal(both, P("{group: second, terms: [other]}", "second"));
+        Assert.NotEqual(both, P("{group: third, terms: [other]}", "third"));
+    }
+
+    private static AuditRecord Panel(string data, string term, string policy = "") => Record(data, term, Csv(), policy);
+
+    private static AuditRecord Record(string data, string left, string csv, string policy = "", bool named = false) => AuditRunner.Record(
+        "audit: 1\nmodel: {id: panel}\ndata: {source: data.csv, columns: {pair: {kind: levels}}, " + data + "}\nresponse: y\nfinal_model: {terms: [x]}\nleft_out: ["
+            + (named ? left : $"{{group: added, terms: [{left}]}}") + "]\n",
+        _ => new MemoryStream(Encoding.UTF8.GetBytes(csv)),
+        policy);
+
+    private static string Text(ReportTable table) => string.Join('\n', table.Rows.SelectMany(row => row).Select(cell => cell.Text));
+
+    /// <summary>24 dealers over 12 quarters; size belongs to the dealer, an office to dealer and half of the span, a region to dealers.</summary>
+    private static string Csv()
+    {
+        var (random, text) = (new Generator(7), new StringBuilder("y,x,z,other,size,dealer,office,region,quarter,pair\n"));
+        double[] sizes = [.. Enumerable.Range(0, 24).Select(_ => random.Normal())];
+        for (var i = 0; i < 288; i++)
+        {
+            var (dealer, quarter) = (i / 12, i % 12);
+            text.AppendLine(CultureInfo.InvariantCulture, $"{random.Normal():R},{random.Normal():R},{random.Normal():R},{random.Normal():R},{sizes[dealer]:R},d{dealer},o{dealer}-{quarter / 6},r{dealer % 6},{quarter},{i}");
+        }
+
+        return text.ToString();
+    }
+}
