@@ -1,4 +1,3 @@
-using System.Globalization;
 using Auditor.Results;
 
 namespace Auditor.Reporting.Html;
