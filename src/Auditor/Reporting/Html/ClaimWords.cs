@@ -32,11 +32,12 @@ internal static class ClaimWords
         int wrong = Count(record, ClaimOutcomes.Differs) + Count(record, ClaimOutcomes.LastDigit);
         int broken = Broken(record).Count;
         string of = $"of the {Figures(record.Claims.Count)} that the report prints";
-        string contradictions = broken == 1 ? "1 contradiction among them needs no data" : $"{NumberText.Count(broken)} contradictions among them need no data";
+        string contradictions = broken == 1 ? "1 contradiction between them stands whatever the data" : $"{NumberText.Count(broken)} contradictions between them stand whatever the data";
         return (wrong, broken) switch
         {
             (0, 0) => null,
             (0, _) => $"The {Figures(record.Claims.Count)} that the report prints: {contradictions}.",
+            (_, 0) when record.Claims.Count == 1 => "The one figure that the report prints is not reproduced by the data.",
             (_, 0) => $"{NumberText.Count(wrong)} {of} {(wrong == 1 ? "is" : "are")} not reproduced by the data.",
             _ => $"{NumberText.Count(wrong)} {of} {(wrong == 1 ? "is" : "are")} not reproduced by the data; {contradictions}.",
         };
