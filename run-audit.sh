@@ -53,8 +53,8 @@ publish() { # FOLDER LOG [options]: a folder that could not be made whole is tak
 # One program of machine code: it starts sooner than a runtime does. It needs the compiler, which is a package, and a linker.
 publish_native() { # FOLDER LOG
     local linker
-    linker=$(basename "$(command -v clang || command -v gcc)") || { echo "error LINK: no clang and no gcc on this machine" >"$2"; return 1; }
-    publish "$1" "$2" --use-current-runtime -p:PublishAot=true -p:IlcInstructionSet=native -p:CppCompilerAndLinker="$linker" || return 1
+    linker=$(command -v clang || command -v gcc) || { echo "error LINKER: no clang and no gcc on this machine" >"$2"; return 1; }
+    publish "$1" "$2" --use-current-runtime -p:PublishAot=true -p:IlcInstructionSet=native -p:CppCompilerAndLinker="${linker##*/}" || return 1
     processor
     echo "$processor" >"$build/$1/processor"
 }

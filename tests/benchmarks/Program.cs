@@ -48,7 +48,7 @@ internal static class Program
     private static Command Whole()
     {
         var declaration = new Argument<string>("DECLARATION.yaml");
-        var program = new Option<string>("--program") { Description = "Auditor.Cli.dll as published.", Required = true };
+        var program = new Option<string>("--program") { Description = "The program as run-audit.sh built it (.build/app-…/Auditor.Cli), or Auditor.Cli.dll as published.", Required = true };
         var runs = Number("--runs", "Runs, their median is shown.", 5);
         var command = new Command("whole", "Whole audits by the published program, record only.") { declaration, program, runs };
         command.SetAction(parsed => WholeTimes.Print(parsed.GetValue(declaration)!, parsed.GetValue(program)!, parsed.GetValue(runs)));

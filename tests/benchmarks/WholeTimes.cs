@@ -10,8 +10,8 @@ internal static class WholeTimes
         {
             foreach (var threads in new[] { "1", "2" })
             {
-                string[] arguments = [program, declaration, "--formats", "json", "--out", folder, "--threads", threads, "--quiet"];
-                var times = Enumerable.Range(0, runs).Select(_ => Measured.Of("dotnet", arguments)).ToList();
+                string[] arguments = [declaration, "--formats", "json", "--out", folder, "--threads", threads, "--quiet"];
+                var times = Enumerable.Range(0, runs).Select(_ => Run(program, arguments)).ToList();
                 Console.Out.WriteLine($"whole audit, {threads} threads: {Measured.Median(times)}");
             }
         }
@@ -20,4 +20,7 @@ internal static class WholeTimes
             Directory.Delete(folder, recursive: true);
         }
     }
+
+    private static Measured Run(string program, string[] arguments) =>
+        program.EndsWith(".dll", StringComparison.Ordinal) ? Measured.Of("dotnet", [program, .. arguments]) : Measured.Of(program, arguments);
 }
