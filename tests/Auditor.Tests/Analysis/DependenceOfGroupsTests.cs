@@ -19,7 +19,7 @@ public sealed class DependenceOfGroupsTests
         Assert.Equal(exclusion.P, exclusion.BasisTest!.P);
         Assert.Equal((1, 23), (exclusion.BasisTest.Df1, exclusion.BasisTest.Df2));
         Assert.Equal(24, exclusion.EffectiveClusters!.Value, 24 * 0.9);
-        Assert.Contains("form by units F = ", exclusion.Reason, StringComparison.Ordinal);
+        Assert.Contains("test over 24 units: F = ", exclusion.Reason, StringComparison.Ordinal);
         Assert.Contains("Score form by dealer (the verdict rests on it)", Text(TestTable.Of(exclusion, 0.05)), StringComparison.Ordinal);
     }
 
