@@ -158,6 +158,61 @@ internal static class BlockKernels
         }
     }
 
+    /// <summary>Least and greatest of the values and the two given; values are finite.</summary>
+    public static (double Least, double Greatest) Range(ReadOnlySpan<double> column, double least, double greatest)
+    {
+        ref var source = ref MemoryMarshal.GetReference(column);
+        var (low, high) = (Vector512.Create(least), Vector512.Create(greatest));
+        nuint i = 0;
+        for (; i < Whole(column.Length); i += Lanes)
+        {
+            var value = Vector512.LoadUnsafe(ref source, i);
+            (low, high) = (Vector512.MinNative(low, value), Vector512.MaxNative(high, value));
+        }
+
+        for (var lane = 0; lane < Lanes; lane++)
+        {
+            (least, greatest) = (Math.Min(least, low[lane]), Math.Max(greatest, high[lane]));
+        }
+
+        foreach (var value in column[(int)i..])
+        {
+            (least, greatest) = (Math.Min(least, value), Math.Max(greatest, value));
+        }
+
+        return (least, greatest);
+    }
+
+    /// <summary>into[i] = 1 - a[i] - b[i]; returns the least of them.</summary>
+    public static double Complement(ReadOnlySpan<double> a, ReadOnlySpan<double> b, Span<double> into)
+    {
+        ref var target = ref MemoryMarshal.GetReference(into);
+        ref var left = ref MemoryMarshal.GetReference(a);
+        ref var right = ref MemoryMarshal.GetReference(b);
+        var low = Vector512.Create(double.PositiveInfinity);
+        nuint i = 0;
+        for (; i < Whole(into.Length); i += Lanes)
+        {
+            var value = Vector512<double>.One - Vector512.LoadUnsafe(ref left, i) - Vector512.LoadUnsafe(ref right, i);
+            value.StoreUnsafe(ref target, i);
+            low = Vector512.MinNative(low, value);
+        }
+
+        var least = double.PositiveInfinity;
+        for (var lane = 0; lane < Lanes; lane++)
+        {
+            least = Math.Min(least, low[lane]);
+        }
+
+        for (var j = (int)i; j < into.Length; j++)
+        {
+            into[j] = 1 - a[j] - b[j];
+            least = Math.Min(least, into[j]);
+        }
+
+        return least;
+    }
+
     /// <summary>The largest absolute value, 0 for none; values are finite.</summary>
     public static double LargestAbsolute(ReadOnlySpan<double> column)
     {

@@ -56,7 +56,7 @@ public sealed class CheckedFit(IDesignRows design, FinalFactor final, Fit fit, R
 
     private static double[] Rising(double[] values)
     {
-        Array.Sort(values);
+        RisingOrder.Sort(values);
         return values;
     }
 

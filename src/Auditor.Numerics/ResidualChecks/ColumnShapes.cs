@@ -19,10 +19,7 @@ internal sealed class ColumnShapes(int[] columns)
         {
             var values = block.Column(columns[k]);
             _isBinary[k] = _isBinary[k] && !values.ContainsAnyExcept(0, 1);
-            foreach (var value in values)
-            {
-                (_least[k], _greatest[k]) = (Math.Min(_least[k], value), Math.Max(_greatest[k], value));
-            }
+            (_least[k], _greatest[k]) = BlockKernels.Range(values, _least[k], _greatest[k]);
         }
 
         MarkMeetings(block);

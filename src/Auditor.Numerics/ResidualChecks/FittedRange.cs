@@ -15,10 +15,7 @@ internal sealed record FittedRange(double Centre, double Scale, double HalfWidth
         {
             values = values.Length < block.Stride ? new double[block.Stride] : values;
             FittedValues.Fill(fit, block, values.AsSpan(0, block.Rows));
-            foreach (var value in values.AsSpan(0, block.Rows))
-            {
-                (least, greatest) = (Math.Min(least, value), Math.Max(greatest, value));
-            }
+            (least, greatest) = BlockKernels.Range(values.AsSpan(0, block.Rows), least, greatest);
         }
 
         var half = (greatest - least) / 2;

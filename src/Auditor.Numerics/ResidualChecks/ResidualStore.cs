@@ -1,3 +1,4 @@
+using Auditor.Numerics.Factor;
 using Auditor.Numerics.SecondPass;
 using Auditor.Numerics.Storage;
 
@@ -6,6 +7,8 @@ namespace Auditor.Numerics.ResidualChecks;
 /// <summary>Keeps residual and leverage of every row: what the checks need beside the design. Two numbers a row, never the design.</summary>
 public sealed class ResidualStore : IMergeable
 {
+    private const int BlockRows = 1 << 12;
+
     private readonly WritableCells<double> _residuals;
     private readonly WritableCells<double> _leverages;
     private readonly CellStore _where;
@@ -61,7 +64,9 @@ public sealed class ResidualStore : IMergeable
     {
         if (_copies is null)
         {
-            return [.. _residuals];
+            var all = GC.AllocateUninitializedArray<double>(Count);
+            _residuals.Read(0, all);
+            return all;
         }
 
         var expanded = new List<double>(Count);
@@ -94,10 +99,12 @@ public sealed class ResidualStore : IMergeable
     private (double Least, double Greatest) FindRange()
     {
         var (least, greatest) = (double.PositiveInfinity, double.NegativeInfinity);
-        for (var row = 0; row < Count; row++)
+        var block = new double[Math.Min(BlockRows, Count)];
+        for (var first = 0; first < Count; first += BlockRows)
         {
-            var value = _residuals[row];
-            (least, greatest) = (Math.Min(least, value), Math.Max(greatest, value));
+            var values = block.AsSpan(0, Math.Min(BlockRows, Count - first));
+            _residuals.Read(first, values);
+            (least, greatest) = BlockKernels.Range(values, least, greatest);
         }
 
         return (least, greatest);

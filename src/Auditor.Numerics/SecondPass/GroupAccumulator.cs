@@ -81,21 +81,39 @@ internal sealed class GroupAccumulator(AddedGroup group, GroupSpace space)
     private void MarkRows(ResidualBlock block, ReadOnlySpan<double> squares)
     {
         var leverages = block.Leverages;
-        var (alive, complements) = (space.Alive, space.Complements);
+        var alive = space.Alive.AsSpan(0, block.Rows);
+        if (block.Copies is { } copies)
+        {
+            copies.AsSpan(0, block.Rows).CopyTo(alive);
+        }
+        else
+        {
+            alive.Fill(1);
+        }
+
+        if (BlockKernels.Complement(leverages, squares, space.Complements.AsSpan(0, block.Rows)) <= LeverageOne)
+        {
+            MarkSpecials(block);
+        }
+
+        var (trace, contributing) = (_sums.LeverageTrace, _sums.ContributingN);
+        for (var i = 0; i < alive.Length; i++)
+        {
+            trace += alive[i] * leverages[i] * squares[i];
+            contributing += squares[i] > ZeroRow ? alive[i] : 0;
+        }
+
+        (_sums.LeverageTrace, _sums.ContributingN) = (trace, contributing);
+    }
+
+    private void MarkSpecials(ResidualBlock block)
+    {
         for (var i = 0; i < block.Rows; i++)
         {
-            var copies = block.Copies?[i] ?? 1;
-            var free = 1 - leverages[i];
-            alive[i] = copies;
-            complements[i] = free - squares[i];
-            if (complements[i] <= LeverageOne)
+            if (space.Complements[i] <= LeverageOne)
             {
-                MarkSpecial(block, i, free);
+                MarkSpecial(block, i, 1 - block.Leverages[i]);
             }
-
-            copies = alive[i];
-            _sums.LeverageTrace += copies * leverages[i] * squares[i];
-            _sums.ContributingN += squares[i] > ZeroRow ? copies : 0;
         }
     }
 
