@@ -38,7 +38,7 @@ public sealed class SameBitsTests
     {
         using var folder = new TemporaryFolder().With("leases.yaml", MixedDeclaration()).With("leases.csv", MixedData()).With("taken", "a file stands in the folder's place");
         var run = ProgramRun.In(folder, "leases.yaml", "--memory", "1K", "--out", "taken").Ends(2);
-        Assert.Contains("larger than --memory allows", run.Errors, StringComparison.Ordinal);
+        Assert.Contains("take more memory than they may (--memory)", run.Errors, StringComparison.Ordinal);
         Assert.False(Directory.Exists(folder.At("audit-out")));
     }
 

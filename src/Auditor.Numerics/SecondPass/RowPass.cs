@@ -25,8 +25,9 @@ public static class RowPass
         var (stripes, inside) = (rows.Stripes, rows.Stripes > 1 ? 1 : threads);
         var merged = new OrderedMerge<StripeSums>(stripes, (first, next) => first.Merge(next));
 
-        // What needs the rows in one sequence is a piece of work like a stripe, and the longest: it begins first.
-        var extra = ordered.IsEmpty || stripes == 1 ? 0 : 1;
+        // One thread takes the stripes in order. With more, what needs the rows in one sequence is a piece of work like a stripe, and the longest: it begins first.
+        var inSequence = stripes == 1 || threads <= 1;
+        var extra = ordered.IsEmpty || inSequence ? 0 : 1;
         InParallel.Each(stripes + extra, threads, piece =>
         {
             if (piece < extra)
@@ -36,7 +37,7 @@ public static class RowPass
             }
 
             var sums = new StripeSums(final, groups, mergeable, inside);
-            Feed(final, stripes == 1 ? rows.Blocks() : rows.Blocks(piece - extra), sums, stripes == 1 ? ordered : null);
+            Feed(final, stripes == 1 ? rows.Blocks() : rows.Blocks(piece - extra), sums, inSequence ? ordered : null);
             merged.Take(piece - extra, sums);
         });
         var all = merged.Merged!;

@@ -44,14 +44,27 @@ internal sealed class StripeSums
     public void Merge(StripeSums next)
     {
         Refinement.Merge(next.Refinement);
-        for (var g = 0; g < _accumulators.Length; g++)
+        if (_accumulators.Length == 0)
         {
-            _accumulators[g].Merge(next._accumulators[g]);
+            _accumulators = next._accumulators;
+        }
+        else
+        {
+            MergeGroups(next._accumulators);
         }
 
         for (var at = 0; at < _others.Length; at++)
         {
             _others[at].Merge(next._others[at]);
+        }
+    }
+
+    /// <param name="next">None of a stripe without rows.</param>
+    private void MergeGroups(GroupAccumulator[] next)
+    {
+        for (var g = 0; g < next.Length; g++)
+        {
+            _accumulators[g].Merge(next[g]);
         }
     }
 

@@ -21,10 +21,13 @@ internal sealed record Basis(string Name, string Reason, TestResult Test)
     /// <summary>The F without the null imposed, or why there is none; for classical and HC3 the test itself.</summary>
     public required TestResult Unrestricted { get; init; }
 
+    /// <summary>Where two forms stand behind the verdict, the fewer of their denominator degrees of freedom; null: those of <see cref="Unrestricted"/> count.</summary>
+    public double? LeastDf { get; init; }
+
     /// <summary>Null when <see cref="Unrestricted"/> has no value.</summary>
     public EffectiveRows? EffectiveRows { get; init; }
 
-    /// <summary>Of a score form: the same form with the group's own fitted part in place of the residuals. Its p is the least that an effect can reach.</summary>
+    /// <summary>Of a score form: the same form with the group's own fitted part in place of the residuals. Its p is where the test ends as the effect grows without limit.</summary>
     public TestResult? Ceiling { get; init; }
 
     /// <summary>The classes of rows that the form sums over; nothing for classical and HC3, two kinds where the larger p of two forms decides.</summary>

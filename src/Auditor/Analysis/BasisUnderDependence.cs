@@ -62,7 +62,8 @@ internal static class BasisUnderDependence
         return decides with
         {
             Over = byCluster.Over | byPeriod.Over,
-            Reason = byCluster.Reason,
+            Reason = sizes.Reason,
+            LeastDf = Least(byCluster.Wald?.Df2, byPeriod.Wald?.Df2),
             Ceiling = byPeriod.Ceiling?.P >= byCluster.Ceiling?.P ? byPeriod.Ceiling : byCluster.Ceiling,
             Unrestricted = sizes.Unrestricted,
             EffectiveRows = sizes.EffectiveRows,
@@ -70,6 +71,8 @@ internal static class BasisUnderDependence
             Needed = sizes.Needed,
         };
     }
+
+    private static double? Least(double? one, double? other) => one is null || other < one ? other : one;
 
     private static Basis OnClusters(GroupResults results, ClassSums clusters, string reason)
     {

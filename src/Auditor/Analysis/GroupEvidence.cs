@@ -18,7 +18,7 @@ internal sealed class GroupEvidence
         _policy = policy;
         var (wald, rows) = (tests.Basis.Wald, tests.Basis.EffectiveRows);
         _basisInterval = new(() => wald is null || rows is null ? null : EffectInterval.Of(wald, rows, policy.Significance));
-        FewDf = wald?.Df2 < policy.NegligibleDf ? wald.Df2 : null;
+        FewDf = (tests.Basis.LeastDf ?? wald?.Df2) is double df && df < policy.NegligibleDf ? df : null;
         _negligibleP = new(() => wald is null || rows is null || FewDf is not null ? null : NegligibleEffect.P(wald, rows, policy.NegligiblePartialRSquared));
         _power = new(() => wald is null || rows is null ? null : PowerEstimate.Of(tests.Basis, wald, rows, policy));
     }

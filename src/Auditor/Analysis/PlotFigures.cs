@@ -27,23 +27,23 @@ internal static class PlotFigures
 
         var fitted = FittedValues.Of(fit, drawn.Positions);
         return fitted.Concat(all.Select(row => fit.Store.Residuals[row.Position])).All(value => Math.Abs(value) < Largest)
-            ? new PlotData(Plots(fit, all, studentised, fitted, weighted, drawn.OneIn) with { Named = MostInfluential(studentised, rows, label) }, null)
+            ? new PlotData(Plots(fit, all, studentised, fitted, weighted, drawn) with { Named = MostInfluential(studentised, rows, label) }, null)
             : new PlotData(null, "the response's numbers are too large to draw");
     }
 
-    private static ResidualPlots Plots(CheckedFit fit, RowInfluence[] all, RowInfluence[] studentised, double[] fitted, bool weighted, int oneIn)
+    private static ResidualPlots Plots(CheckedFit fit, RowInfluence[] all, RowInfluence[] studentised, double[] fitted, bool weighted, DrawnRows drawn)
     {
         var (store, high) = (fit.Store, 2 * fit.Fit.Rank / fit.Fit.N);
         var fittedAt = all.Zip(fitted).ToDictionary(pair => pair.First.Position, pair => pair.Second);
         PointCloud Cloud(IEnumerable<RowInfluence> rows, Func<RowInfluence, double> x, Func<RowInfluence, double> y, bool trend) =>
-            PointClouds.Of([.. rows.Select(row => new PlotPoint(x(row), y(row), store.CopiesOf(row.Position)))], trend) with { OneIn = oneIn };
+            PointClouds.Of([.. rows.Select(row => new PlotPoint(x(row), y(row), store.CopiesOf(row.Position)))], trend) with { OneIn = drawn.OneIn };
 
         return new ResidualPlots(
             Cloud(all, row => fittedAt[row.Position], row => store.Residuals[row.Position], trend: true),
-            NormalPlots.Of(studentised.Select(row => (Standardised(fit, row), store.CopiesOf(row.Position)))),
+            NormalPlots.Of(studentised.Where(row => drawn.IsAtRandom(row.Position)).Select(row => (Standardised(fit, row), store.CopiesOf(row.Position)))),
             Cloud(studentised, row => fittedAt[row.Position], row => Math.Sqrt(Math.Abs(row.StudentisedResidual!.Value)), trend: true),
             Cloud(studentised, row => row.Leverage, row => row.StudentisedResidual!.Value, trend: false),
-            [], high, store.Leverages.Count(leverage => leverage > high), weighted, all.Length - studentised.Length);
+            [], high, store.Leverages.Count(leverage => leverage > high), weighted, drawn.OneIn == 1 ? all.Length - studentised.Length : drawn.LeverageOne);
     }
 
     private static double Standardised(CheckedFit fit, RowInfluence row) =>

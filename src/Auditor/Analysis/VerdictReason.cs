@@ -23,7 +23,7 @@ internal static class VerdictReason
         if (judgement.Verdict == Verdicts.Untestable)
         {
             return $"The data cannot test this: however large the effect, the {BasisWords.Of(evidence.Basis)} cannot reach the level"
-                + $" {PlainNumber.Digits(policy.Significance, 4)} ({PlainNumber.PAgainst(evidence.Basis.Ceiling!.P!.Value, policy.Significance)} at the least){Beside(evidence, policy)}.";
+                + $" {PlainNumber.Digits(policy.Significance, 4)} ({PlainNumber.PAgainst(evidence.Basis.Ceiling!.P!.Value, policy.Significance)} is where it ends as the effect grows){Beside(evidence, policy)}.";
         }
 
         if (judgement.Group.Drifts)

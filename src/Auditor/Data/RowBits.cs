@@ -61,6 +61,11 @@ internal sealed class RowBits
 
     private RowBits Combine(RowBits other, Func<ulong, ulong, ulong> of)
     {
+        if (other.Rows != Rows)
+        {
+            throw new ArgumentException("rows of different tables have nothing in common", nameof(other));
+        }
+
         var words = new ulong[_words.Length];
         for (var w = 0; w < words.Length; w++)
         {

@@ -16,7 +16,7 @@ public sealed class RowSubset : IEquatable<RowSubset>, IReadOnlyList<int>
     private readonly int[] _before;
     private readonly int _hash;
 
-    /// <param name="rows">Rising.</param>
+    /// <param name="rows">Rising, of a table that ends with the last of them.</param>
     public RowSubset(IReadOnlyCollection<int> rows)
         : this(BitsOf(rows))
     {
@@ -93,6 +93,21 @@ public sealed class RowSubset : IEquatable<RowSubset>, IReadOnlyList<int>
     }
 
     IEnumerator IEnumerable.GetEnumerator() => GetEnumerator();
+
+    /// <summary>The rows of this subset that pass a test.</summary>
+    public RowSubset Where(Func<int, bool> test)
+    {
+        var passed = new RowBits(Bits.Rows);
+        foreach (var row in this)
+        {
+            if (test(row))
+            {
+                passed.Set(row);
+            }
+        }
+
+        return new RowSubset(passed);
+    }
 
     /// <summary>The rows of this subset without the given ones.</summary>
     internal RowSubset Without(RowBits excluded)

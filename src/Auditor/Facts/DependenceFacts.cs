@@ -16,7 +16,7 @@ internal static class DependenceFacts
         .Text("basis_clusters_on", "The variable by which the test the verdict rests on sums rows into clusters.", view => view.Of.BasisClustersOn, _ => "the verdict does not rest on a form over clusters")
         .Flag("has_effective_clusters", "effective_clusters could be computed.", view => view.Of.EffectiveClusters is not null)
         .Flag("on_score_form", "The verdict rests on a form over clusters or periods with the null imposed.", view => view.Of.Ceiling is not null)
-        .Number("ceiling_p", FactUnits.P, "The least p that the test can reach, however large the group's effect.", view => view.Of.Ceiling?.P, _ => NoScoreForm)
+        .Number("ceiling_p", FactUnits.P, "The p at which the test ends as the group's effect grows without limit.", view => view.Of.Ceiling?.P, _ => NoScoreForm)
         .Flag("cannot_reject", "ceiling_p is above the policy's significance.", view => view.Of.Ceiling is { } ceiling ? ceiling.CannotReject : null, _ => NoScoreForm)
         .Flag("cannot_reject_adjusted", "ceiling_p is above the policy's significance after the factor that the policy's adjustment puts on the least p of all groups: as the first of them the group could not be rejected.",
             view => view.Of.Ceiling is { } ceiling ? ceiling.P * OnTheLeastP(view.Policy.Adjustment, view.Inputs.Groups) > view.Policy.Significance : null, _ => NoScoreForm)

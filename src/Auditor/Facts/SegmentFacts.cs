@@ -19,7 +19,7 @@ public static class SegmentFacts
         .Text("by", "What divides the rows.", view => view.By.By)
         .Word("divides", "How: by a segment column, at the declared split, in halves of the time span.", [Divisions.Segment, Divisions.Split, Divisions.Halves], view => view.By.Kind)
         .Count("parts", "parts", "Parts that the rows are divided into.", view => view.By.Parts.Count)
-        .Flag("computed", "The division was made, or the test has a p.", view => view.Kind == Division ? view.By.Why is null : view.Test?.P is not null)
+        .Flag("computed", "The division was made, or the test has a p and could reject.", view => view.Kind == Division ? view.By.Why is null : view.PAdjusted is not null)
         .Text("why_not", "Why not.", view => view.Why, _ => "it was computed")
         .Text("group", "Name of the left-out group.", view => view.Exclusion?.Group, _ => OfDivision)
         .Word("group_verdict", "The group's verdict on all its rows.", FactWords.Verdicts, view => view.Exclusion?.Verdict, _ => OfDivision)

@@ -109,7 +109,7 @@ public sealed record PowerFigures(
 /// <summary>The same test on the other row set.</summary>
 public sealed record OtherRowSetFigures(int Rows, double? F, double? Df1, double? Df2, double? P, string Verdict);
 
-/// <param name="P">The least p that the form can reach, however large the effect.</param>
+/// <param name="P">Where the form's p ends as the effect grows without limit.</param>
 /// <param name="CannotReject">It is above the policy's significance.</param>
 /// <param name="UnrestrictedP">p of the same kind of test with the group in the model; null when it has none.</param>
 public sealed record ScoreCeiling(double P, bool CannotReject, double? UnrestrictedP);

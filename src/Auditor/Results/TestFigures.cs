@@ -4,7 +4,7 @@ namespace Auditor.Results;
 
 /// <summary>One test as the record shows it.</summary>
 /// <param name="F">Null when the statistic has no finite value; <paramref name="Why"/> then says so.</param>
-/// <param name="CeilingP">Of a score form: the least p that an effect in this direction can reach, however large.</param>
+/// <param name="CeilingP">Of a score form: where its p ends as the effect grows without limit.</param>
 /// <param name="P">Upper tail probability; 0 when below 1e-300, and then <paramref name="Log10P"/> holds it.</param>
 public sealed record TestFigures(
     double? F,

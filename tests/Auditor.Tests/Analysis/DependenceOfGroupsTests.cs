@@ -70,6 +70,33 @@ public sealed class DependenceOfGroupsTests
         Assert.Equal((Verdicts.Supported, Materialities.ShownNegligible), (allowed.Verdict, allowed.Materiality));
     }
 
+    /// <summary>Two forms stand behind a mixture; the fewer degrees of freedom count whichever of them sizes the effect.</summary>
+    [Fact]
+    public void A_mixture_is_held_to_the_form_with_fewer_degrees_of_freedom()
+    {
+        var exclusion = Record("time: quarter, unit: dealer", "size, macro", LargePanel()).Exclusions[0];
+        Assert.Equal("several", exclusion.Level);
+        Assert.Equal("clusters", exclusion.Power.CountedIn);
+        Assert.Null(exclusion.Negligible.P);
+        Assert.NotEqual(Materialities.ShownNegligible, exclusion.Materiality);
+        Assert.Contains("no effect is called negligible", exclusion.Negligible.Why, StringComparison.Ordinal);
+        var difference = exclusion.InParts[0].Difference;
+        Assert.Equal(difference.Test!.Df2 > 100 ? "cluster" : "time", difference.Basis);
+    }
+
+    [Fact]
+    public void A_group_that_cannot_be_rejected_in_a_part_is_no_member_of_the_family_there()
+    {
+        var halves = Panel("time: quarter, unit: dealer, cluster: dealer", "macro").Exclusions[0].InParts[0];
+        Assert.Contains(halves.Parts, part => part.Test!.CeilingP > 0.05);
+        Assert.All(halves.Parts.Where(part => part.Test!.CeilingP > 0.05), part =>
+        {
+            Assert.Null(part.PAdjusted);
+            Assert.Null(part.PartialRSquared.BasisUpper);
+            Assert.StartsWith("the test cannot reach the level 0.05 here: as the effect grows without limit, it ends at p = ", part.Why, StringComparison.Ordinal);
+        });
+    }
+
     [Fact]
     public void A_groups_resampling_does_not_depend_on_the_other_groups()
     {
@@ -88,17 +115,30 @@ public sealed class DependenceOfGroupsTests
         _ => new MemoryStream(Encoding.UTF8.GetBytes(csv)),
         policy);
 
+    /// <summary>400 dealers over 30 quarters, errors independent; size belongs to the dealer, macro to the quarter.</summary>
+    private static string LargePanel()
+    {
+        var (random, text) = (new Generator(11), new StringBuilder("y,x,size,macro,dealer,quarter,pair\n"));
+        double[] sizes = [.. Enumerable.Range(0, 400).Select(_ => random.Normal())], macro = [.. Enumerable.Range(0, 30).Select(_ => random.Normal())];
+        for (var i = 0; i < 12_000; i++)
+        {
+            text.AppendLine(CultureInfo.InvariantCulture, $"{random.Normal():R},{random.Normal():R},{sizes[i / 30]:R},{macro[i % 30]:R},d{i / 30},{i % 30},{i}");
+        }
+
+        return text.ToString();
+    }
+
     private static string Text(ReportTable table) => string.Join('\n', table.Rows.SelectMany(row => row).Select(cell => cell.Text));
 
     /// <summary>24 dealers over 12 quarters; size belongs to the dealer, an office to dealer and half of the span, a region to dealers.</summary>
     private static string Csv()
     {
-        var (random, text) = (new Generator(7), new StringBuilder("y,x,z,other,size,dealer,office,region,quarter,pair\n"));
+        var (random, text) = (new Generator(7), new StringBuilder("y,x,z,other,size,dealer,office,region,quarter,pair,macro\n"));
         double[] sizes = [.. Enumerable.Range(0, 24).Select(_ => random.Normal())];
         for (var i = 0; i < 288; i++)
         {
             var (dealer, quarter) = (i / 12, i % 12);
-            text.AppendLine(CultureInfo.InvariantCulture, $"{random.Normal():R},{random.Normal():R},{random.Normal():R},{random.Normal():R},{sizes[dealer]:R},d{dealer},o{dealer}-{quarter / 6},r{dealer % 6},{quarter},{i}");
+            text.AppendLine(CultureInfo.InvariantCulture, $"{random.Normal():R},{random.Normal():R},{random.Normal():R},{random.Normal():R},{sizes[dealer]:R},d{dealer},o{dealer}-{quarter / 6},r{dealer % 6},{quarter},{i},{Math.Sin(quarter * quarter):R}");
         }
 
         return text.ToString();

@@ -10,6 +10,9 @@ namespace Auditor.Analysis.Parts;
 /// <param name="Compared">Parts that enter.</param>
 internal sealed record DifferenceOfParts(string? Basis, TestResult Test, TestResult? Ceiling, TestResult Classical, int Compared)
 {
+    /// <summary>Its p ends above the level however large the difference.</summary>
+    public bool CannotReject(double level) => Ceiling?.P > level;
+
     /// <param name="whole">The group on all its rows, which fixes the form; null: it has none.</param>
     /// <param name="parts">The group in each part; null where it has too few rows.</param>
     public static DifferenceOfParts Of(GroupEvidence? whole, int group, IReadOnlyList<GroupEvidence?> parts, PartFits fits, bool sampling)
@@ -26,9 +29,9 @@ internal sealed record DifferenceOfParts(string? Basis, TestResult Test, TestRes
         }
 
         var forms = new FormsOfDifference(contrast, [.. compared.Select(part => (fits.Of(part.Index, group)!, part.Item!.Fit.Sums))], fits);
-        var (test, ceiling) = forms.Deciding(whole.Basis);
+        var (name, test, ceiling) = forms.Deciding(whole.Basis);
         var classical = sampling ? TestResult.None(Impediment.SamplingWeights) : EqualEffectsF.Of(contrast);
-        return new DifferenceOfParts(whole.Basis.Name, test, ceiling, classical, compared.Count);
+        return new DifferenceOfParts(name, test, ceiling, classical, compared.Count);
     }
 
     private static DifferenceOfParts None(Impediment why, int compared) => new(null, TestResult.None(why), null, TestResult.None(why), compared);
@@ -39,39 +42,40 @@ internal sealed record DifferenceOfParts(string? Basis, TestResult Test, TestRes
 internal sealed class FormsOfDifference(EffectContrast contrast, IReadOnlyList<(RowSetFit Fit, GroupSums Sums)> parts, PartFits fits)
 {
     /// <summary>The form of the basis on all rows; of two, as there, the one with the larger p, a form without a value leaving no other, and the higher ceiling.</summary>
-    public (TestResult Test, TestResult? Ceiling) Deciding(Basis basis)
+    public (string Basis, TestResult Test, TestResult? Ceiling) Deciding(Basis basis)
     {
         if (basis.Over == SummedOver.Nothing)
         {
-            return (basis.Name == Basis.Classical ? EqualEffectsF.Of(contrast) : EqualEffectsHc3.Of(contrast, [.. parts.Select(part => part.Sums)]), null);
+            return (basis.Name, basis.Name == Basis.Classical ? EqualEffectsF.Of(contrast) : EqualEffectsHc3.Of(contrast, [.. parts.Select(part => part.Sums)]), null);
         }
 
         var clusters = basis.Over & ~SummedOver.Period;
-        var byCluster = clusters == SummedOver.Nothing ? default((TestResult Test, TestResult? Ceiling)?) : OverClusters(clusters);
-        var byPeriod = basis.Over.HasFlag(SummedOver.Period) ? OverPeriods() : default((TestResult Test, TestResult? Ceiling)?);
+        var byCluster = clusters == SummedOver.Nothing ? default((string Basis, TestResult Test, TestResult? Ceiling)?) : OverClusters(clusters);
+        var byPeriod = basis.Over.HasFlag(SummedOver.Period) ? OverPeriods() : default((string Basis, TestResult Test, TestResult? Ceiling)?);
         return byCluster is { } one && byPeriod is { } other ? Larger(one, other) : byCluster ?? byPeriod!.Value;
     }
 
-    private static (TestResult Test, TestResult? Ceiling) Larger((TestResult Test, TestResult? Ceiling) byCluster, (TestResult Test, TestResult? Ceiling) byPeriod)
+    private static (string Basis, TestResult Test, TestResult? Ceiling) Larger(
+        (string Basis, TestResult Test, TestResult? Ceiling) byCluster, (string Basis, TestResult Test, TestResult? Ceiling) byPeriod)
     {
         if (byPeriod.Test is NotComputable || byCluster.Test is NotComputable)
         {
             return byPeriod.Test is NotComputable ? byPeriod : byCluster;
         }
 
-        return (byPeriod.Test.P >= byCluster.Test.P ? byPeriod.Test : byCluster.Test, byPeriod.Ceiling?.P >= byCluster.Ceiling?.P ? byPeriod.Ceiling : byCluster.Ceiling);
+        return (byPeriod.Test.P >= byCluster.Test.P ? byPeriod : byCluster) with { Ceiling = byPeriod.Ceiling?.P >= byCluster.Ceiling?.P ? byPeriod.Ceiling : byCluster.Ceiling };
     }
 
-    private (TestResult Test, TestResult? Ceiling) OverClusters(SummedOver over)
+    private (string Basis, TestResult Test, TestResult? Ceiling) OverClusters(SummedOver over)
     {
         var sums = Sums(over);
-        return (EqualEffectsOverClusters.Of(contrast, sums), EqualEffectsOverClusters.Ceiling(contrast, sums));
+        return (Basis.Cluster, EqualEffectsOverClusters.Of(contrast, sums), EqualEffectsOverClusters.Ceiling(contrast, sums));
     }
 
-    private (TestResult Test, TestResult? Ceiling) OverPeriods()
+    private (string Basis, TestResult Test, TestResult? Ceiling) OverPeriods()
     {
         var sums = Sums(SummedOver.Period);
-        return (EqualEffectsOverPeriods.Of(contrast, sums), EqualEffectsOverPeriods.Ceiling(contrast, sums));
+        return (Basis.Time, EqualEffectsOverPeriods.Of(contrast, sums), EqualEffectsOverPeriods.Ceiling(contrast, sums));
     }
 
     private ContrastSums? Sums(SummedOver over)

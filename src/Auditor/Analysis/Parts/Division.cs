@@ -12,5 +12,5 @@ internal sealed record Division(string By, string Kind, IReadOnlyList<DivisionPa
 /// <param name="Holds">Whether a row of the table lies in the part.</param>
 internal sealed record DivisionPart(string Label, Func<int, bool> Holds)
 {
-    public RowSubset Of(RowSubset rows) => new([.. rows.Where(Holds)]);
+    public RowSubset Of(RowSubset rows) => rows.Where(Holds);
 }

@@ -35,6 +35,7 @@ internal static class DivisionsOfRows
         int[] codes = [.. shown.Select(row => segment[row]).Where(code => code >= 0).Distinct().Order()];
         var why = codes.Length > most
             ? $"{segment.Name} has {PlainNumber.Count(codes.Length)} values in the rows that are used, more than the {PlainNumber.Count(most)} parts that the policy allows (most_parts)"
+            : codes.Length == 0 ? "no row that is used has a value of it"
             : codes.Length < 2 ? "all rows that are used and have a value of it have the same one" : null;
         return new Division(
             segment.Name, Divisions.Segment, why is null ? [.. codes.Select(code => new DivisionPart(segment.Label(code), row => segment[row] == code))] : [], why);

@@ -32,21 +32,23 @@ internal static class GroupsInParts
         var tests = groups.Select((group, g) => division.Parts.Select((_, part) => fits.Of(part, g) is { } fit
             ? new GroupEvidence(new GroupResults(fit[g], policy.BasisWithoutStructure, inputs.Sampling), policy)
             : null).ToArray()).ToArray();
-        var adjusted = Family.Adjust([.. tests.SelectMany(one => one).Select(P)], policy.Adjustment);
+        var adjusted = Family.Adjust([.. tests.SelectMany(one => one).Select(evidence => P(evidence, policy.Significance))], policy.Adjustment);
         var differences = groups.Select((group, g) => DifferenceOfParts.Of(group.Judgement.Evidence, g, tests[g], fits, inputs.Sampling)).ToArray();
-        var adjustedDifferences = Family.Adjust([.. differences.Select(one => TestFigure.P(one.Test))], policy.Adjustment);
+        var adjustedDifferences = Family.Adjust([.. differences.Select(one => one.CannotReject(policy.Significance) ? null : TestFigure.P(one.Test))], policy.Adjustment);
         return
         [
             .. groups.Select((_, g) => new GroupInParts(
                 division.By,
                 division.Kind,
                 [.. division.Parts.Select((part, k) => PartFigure.Of(part.Label, fits.Rows(k, g).Count, fits.Of(k, g), tests[g][k], adjusted[(g * division.Parts.Count) + k], policy))],
-                PartFigure.Difference(differences[g], adjustedDifferences[g]),
+                PartFigure.Difference(differences[g], adjustedDifferences[g], policy),
                 null)),
         ];
     }
 
-    private static PValue? P(GroupEvidence? evidence) => evidence is null ? null : TestFigure.P(evidence.Basis.Test);
+    /// <summary>A test that cannot reject in its part, however large the effect, is no member of the family.</summary>
+    private static PValue? P(GroupEvidence? evidence, double level) =>
+        evidence is null || evidence.Basis.CannotReject(level) ? null : TestFigure.P(evidence.Basis.Test);
 }
 
 /// <summary>A group judged on all its rows; the fit is null when it has none.</summary>

@@ -20,13 +20,21 @@ internal static class PartFigure
 
         var (test, why) = Figure(evidence.Basis.Test, evidence.Basis.Ceiling);
         return new PartFigures(
-            label, (int)fit.Fit.N, evidence.Basis.Name, test, Shown(adjusted), Figure(evidence.Tests.Classical, null).Figures, Effect(evidence, why), why is null ? null : InPart(evidence, why));
+            label,
+            rows,
+            evidence.Basis.Name,
+            test,
+            Shown(adjusted),
+            Figure(evidence.Tests.Classical, null).Figures,
+            evidence.Basis.CannotReject(policy.Significance) ? WithoutSize(evidence, CannotReject(evidence.Basis.Ceiling!, policy)) : Effect(evidence, why),
+            evidence.Basis.CannotReject(policy.Significance) ? CannotReject(evidence.Basis.Ceiling!, policy) : why is null ? null : InPart(evidence, why));
     }
 
-    public static DifferenceFigures Difference(DifferenceOfParts difference, PValue? adjusted)
+    public static DifferenceFigures Difference(DifferenceOfParts difference, PValue? adjusted, Policy policy)
     {
         var (test, why) = Figure(difference.Test, difference.Ceiling);
-        return new DifferenceFigures(difference.Compared, difference.Basis, test, Shown(adjusted), Figure(difference.Classical, null).Figures, why);
+        return new DifferenceFigures(difference.Compared, difference.Basis, test, Shown(adjusted), Figure(difference.Classical, null).Figures,
+            difference.CannotReject(policy.Significance) ? CannotReject(difference.Ceiling!, policy) : why);
     }
 
     public static DifferenceFigures NoDifference(int compared, string why) => new(compared, null, null, null, null, why);
@@ -42,6 +50,12 @@ internal static class PartFigure
         var figures = TestFigure.Of(result, "test", none);
         return (figures is null ? null : figures with { CeilingP = ceiling?.P }, none.GetValueOrDefault("test"));
     }
+
+    private static string CannotReject(TestResult ceiling, Policy policy) =>
+        $"the test cannot reach the level {PlainNumber.Digits(policy.Significance, 4)} here: as the effect grows without limit, it ends at {PlainNumber.PAgainst(ceiling.P!.Value, policy.Significance)}";
+
+    private static EffectFigures WithoutSize(GroupEvidence evidence, string why) =>
+        new(evidence.Tests.PartialRSquared, evidence.ClassicalInterval?.Lower, evidence.ClassicalInterval?.Upper, null, null, why);
 
     private static double? Shown(PValue? adjusted) => adjusted is { } p ? TestFigure.ShownP(p.P) : null;
 
