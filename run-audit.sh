@@ -106,5 +106,7 @@ if ! is_current; then
     exec 9>&-
 fi
 
+# So that what it tells people to type next works where they typed this.
+export AUDITOR_CALLED_AS="$script"
 [ ! -f "$app/Auditor.Cli.dll" ] || exec dotnet "$app/Auditor.Cli.dll" "$@"
 exec "$app/Auditor.Cli" "$@"

@@ -1,5 +1,6 @@
 using System.CommandLine;
 using System.Reflection;
+using Auditor.Yaml;
 
 namespace Auditor.Cli;
 
@@ -23,7 +24,7 @@ internal sealed class CommandLine
     private readonly Option<string?> _response = Options.Text("--response", "COLUMN", "The column that the model explains.");
     private readonly Option<string?> _newFile = Options.Text("--out", "FILE", "Where to write it (default: NAME.yaml here); never over a file that is there.");
     private readonly Command _rules = new("rules", "List the rules and facts, or explain one.");
-    private readonly Argument<string?> _ruleId = new("ID") { Description = "The rule to explain.", Arity = ArgumentArity.ZeroOrOne };
+    private readonly Argument<string?> _ruleId = new("ID") { Description = "The rule or fact to explain.", Arity = ArgumentArity.ZeroOrOne };
     private readonly Command _selfTest = new("self-test", "Certified and reference cases on this machine; writes self-test.json and self-test.html.");
     private readonly Option<string?> _selfTestOut = new("--out") { HelpName = "DIR", Description = "Folder for the evidence (default: ./audit-out)." };
     private readonly RootCommand _root = new("Audits a declared regression model and the terms it left out, from its data.");
@@ -70,7 +71,7 @@ internal sealed class CommandLine
             return Help(parsed);
         }
 
-        var misfits = Misplaced(args, parsed) is string misplaced ? [misplaced] : UnknownWords.In(parsed, parsed.GetValue(_declaration));
+        var misfits = (Misplaced(args, parsed) ?? Misspelt(parsed)) is string wrong ? [wrong] : UnknownWords.In(parsed, parsed.GetValue(_declaration));
         return misfits.Count > 0 ? Unusable(misfits) : Run(parsed);
     }
 
@@ -135,6 +136,15 @@ internal sealed class CommandLine
     private string? Misplaced(string[] args, ParseResult parsed) =>
         parsed.CommandResult.Command is var command && command != _root && args[0] != command.Name
             ? $"'{args[0]}' stands before '{command.Name}'; options stand after the word they belong to"
+            : null;
+
+    /// <summary>What is taken for a declaration because no command is called so.</summary>
+    private string? Misspelt(ParseResult parsed) =>
+        parsed.CommandResult.Command == _root
+        && parsed.GetValue(_declaration) is { } word
+        && !Path.Exists(word)
+        && NearestName.Of(word, _root.Subcommands.Select(command => command.Name)) is { } near
+            ? $"'{word}' is no command, and no file has that name; did you mean '{near}'?"
             : null;
 
     private static int Unusable(IEnumerable<string> problems)

@@ -33,7 +33,7 @@ internal static class NearestFile
 {
     public static string Hint(string path) =>
         Path.GetDirectoryName(Path.GetFullPath(path)) is { } folder && Directory.Exists(folder)
-            ? Yaml.NearestName.DidYouMean(Path.GetFileName(path), Directory.GetFiles(folder).Select(file => Path.GetFileName(file)!))
+            ? Yaml.NearestName.DidYouMean(Path.GetFileName(path), [.. Directory.GetFiles(folder).Select(file => Path.GetFileName(file)!)])
             : "";
 }
 

@@ -49,9 +49,9 @@ internal static class NewCommand
 
     private static int Said(string data, string target)
     {
-        var outside = RealPath.Within(data, FolderOf(target)) ? "" : " --data-root " + FolderOf(data);
+        var outside = RealPath.Within(data, FolderOf(target)) ? "" : " --data-root " + Shell.Word(FolderOf(data));
         Console.Out.WriteLine("Written: " + target);
-        Console.Out.WriteLine($"Audit it with: ./run-audit.sh {target}{outside}");
+        Console.Out.WriteLine($"Audit it with: {Shell.Program} {Shell.Word(target)}{outside}");
         return ExitStatus.Audited;
     }
 

@@ -32,6 +32,18 @@ public sealed class NewTests
         Assert.Contains("is another file than data.sha256 says", ProgramRun.In(folder, "leases.yaml").Ends(2).Errors, StringComparison.Ordinal);
     }
 
+    /// <summary>run-audit.sh says how it was called: the line works in the folder where the command was typed.</summary>
+    [Fact]
+    public void The_last_line_calls_the_script_as_it_was_called_and_the_file_as_it_was_named()
+    {
+        using var folder = new TemporaryFolder().With("leases.csv", Leases.Csv());
+        var target = folder.At("the first's.yaml");
+        var run = ProgramRun.With(folder, [("AUDITOR_CALLED_AS", "../tools/run-audit.sh")], "new", "leases.csv", "--response", "loss", "--out", target).Ends(0);
+
+        Assert.Equal($"Written: {target}\nAudit it with: ../tools/run-audit.sh '{folder.At("the first")}'\\''s.yaml'\n", run.Output);
+        Assert.Contains("\nexport AUDITOR_CALLED_AS=\"$script\"\n", Repository.Text("run-audit.sh"), StringComparison.Ordinal);
+    }
+
     [Fact]
     public void Nothing_is_written_over()
     {

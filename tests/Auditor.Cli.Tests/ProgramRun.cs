@@ -33,6 +33,7 @@ internal sealed record ProgramRun(int Status, string Output, string Errors)
         start.RedirectStandardOutput = true;
         start.RedirectStandardError = true;
         start.Environment.Remove("SOURCE_DATE_EPOCH");
+        start.Environment.Remove("AUDITOR_CALLED_AS");
         if (moment is not null)
         {
             start.Environment["SOURCE_DATE_EPOCH"] = moment;

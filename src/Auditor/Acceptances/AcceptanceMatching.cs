@@ -36,7 +36,7 @@ public static class AcceptanceMatching
 
     /// <summary>A file may serve many models, so entries of others are nothing to speak of; but where none is for this one, a name that is nearly this one's may be a slip.</summary>
     private static IEnumerable<AcceptanceStanding> OfNearModels(AcceptancesOfRun acceptances, string model, string? version) => acceptances.Entries
-        .Where(entry => NearestName.DidYouMean(entry.Model, [model]).Length > 0)
+        .Where(entry => NearestName.Of(entry.Model, [model]) is not null)
         .Select(entry => new AcceptanceStanding(entry, version, acceptances.AsOf, null, null, null, [], "") { NearModel = entry.Model });
 
     private static AcceptanceStanding Standing(
@@ -45,7 +45,7 @@ public static class AcceptanceMatching
         var ofRule = findings.Where(finding => finding.Rule == entry.Rule).ToList();
         if (ofRule.FirstOrDefault(finding => finding.Subject == entry.Subject) is not { } match)
         {
-            return new AcceptanceStanding(entry, version, asOf, null, null, null, [], NearestName.DidYouMean(entry.Subject, ofRule.Select(finding => finding.Subject)));
+            return new AcceptanceStanding(entry, version, asOf, null, null, null, [], NearestName.DidYouMean(entry.Subject, [.. ofRule.Select(finding => finding.Subject)]));
         }
 
         var evidence = Evidence.Of(match, rules.First(rule => rule.Id == entry.Rule), facts);

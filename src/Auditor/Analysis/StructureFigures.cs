@@ -22,6 +22,7 @@ internal static class StructureFigures
             structure.Order?.TiedRows)
         {
             UnitsInSeveralClusters = structure is { Units: { } units, Clusters: { } clusters } ? InSeveral(units, clusters) : null,
+            DaysAsPeriods = model.Structure.Time is { Column: DateColumn, Steps: null },
         };
     }
 

@@ -9,11 +9,12 @@ internal sealed record DateOrNumber(string Text, bool IsDate, double Value)
 {
     private const string Expected = "a date as YYYY-MM-DD or a number";
 
-    public static DateOrNumber? Read(Place place)
+    /// <param name="hint">What to use where neither is meant, in brackets.</param>
+    public static DateOrNumber? Read(Place place, string hint = "")
     {
         if (place.Node is not TextValue { Text: var text })
         {
-            place.Refuse(Expected);
+            place.Refuse(Expected + hint);
             return null;
         }
 
@@ -22,7 +23,7 @@ internal sealed record DateOrNumber(string Text, bool IsDate, double Value)
             return new DateOrNumber(text, IsDate: true, date.DayNumber);
         }
 
-        return place.Number(Expected) is double number ? new DateOrNumber(text, IsDate: false, number) : null;
+        return place.Number(Expected + hint) is double number ? new DateOrNumber(text, IsDate: false, number) : null;
     }
 
     /// <summary>Adds a problem unless both are dates or both numbers, and in order.</summary>

@@ -7,6 +7,8 @@ internal sealed class StructureReader(ColumnNames columns)
 {
     private const int LongestLag = 1_000_000;
 
+    private const string ByEachValue = " (to divide the rows by each value of a column, use data.segments)";
+
     public StructureDeclaration Read(Keys data)
     {
         var time = data.Optional("time");
@@ -77,7 +79,7 @@ internal sealed class StructureReader(ColumnNames columns)
                 return new SplitDeclaration(null, null, keys.Optional("row")!.Whole(1, int.MaxValue), place.Line);
             case ["column", "at"]:
                 var column = columns.Read(keys.Optional("column")!, "data.split");
-                var at = DateOrNumber.Read(keys.Optional("at")!);
+                var at = DateOrNumber.Read(keys.Optional("at")!, ByEachValue);
                 return new SplitDeclaration(column?.Column, at?.Text, null, place.Line);
             default:
                 if (keys.Optional("column") is { } named)
@@ -85,7 +87,7 @@ internal sealed class StructureReader(ColumnNames columns)
                     columns.Read(named, "data.split");
                 }
 
-                keys.RefuseChoice("column and at, or row", ["column", "at", "row"]);
+                keys.RefuseChoice("column and at, or row" + (keys.Has("row") ? "" : ByEachValue), ["column", "at", "row"]);
                 return null;
         }
     }
@@ -93,7 +95,8 @@ internal sealed class StructureReader(ColumnNames columns)
     private List<ColumnMention> Segments(Place place)
     {
         var mentions = new List<ColumnMention>();
-        Distinct.Texts(place.Items("column names") ?? [], "column", item =>
+        var named = place.Node is TextValue && !place.IsNothing ? [place] : place.Items("column names");
+        Distinct.Texts(named ?? [], "column", item =>
         {
             var mention = columns.Read(item, "data.segments");
             if (mention is not null && mentions.TrueForAll(other => other.Column != mention.Column))

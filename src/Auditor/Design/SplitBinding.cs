@@ -31,7 +31,7 @@ internal sealed class SplitBinding(DataTable table, RowSubset keptRows, Action<i
         var column = table[declared.Column!];
         var position = CellTest.Position(column);
         var fault = position is null
-            ? $"column {column.Name} holds {column.Kind.ToString().ToLowerInvariant()}, a split needs dates or numbers, or a row"
+            ? $"column {column.Name} holds {column.Kind.ToString().ToLowerInvariant()}, a split needs dates or numbers, or a row" + Instead(column)
             : CellTest.Fault(column, declared.At!);
         if (fault is not null)
         {
@@ -43,6 +43,9 @@ internal sealed class SplitBinding(DataTable table, RowSubset keptRows, Action<i
         return Checked(
             new BoundSplit($"{column.Name} {declared.At}", row => !column.IsMissing(row), row => position!(row) <= at), declared.Line, Range(column, position!));
     }
+
+    private static string Instead(DataColumn column) =>
+        column.Kind == ColumnKind.Levels ? $"; to test every group in each of its values, use data.segments: [{column.Name}]" : "";
 
     private BoundSplit? Checked(BoundSplit split, int line, string range)
     {

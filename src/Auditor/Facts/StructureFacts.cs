@@ -19,6 +19,7 @@ internal static class StructureFacts
         .Number("units_in_several_clusters_share", FactUnits.Share, "Those units as a share of all.", counts => counts.Units > 0 ? (double?)counts.UnitsInSeveralClusters / counts.Units : null, NoUnitsOrClusters)
         .Flag("time_declared", "The declaration gives the rows an order in time.", counts => counts.Periods is not null)
         .Count("n_periods", "periods", "Periods that have a row of the final model's fit.", counts => counts.Periods, _ => NoTime)
+        .Flag("days_as_periods", "Time holds dates and no period is declared: each distinct day is a period of its own.", counts => counts.Periods is null ? null : counts.DaysAsPeriods, _ => NoTime)
         .Flag("has_missing_periods", "A unit has no row in a period between its first and its last.", counts => counts.MissingPeriods is long missing ? missing > 0 : null, NotCounted)
         .Count("missing_periods", "periods", "Such periods, added up over the units.", counts => counts.MissingPeriods, NotCounted)
         .Flag("has_tied_rows", "Some rows share unit and period.", counts => counts.TiedRows is { } tied ? tied > 0 : null, _ => NoTime)

@@ -11,4 +11,7 @@ public sealed record StructureCounts(
 {
     /// <summary>Units with rows in more than one cluster; null unless both are declared.</summary>
     public int? UnitsInSeveralClusters { get; init; }
+
+    /// <summary>Time holds dates and no period is declared: each distinct day is a period of its own.</summary>
+    public bool DaysAsPeriods { get; init; }
 }

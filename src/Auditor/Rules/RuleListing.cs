@@ -17,12 +17,17 @@ public static class RuleListing
         .. AboutWithLines(about => [.. FactCatalogue.Of(about).Select(Line)]),
     ];
 
-    /// <summary>One rule in full, with the policy's values and the facts it rests on; or the nearest id when there is no such rule.</summary>
-    public static Reading<IReadOnlyList<string>> Explain(string id, IReadOnlyList<Rule> rules, Policy policy) =>
-        rules.FirstOrDefault(rule => rule.Id == id) is { } rule
-            ? Reading<IReadOnlyList<string>>.Of(Explain(rule, policy))
-            : Reading<IReadOnlyList<string>>.Failed(
-                new Problem("rules", null, $"no rule has the id '{id}'" + NearestName.Hint(id, [.. rules.Select(known => known.Id)])));
+    /// <summary>One rule in full, with the policy's values and the facts it rests on; else the facts of that name; or the nearest name when there is neither.</summary>
+    public static Reading<IReadOnlyList<string>> Explain(string id, IReadOnlyList<Rule> rules, Policy policy)
+    {
+        var facts = AboutWithLines(about => [.. FactCatalogue.Of(about).Where(fact => fact.Name == id).Select(Line)]).ToList();
+        return rules.FirstOrDefault(rule => rule.Id == id) is { } rule ? Reading<IReadOnlyList<string>>.Of(Explain(rule, policy))
+            : facts.Count > 0 ? Reading<IReadOnlyList<string>>.Of(["Facts of this name", .. facts])
+            : Reading<IReadOnlyList<string>>.Failed(new Problem("rules", null, $"no rule has the id '{id}', and no fact the name" + NearestName.DidYouMean(id, Names(rules))));
+    }
+
+    private static IReadOnlyCollection<string> Names(IReadOnlyList<Rule> rules) =>
+        [.. rules.Select(rule => rule.Id), .. Enum.GetValues<About>().SelectMany(FactCatalogue.Of).Select(fact => fact.Name).Distinct()];
 
     private static IEnumerable<string> AboutWithLines(Func<About, IReadOnlyList<string>> linesOf) =>
         Enum.GetValues<About>()

@@ -35,6 +35,8 @@ internal static class DeclarationText
             Line("  # missing: [\"\", NA, NaN, \"null\"]", "texts that mean \"no value\"; these unless you say others"),
             Line("  # keep:", "only rows that meet every condition"),
             Line("  #   - {column: status, equals: closed}", "or not, in, from and to, present: true"),
+            "  # Which rows depend on each other decides the test, and nothing in the data tells it. Without time or cluster every row counts as independent.",
+            .. StructureLines.Of([.. choices.Select(choice => choice.Column)]).Select(line => Line("  # " + line.Text, line.Note)),
             "",
             Line("response: " + YamlText.Of(response.Name), TermChoice.Described(response)),
             "",

@@ -7,6 +7,10 @@ public static class NearestName
 
     private const int MostNamesListed = 12;
 
+    private const int FewestLettersOfABeginning = 3;
+
+    private static readonly char[] _betweenWords = ['-', '_', ' '];
+
     /// <summary>A sentence part naming the nearest of the known names, or all of them when none is near and they are few.</summary>
     public static string Hint(string name, IReadOnlyCollection<string> known)
     {
@@ -19,7 +23,8 @@ public static class NearestName
     }
 
     /// <summary>A sentence part naming the nearest of the known names, empty when none is near.</summary>
-    public static string DidYouMean(string name, IEnumerable<string> known) => Of(name, known) is { } near ? $"; did you mean '{near}'?" : "";
+    public static string DidYouMean(string name, IReadOnlyCollection<string> known) =>
+        (Of(name, known) ?? Begun(name, known) ?? LikeWords(name, known)) is { } near ? $"; did you mean '{near}'?" : "";
 
     /// <summary>
     /// The known name with the fewest slips, the first on a tie; null when none is near enough to be meant: one slip is, two when the shorter
@@ -67,6 +72,25 @@ public static class NearestName
 
         return last[b.Length];
     }
+
+    /// <summary>The shortest known name that begins so, as precision does for prec.</summary>
+    private static string? Begun(string name, IReadOnlyCollection<string> known) => name.Length < FewestLettersOfABeginning
+        ? null
+        : known.Where(candidate => candidate.StartsWith(name, StringComparison.OrdinalIgnoreCase)).MinBy(candidate => candidate.Length);
+
+    /// <summary>The known name that shares the most first words, each with its slips: two at least, and more than half of the name's.</summary>
+    private static string? LikeWords(string name, IReadOnlyCollection<string> known)
+    {
+        var words = name.Split(_betweenWords);
+        return known.Select(candidate => (Name: candidate, Shared: SharedWords(words, candidate.Split(_betweenWords))))
+            .Where(candidate => candidate.Shared > 1 && 2 * candidate.Shared > words.Length)
+            .OrderByDescending(candidate => candidate.Shared)
+            .ThenBy(candidate => candidate.Name.Length)
+            .FirstOrDefault().Name;
+    }
+
+    private static int SharedWords(string[] words, string[] others) =>
+        words.Zip(others).TakeWhile(pair => Slips(pair.First, pair.Second) is not null).Count();
 
     /// <summary>Null when there are too many for a misspelling. Names of very different length are never compared letter by letter.</summary>
     private static int? Slips(string name, string candidate)

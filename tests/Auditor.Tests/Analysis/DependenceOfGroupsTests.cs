@@ -40,6 +40,20 @@ public sealed class DependenceOfGroupsTests
         Assert.DoesNotContain(Panel("time: quarter, unit: dealer, cluster: region", "z").Findings, finding => finding.Rule == "structure-clusters-split-units");
     }
 
+    [Theory]
+    [InlineData("time: day", true)]
+    [InlineData("time: day, period: month", false)]
+    [InlineData("time: day, period: day", false)]
+    [InlineData("time: quarter", false)]
+    [InlineData("cluster: dealer", false)]
+    public void Dates_without_a_period_are_a_finding(string data, bool found)
+    {
+        var record = Panel(data, "z");
+        var finding = record.Findings.SingleOrDefault(finding => finding.Rule == "structure-days-as-periods");
+        Assert.Equal(found, finding is not null);
+        Assert.True(finding is null || finding.Message.Contains("each of the 144 days", StringComparison.Ordinal), finding?.Message);
+    }
+
     [Fact]
     public void More_clusters_than_CR2_is_computed_for_are_said_in_the_reason()
     {
@@ -130,15 +144,15 @@ public sealed class DependenceOfGroupsTests
 
     private static string Text(ReportTable table) => string.Join('\n', table.Rows.SelectMany(row => row).Select(cell => cell.Text));
 
-    /// <summary>24 dealers over 12 quarters; size belongs to the dealer, an office to dealer and half of the span, a region to dealers.</summary>
+    /// <summary>24 dealers over 12 quarters; size belongs to the dealer, an office to dealer and half of the span, a region to dealers; two dealers share a day.</summary>
     private static string Csv()
     {
-        var (random, text) = (new Generator(7), new StringBuilder("y,x,z,other,size,dealer,office,region,quarter,pair,macro\n"));
+        var (random, text) = (new Generator(7), new StringBuilder("y,x,z,other,size,dealer,office,region,quarter,pair,day,macro\n"));
         double[] sizes = [.. Enumerable.Range(0, 24).Select(_ => random.Normal())];
         for (var i = 0; i < 288; i++)
         {
             var (dealer, quarter) = (i / 12, i % 12);
-            text.AppendLine(CultureInfo.InvariantCulture, $"{random.Normal():R},{random.Normal():R},{random.Normal():R},{random.Normal():R},{sizes[dealer]:R},d{dealer},o{dealer}-{quarter / 6},r{dealer % 6},{quarter},{i},{Math.Sin(quarter * quarter):R}");
+            text.AppendLine(CultureInfo.InvariantCulture, $"{random.Normal():R},{random.Normal():R},{random.Normal():R},{random.Normal():R},{sizes[dealer]:R},d{dealer},o{dealer}-{quarter / 6},r{dealer % 6},{quarter},{i},2020-{1 + quarter:00}-{1 + (dealer / 2):00},{Math.Sin(quarter * quarter):R}");
         }
 
         return text.ToString();

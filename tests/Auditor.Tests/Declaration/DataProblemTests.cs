@@ -164,13 +164,13 @@ public sealed class DataProblemTests
         {
             ["data: {source: a.csv, split: {column: a}}"],
             [
-                "3: data.split: expected column and at, or row, found column",
+                "3: data.split: expected column and at, or row (to divide the rows by each value of a column, use data.segments), found column",
             ]
         },
         {
             ["data: {source: a.csv, split: {column: a, at: x}}"],
             [
-                "3: data.split.at: expected a date as YYYY-MM-DD or a number, found 'x'",
+                "3: data.split.at: expected a date as YYYY-MM-DD or a number (to divide the rows by each value of a column, use data.segments), found 'x'",
             ]
         },
         {
@@ -216,9 +216,9 @@ public sealed class DataProblemTests
             ]
         },
         {
-            ["data: {source: a.csv, segments: a}"],
+            ["data: {source: a.csv, segments: {a: b}}"],
             [
-                "3: data.segments: expected a list of column names, found 'a'",
+                "3: data.segments: expected a list of column names, found a map",
             ]
         },
         {

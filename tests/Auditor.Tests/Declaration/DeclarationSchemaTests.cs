@@ -97,6 +97,7 @@ public sealed class DeclarationSchemaTests
     [InlineData("final_model:\n  terms:")]
     [InlineData("data: {source: leases.csv, columns: , keep: , segments: }")]
     [InlineData("data: {source: leases.csv, time: {file_order: true}, split: {row: 60}}")]
+    [InlineData("data: {source: leases.csv, segments: region}")]
     [InlineData("elimination: {rule: {judgement: signs}}")]
     [InlineData("response: 2008")]
     [InlineData("response: {log: {of: {ratio: [a, b]}, plus: 1}}")]

@@ -115,6 +115,8 @@ public sealed class StructureBindingTests
         Assert.Equal([0, -1, 1, 1], segments[1].Codes);
         Assert.Equal(["A", "B"], Labels(segments[1]));
         Assert.Equal([1, 2], segments[1].Sizes());
+        var one = Assert.Single(Bound("segments: region").Among(new RowSubset([0, 1, 2, 3])).Segments);
+        Assert.Equal(segments[0].Codes, one.Codes);
     }
 
     [Fact]
@@ -163,7 +165,7 @@ public sealed class StructureBindingTests
     [InlineData("split: {row: 3}, keep: [{column: year, to: 2003}]", "data.split: the first part ends at row 3, which leaves no kept row in the second part")]
     [InlineData("split: {column: year, at: 1999}", "data.split: the first part ends at year 1999, which leaves no kept row in the first part; year runs from 2001 to 2004 there")]
     [InlineData("split: {column: opened, at: 2008-09-30}", "data.split: the first part ends at opened 2008-09-30, which leaves no kept row in the second part; opened runs from 2008-01-01 to 2008-09-30 there")]
-    [InlineData("split: {column: region, at: 3}", "data.split: column region holds levels, a split needs dates or numbers, or a row")]
+    [InlineData("split: {column: region, at: 3}", "data.split: column region holds levels, a split needs dates or numbers, or a row; to test every group in each of its values, use data.segments: [region]")]
     [InlineData("split: {column: year, at: 2008-09-30}", "data.split: column year holds numbers, found '2008-09-30'")]
     [InlineData("split: {column: opened, at: 2008}", "data.split: column opened holds dates, found '2008', expected YYYY-MM-DD")]
     [InlineData("time: year, serial_lag: 4", "data.serial_lag: 4 periods back, and the kept rows have 4 periods; expected at most 3")]

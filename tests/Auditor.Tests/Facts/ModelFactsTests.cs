@@ -81,10 +81,14 @@ public sealed class ModelFactsTests
             new FactValue.NotComputable("periods cannot be counted: dates without a declared period, or numbers that are not whole"),
             RowFacts.From("m", Samples.Rows, Samples.Structure with { MissingPeriods = null })["has_missing_periods"]);
 
+        Assert.Equal(new FactValue.Flag(false), declared["days_as_periods"]);
+        Assert.Equal(new FactValue.Flag(true), RowFacts.From("m", Samples.Rows, Samples.Structure with { DaysAsPeriods = true })["days_as_periods"]);
+
         var none = RowFacts.From("m", Samples.Rows, new StructureCounts(480, null, null, null, null, null, null, null));
         Assert.Equal(new FactValue.Flag(false), none["clusters_declared"]);
         Assert.Equal(new FactValue.NotComputable("no cluster declared"), none["n_clusters"]);
         Assert.Equal(new FactValue.NotComputable("no time order declared"), none["missing_periods"]);
+        Assert.Equal(new FactValue.NotComputable("no time order declared"), none["days_as_periods"]);
     }
 
     [Fact]

@@ -62,8 +62,19 @@ public sealed class RuleListingTests
 
     [Fact]
     public void An_unknown_id_is_a_problem_with_the_nearest() => Assert.Equal(
-        "rules: no rule has the id 'rejectd'; did you mean 'rejected'?",
+        "rules: no rule has the id 'rejectd', and no fact the name; did you mean 'rejected'?",
         Assert.Single(RuleListing.Explain("rejectd", Rules, Samples.Policy()).Problems).ToString());
+
+    [Fact]
+    public void A_fact_is_explained_for_all_that_it_is_about()
+    {
+        var lines = RuleListing.Explain("days_as_periods", Rules, Samples.Policy()).Value!;
+
+        Assert.Equal(
+            ["Facts of this name", "  about rows", "    days_as_periods (true or false): Time holds dates and no period is declared: each distinct day is a period of its own."],
+            lines);
+        Assert.True(RuleListing.Explain("p_adjusted", Rules, Samples.Policy()).Value!.Count(line => line.StartsWith("  about ", StringComparison.Ordinal)) > 1);
+    }
 
     [Fact]
     public void All_rules_and_all_facts_are_listed()

@@ -66,6 +66,16 @@ public sealed class ShippedRulesTests(ITestOutputHelper output)
         Assert.Equal("medium", Severity("exclusion-inconclusive"));
         Assert.Equal("medium", Severity("exclusion-untestable"));
         Assert.Equal("note", Severity("column-declared-level-absent"));
+        Assert.Equal("medium", Severity("structure-days-as-periods"));
+    }
+
+    /// <summary>So that --fail-on medium sees a part that contradicts what all rows say, or leave open.</summary>
+    [Fact]
+    public void A_part_that_speaks_against_leaving_a_group_out_is_medium()
+    {
+        Assert.Equal("medium", Severity("segment-rejected-although-supported"));
+        Assert.Equal("medium", Severity("segment-rejected-where-undecided"));
+        Assert.Equal("medium", Severity("segment-effect-differs-although-supported"));
     }
 
     [Fact]

@@ -42,6 +42,61 @@ public sealed class FirstDeclarationTests
         Assert.Equal(["price", "plot", "01", "region", "half: empty", "prise", "yes"], Audited(text, Motley()).Model.Terms);
     }
 
+    [Fact]
+    public void What_is_proposed_about_dependence_can_be_taken_as_proposed()
+    {
+        var text = Written(Motley());
+        foreach (var line in new[] { "time: opened", "period: day", "unit: note", "cluster: note", "split: {column: opened, at: 2020-01-14}", "segments: [region]" })
+        {
+            Assert.Contains("\n  # " + line + " ", text, StringComparison.Ordinal);
+            text = text.Replace("  # " + line + " ", "  " + line + " ", StringComparison.Ordinal);
+        }
+
+        Assert.Equal(["price", "region", "half: empty", "yes"], Audited(text, Motley()).Model.Terms);
+    }
+
+    /// <summary>Guessed from the days alone: the longest step that nearly always holds one and never two, else months, or what is shorter where they would be few.</summary>
+    [Theory]
+    [InlineData(366, 1, "year")]
+    [InlineData(92, 1, "quarter")]
+    [InlineData(31, 1, "month")]
+    [InlineData(7, 1, "week")]
+    [InlineData(1, 1, "day")]
+    [InlineData(1, 2, "day")]
+    [InlineData(92, 3, "quarter")]
+    [InlineData(31, 4, "month")]
+    [InlineData(9, 2, "month")]
+    [InlineData(4, 2, "week")]
+    [InlineData(4, 1, "month")]
+    public void The_period_is_guessed_from_the_spacing(int apart, int rowsADay, string period)
+    {
+        var text = new StringBuilder("loss,opened,price\n");
+        for (var row = 0; row < 120; row++)
+        {
+            text.Append(CultureInfo.InvariantCulture, $"{Wave(row)},{new DateOnly(2000, 1, 15).AddDays(row / rowsADay * apart):yyyy-MM-dd},{Wave(row * 3)}\n");
+        }
+
+        Assert.Contains($"\n  # period: {period} ", Written(text.ToString()), StringComparison.Ordinal);
+    }
+
+    /// <summary>Years step by 1 and need no period; a column that names units comes again and has many values; one for segments has few.</summary>
+    [Fact]
+    public void Columns_are_proposed_for_what_they_look_like()
+    {
+        var text = new StringBuilder("loss,year,dealer,region,exposure\n");
+        for (var row = 0; row < 120; row++)
+        {
+            text.Append(CultureInfo.InvariantCulture, $"{Wave(row)},{2000 + (row % 9)},d{row / 9},r{row / 27},{1 + (row % 5)}\n");
+        }
+
+        var written = Written(text.ToString());
+        string[] lines = ["time: year", "unit: dealer", "cluster: dealer", "split: {column: year, at: 2004}", "segments: [region]", "weights: {column: exposure, kind: precision}"];
+        Assert.All(lines, line => Assert.Contains("\n  # " + line + " ", written, StringComparison.Ordinal));
+        Assert.DoesNotContain("# period:", written, StringComparison.Ordinal);
+        var none = Written("loss,price\n1,2\n2,4\n3,5\n4,1\n5,9\n6,3\n7,7\n8,8\n9,2\n10,4\n");
+        Assert.All(["time: opened", "period: month", "unit: dealer", "split: {row: 5}"], line => Assert.Contains("\n  # " + line + " ", none, StringComparison.Ordinal));
+    }
+
     [Theory]
     [InlineData("lose", "leases.csv: the data have no column 'lose'; did you mean 'loss'?")]
     [InlineData("region", "leases.csv: column 'region' cannot be the response: its cells are no numbers but texts such as 'north'")]

@@ -54,6 +54,23 @@ public sealed class NearestNameTests
         Assert.Equal("", NearestName.DidYouMean("wholly", ["age", "price"]));
     }
 
+    /// <summary>What slips alone do not find: the beginning of a name, and a name with its last words in another way.</summary>
+    [Theory]
+    [InlineData("prec", "precision")]
+    [InlineData("Sam", "sampling")]
+    [InlineData("pr", null)]
+    [InlineData("effect", "effect-differs")]
+    [InlineData("efect-differ", "effect-differs")]
+    [InlineData("effect-difers-not", "effect-differs")]
+    [InlineData("partial_r2", null)]
+    [InlineData("small_partial_r2", "small_partial_r_squared")]
+    [InlineData("small_r_squared_of_all", null)]
+    public void A_hint_also_takes_beginnings_and_words(string name, string? meant)
+    {
+        string[] known = ["effect-differs-everywhere", "effect-differs", "precision", "sampling", "small_partial_r_squared"];
+        Assert.Equal(meant is null ? "" : $"; did you mean '{meant}'?", NearestName.DidYouMean(name, known));
+    }
+
     [Fact]
-    public void A_very_long_name_costs_nothing() => Assert.Null(NearestName.Of(new string('x', 1_000_000), [.. Enumerable.Repeat("price", 10_000)]));
+    public void A_very_long_name_costs_nothing() => Assert.Equal("", NearestName.DidYouMean(new string('x', 1_000_000), [.. Enumerable.Repeat("price", 10_000)]));
 }
