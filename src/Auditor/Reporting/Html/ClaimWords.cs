@@ -75,10 +75,10 @@ internal static class ClaimWords
         claims,
         new("Figure", "text", claim => Cell.Words(claim.What)),
         new("As reported", "number", claim => new Cell(claim.Reported, null, "number", null)),
-        new("Rounded alike", "number", claim => claim.Recomputed is double value
+        new("Recomputed", "number", claim => claim.Recomputed is double whole && whole == Math.Round(whole) ? Cell.Count(whole) : Cell.Number(claim.Recomputed, claim.Why)),
+        new("To the same digits", "number", claim => claim.Recomputed is double value
             ? new Cell(claim.RecomputedAsPrinted ?? NumberText.Number(value), NumberText.Full(value), "number", null)
             : Cell.Missing(claim.Why)),
-        new("Recomputed", "number", claim => Cell.Number(claim.Recomputed, claim.Why)),
         new("Outcome", "text", claim => Cell.Words(Outcome(claim, RowSetWords.Of(record.Policy))) with { Link = findings.FirstOrDefault(finding => finding.Finding.Subject == claim.Claim)?.Anchor }));
 
     public static ReportTable Contradictions(AuditRecord record) => ReportTable.Of(
