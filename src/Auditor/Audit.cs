@@ -76,6 +76,7 @@ public static class Audit
         ClaimsAgainstEachOther = results.Claims.AgainstEachOther,
         EliminationByRule = results.Elimination.ByRule,
         PolicyOverridden = inputs.Policy.Overridden,
+        Structure = results.Structure,
         Plots = results.Plots,
         WhatIf = results.WhatIf,
     };

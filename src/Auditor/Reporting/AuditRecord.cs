@@ -37,6 +37,10 @@ public sealed record AuditRecord(
     /// <summary>Policy values that are not the shipped ones, with the shipped value.</summary>
     public IReadOnlyDictionary<string, object> PolicyOverridden { get; init; } = new Dictionary<string, object>();
 
+    /// <summary>Clusters, units and periods that are declared; null in a record that was made without them.</summary>
+    [JsonIgnore]
+    public StructureCounts? Structure { get; init; }
+
     /// <summary>Points of the pictures: a way of showing the residuals, not a figure, and so not in the JSON record. Null in a record that was made without them.</summary>
     [JsonIgnore]
     public PlotData? Plots { get; init; }

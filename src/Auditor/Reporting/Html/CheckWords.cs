@@ -32,6 +32,12 @@ internal static class CheckWords
         ["persistence"] = "share left after one period",
     };
 
+    /// <summary>Checks whose p needs independent rows, whatever else they assume.</summary>
+    private static readonly (string Check, string Title)[] Independent =
+    [
+        ("breusch_pagan", "Breusch–Pagan"), ("white", "White"), ("reset", "RESET"), ("chow", "Chow"),
+    ];
+
     /// <summary>Each measure with its value.</summary>
     public static string? Size(CheckResult check) => check.Size is { Count: > 0 } sizes
         ? string.Join("; ", sizes.Select(size => (Measures.GetValueOrDefault(size.Key) ?? Spaced(size.Key)) + "\u00A0" + NumberText.Number(size.Value)))
@@ -49,6 +55,18 @@ internal static class CheckWords
             check.Draws is int draws ? $"p simulated with {NumberText.Count(draws)} draws" : null,
             check.Variant,
         }.OfType<string>());
+
+    /// <summary>Said where rows are declared to belong together or to follow in time, and a check was made that takes them as independent.</summary>
+    public static string? NeedIndependence(AuditRecord record)
+    {
+        bool declared = record.Structure is { } structure && (structure.Clusters ?? structure.Units ?? structure.Periods) is not null;
+        string[] names = [.. Independent.Where(name => record.Checks.Any(check => check.Check == name.Check && check.P is not null)).Select(name => name.Title)];
+        return !declared || names.Length == 0 ? null
+            : $"{Listed(names)} {(names.Length == 1 ? "takes" : "take")} the rows as independent: where residuals move together within a cluster or a unit, or carry over in time, "
+                + $"{(names.Length == 1 ? "its p is" : "their p are")} too small to rely on.";
+    }
+
+    private static string Listed(string[] names) => names.Length == 1 ? names[0] : $"{string.Join(", ", names[..^1])} and {names[^1]}";
 
     public static string Spaced(string name) => name.Replace('_', ' ');
 

@@ -61,23 +61,25 @@ internal static class ClaimWords
     }
 
     public static ReportTable Table(AuditRecord record, IReadOnlyList<FindingPage> findings) =>
-        Table("Figures of the report, recomputed", record.Claims, findings);
+        Table("Figures of the report, recomputed", record.Claims, record, findings);
 
     /// <summary>The figures that the report prints for one left-out group.</summary>
     public static ReportTable TableOf(string group, AuditRecord record, IReadOnlyList<FindingPage> findings) => Table(
         $"Figures that the report prints for {group}, recomputed",
         [.. record.Claims.Where(claim => claim.Claim.StartsWith($"left_out[{group}].", StringComparison.Ordinal))],
+        record,
         findings);
 
-    private static ReportTable Table(string caption, IReadOnlyList<ClaimResult> claims, IReadOnlyList<FindingPage> findings) => ReportTable.Of(
+    private static ReportTable Table(string caption, IReadOnlyList<ClaimResult> claims, AuditRecord record, IReadOnlyList<FindingPage> findings) => ReportTable.Of(
         caption,
         claims,
         new("Figure", "text", claim => Cell.Words(claim.What)),
         new("As reported", "number", claim => new Cell(claim.Reported, null, "number", null)),
-        new("Recomputed", "number", claim => claim.Recomputed is double value
+        new("Recomputed", "number", claim => claim.Recomputed is double whole && whole == Math.Round(whole) ? Cell.Count(whole) : Cell.Number(claim.Recomputed, claim.Why)),
+        new("To the same digits", "number", claim => claim.Recomputed is double value
             ? new Cell(claim.RecomputedAsPrinted ?? NumberText.Number(value), NumberText.Full(value), "number", null)
             : Cell.Missing(claim.Why)),
-        new("Outcome", "text", claim => Cell.Words(Outcome(claim)) with { Link = findings.FirstOrDefault(finding => finding.Finding.Subject == claim.Claim)?.Anchor }));
+        new("Outcome", "text", claim => Cell.Words(Outcome(claim, RowSetWords.Of(record.Policy))) with { Link = findings.FirstOrDefault(finding => finding.Finding.Subject == claim.Claim)?.Anchor }));
 
     public static ReportTable Contradictions(AuditRecord record) => ReportTable.Of(
         "Printed figures that cannot all be right",
@@ -86,16 +88,17 @@ internal static class ClaimWords
         new("What is printed", "text", relation => Cell.Words(relation.Why ?? "")));
 
     /// <summary>An F or p of a left-out group that is the classical one: the verdict may rest on another.</summary>
-    private static bool ByClassical(ClaimResult claim) =>
-        claim is { Outcome: ClaimOutcomes.Agrees, Kind: ClaimKinds.F or ClaimKinds.P } && claim.Claim.StartsWith("left_out[", StringComparison.Ordinal);
+    private static bool ByClassical(ClaimResult claim) => claim is { Outcome: ClaimOutcomes.Agrees, Kind: ClaimKinds.F or ClaimKinds.P } && OfGroup(claim);
 
-    private static string Outcome(ClaimResult claim) => string.Join(
+    private static bool OfGroup(ClaimResult claim) => claim.Claim.StartsWith("left_out[", StringComparison.Ordinal);
+
+    private static string Outcome(ClaimResult claim, RowSetWords rows) => string.Join(
         "; ",
         new[]
         {
             Outcomes.GetValueOrDefault(claim.Outcome) ?? CheckWords.Spaced(claim.Outcome),
             claim.ReproducedBy is { } form ? "by " + Form(form) : ByClassical(claim) ? "by the classical test" : null,
-            claim.Rows is null ? null : "on the other set of rows",
+            claim.Rows is null ? null : "on " + (OfGroup(claim) ? rows.OtherOfGroup : rows.OtherOfModel),
             claim.Recomputed is null ? null : claim.Why,
         }.OfType<string>());
 

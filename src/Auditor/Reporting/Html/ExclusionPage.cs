@@ -30,7 +30,9 @@ internal sealed record ExclusionPage(
         Of(exclusion, "exclusion-" + (index + 1).ToString(CultureInfo.InvariantCulture), level, alone);
 
     /// <param name="alone">No adjustment: the only group, or the joint test.</param>
-    public static ExclusionPage Of(Exclusion exclusion, string anchor, double level, bool alone) => new(
+    public static ExclusionPage Of(Exclusion exclusion, string anchor, double level, bool alone) => Shown(ShownExclusion.Of(exclusion), anchor, level, alone);
+
+    private static ExclusionPage Shown(Exclusion exclusion, string anchor, double level, bool alone) => new(
         exclusion, anchor, VerdictWords.Of(exclusion), TestTable.Of(exclusion, level), NotComputedOf(exclusion), DecisionOf(exclusion, level, alone), SizeOf(exclusion, level),
         exclusion.OtherRowSet is { } other ? OtherRowsOf(other, level) : null)
     {
@@ -39,7 +41,7 @@ internal sealed record ExclusionPage(
 
     private static IReadOnlyList<Fact> NotComputedOf(Exclusion exclusion) => FactList.Gathered(
         from test in TestWords.All
-        where exclusion.TestsNotComputed.ContainsKey(test.Name)
+        where exclusion.TestsNotComputed.ContainsKey(test.Name) && test.Name != TestWords.NotDone
         select (test.Title, exclusion.TestsNotComputed[test.Name]));
 
     private static FactList DecisionOf(Exclusion exclusion, double level, bool alone) => FactList.Of([
@@ -73,7 +75,8 @@ internal sealed record ExclusionPage(
             yield return new Fact("Its clusters", Cell.Name(variable), "rows with one value of it may move together, or share the group’s values");
         }
 
-        if (exclusion.EffectiveClusters is double clusters)
+        // Under another test the record counts the declared clusters, on which that test does not rest.
+        if (exclusion is { Basis: "cluster", EffectiveClusters: double clusters })
         {
             yield return new Fact("Clusters these are worth", Cell.Tenths(clusters), "equal clusters that would carry as much of this group");
         }
@@ -110,7 +113,7 @@ internal sealed record ExclusionPage(
         return FactList.Of(
             new($"Against the bound {NumberText.Plain(exclusion.Negligible.Bound)}", Cell.Words(VerdictWords.Materiality(exclusion.Materiality)), "by this group’s own interval, before adjustment for the number of groups"),
             new("Partial R²", Cell.Share(effect.Estimate, EffectWhy("estimate")), "share of what the final model leaves over, as the classical fit has it; the intervals allow for chance and can lie beside it"),
-            new(interval + " by the test the verdict rests on", Cell.Range(effect.BasisLower, effect.BasisUpper, EffectWhy("basis_lower"), NumberText.Share)),
+            new(interval + " by the test the verdict rests on", BasisInterval(effect, EffectWhy("basis_lower"))),
             new(interval + ", classical", Cell.Range(effect.Lower, effect.Upper, EffectWhy("lower"), NumberText.Share)),
             new("Rows of this test", Cell.Count(exclusion.Rows)),
             new("Columns added", Cell.Count(exclusion.Df1, Why(exclusion, "df1"))),
@@ -122,6 +125,11 @@ internal sealed record ExclusionPage(
         string? EffectWhy(string name) => effect.Why ?? Why(exclusion, "partial_r_squared." + name);
         string? PowerWhy(string name) => power.Why ?? Why(exclusion, "power." + name);
     }
+
+    /// <summary>None is said in its place: where only the classical interval stands, a reader may take it for this one.</summary>
+    private static Cell BasisInterval(EffectFigures effect, string? why) => effect.Why == ShownExclusion.CannotReject
+        ? Cell.Words("none: " + effect.Why)
+        : Cell.Range(effect.BasisLower, effect.BasisUpper, why, NumberText.Share);
 
     private static FactList OtherRowsOf(OtherRowSetFigures other, double level)
     {

@@ -61,7 +61,7 @@ internal static class ExclusionPictures
 
     /// <summary>How far the mean residual wanders along the column.</summary>
     private static string Wander(PointCloud cloud) => cloud.Trend.Count > 1
-        ? $"The mean residual runs from {NumberText.Share(cloud.Trend.Min(point => point.Y))} to {NumberText.Share(cloud.Trend.Max(point => point.Y))} along it"
+        ? $"The mean residual runs from {NumberText.Share(cloud.Trend.Min(point => point.Y))} to {NumberText.Share(cloud.Trend.Max(point => point.Y))}"
         : "Too few rows or values for a mean along it";
 
     private static Picture PowerCurve(Exclusion exclusion, string anchor, double power)

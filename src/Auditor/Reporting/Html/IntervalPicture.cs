@@ -17,8 +17,9 @@ internal sealed record IntervalPicture(IReadOnlyList<PictureRow?> Rows, IReadOnl
     private static readonly double[] Candidates = [0, 0.1, 0.3, 1, 0.03, 0.001, 0.01, 0.5, 0.2, 0.7];
 
     /// <summary>Null when no group has an effect to draw.</summary>
-    public static IntervalPicture? Of(IReadOnlyList<Exclusion> exclusions)
+    public static IntervalPicture? Of(IReadOnlyList<Exclusion> recorded)
     {
+        Exclusion[] exclusions = [.. recorded.Select(ShownExclusion.Of)];
         Exclusion[] drawn = [.. exclusions.Where(exclusion => exclusion.PartialRSquared.Estimate is not null)];
         if (drawn.Length == 0)
         {
@@ -62,6 +63,11 @@ internal sealed record IntervalPicture(IReadOnlyList<PictureRow?> Rows, IReadOnl
     private static string Against(EffectFigures effect, double value, double bound)
     {
         string estimate = "partial R² " + NumberText.Share(value);
+        if (effect.Why is { } why)
+        {
+            return $"{estimate}, without an interval of the test the verdict rests on: {why}";
+        }
+
         if ((effect.BasisLower ?? effect.Lower) is not double lower || (effect.BasisUpper ?? effect.Upper) is not double upper)
         {
             return $"{estimate}, without an interval";

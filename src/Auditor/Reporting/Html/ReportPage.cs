@@ -16,6 +16,8 @@ internal sealed record ReportPage(AuditRecord Record, PageScript Script)
 
     private double Power => Record.Policy.TryGetValue("power", out object? value) ? Convert.ToDouble(value, CultureInfo.InvariantCulture) : UsualPower;
 
+    public RowSetWords RowSets => RowSetWords.Of(Record.Policy);
+
     public string Title => Record.Model.Title ?? Record.Model.Id;
 
     public string Outcome => OutcomeSentence.Of(Record);
@@ -42,9 +44,12 @@ internal sealed record ReportPage(AuditRecord Record, PageScript Script)
 
     public FitPage FinalFit => FitPage.Of(Record.FinalFit, Level, "Coefficients");
 
-    public FitPage? OtherFit => Record.OtherFit is { } other ? FitPage.Of(other, Level, "Coefficients on the other set of rows") : null;
+    public FitPage? OtherFit => Record.OtherFit is { } other ? FitPage.Of(other, Level, "Coefficients on " + RowSets.OtherOfModel) : null;
 
     public ReportTable Entangled => AuditTables.Entangled(Record, Level);
+
+    /// <summary>What the checks that take rows as independent are worth here; null where no dependence is declared.</summary>
+    public string? ChecksNeedIndependence => CheckWords.NeedIndependence(Record);
 
     public ReportTable Checks => AuditTables.Checks(Record, Level);
 

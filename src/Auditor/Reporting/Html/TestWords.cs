@@ -3,6 +3,9 @@ namespace Auditor.Reporting.Html;
 /// <summary>What a test is called in words, and the question it answers.</summary>
 internal sealed record TestWords(string Name, string Title, string Answers)
 {
+    /// <summary>The test that the audit does for no group: said once for all, in how to read the page.</summary>
+    public const string NotDone = "permutation";
+
     /// <summary>In the order in which they are shown: the classical one always first.</summary>
     public static IReadOnlyList<TestWords> All { get; } =
     [
@@ -16,7 +19,7 @@ internal sealed record TestWords(string Name, string Title, string Answers)
         new("time", "Test over periods (cosine form)", "The same, when errors may carry over from one period to the next."),
         new("time_unrestricted", "Test over periods, group in the model", "The same, with the spread taken from the model with the group in; size and power rest on it."),
         new("newey_west", "Newey–West F", "The usual form for serial dependence; it rejects too often."),
-        new("permutation", "Permutation of residuals", "How often would shuffled residuals look as strong?"),
+        new(NotDone, "Permutation of residuals", "How often would shuffled residuals look as strong?"),
         new("last_in", "With all other groups in", "Does the group still add something when every other left-out group is in?"),
         new("largest_model_denominator", "Partial F over the largest model's spread", "Is the group strong against what is left when everything tried is in?"),
         new("hc0", "Robust F (HC0)", "Given so that an author's figure can be reproduced."),
