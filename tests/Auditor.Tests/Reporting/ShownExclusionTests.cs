@@ -1,5 +1,4 @@
 using System.Net;
-using Auditor.Reporting;
 using Auditor.Reporting.Html;
 using Auditor.Results;
 
