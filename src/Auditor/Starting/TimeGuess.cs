@@ -61,5 +61,5 @@ internal sealed record TimeGuess(string Column, string Middle, string? Step, str
 
     private static int Periods(Period period, int[] days) => days.Select(day => PeriodIndex.Of(period, day)).Distinct().Count();
 
-    private static T MiddleOf<T>(IReadOnlyList<T> ordered) => ordered[(ordered.Count - 1) / 2];
+    private static T MiddleOf<T>(T[] ordered) => ordered[(ordered.Length - 1) / 2];
 }
