@@ -17,7 +17,7 @@ internal sealed record DataFile(IDataSource Source, string Sha256)
 
         var folder = Path.GetDirectoryName(Path.GetFullPath(request.Declaration))!;
         var path = Path.GetFullPath(Path.Combine(folder, source));
-        place.Structured = reading.Declaration?.Data.Structure is { } declared && (declared.TimeLine ?? declared.Unit?.Line ?? declared.Cluster?.Line ?? declared.Segments.FirstOrDefault()?.Line) is not null;
+        place.Structured = reading.Declaration?.Data.Structure is { } declared && (declared.TimeLine ?? declared.Unit?.Line ?? declared.Cluster?.Line ?? (declared.Segments is [var first, ..] ? first.Line : null)) is not null;
         var fault = Fault(path, source, folder, request);
         return fault is null ? Open(path, source, line, reading, request, place, progress) : Failed(request, line, "data.source: " + fault);
     }
