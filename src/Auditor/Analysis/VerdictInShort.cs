@@ -19,6 +19,8 @@ internal static class VerdictInShort
             $"There is an effect, but the data show it to be negligible: partial R² is below {Bound(judgement.Policy)}.",
         { Verdict: Verdicts.NotSupported } => "Jointly it explains more than chance would" + Share(judgement) + ".",
         { Verdict: Verdicts.Supported } => $"No effect is found, and one that matters is ruled out: partial R² is below {Bound(judgement.Policy)}.",
+        _ when judgement.Evidence!.Basis.Test.P <= judgement.Policy.Significance =>
+            "Its test rejects by itself, but not once the number of groups is allowed for" + Possible(judgement) + ".",
         _ => "No effect is found, but one that matters is not ruled out" + Possible(judgement) + ".",
     };
 

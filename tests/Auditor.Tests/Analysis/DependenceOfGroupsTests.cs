@@ -112,6 +112,17 @@ public sealed class DependenceOfGroupsTests
     }
 
     [Fact]
+    public void A_rejection_that_the_number_of_groups_takes_back_is_not_called_no_effect()
+    {
+        const string groups = "{group: first, terms: [z]}, {group: second, terms: [other]}";
+        var least = Record("cluster: dealer", groups, Csv(), named: true).Exclusions.Min(exclusion => exclusion.P!.Value);
+        var level = FormattableString.Invariant($"significance: {least * 1.2}\nnegligible_partial_r_squared: 0.00001");
+        var exclusion = Record("cluster: dealer", groups, Csv(), level, named: true).Exclusions.MinBy(one => one.P)!;
+        Assert.Equal(Verdicts.Inconclusive, exclusion.Verdict);
+        Assert.StartsWith("Its test rejects by itself, but not once the number of groups is allowed for", exclusion.InShort, StringComparison.Ordinal);
+    }
+
+    [Fact]
     public void A_groups_resampling_does_not_depend_on_the_other_groups()
     {
         double P(string groups, string name) => Record("cluster: dealer", groups, Csv(), named: true).Exclusions.Single(exclusion => exclusion.Group == name).Tests.WildBootstrap!.P!.Value;

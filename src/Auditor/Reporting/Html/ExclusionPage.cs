@@ -83,7 +83,7 @@ internal sealed record ExclusionPage(
 
         if (exclusion.Ceiling is { } ceiling)
         {
-            yield return new Fact("Least p that it can reach", Cell.Number(ceiling.P) with { Text = NumberText.Probability(ceiling.P, null, 0.5) }, "however large the effect: an effect also widens the spread this form allows for");
+            yield return new Fact("Where its p ends as the effect grows", Cell.Number(ceiling.P) with { Text = NumberText.Probability(ceiling.P, null, 0.5) }, "an effect also widens the spread this form allows for, so its p does not fall to 0");
         }
     }
 
